@@ -1,0 +1,62 @@
+/** What the service offers to the editor, the terminal and the tests: plain data in offsets. Only the types; see workspace.ts. */
+import type { FindingCode, Severity } from '../findings/finding.ts';
+import type { NoteSettings } from '../notes/types.ts';
+import type { LanguageId } from '../program/nodes.ts';
+import type { Span } from '../text/span.ts';
+
+/** The only way the service learns of files it was not given. Synchronous; answers from memory in an editor. */
+export interface FileSource {
+  /** Text of a file; undefined where there is none or it cannot be read. */
+  read(file: string): string | undefined;
+  /** Names (not paths) of the files in a folder; empty where there is none. */
+  list(folder: string): readonly string[];
+}
+
+/** What the engine needs from outside besides scripts: bytes and texts that ship with it. */
+export interface Assets {
+  /** The grammar runtime and one grammar per language, as WASM bytes. */
+  readonly runtime: Uint8Array;
+  grammar(language: LanguageId): Uint8Array | undefined;
+  /** Shipped signature files of a language, in the nomenclature notation. */
+  signatures(language: LanguageId): readonly { readonly file: string; readonly text: string }[];
+}
+
+export interface Settings {
+  /** Severity of each code; `off` silences it. Missing: the check's default. */
+  readonly severities: Readonly<Partial<Record<FindingCode, Severity | 'off'>>>;
+  readonly notes: NoteSettings;
+}
+
+export interface PlacedFinding {
+  readonly code: FindingCode;
+  readonly severity: Severity;
+  readonly span: Span;
+  readonly message: string;
+  readonly related: readonly { readonly file: string; readonly span: Span; readonly message: string }[];
+}
+
+export interface CheckResult {
+  readonly file: string;
+  readonly language: LanguageId;
+  readonly text: string;
+  readonly findings: readonly PlacedFinding[];
+  readonly statistics: Statistics;
+}
+
+export interface Statistics {
+  readonly functions: number;
+  /** Notes read as units. */
+  readonly notes: number;
+  /** Brackets left alone or not readable, with their text. */
+  readonly unread: readonly string[];
+}
+
+/** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
+export interface Workspace {
+  /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
+  check(file: string, text: string, language?: LanguageId): CheckResult;
+  /** Frees what is kept for a file. */
+  forget(file: string): void;
+  /** Tells that a file changed on disk (an import or a nomenclature file). */
+  invalidate(file: string): void;
+}
