@@ -1,0 +1,213 @@
+/** Sums, products, quotients and powers: what each says of the units around it. */
+import { Dimension } from '../quantities/dimension.ts';
+import { Rational } from '../quantities/rational.ts';
+import type { Expr } from '../program/nodes.ts';
+import type { Span } from '../text/span.ts';
+import type { Context } from './context.ts';
+import { divideForms, isConstant, multiplyForms, oneForm, raiseForm, sameForm } from './form.ts';
+import { addLiterals, exactLiteral, invertLiteral, type Literal, literalNumber, multiplyLiterals, negateLiteral, raiseLiteral } from './literal.ts';
+import type { Measure } from './measure.ts';
+import { addMeasures, divideMeasures, isGauge, isPoint, multiplyMeasures, raiseMeasure, scaleMeasure, shiftMeasure } from './measure-algebra.ts';
+import type { Reason } from './problem.ts';
+import { type Misuse, type Value, unknown } from './value.ts';
+
+const temperature = Dimension.base('Θ');
+const minusOne = exactLiteral(Rational.minusOne);
+
+/** `left + right` or `left - right`. */
+export function sum(context: Context, expr: Expr, left: Value, right: Value, op: '+' | '-', opSpan: Span): Value {
+  const sign = op === '+' ? 1 : -1;
+  if (left.literal && right.literal) {
+    const folded = addLiterals(left.literal, op === '+' ? right.literal : negateLiteral(right.literal));
+    return folded ? literalValue(expr, folded) : { ...literalValue(expr, approximateSum(left.literal, right.literal, sign)), from: [] };
+  }
+  if (left.fits || right.fits) return left.fits ? { ...right, expr } : { ...left, expr };
+  if (left.literal || right.literal) return withBareTerm(context, expr, left, right, sign);
+  if (!left.form || !right.form) return halfKnown(expr, left, right);
+  agree(context, expr, left, right, { kind: 'sum', op }, opSpan);
+  return sumValue(expr, left, right, sign);
+}
+
+/** Terms that must be alike and give one of their kind: the choices of a conditional, the arguments of max. Open ones drop out. */
+export function alternatives(context: Context, expr: Expr, values: readonly Value[], reason: (at: number) => Reason): Value {
+  const known = values.filter((value) => value.form && !value.fits && !value.literal);
+  const first = known[0];
+  if (!first) return values.every((value) => value.fits) && values.length > 0 ? { ...(values[0] as Value), expr } : unknown(expr, values);
+  for (const other of known.slice(1)) agree(context, expr, first, other, reason(values.indexOf(other)), expr);
+  const steady = known.every((value) => value.form && first.form && sameForm(value.form, first.form));
+  if (!steady && known.every((value) => value.form && isConstant(value.form))) return { expr, form: undefined, from: known };
+  const measure = known.every((value) => value.measure && first.measure && sameMeasure(value.measure, first.measure)) ? first.measure : undefined;
+  return { expr, form: first.form, measure, from: known, ...(known.every((value) => value.tainted) ? { tainted: true } : {}) };
+}
+
+/** Requires two values to be counted alike, unless that is plain to see. */
+export function agree(context: Context, _expr: Expr, left: Value, right: Value, reason: Reason, span: Span): void {
+  if (!left.form || !right.form) return;
+  const alike = left.form === right.form && isConstant(left.form);
+  if (alike && (!left.measure || !right.measure || sameMeasure(left.measure, right.measure))) return;
+  context.add({ kind: 'same', anchor: context.anchor, span, reason, left, right });
+}
+
+/** Measures that need no comparison: one reading each, of the same scale, without factors or points. */
+export function sameMeasure(a: Measure, b: Measure): boolean {
+  if (a === b) return true;
+  const [left, right] = [a.readings[0], b.readings[0]];
+  if (!left || !right || a.readings.length > 1 || b.readings.length > 1 || a.factors.length > 0 || b.factors.length > 0) return false;
+  return left.scale === right.scale && left.weight === 0 && right.weight === 0 && a.radian === b.radian && a.cycle === b.cycle;
+}
+
+export function product(expr: Expr, left: Value, right: Value): Value {
+  if (left.literal && right.literal) return literalValue(expr, multiplyLiterals(left.literal, right.literal));
+  if (left.fits || right.fits) return { expr, form: undefined, fits: true, from: [] };
+  if (left.literal) return scaled(expr, right, left.literal);
+  if (right.literal) return scaled(expr, left, right.literal);
+  if (!left.form || !right.form) return unknown(expr, [left, right]);
+  const misuse = left.misuse ?? right.misuse ?? (isPoint(left.measure) && isPoint(right.measure) ? misused(expr, 'product', left) : undefined);
+  return productValue(expr, left, right, multiplyForms(left.form, right.form), multiplyMeasures(left.measure, right.measure), misuse);
+}
+
+export function quotient(expr: Expr, left: Value, right: Value): Value {
+  const inverse = right.literal && invertLiteral(right.literal);
+  if (right.literal && !inverse) return unknown(expr);
+  if (left.literal && inverse) return literalValue(expr, multiplyLiterals(left.literal, inverse));
+  if (left.fits || right.fits) return { expr, form: undefined, fits: true, from: [] };
+  if (inverse) return scaled(expr, left, inverse);
+  if (!right.form || (!left.form && !left.literal)) return unknown(expr, [left, right]);
+  const misuse = left.misuse ?? right.misuse ?? (isPoint(right.measure) ? misused(expr, 'quotient', right) : undefined);
+  const below = misuse ? undefined : right.measure;
+  if (left.literal) {
+    const measure = scaleMeasure(raiseMeasure(below, Rational.minusOne), left.literal);
+    const value = { expr, form: raiseForm(right.form, Rational.minusOne), measure, from: [right], ...kept(right, misuse) };
+    return left.literal.pure ? value : { ...value, tainted: true };
+  }
+  return productValue(expr, left, right, divideForms(left.form as typeof oneForm, right.form), divideMeasures(left.measure, below), misuse);
+}
+
+/** `base ** exponent`. */
+export function power(context: Context, expr: Expr, base: Value, exponent: Value, span: Span): Value {
+  const constant = exponent.literal ?? constantOf(exponent);
+  if (!exponent.literal) pureExponent(context, exponent);
+  if (base.literal && constant) return literalPower(expr, base.literal, constant);
+  if (base.fits) return { expr, form: undefined, fits: true, from: [] };
+  if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure ? {} : { tainted: true }) };
+  if (!base.form) return unknown(expr, [base]);
+  if (constant && constant.pi === 0) return constantPower(expr, base, constant.value);
+  if (isConstant(base.form) && base.form.dimension.isOne) return { expr, form: oneForm, from: [base, exponent], ...taint(base) };
+  context.add({ kind: 'varying-power', anchor: context.anchor, span, base, exponent });
+  return unknown(expr, [base]);
+}
+
+/** A root or another constant power that a library function stands for. */
+export function constantPower(expr: Expr, base: Value, exponent: Rational): Value {
+  if (!base.form) return unknown(expr, [base]);
+  if (exponent.isZero) return { expr, form: oneForm, from: [base] };
+  const point = !exponent.isOne && isPoint(base.measure);
+  const misuse = base.misuse ?? (point ? misused(expr, 'power', base) : undefined);
+  const measure = misuse ? undefined : raiseMeasure(base.measure, exponent);
+  return { expr, form: raiseForm(base.form, exponent), measure, from: [base], ...kept(base, misuse), ...taint(base) };
+}
+
+export function negative(expr: Expr, operand: Value): Value {
+  if (operand.literal) return literalValue(expr, negateLiteral(operand.literal));
+  if (operand.fits || !operand.form) return { ...operand, expr };
+  return { ...scaled(expr, operand, minusOne), expr };
+}
+
+export function literalValue(expr: Expr | undefined, literal: Literal): Value {
+  return literal.value.isZero ? { expr, form: oneForm, literal, fits: true, from: [] } : { expr, form: oneForm, literal, from: [] };
+}
+
+/** The number of a constant without a note, `n = 0.25`: what it counts in an exponent. */
+export function constantOf(value: Value): Literal | undefined {
+  return value.version?.assigned?.literal;
+}
+
+function scaled(expr: Expr, value: Value, literal: Literal): Value {
+  if (!value.form) return unknown(expr, [value]);
+  const result: Value = { expr, form: value.form, measure: scaleMeasure(value.measure, literal), from: [value], ...kept(value, value.misuse) };
+  return literal.pure && !value.tainted ? result : { ...result, tainted: true };
+}
+
+function productValue(expr: Expr, left: Value, right: Value, form: Value['form'], measure: Measure | undefined, misuse: Misuse | undefined): Value {
+  const gauge = left.gaugeFactor === true || right.gaugeFactor === true || isGauge(left.measure) || isGauge(right.measure);
+  const hot = left.temperatureFactor === true || right.temperatureFactor === true || isTemperature(left) || isTemperature(right);
+  const found = misuse ?? (gauge && hot ? misused(expr, 'gas law', isGauge(left.measure) || left.gaugeFactor ? left : right) : undefined);
+  return {
+    expr, form, measure: found ? undefined : measure, from: [left, right],
+    ...(found ? { misuse: found } : {}),
+    ...(gauge ? { gaugeFactor: true } : {}), ...(hot ? { temperatureFactor: true } : {}),
+    ...(left.tainted || right.tainted ? { tainted: true } : {}),
+  };
+}
+
+function isTemperature(value: Value): boolean {
+  return value.form !== undefined && value.form.dimension === temperature && isConstant(value.form) && !isPoint(value.measure);
+}
+
+function kept(value: Value, misuse: Misuse | undefined): Partial<Value> {
+  if (!misuse && !value.gaugeFactor && !value.temperatureFactor) return none;
+  return {
+    ...(misuse ? { misuse } : {}),
+    ...(value.gaugeFactor ? { gaugeFactor: true } : {}),
+    ...(value.temperatureFactor ? { temperatureFactor: true } : {}),
+  };
+}
+
+const none: Partial<Value> = {};
+
+function taint(value: Value): Partial<Value> {
+  return value.tainted ? { tainted: true } : none;
+}
+
+function misused(expr: Expr, use: Misuse['use'], value: Value): Misuse {
+  return { span: expr, use, value };
+}
+
+function withBareTerm(context: Context, expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
+  const literal = (left.literal ?? right.literal) as Literal;
+  const value = left.literal ? right : left;
+  const bare = left.literal ? left : right;
+  if (!value.form) return unknown(expr, [value]);
+  if (bare.expr && !(isConstant(value.form) && value.form.dimension.isOne)) {
+    context.add({ kind: 'bare', anchor: context.anchor, span: bare.expr, literal, text: '', beside: value });
+  }
+  const base = left.literal && sign === -1 ? scaleMeasure(value.measure, minusOne) : value.measure;
+  const measure = left.literal ? shiftMeasure(base, literal, 1) : shiftMeasure(base, literal, sign);
+  return { expr, form: value.form, measure, from: [value], ...taint(value), ...(value.misuse ? { misuse: value.misuse } : {}) };
+}
+
+function halfKnown(expr: Expr, left: Value, right: Value): Value {
+  const known = left.form ? left : right;
+  if (!known.form) return unknown(expr, [left, right]);
+  return { expr, form: known.form, from: [known], ...taint(known) };
+}
+
+function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
+  if (!left.form || !right.form) return unknown(expr);
+  if (isConstant(left.form) && isConstant(right.form) && left.form !== right.form) return { expr, form: undefined, from: [left, right] };
+  const lead = isConstant(left.form) && !(left.tainted && !right.tainted) ? left : isConstant(right.form) ? right : left.tainted ? right : left;
+  const measure = sameForm(left.form, right.form) ? addMeasures(left.measure, right.measure, sign) : undefined;
+  const misuse = left.misuse ?? right.misuse;
+  return {
+    expr, form: lead.form, measure, from: [left, right],
+    ...(left.tainted && right.tainted ? { tainted: true } : {}), ...(misuse ? { misuse } : {}),
+  };
+}
+
+function pureExponent(context: Context, exponent: Value): void {
+  if (!exponent.form || exponent.fits || (isConstant(exponent.form) && exponent.form.dimension.isOne) || !exponent.expr) return;
+  context.add({ kind: 'pure', anchor: context.anchor, span: exponent.expr, reason: { kind: 'exponent' }, value: exponent });
+}
+
+function literalPower(expr: Expr, base: Literal, exponent: Literal): Value {
+  const exact = exponent.pi === 0 ? raiseLiteral(base, exponent.value) : undefined;
+  if (exact) return literalValue(expr, exact);
+  const size = literalNumber(base) ** literalNumber(exponent);
+  const value = Number.isFinite(size) && size !== 0 ? Rational.parse(size.toPrecision(15)) : undefined;
+  return value ? literalValue(expr, { value, pi: 0, pure: base.pure, tolerance: base.tolerance + 1e-12 }) : unknown(expr);
+}
+
+function approximateSum(a: Literal, b: Literal, sign: 1 | -1): Literal {
+  const value = Rational.parse((literalNumber(a) + sign * literalNumber(b)).toPrecision(15)) ?? Rational.one;
+  return { value, pi: 0, pure: false, tolerance: 1e-12 };
+}

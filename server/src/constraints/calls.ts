@@ -1,0 +1,75 @@
+/** Calls: which function is meant, and what its signature or its body says of arguments and result. */
+import type { Argument, CallExpr, Expr } from '../program/nodes.ts';
+import { power } from './arithmetic.ts';
+import type { Context } from './context.ts';
+import { evaluate } from './expressions.ts';
+import { oneForm } from './form.ts';
+import { callLibrary } from './library-call.ts';
+import { exactLiteral } from './literal.ts';
+import { Rational } from '../quantities/rational.ts';
+import { callLocal, callScheme, newObject } from './user-call.ts';
+import { type Value, unknown } from './value.ts';
+
+/** One argument with what is known of it. */
+export interface Passed {
+  readonly argument: Argument;
+  readonly value: Value;
+}
+
+const powers = new Set(['pow', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow']);
+/** Arrays of zeros or of nothing fit any unit. */
+const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan']);
+const ones = new Set(['numpy.ones', 'numpy.ones_like', 'numpy.eye', 'numpy.identity']);
+
+export function call(context: Context, expr: CallExpr): Value {
+  const callee = calleeOf(context, expr.callee);
+  const passed = expr.args.map((argument) => ({ argument, value: evaluate(context, argument.value) }));
+  const target = callee.value.callable;
+  if (!target) return callee.method ? callMethod(context, expr, callee.object as Value, callee.method, passed) : unknown(expr);
+  switch (target.kind) {
+    case 'library':
+      return special(context, expr, target.name, passed) ?? callLibrary(context, expr, target.signature, passed);
+    case 'function': {
+      const scheme = target.scheme();
+      return scheme ? callScheme(context, expr, scheme, passed, callee.bound) : unknown(expr);
+    }
+    case 'class':
+      return newObject(context, expr, target.info, passed);
+    case 'local':
+      return callLocal(context, expr, target.local, passed);
+  }
+}
+
+interface Callee {
+  readonly value: Value;
+  /** The object and the name of a method that its class does not define. */
+  readonly object?: Value;
+  readonly method?: string;
+  /** The first parameter is the object. */
+  readonly bound: boolean;
+}
+
+function calleeOf(context: Context, callee: Expr): Callee {
+  if (callee.kind !== 'member') return { value: evaluate(context, callee), bound: false };
+  const object = evaluate(context, callee.object);
+  if (object.module || object.fields?.has(callee.name)) {
+    return { value: evaluate(context, callee), bound: object.fields !== undefined };
+  }
+  return { value: unknown(callee), object, method: callee.name, bound: true };
+}
+
+function callMethod(context: Context, expr: CallExpr, object: Value, name: string, passed: readonly Passed[]): Value {
+  const signature = context.surroundings.method(`.${name}`);
+  if (!signature || (!object.form && !object.fits)) return unknown(expr);
+  const self: Passed = { argument: { start: expr.callee.start, end: expr.callee.end, value: expr.callee }, value: object };
+  return callLibrary(context, expr, signature, [self, ...passed]);
+}
+
+/** Functions whose meaning is no matter of units alone. */
+function special(context: Context, expr: CallExpr, name: string, passed: readonly Passed[]): Value | undefined {
+  const [first, second] = passed;
+  if (powers.has(name) && first && second) return power(context, expr, first.value, second.value, expr);
+  if (fitting.has(name)) return { expr, form: undefined, fits: true, from: [] };
+  if (ones.has(name)) return { expr, form: oneForm, literal: exactLiteral(Rational.one), from: [] };
+  return undefined;
+}

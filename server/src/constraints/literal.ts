@@ -1,0 +1,77 @@
+import { Rational } from '../quantities/rational.ts';
+
+/** A number known from literals alone: `value · π^pi`, folded exactly. */
+export interface Literal {
+  readonly value: Rational;
+  readonly pi: number;
+  /** Small integers, simple fractions, π and their roots carry no hidden unit. */
+  readonly pure: boolean;
+  /** Half a unit of the last digit written, relative; 0 where the number is meant exactly. */
+  readonly tolerance: number;
+}
+
+const largestPure = Rational.of(16);
+const cache = new Map<string, Literal>();
+
+/** The literal that a number's text stands for. */
+export function readLiteral(value: Rational, text: string): Literal {
+  const known = cache.get(text);
+  if (known) return known;
+  const literal = { value, pi: 0, pure: isPure(value), tolerance: toleranceOf(value, text) };
+  if (cache.size > 5000) cache.clear();
+  cache.set(text, literal);
+  return literal;
+}
+
+export function exactLiteral(value: Rational, pi = 0): Literal {
+  return { value, pi, pure: isPure(value), tolerance: 0 };
+}
+
+export function multiplyLiterals(a: Literal, b: Literal): Literal {
+  return { value: a.value.mul(b.value), pi: a.pi + b.pi, pure: a.pure && b.pure, tolerance: a.tolerance + b.tolerance };
+}
+
+export function invertLiteral(a: Literal): Literal | undefined {
+  return a.value.isZero ? undefined : { value: a.value.inv(), pi: -a.pi, pure: a.pure, tolerance: a.tolerance };
+}
+
+export function negateLiteral(a: Literal): Literal {
+  return { ...a, value: a.value.neg() };
+}
+
+/** Sum of literals, where no π is left over that cannot be added exactly. */
+export function addLiterals(a: Literal, b: Literal): Literal | undefined {
+  if (a.pi !== b.pi) return undefined;
+  const value = a.value.add(b.value);
+  return { value, pi: a.pi, pure: a.pure && b.pure && isPure(value), tolerance: Math.max(a.tolerance, b.tolerance) };
+}
+
+/** A power with a rational exponent, where it is exact and not unwieldy; a root that is not rational gives undefined. */
+export function raiseLiteral(a: Literal, power: Rational): Literal | undefined {
+  const whole = Number(power.num);
+  const root = Number(power.den);
+  if (Math.abs(whole) > 64 || root > 12 || (a.value.isZero && whole < 0) || (a.pi * whole) % root !== 0) return undefined;
+  const base = root === 1 ? a.value : a.value.root(root);
+  if (!base || base.num.toString().length + base.den.toString().length > 60) return undefined;
+  return { value: base.pow(whole), pi: (a.pi * whole) / root, pure: a.pure, tolerance: a.tolerance * Math.abs(power.toNumber()) };
+}
+
+/** The floating-point value, for display and tolerant comparison. */
+export function literalNumber(a: Literal): number {
+  return a.pi === 0 ? a.value.toNumber() : a.value.toNumber() * Math.PI ** a.pi;
+}
+
+function isPure(value: Rational): boolean {
+  const size = value.abs();
+  if (size.den === 1n) return size.compare(largestPure) <= 0;
+  return size.den <= 16n && size.num <= 64n;
+}
+
+/** Integers and short decimals such as 0.001 and 3.6 are meant exactly; 32.2 and 0.3048 may be rounded. */
+function toleranceOf(value: Rational, text: string): number {
+  const mantissa = /^[\d_]*\.?[\d_]*/.exec(text)?.[0].replaceAll('_', '') ?? '';
+  const digits = mantissa.replace('.', '').replace(/^0+/, '');
+  const significant = digits.replace(/0+$/, '');
+  if (!mantissa.includes('.') || significant.length < 2 || value.isZero) return 0;
+  return 0.5 / Number(digits);
+}

@@ -1,0 +1,77 @@
+/** Whether two numbers of one dimension are counted in the same unit, as far as literals, offsets and rotation leave it open. */
+import type { Constraint } from '../constraints/problem.ts';
+import type { Measure, Reading } from '../constraints/measure.ts';
+import { isPending, zeroTolerance } from '../constraints/measure-algebra.ts';
+import { matchScales, missingFactor } from '../constraints/measure-match.ts';
+import type { Value } from '../constraints/value.ts';
+import { Dimension } from '../quantities/dimension.ts';
+import type { Elimination } from './eliminate.ts';
+import type { Fault } from './fault.ts';
+
+type Same = Extract<Constraint, { kind: 'same' }>;
+
+const temperature = Dimension.base('Θ');
+const velocity = Dimension.base('L').div(Dimension.base('T'));
+
+/** The fault of a constraint whose dimensions agree; undefined where the units agree too or are not known. */
+export function scaleFault(constraint: Same, elimination: Elimination): Fault | undefined {
+  const left = comparable(constraint.left, elimination);
+  const right = comparable(constraint.right, elimination);
+  if (!left || !right || !sameOpenTerms(constraint)) return undefined;
+  const additive = constraint.reason.kind === 'sum';
+  const dimension = elimination.reduce(constraint.left.form ?? constant).dimension;
+  if (!additive && isPending(left) && dimension !== temperature) return pendingFault(constraint, constraint.left);
+  const pairs = matchScales(left, right);
+  if (pairs.length === 0) return mismatch(constraint, left, right);
+  if (dimension === velocity && turnsWithoutPi(left, right)) return { kind: 'scale', constraint, ratio: 2 * Math.PI, turns: 2 * Math.PI, zeros: false };
+  if (additive || pairs.some(([a, b]) => sameZero(a, b))) return undefined;
+  const weight = Math.max(...left.readings.map((reading) => reading.weight));
+  if (weight > 1.5 && left.readings.every((reading) => Math.abs(reading.weight) > 1.5)) return { kind: 'weight', constraint, weight };
+  return { kind: 'scale', constraint, ratio: 1, turns: 1, zeros: true };
+}
+
+const constant = { dimension: Dimension.one, terms: [] };
+
+function pendingFault(constraint: Same, value: Value): Fault {
+  return { kind: 'point', constraint: { kind: 'point', anchor: constraint.anchor, span: constraint.span, value, use: 'product' } };
+}
+
+function mismatch(constraint: Same, left: Measure, right: Measure): Fault | undefined {
+  const missing = missingFactor(left, right);
+  if (!missing || Math.abs(missing.ratio - 1) < 1e-9) return undefined;
+  return { kind: 'scale', constraint, ratio: missing.ratio, turns: missing.turns, zeros: false };
+}
+
+/** A measure whose literal factors are settled: a constant that turned out to carry a unit leaves the scale unknown. */
+function comparable(value: Value, elimination: Elimination): Measure | undefined {
+  const measure = value.measure;
+  if (!measure || !value.form) return undefined;
+  for (const term of value.form.terms) {
+    if (term.unknown.origin !== 'constant') continue;
+    const solved = elimination.reduce({ dimension: Dimension.one, terms: [{ unknown: term.unknown, power: term.power }] });
+    if (solved.terms.length > 0 || !solved.dimension.isOne) return undefined;
+  }
+  return measure;
+}
+
+/** Unknown units cancel only where both sides have the same ones. */
+function sameOpenTerms(constraint: Same): boolean {
+  const terms = (value: Value): string => (value.form?.terms ?? [])
+    .filter((term) => term.unknown.origin !== 'constant')
+    .map((term) => `${term.unknown.id}^${term.power}`).join(' ');
+  return terms(constraint.left) === terms(constraint.right);
+}
+
+/** `v = N*r` with N in revolutions: a length per time needs the 2π, or the π of a circumference. */
+function turnsWithoutPi(left: Measure, right: Measure): boolean {
+  const turning = left.cycle !== 0 && left.radian === 0 && right.cycle === 0 && right.radian === 0;
+  return turning && left.factors.every((factor) => factor.literal.pi === 0);
+}
+
+/** Points agree where they hold the same number of points from the same zero; a difference is counted like its scale's points. */
+function sameZero(a: Reading, b: Reading): boolean {
+  if (a.nature === 'gauge' || b.nature === 'gauge') return true;
+  if (a.weight === 0 && b.weight === 0) return true;
+  if (a.weight === 0 || b.weight === 0) return (a.weight === 0 ? a : b).nature !== 'absolute';
+  return Math.abs(a.weight - b.weight) < 1e-6 && (a.pending || b.pending || Math.abs(a.zero - b.zero) < zeroTolerance);
+}
