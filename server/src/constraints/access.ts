@@ -3,6 +3,7 @@ import { pathOf } from '../program/path.ts';
 import type { Expr, IndexExpr, MemberExpr, NameExpr } from '../program/nodes.ts';
 import type { Context } from './context.ts';
 import { evaluate } from './expressions.ts';
+import { isConstant } from './form.ts';
 import { notedValue } from './targets.ts';
 import { type Value, unknown } from './value.ts';
 
@@ -52,7 +53,14 @@ export function indexed(context: Context, expr: IndexExpr): Value {
     return unknown(expr);
   }
   const object = evaluate(context, expr.object);
-  return object.items ? itemOf(object.items, expr, key) : object.fields ? unknown(expr) : withExpr({ ...object, from: [object] }, expr);
+  if (object.items) return itemOf(object.items, expr, key);
+  if (object.fields || object.callable || object.element) return unknown(expr);
+  return isFixed(expr) && object.form && !isConstant(object.form) ? unknown(expr) : withExpr({ ...object, from: [object] }, expr);
+}
+
+/** `y[0]` of an array without a note: a state vector's places have units of their own. */
+function isFixed(expr: IndexExpr): boolean {
+  return expr.keys.some((key) => key.kind === 'number' || key.kind === 'slice' || key.kind === 'unary');
 }
 
 function itemOf(items: readonly Value[], expr: IndexExpr, key: Expr | undefined): Value {

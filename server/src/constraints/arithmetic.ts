@@ -168,7 +168,7 @@ function withBareTerm(context: Context, expr: Expr, left: Value, right: Value, s
   const value = left.literal ? right : left;
   const bare = left.literal ? left : right;
   if (!value.form) return unknown(expr, [value]);
-  if (bare.expr && !(isConstant(value.form) && value.form.dimension.isOne)) {
+  if (bare.expr && value.form.dimension !== temperature && !(isConstant(value.form) && value.form.dimension.isOne)) {
     context.add({ kind: 'bare', anchor: context.anchor, span: bare.expr, literal, text: '', beside: value });
   }
   const base = left.literal && sign === -1 ? scaleMeasure(value.measure, minusOne) : value.measure;

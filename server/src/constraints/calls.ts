@@ -8,7 +8,7 @@ import { callLibrary } from './library-call.ts';
 import { exactLiteral } from './literal.ts';
 import { Rational } from '../quantities/rational.ts';
 import { callLocal, callScheme, newObject } from './user-call.ts';
-import { type Value, unknown } from './value.ts';
+import { type Value, unknown, unknownValue } from './value.ts';
 
 /** One argument with what is known of it. */
 export interface Passed {
@@ -65,11 +65,17 @@ function callMethod(context: Context, expr: CallExpr, object: Value, name: strin
   return callLibrary(context, expr, signature, [self, ...passed]);
 }
 
+function elementOf(value: Value): Value {
+  return value.element ?? (value.items ? unknownValue : value);
+}
+
 /** Functions whose meaning is no matter of units alone. */
 function special(context: Context, expr: CallExpr, name: string, passed: readonly Passed[]): Value | undefined {
   const [first, second] = passed;
   if (powers.has(name) && first && second) return power(context, expr, first.value, second.value, expr);
   if (fitting.has(name)) return { expr, form: undefined, fits: true, from: [] };
+  if (name === 'zip') return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: passed.map(({ value }) => elementOf(value)) } };
+  if (name === 'enumerate' && first) return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: [unknown(expr), elementOf(first.value)] } };
   if (ones.has(name)) return { expr, form: oneForm, literal: exactLiteral(Rational.one), from: [] };
   return undefined;
 }

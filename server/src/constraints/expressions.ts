@@ -219,7 +219,7 @@ function comprehension(context: Context, expr: ComprehensionExpr): Value {
 
 /** Binds a loop's target to a member of what it runs over. */
 export function bindElement(context: Context, target: Expr, iterable: Value): void {
-  const element: Value = iterable.items ? (common(iterable.items) ?? unknown(target)) : iterable;
+  const element: Value = iterable.element ?? (iterable.items ? (common(iterable.items) ?? unknown(target)) : iterable);
   if (target.kind === 'sequence') {
     for (const [at, item] of target.items.entries()) bindElement(context, item, element.items?.[at] ?? unknown(item));
     return;

@@ -5,8 +5,10 @@ import type { Anchor, Span } from '../text/span.ts';
 import { agree } from './arithmetic.ts';
 import type { Context } from './context.ts';
 import { constantForm, unknownForm } from './form.ts';
-import { measureOf } from './measure.ts';
-import { type NoteInForce, type Value, unknown } from './value.ts';
+import type { Literal } from './literal.ts';
+import { type Measure, measureOf } from './measure.ts';
+import { Scale } from '../quantities/scale.ts';
+import { type NoteInForce, type Value, type Version, unknown } from './value.ts';
 
 /** Assigns a value to a target of any shape. */
 export function assign(context: Context, target: Expr, value: Value, statement: Stmt): void {
@@ -22,7 +24,7 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
   const note = notes[0];
   if (!note) {
     if (value.misuse) reportMisuse(context, value);
-    return bind(context, path, target, value);
+    return bind(context, path, target, value.misuse ? { ...value, misuse: undefined } : value);
   }
   const noted = notedValue(path, note, context.anchor, target, namesDifference(path, note) || isDifference(value));
   checkTarget(context, path, target, value, noted, note);
@@ -34,11 +36,17 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
 export function bind(context: Context, path: string, target: Span, value: Value): void {
   dropParts(context, path);
   const version = { path, anchor: context.anchor, span: target, assigned: value };
-  const bound: Value = value.literal && !value.fits
-    ? { expr: undefined, form: unknownForm(context.fresh(path, target, 'constant')), from: [], version: { ...version, origin: 'constant' } }
-    : { ...value, version: { ...version, origin: 'assigned' } };
+  const bound: Value = value.literal && !value.fits ? constantValue(context, path, target, value.literal, version) : { ...value, version: { ...version, origin: 'assigned' } };
   context.bindings.set(path, bound);
   context.sightings?.set(target, bound);
+}
+
+/** A constant without a note: its unit is open; it converts like its number only if it turns out to be a pure one. */
+function constantValue(context: Context, path: string, target: Span, literal: Literal, version: Omit<Version, 'origin'>): Value {
+  const unit = context.fresh(path, target, 'constant');
+  const size = literal.value.sign < 0 ? { ...literal, value: literal.value.neg() } : literal;
+  const measure: Measure = { readings: [{ scale: Scale.one, weight: 0, zero: 0, nature: 'ratio' }], factors: [{ literal: size, unless: unit }], radian: 0, cycle: 0, degrees: 0 };
+  return { expr: undefined, form: unknownForm(unit), measure, from: [], version: { ...version, origin: 'constant' } };
 }
 
 /** The value of a symbol whose note decides its unit. */

@@ -23,13 +23,15 @@ export interface Value {
   readonly tainted?: boolean;
   /** A tuple's positions. */
   readonly items?: readonly Value[];
+  /** What a member is, for what is only run over: `zip`, `enumerate`. */
+  readonly element?: Value;
   /** A record's entries, an object's attributes. */
   readonly fields?: ReadonlyMap<string, Value>;
   readonly callable?: Callable;
   /** A module, by the name it was imported from. */
   readonly module?: ModuleValue;
   /** A point on a scale was used as if it counted from zero; reported where the value is put to use. */
-  readonly misuse?: Misuse;
+  readonly misuse?: Misuse | undefined;
   /** Factors of a product that decide whether it is a gas law. */
   readonly gaugeFactor?: boolean;
   readonly temperatureFactor?: boolean;

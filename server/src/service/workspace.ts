@@ -1,0 +1,168 @@
+/** The facade over one set of files: keeps what is parsed and solved, and answers checks. */
+import { detect, type Engine, say, type Understood, understand } from '../analyze.ts';
+import type { Detected } from '../findings/collect.ts';
+import type { FrontEnd } from '../frontends/frontend.ts';
+import { nomenclatureFrontEnd, nomenclatureNotes } from '../frontends/nomenclature/index.ts';
+import { createPythonFrontEnd } from '../frontends/python/index.ts';
+import { readChunkNotes } from '../notes/read-chunk.ts';
+import type { ChunkNotes } from '../notes/types.ts';
+import type { Chunk, LanguageId } from '../program/nodes.ts';
+import { loadSignatures } from '../signatures/load.ts';
+import type { FileSolver } from '../solver/file-solver.ts';
+import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
+import type { Solved } from '../solver/pieces.ts';
+import { absolute } from '../text/span.ts';
+import type { Assets, CheckResult, FileSource, PlacedFinding, Settings, Workspace } from './contract.ts';
+import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
+import { resolveImport } from './imports.ts';
+import { voiceOver } from './voice-over.ts';
+
+/** Imported files that are kept understood; the least recently used goes first. */
+const mostImports = 60;
+
+export async function createWorkspace(assets: Assets, source: FileSource, settings: Settings): Promise<Workspace> {
+  const grammar = assets.grammar('python');
+  const python = grammar && (await createPythonFrontEnd(assets.runtime, grammar));
+  const frontEnds = [python, nomenclatureFrontEnd].filter((each) => each !== undefined);
+  return new Files(assets, source, settings, frontEnds);
+}
+
+interface Kept {
+  readonly understood: Understood;
+  readonly reach: string;
+}
+
+class Files implements Workspace {
+  private readonly open = new Map<string, Kept>();
+  private readonly imports = new Map<string, Understood | undefined>();
+  private readonly folders: NomenclatureFolders;
+  private readonly tables = new Map<LanguageId, SignatureTable>();
+  private readonly libraries = new Map<string, Library>();
+  private notes = new WeakMap<Chunk, { readonly reach: string; readonly notes: ChunkNotes }>();
+  private cache = new WeakMap<object, Solved>();
+
+  constructor(
+    private readonly assets: Assets,
+    private readonly source: FileSource,
+    private readonly settings: Settings,
+    private readonly frontEnds: readonly FrontEnd[],
+  ) {
+    this.folders = new NomenclatureFolders(source);
+  }
+
+  check(file: string, text: string, language?: LanguageId): CheckResult {
+    const frontEnd = this.frontEndOf(file, language);
+    if (!frontEnd) return { file, language: language ?? 'python', text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
+    const understood = this.understand(file, text, frontEnd);
+    const detected = this.severe(detect(understood));
+    const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)));
+    const findings = say(detected, voice).map((finding): PlacedFinding => ({
+      code: finding.code,
+      severity: finding.severity,
+      span: absolute(finding.place),
+      message: finding.message,
+      related: finding.related.map((each) => ({ file: each.place.anchor.file, span: absolute(each.place), message: each.message })),
+    }));
+    return { file, language: frontEnd.language, text, findings, statistics: statisticsOf(understood) };
+  }
+
+  forget(file: string): void {
+    this.open.get(file)?.understood.parsed.release();
+    this.open.delete(file);
+  }
+
+  invalidate(file: string): void {
+    if (file.endsWith('.nomen')) this.folders.forget();
+    this.imports.get(file)?.parsed.release();
+    this.imports.clear();
+    this.libraries.clear();
+  }
+
+  private understand(file: string, text: string, frontEnd: FrontEnd): Understood {
+    const reach = this.folders.reachOf(file);
+    const previous = this.open.get(file);
+    const understood = understand(text, file, this.engineFor(file, frontEnd, reach), previous?.understood.parsed);
+    this.open.set(file, { understood, reach: reach.fingerprint });
+    return understood;
+  }
+
+  private engineFor(file: string, frontEnd: FrontEnd, reach: Reach): Engine {
+    return {
+      frontEnd,
+      readNotes: (chunk) => this.notesOf(chunk, frontEnd, reach),
+      library: this.libraryFor(frontEnd.language, reach),
+      nomenclature: (name) => reach.symbol(name),
+      importFile: (statement, name) => this.imported(resolveImport(file, statement, name, this.source)),
+      cache: this.cache,
+    };
+  }
+
+  private notesOf(chunk: Chunk, frontEnd: FrontEnd, reach: Reach): ChunkNotes {
+    const known = this.notes.get(chunk);
+    if (known?.reach === reach.fingerprint) return known.notes;
+    const notes = frontEnd.language === 'nomenclature' ? nomenclatureNotes(chunk, reach.vocabulary) : readChunkNotes(chunk, this.settings.notes, reach.vocabulary, frontEnd.language);
+    this.notes.set(chunk, { reach: reach.fingerprint, notes });
+    return notes;
+  }
+
+  private libraryFor(language: LanguageId, reach: Reach): Library {
+    const key = `${language}|${reach.fingerprint}`;
+    let library = this.libraries.get(key);
+    if (!library) {
+      library = libraryOf(...reach.signatures, this.shipped(language));
+      this.libraries.set(key, library);
+    }
+    return library;
+  }
+
+  private shipped(language: LanguageId): SignatureTable {
+    let table = this.tables.get(language);
+    if (!table) {
+      table = loadSignatures(this.assets.signatures(language));
+      this.tables.set(language, table);
+    }
+    return table;
+  }
+
+  private imported(file: string | undefined): FileSolver | undefined {
+    if (file === undefined) return undefined;
+    const open = this.open.get(file);
+    if (open) return open.understood.solver;
+    if (this.imports.has(file)) return this.imports.get(file)?.solver;
+    this.imports.set(file, undefined);
+    const text = this.source.read(file);
+    const frontEnd = this.frontEndOf(file, undefined);
+    const understood = text === undefined || !frontEnd ? undefined : understand(text, file, this.engineFor(file, frontEnd, this.folders.reachOf(file)));
+    understood?.parsed.release();
+    this.imports.set(file, understood);
+    const oldest = this.imports.keys().next().value;
+    if (this.imports.size > mostImports && oldest !== undefined) this.imports.delete(oldest);
+    return understood?.solver;
+  }
+
+  private textOf(file: string): string {
+    return this.open.get(file)?.understood.parsed.text ?? this.imports.get(file)?.parsed.text ?? this.source.read(file) ?? '';
+  }
+
+  private frontEndOf(file: string, language: LanguageId | undefined): FrontEnd | undefined {
+    if (language) return this.frontEnds.find((each) => each.language === language);
+    return this.frontEnds.find((each) => each.endings.some((ending) => file.endsWith(ending)));
+  }
+
+  private severe(detected: readonly Detected[]): readonly Detected[] {
+    return detected.flatMap((each) => {
+      const severity = this.settings.severities[each.code] ?? each.severity;
+      return severity === 'off' ? [] : [{ ...each, severity }];
+    });
+  }
+}
+
+function statisticsOf(understood: Understood): CheckResult['statistics'] {
+  const unread: string[] = [];
+  let notes = 0;
+  for (const read of understood.notes.values()) {
+    notes += read.notes.length;
+    for (const each of read.unread) unread.push(each.text);
+  }
+  return { functions: [...understood.solver.pieces()].length, notes, unread };
+}
