@@ -24,6 +24,8 @@ describe('constants', () => {
       expect(entry.source.length, entry.name).toBeGreaterThan(3);
       expect(entry.uncertainty, entry.name).toBeGreaterThanOrEqual(0);
       expect(coherent(entry.value, entry.unit), entry.name).toBeGreaterThan(0);
+      // A form of one digit would stand for half of all numbers around it.
+      for (const form of entry.metAs) expect(form.value.replace(/e.*|\D/g, '').replace(/^0+/, '').length, `${entry.name}: ${form.value}`).toBeGreaterThan(1);
       expect(new Set(entry.metAs.map(({ value, unit }) => `${value} ${unit}`)).size, entry.name).toBe(entry.metAs.length);
     }
     expect(new Set(constants.map((entry) => entry.name)).size).toBe(constants.length);
@@ -43,7 +45,7 @@ function strayForms(entry: ConstantEntry): string[] {
   const { dimension } = readStrict(entry.unit);
   return entry.metAs.filter(({ value, unit }) => {
     const same = readStrict(unit).dimension === dimension;
-    const off = Math.abs(coherent(value.replace('e+', 'e'), unit) / reference - 1);
+    const off = Math.abs(coherent(value, unit) / reference - 1);
     return !same || off > Math.max(lastDigit(value), 3 * entry.uncertainty, 5e-5) * 1.0001;
   }).map(({ value, unit }) => `${value} ${unit}: ${(reference / readStrict(unit).scale.toNumber()).toPrecision(8)}`);
 }

@@ -40,7 +40,7 @@ export const gasConstants: readonly ConstantEntry[] = [
     metAs: [...met('1/m^3', '2.687e25', '2.69e25', '2.6868e25', '2.686780111e25'), ...met('1/cm^3', '2.687e19', '2.69e19')], source: exact },
   { name: 'specific gas constant of dry air', symbol: 'R_air', value: '287.05287', unit: 'J/(kg K)', uncertainty: 1e-4,
     metAs: [
-      ...met('J/(kg K)', '287', '287.0', '287.1', '287.05', '287.04', '287.06', '287.058', '287.055', '287.0528', '287.05287', '287.053', '287.042', '2.87e2', '2.87e+2'),
+      ...met('J/(kg K)', '287', '287.0', '287.1', '287.05', '287.04', '287.06', '287.058', '287.055', '287.0528', '287.05287', '287.053', '287.042', '2.87e2'),
       ...met('kJ/(kg K)', '0.287', '0.28705', '0.2871', '0.2870', '0.287055', '0.287058', '0.287042'),
       ...met('ft lbf/(lb degR)', '53.3', '53.34', '53.35', '53.350', '53.352', '53.36'), ...met('ft lbf/(slug degR)', '1716', '1716.5', '1716.49', '1716.6', '1717'),
       ...met('BTU/(lb degR)', '0.06855', '0.0686', '0.06856'), ...met('psi ft^3/(lb degR)', '0.3704', '0.370', '0.3705'), ...met('kgf m/(kg K)', '29.27', '29.3'),
@@ -63,7 +63,7 @@ export const gasConstants: readonly ConstantEntry[] = [
       ...met('kgf/cm^2', '1.033', '1.0332', '1.03323'), ...met('dyn/cm^2', '1.01325e6', '1.013e6'),
     ], source: '10th CGPM (1954); CODATA 2022, exact' },
   { name: 'standard-state pressure', symbol: 'p°', value: '100000', unit: 'Pa', uncertainty: 0,
-    metAs: [...met('Pa', '1e5', '100000', '1.0e5', '1e+5'), ...met('hPa', '1000'), ...met('mbar', '1000')], source: 'IUPAC; CODATA 2022' },
+    metAs: [...met('Pa', '100000', '1.0e5'), ...met('hPa', '1000'), ...met('mbar', '1000')], source: 'IUPAC; CODATA 2022' },
   { name: 'specific heat of dry air', symbol: 'c_p', value: '1005', unit: 'J/(kg K)', uncertainty: 1e-3,
     metAs: [...met('J/(kg K)', '1004', '1004.5', '1004.7', '1005', '1006', '1005.0', '1004.68', '1.005e3'), ...met('kJ/(kg K)', '1.0', '1.00', '1.004', '1.005', '1.006', '1.01'), ...met('MJ/(kg K)', '1.005e-3'), ...met('BTU/(lb degF)', '0.24', '0.240', '0.2400'), ...met('kcal/(kg K)', '0.24', '0.240')], source: 'common practice, from memory: near 20 °C' },
 ];

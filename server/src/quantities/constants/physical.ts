@@ -7,7 +7,7 @@ const exact = 'CODATA 2022, exact in the SI of 2019';
 /** Universal, electromagnetic, atomic and radiation constants. */
 export const physicalConstants: readonly ConstantEntry[] = [
   { name: 'speed of light in vacuum', symbol: 'c', value: '299792458', unit: 'm/s', uncertainty: 0,
-    metAs: [...met('m/s', '299792458', '3e8', '3.0e8', '2.998e8', '2.9979e8', '2.99792458e8'), ...met('km/s', '299792.458', '299792', '3e5'), ...met('cm/s', '2.998e10', '2.99792458e10', '3e10'), ...met('ft/s', '9.836e8'), ...met('mi/s', '186282', '186000')], source: exact },
+    metAs: [...met('m/s', '299792458', '3.00e8', '2.998e8', '2.9979e8', '2.99792458e8'), ...met('km/s', '299792.458', '299792', '3.00e5'), ...met('cm/s', '2.998e10', '2.99792458e10', '3.00e10'), ...met('ft/s', '9.836e8'), ...met('mi/s', '186282', '186000')], source: exact },
   { name: 'Planck constant', symbol: 'h', value: '6.62607015e-34', unit: 'J s', uncertainty: 0,
     metAs: [...met('J s', '6.62607015e-34', '6.626e-34', '6.63e-34', '6.62607e-34', '6.6261e-34'), ...met('erg s', '6.626e-27'), ...met('eV s', '4.136e-15', '4.135667696e-15', '4.1357e-15')], source: exact },
   { name: 'reduced Planck constant', symbol: 'ħ', value: '1.0545718176461565e-34', unit: 'J s', uncertainty: 0,
@@ -29,7 +29,7 @@ export const physicalConstants: readonly ConstantEntry[] = [
   { name: 'characteristic impedance of vacuum', symbol: 'Z0', value: '376.730313412', unit: 'Ω', uncertainty: 1.6e-10,
     metAs: met('Ω', '377', '376.7', '376.73', '376.7303', '376.730313'), source: codata },
   { name: 'Coulomb force constant', symbol: 'k_e', value: '8.9875517862e9', unit: 'N m^2/C^2', uncertainty: 1.6e-10,
-    metAs: met('N m^2/C^2', '8.988e9', '8.99e9', '9e9', '8.9875e9', '8.9876e9', '8.98755e9', '8.9875517873681764e9'), source: 'from the permittivity of CODATA 2022' },
+    metAs: met('N m^2/C^2', '8.988e9', '8.99e9', '9.0e9', '8.9875e9', '8.9876e9', '8.98755e9', '8.9875517873681764e9'), source: 'from the permittivity of CODATA 2022' },
   { name: 'magnetic flux quantum', symbol: 'Φ0', value: '2.0678338484619295e-15', unit: 'Wb', uncertainty: 0,
     metAs: met('Wb', '2.068e-15', '2.0678e-15', '2.07e-15', '2.067833848e-15'), source: exact },
   { name: 'conductance quantum', symbol: 'G0', value: '7.748091729863649e-5', unit: 'S', uncertainty: 0,
