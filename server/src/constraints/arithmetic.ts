@@ -45,7 +45,12 @@ export function agree(context: Context, _expr: Expr, left: Value, right: Value, 
   if (!left.form || !right.form) return;
   const alike = left.form === right.form && isConstant(left.form);
   if (alike && (!left.measure || !right.measure || sameMeasure(left.measure, right.measure))) return;
-  context.add({ kind: 'same', anchor: context.anchor, span, reason, left, right });
+  context.add({ kind: 'same', anchor: context.anchor, span, reason, left: withoutOwnScale(left), right: withoutOwnScale(right) });
+}
+
+/** A constant without a note is counted in whatever unit its neighbour is, even where that is a mere per cent. */
+function withoutOwnScale(value: Value): Value {
+  return value.version?.origin === 'constant' && value.measure ? { ...value, measure: undefined } : value;
 }
 
 /** Measures that need no comparison: one reading each, of the same scale, without factors or points. */
@@ -186,12 +191,18 @@ function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
   if (!left.form || !right.form) return unknown(expr);
   if (isConstant(left.form) && isConstant(right.form) && left.form !== right.form) return { expr, form: undefined, from: [left, right] };
   const lead = isConstant(left.form) && !(left.tainted && !right.tainted) ? left : isConstant(right.form) ? right : left.tainted ? right : left;
-  const measure = sameForm(left.form, right.form) ? addMeasures(left.measure, right.measure, sign) : undefined;
+  const measure = sumMeasure(left, right, sign);
   const misuse = left.misuse ?? right.misuse;
   return {
     expr, form: lead.form, measure, from: [left, right],
     ...(left.tainted && right.tainted ? { tainted: true } : {}), ...(misuse ? { misuse } : {}),
   };
+}
+
+function sumMeasure(left: Value, right: Value, sign: 1 | -1): Measure | undefined {
+  if (right.version?.origin === 'constant') return shiftMeasure(left.measure, right.version.assigned?.literal ?? minusOne, sign);
+  if (left.version?.origin === 'constant') return right.measure;
+  return left.form && right.form && sameForm(left.form, right.form) ? addMeasures(left.measure, right.measure, sign) : undefined;
 }
 
 function pureExponent(context: Context, exponent: Value): void {
