@@ -67,7 +67,7 @@ P | P
 cP | cP
 St | St
 cSt | cSt
-Bi | Bi
+abA | Bi
 Mx | Mx
 Gs | G
 Oe | Oe

@@ -66,9 +66,11 @@ describe(`catalogue: ${allUnits.length} units, ${whole.size} symbols, ${combined
     expect(hidden.sort()).toEqual([
       'Gs: gauss, not s with a prefix',
       'PS: metric horsepower, not S with a prefix',
-      'RT: ton of refrigeration, not T with a prefix',
+      'RT: TR, not T with a prefix',
+      'cP: cP, not P with a prefix',
+      'cSt: cSt, not St with a prefix',
       'fL: footlambert, not L with a prefix',
-      'kt: knot, not t with a prefix',
+      'kt: kt, not t with a prefix',
     ]);
   });
 
@@ -92,6 +94,17 @@ describe(`catalogue: ${allUnits.length} units, ${whole.size} symbols, ${combined
     'kOhm', 'mbar', 'dbar', 'mTorr', 'kcal', 'MeV', 'GHz', 'MJ', 'kJ', 'mV', 'µatm', 'MWe', 'kWp', 'Mt', 'Gt', 'µrad', 'mrad', 'kbit', 'MB', 'kyr', 'Myr', 'daN', 'kPag', 'mbarg', 'mGal', 'msec', 'µsec',
   ])('%s takes its prefix', (text) => {
     expect(symbolMeasure(text)).toBeDefined();
+  });
+
+  it('takes symbols that are other things in most scripts as units only where nothing else fits', () => {
+    const others = ['in', 'a', 'y', 'b', 'r', 'M', 'G', 'U', 'at', 'ton', 'P', 'St', 'Da', 'We', 'Mx', 'Jy', 'fc', 'kt', 'ct', 'ac', 'AU', 'AF', 'CV', 'RT', 'var', 'den', 'pc', 'ppt', 'Gal', 'u', 'Ly', 'met', 'g_n', 'M_sun', 'cpd', 'gr'];
+    expect(others.filter((symbol) => !whole.get(symbol)?.weak)).toEqual([]);
+    const units = ['m', 's', 'kn', 'knot', 'VAr', 'cP', 'cSt', 'acre', 'inch', 'ft', 'psi', 'rpm', 'Hz', 'gal', 'lb', 'lbf', 'bar', 'psu', 'dB', 'ppm', 'min', 'h', 'd', 'deg'];
+    expect(units.filter((symbol) => whole.get(symbol)?.weak)).toEqual([]);
+  });
+
+  it('leaves characteristic numbers and abbreviations alone', () => {
+    expect(['Bi', 'Fr', 'Re', 'Pr', 'Nu', 'Gr', 'Ra', 'Pe', 'Le', 'Ec', 'R', 'ADC', 'cv', 'cp', 'Cp', 'cf', 'Eq.', 'ID', 'OD', 'NM', 'PSS'].filter((text) => symbolMeasure(text))).toEqual([]);
   });
 
   it('reads the spellings that scripts use most', () => {

@@ -22,7 +22,6 @@ bar | Pa | 1.0E+05 *
 barn | m^2 | 1.0E-28 *
 bbl | m^3 | 1.589873E-01
 bbl | L | 1.589873E+02
-Bi | A | 1.0E+01 *
 BTU | J | 1.055056E+03
 BTU_th | J | 1.054350E+03
 BTU ft/(h ft^2 degF) | W/(m K) | 1.730735E+00
@@ -123,7 +122,7 @@ ft lbf | J | 1.355818E+00
 ft lbf/h | W | 3.766161E-04
 ft lbf/min | W | 2.259697E-02
 ft^4 | m^4 | 8.630975E-03
-Fr | A s | 3.335641E-10
+statC | A s | 3.335641E-10
 Gal | m/s^2 | 1.0E-02 *
 galUK | m^3 | 4.54609E-03 *
 galUK/d | m^3/s | 5.261678E-08
@@ -290,13 +289,11 @@ yr365 | s | 3.1536E+07 *
 yr_sidereal | s | 3.155815E+07
 yr_tropical | s | 3.155693E+07
 `;
-
 /** Rows of the table: unit, SI unit, printed factor, and whether it is printed as exact. */
 export const nistFactors = table.trim().split('\n').map((line) => {
   const [unit = '', si = '', printed = ''] = line.split('|').map((cell) => cell.trim());
   return { unit, si, printed: printed.replace(' *', ''), exact: printed.endsWith('*') };
 });
-
 /** SP 811 counts these in survey feet; the catalogue counts them in international feet, which is 2e-6 (length) to 6e-6 (volume) less. */
 export const nistSurveyFactors = [
   { unit: 'acre', si: 'm^2', printed: '4.046873E+03', power: 2 },
@@ -305,7 +302,6 @@ export const nistSurveyFactors = [
   { unit: 'rod', si: 'm', printed: '5.029210E+00', power: 1 },
   { unit: 'fathom', si: 'm', printed: '1.828804E+00', power: 1 },
 ] as const;
-
 /** SP 811, B.8: a revolution in radians; in the catalogue a revolution is a cycle, which becomes an angle by 2π only. */
 export const nistTurns = [
   { unit: 'rev', si: 'rad', printed: '6.283185E+00' },

@@ -13,7 +13,7 @@ export const angle: UnitFamily = {
     { symbols: ['mgon'], names: ['milligon'], factor: 'pi/200000', of: '1', prefixes: 'none', rotation: 'radian', source: 'common practice in surveying' },
     { symbols: ['mil_angle', 'mil_NATO'], names: ['angular mil'], factor: 'pi/3200', of: '1', prefixes: 'none', rotation: 'radian', source: 'NIST SP 811, B.8' },
     { symbols: ['hourangle', 'hour_angle'], names: ['hour angle', 'hour of angle'], factor: 'pi/12', of: '1', prefixes: 'none', rotation: 'radian', source: 'common practice in astronomy' },
-    { symbols: ['deg2', 'sqdeg', 'sq deg'], names: ['square degree'], factor: 'pi/180*pi/180', of: '1', prefixes: 'none', weak: true, remark: 'solid angle', source: 'IAU style manual' },
+    { symbols: ['sqdeg', 'sq deg'], names: ['square degree'], factor: 'pi/180*pi/180', of: '1', prefixes: 'none', weak: true, remark: 'solid angle', source: 'IAU style manual' },
   ],
 };
 
@@ -30,8 +30,8 @@ export const rotation: UnitFamily = {
     { symbols: ['rps', 'RPS'], names: ['revolution per second'], factor: '1', of: 's^-1', prefixes: 'none', rotation: 'cycle', source: 'common practice' },
     { symbols: ['rph'], names: ['revolution per hour'], factor: '1/3600', of: 's^-1', prefixes: 'none', rotation: 'cycle', source: 'common practice' },
     { symbols: ['cpm', 'CPM'], names: ['cycle per minute'], factor: '1/60', of: 's^-1', prefixes: 'none', rotation: 'cycle', remark: 'in vibration work; in radiation work counts per minute', source: 'common practice' },
-    { symbols: ['cpd'], names: ['cycle per day'], factor: '1/86400', of: 's^-1', prefixes: 'none', rotation: 'cycle', source: 'common practice in oceanography' },
-    { symbols: ['cph'], names: ['cycle per hour'], factor: '1/3600', of: 's^-1', prefixes: 'none', rotation: 'cycle', source: 'common practice in oceanography' },
+    { symbols: ['cpd'], names: ['cycle per day'], factor: '1/86400', of: 's^-1', prefixes: 'none', weak: true, rotation: 'cycle', source: 'common practice in oceanography' },
+    { symbols: ['cph'], names: ['cycle per hour'], factor: '1/3600', of: 's^-1', prefixes: 'none', weak: true, rotation: 'cycle', source: 'common practice in oceanography' },
     { symbols: ['bpm'], names: ['beat per minute'], factor: '1/60', of: 's^-1', prefixes: 'none', rotation: 'cycle', source: 'common practice' },
     { symbols: ['Hz', 'hz', 'HZ'], names: ['hertz'], factor: '1', of: 's^-1', prefixes: 'all', rotation: 'cycle', source: 'SI Brochure, table 4' },
     { symbols: ['spm'], names: ['stroke per minute'], factor: '1/60', of: 's^-1', prefixes: 'none', rotation: 'cycle', weak: true, remark: 'strokes of a pump per minute', source: 'common practice' },

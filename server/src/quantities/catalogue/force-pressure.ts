@@ -9,9 +9,9 @@ export const force: UnitFamily = {
   field: 'force',
   units: [
     { symbols: ['kgf', 'kg_f', 'kgF'], names: ['kilogram force', 'kilogram-force', 'kilograms force'], factor: '9.80665', of: newton, prefixes: 'none', source: 'NIST SP 811, B.8' },
-    { symbols: ['kp'], names: ['kilopond'], factor: '9.80665', of: newton, prefixes: 'none', source: 'NIST SP 811, B.8' },
+    { symbols: ['kp'], names: ['kilopond'], factor: '9.80665', of: newton, prefixes: 'none', weak: true, source: 'NIST SP 811, B.8' },
     { symbols: ['gf', 'pond'], names: ['gram force', 'gram-force', 'pond'], factor: '0.00980665', of: newton, prefixes: 'none', source: 'common practice; definition as for kgf' },
-    { symbols: ['tf', 'tonnef'], names: ['tonne force', 'metric ton force'], factor: '9806.65', of: newton, prefixes: 'none', source: 'common practice; definition as for kgf' },
+    { symbols: ['tf', 'tonnef'], names: ['tonne force', 'metric ton force'], factor: '9806.65', of: newton, prefixes: 'none', weak: true, source: 'common practice; definition as for kgf' },
     { symbols: ['lbf', 'lb_f', 'lbF'], names: ['pound force', 'pound-force', 'pounds force'], factor: '0.45359237*9.80665', of: newton, prefixes: 'none', source: 'NIST SP 811, B.8' },
     { symbols: ['klbf'], names: ['thousand pound force'], factor: '453.59237*9.80665', of: newton, prefixes: 'none', source: 'common practice' },
     { symbols: ['kip', 'kips'], names: ['kip'], factor: '453.59237*9.80665', of: newton, prefixes: 'none', source: 'NIST SP 811, B.8' },
@@ -23,7 +23,7 @@ export const force: UnitFamily = {
     { symbols: ['plf'], names: ['pound per linear foot', 'pound force per foot'], factor: '0.45359237*9.80665/0.3048', of: 'kg s^-2', prefixes: 'none', remark: 'pounds-force per foot of length', source: 'common practice; factor NIST SP 811, B.8' },
     { symbols: ['klf'], names: ['kip per linear foot'], factor: '453.59237*9.80665/0.3048', of: 'kg s^-2', prefixes: 'none', source: 'common practice' },
     { symbols: ['pli'], names: ['pound per linear inch'], factor: '0.45359237*9.80665/0.0254', of: 'kg s^-2', prefixes: 'none', source: 'common practice; factor NIST SP 811, B.8' },
-    { symbols: ['g_n', 'g0', 'gee'], names: ['standard gravity', 'standard acceleration of free fall'], factor: '9.80665', of: 'm s^-2', prefixes: 'none', remark: 'accelerations counted in g', source: 'NIST SP 811, B.8; CGPM 1901' },
+    { symbols: ['g_n', 'g0', 'gee'], names: ['standard gravity', 'standard acceleration of free fall'], factor: '9.80665', of: 'm s^-2', prefixes: 'none', weak: true, remark: 'accelerations counted in g', source: 'NIST SP 811, B.8; CGPM 1901' },
     { symbols: ['Gal'], names: ['galileo'], factor: '0.01', of: 'm s^-2', prefixes: 'small', weak: true, remark: 'acceleration in geodesy; gal is the gallon', source: 'NIST SP 811, B.8' },
   ],
 };
@@ -59,7 +59,7 @@ export const pressure: UnitFamily = {
     { symbols: ['mH2O', 'm H2O', 'mWC', 'mwc', 'mCE', 'mWS'], names: ['metre of water'], factor: '1000*9.80665', of: pascal, prefixes: 'none', remark: 'conventional', source: 'common practice; definition as for mmH2O' },
     { symbols: ['cmH2O', 'cm H2O', 'cmWC'], names: ['centimetre of water'], factor: '10*9.80665', of: pascal, prefixes: 'none', remark: 'conventional', source: 'NIST SP 811, B.8' },
     { symbols: ['mmH2O', 'mm H2O', 'mmWC', 'mmwc', 'mmCE', 'mmWS', 'mmAq'], names: ['millimetre of water'], factor: '9.80665', of: pascal, prefixes: 'none', remark: 'conventional', source: 'NIST SP 811, B.8' },
-    { symbols: ['Ba', 'barye'], names: ['barye'], factor: '0.1', of: pascal, prefixes: 'none', remark: 'dyn/cm²', source: 'common practice' },
+    { symbols: ['Ba', 'barye'], names: ['barye'], factor: '0.1', of: pascal, prefixes: 'none', weak: true, remark: 'dyn/cm²', source: 'common practice' },
   ],
 };
 

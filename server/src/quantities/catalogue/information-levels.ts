@@ -17,7 +17,7 @@ export const information: UnitFamily = {
     { symbols: ['bps'], names: ['bit per second'], factor: '1', of: 's^-1', prefixes: 'large', source: 'common practice; IEC 80000-13' },
     { symbols: ['Bps'], names: ['byte per second'], factor: '8', of: 's^-1', prefixes: 'large', source: 'common practice; IEC 80000-13' },
     { symbols: ['Bd', 'baud'], names: ['baud'], factor: '1', of: 's^-1', prefixes: 'large', source: 'IEC 80000-13' },
-    { symbols: ['Sps', 'SPS', 'sps'], names: ['sample per second'], factor: '1', of: 's^-1', prefixes: 'large', source: 'common practice' },
+    { symbols: ['Sps', 'sps'], names: ['sample per second'], factor: '1', of: 's^-1', prefixes: 'large', source: 'common practice' },
     { symbols: ['fps_video', 'FPS'], names: ['frame per second'], factor: '1', of: 's^-1', prefixes: 'none', weak: true, remark: 'fps in small letters is feet per second', source: 'common practice' },
   ],
 };
@@ -40,7 +40,7 @@ export const levels: UnitFamily = {
     { symbols: ['dBZ'], names: ['decibel reflectivity'], factor: '1', of: '1', prefixes: 'none', level: true, remark: 'radar reflectivity, reference 1 mm⁶/m³', source: 'common practice in meteorology' },
     { symbols: ['dBsm', 'dBHz', 'dBK'], names: ['decibel square metre'], factor: '1', of: '1', prefixes: 'none', level: true, source: 'common practice' },
     { symbols: ['Np', 'neper'], names: ['neper'], factor: '1', of: '1', prefixes: 'small', level: true, source: 'SI Brochure, table 8' },
-    { symbols: ['bel'], names: ['bel'], factor: '1', of: '1', prefixes: 'none', level: true, source: 'SI Brochure, table 8' },
+    { symbols: ['bel'], names: ['bel'], factor: '1', of: '1', prefixes: 'none', weak: true, level: true, source: 'SI Brochure, table 8' },
     { symbols: ['phon'], names: ['phon'], factor: '1', of: '1', prefixes: 'none', level: true, source: 'ISO 226' },
     { symbols: ['oct', 'octave'], names: ['octave'], factor: '1', of: '1', prefixes: 'none', weak: true, remark: 'a doubling of frequency, as in dB/octave', source: 'ISO 80000-8' },
     { symbols: ['dec'], names: [], factor: '1', of: '1', prefixes: 'none', weak: true, remark: 'a tenfold frequency, as in dB/dec', source: 'ISO 80000-8' },

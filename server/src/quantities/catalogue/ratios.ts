@@ -16,7 +16,7 @@ export const ratios: UnitFamily = {
     { symbols: ['pptv', 'pptV', 'pptr'], names: ['part per trillion', 'parts per trillion'], factor: '1e-12', of: '1', prefixes: 'none', source: 'NIST SP 811, section 7.10.3' },
     { symbols: ['bp'], names: ['basis point'], factor: '1e-4', of: '1', prefixes: 'none', weak: true, source: 'common practice' },
     { symbols: ['fraction', 'frac', 'ratio', 'number', 'num'], names: ['fraction', 'ratio', 'number', 'dimensionless', 'unitless', 'nondimensional', 'non-dimensional', 'adimensional', 'decimal fraction'], factor: '1', of: '1', prefixes: 'none', source: 'SI Brochure, section 5.4.7; common practice for the words' },
-    { symbols: ['psu', 'PSU', 'PSS', 'PSS-78', 'pss'], names: ['practical salinity unit', 'practical salinity'], factor: '1', of: '1', prefixes: 'none', remark: 'a number on the Practical Salinity Scale, not g/kg', source: 'PSS-78, UNESCO technical papers in marine science 44' },
+    { symbols: ['psu', 'PSU', 'PSS-78'], names: ['practical salinity unit', 'practical salinity'], factor: '1', of: '1', prefixes: 'none', remark: 'a number on the Practical Salinity Scale, not g/kg', source: 'PSS-78, UNESCO technical papers in marine science 44' },
     { symbols: ['°Bx', 'Brix', 'degBrix', '°Brix'], names: ['degree brix', 'degrees brix', 'brix'], factor: '0.01', of: '1', prefixes: 'none', remark: 'mass fraction of sucrose', source: 'common practice in food engineering' },
     { symbols: ['Mach', 'mach'], names: ['mach'], factor: '1', of: '1', prefixes: 'none', source: 'ISO 80000-11' },
     { symbols: ['dozen'], names: ['dozen'], factor: '12', of: '1', prefixes: 'none', source: 'common practice' },

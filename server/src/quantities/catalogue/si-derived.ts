@@ -22,6 +22,6 @@ export const siDerived: UnitFamily = {
     { symbols: ['Gy'], names: ['gray'], factor: '1', of: 'm^2 s^-2', prefixes: 'all', source: 'SI Brochure, table 4' },
     { symbols: ['Sv'], names: ['sievert'], factor: '1', of: 'm^2 s^-2', prefixes: 'all', remark: 'the sverdrup of oceanography is read by its name only', source: 'SI Brochure, table 4' },
     { symbols: ['kat'], names: ['katal'], factor: '1', of: 'mol s^-1', prefixes: 'all', source: 'SI Brochure, table 4' },
-    { symbols: ['sr', 'ster'], names: ['steradian'], factor: '1', of: '1', prefixes: 'small', source: 'SI Brochure, table 4' },
+    { symbols: ['sr'], names: ['steradian'], factor: '1', of: '1', prefixes: 'small', source: 'SI Brochure, table 4' },
   ],
 };
