@@ -224,6 +224,7 @@ p1 = 160.0      # [barg]
 V0 = 10.0       # [L]
 p_atm = 1.013   # [bar]
 V1 = V0 * (p0 + p_atm) / (p1 + p_atm)   # [L]
+V1_m3 = V1 / 1000   # [m^3]
 V_used = V0 - V1
-fill = V0 / 1000 - V1
-#      ^^^^^^^^^^^^^^ scale-mismatch
+V_slip = V0 - V1_m3
+#        ^^^^^^^^^^ scale-mismatch: m^3
