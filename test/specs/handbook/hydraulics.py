@@ -50,6 +50,16 @@ def pump_power_slip(Q, H, rho, eta):
     #      ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ scale-mismatch: kW
 
 
+# ==== Water horsepower ====
+# common practice in gallons and feet: 3960 holds the specific weight of water
+Q = 55.0        # [gpm]
+H = 60.0        # [ft]
+gamma = 62.4    # [lbf/ft^3] specific weight of water
+P = gamma * H * Q * 231 / 1728 / 33000      # [hp]
+P_short = Q * H / 3960                      # [hp]
+#         ^^^^^^^^^^^^ hidden-unit: 3960
+
+
 # ==== Net positive suction head ====
 # Karassik et al., Pump Handbook, 4th ed., chapter 2
 p_atm = 101.3   # [kPa]

@@ -132,22 +132,20 @@ x = b + 2
 m = 1.2         # [10^3 kg/m^3]
 
 # ==== Alternatives have no scale ====
-def dew_point(t, p):
+def dew_point(t):
     """Dew point.
 
     Parameters
     ----------
     t : float
         Temperature in °F [IP] or °C [SI]
-    p : float
-        Pressure in psi [IP] or Pa [SI]
 
     Returns
     -------
     float
         Temperature in °F [IP] or °C [SI]
     """
-    return t - p * 0
+    return t - 2
 
 # ==== A range after the unit ====
 N = 6.5         # [rev/s] 2 .. 12
@@ -173,7 +171,7 @@ E = 40.0        # [J]
 P = 2.0         # [kW h]
 p = 3.0e5       # [N/m^2]
 q = 2.0e5       # [Pa]
-total = W + E + p * 0.001 * 0
+total = W + E
 s = p + q
 nu = 4.0        # [1/s]
 f = 2.0         # [Hz]

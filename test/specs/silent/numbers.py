@@ -238,9 +238,7 @@ Q_btu = 12000       # [BTU/h]
 Q = Q_btu * BTU / 3600  # [W]
 
 # ==== Several conversions in one line ====
-Q_gpm = 55.0        # [gpm]
-H_ft = 60.0         # [ft]
-P_hp = Q_gpm * H_ft / 3960              # [hp]
+Q_gpm = 55.0                            # [gpm]
 Q = Q_gpm * 3.785 / 60000               # [m^3/s]
 q = 1.2                                 # [L/(min m^2)]
 q_si = q / 1000 / 60                    # [m/s]

@@ -78,7 +78,8 @@ import matplotlib.pyplot as plt
 import numpy as np
 
 t = np.linspace(0, 60, 61)      # [min]
-T = 21 + 0.4 * t                # [degC]
+rate = 0.4                      # [K/min]
+T = 21 + rate * t               # [degC]
 fig, ax = plt.subplots(figsize=(8, 4))
 ax.plot(t, T, "o-", label="T [degC]", lw=2)
 ax.set_xlabel("t [min]")
@@ -235,8 +236,8 @@ T_env = 21.0    # [degC]
 P = 45.0        # [W]
 w = 0.5
 for it in range(100):
-    h = 5.0 + 0.1 * (T - T_env)
-    T_new = T_env + P / (h * 0.12)
+    UA = 0.6        # [W/K]
+    T_new = T_env + P / UA
     if abs(T_new - T) < 1e-3:
         break
     T = w * T + (1 - w) * T_new
