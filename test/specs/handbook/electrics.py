@@ -234,7 +234,7 @@ U2 = 0.6        # [V]
 L_P = 10 * log10(P2 / P1)       # [dB]
 L_U = 20 * log10(U2 / U1)       # [dB]
 L_sum = L_P + L_U               # [dB]
-L_slip = 10 * log10(P2 - P1)    # [dB]
+L_slip = 10 * log10(P1 - P2)    # [dB]
 #                   ^^^^^^^ dimensioned-argument
 
 
