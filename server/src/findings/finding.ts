@@ -1,12 +1,9 @@
+import type { FindingCode } from '../program/codes.ts';
 import type { Place } from '../text/span.ts';
 
 export type Severity = 'error' | 'warning' | 'information' | 'hint';
 
-export const findingCodes = [
-  'unlike-terms', 'unlike-result', 'dimensioned-exponent', 'dimensioned-argument', 'scale-mismatch', 'offset-misuse',
-  'hidden-unit', 'conflicting-notes', 'unreadable-unit', 'ambiguous-unit', 'bare-addend',
-] as const;
-export type FindingCode = (typeof findingCodes)[number];
+export { type FindingCode, findingCodes } from '../program/codes.ts';
 
 /** A finding in sentences, ready to show; offsets through places. */
 export interface Finding {
