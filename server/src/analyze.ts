@@ -58,7 +58,7 @@ export function understand(text: string, file: string, engine: Engine, previous?
 export function detect(understood: Understood): readonly Detected[] {
   const { solver, notes, lines } = understood;
   const detected: Detected[] = [];
-  detected.push(...detectFaults(solver.topLevel()?.faults ?? []));
+  detected.push(...detectFaults(solver.topLevel()?.faults ?? [], false));
   for (const piece of solver.pieces()) detected.push(...detectFaults(solver.piece(piece)?.faults ?? []));
   for (const [chunk, read] of notes) {
     detected.push(...detectUnreadable(read.problems, chunk.anchor), ...detectAmbiguous(read.notes, chunk.anchor), ...detectDirectives(read.directives, chunk.anchor));

@@ -1,6 +1,7 @@
 /** Sums, products, quotients and powers: what each says of the units around it. */
 import { Dimension } from '../quantities/dimension.ts';
 import { Rational } from '../quantities/rational.ts';
+import { Scale } from '../quantities/scale.ts';
 import type { Expr } from '../program/nodes.ts';
 import type { Span } from '../text/span.ts';
 import type { Context } from './context.ts';
@@ -8,6 +9,7 @@ import { divideForms, isConstant, multiplyForms, oneForm, raiseForm, sameForm } 
 import { addLiterals, exactLiteral, invertLiteral, type Literal, literalNumber, multiplyLiterals, negateLiteral, raiseLiteral } from './literal.ts';
 import type { Measure } from './measure.ts';
 import { addMeasures, divideMeasures, isGauge, isPoint, multiplyMeasures, raiseMeasure, scaleMeasure, shiftMeasure } from './measure-algebra.ts';
+import { matchScales } from './measure-match.ts';
 import type { Reason } from './problem.ts';
 import { type Misuse, type Value, unknown } from './value.ts';
 
@@ -159,6 +161,7 @@ function kept(value: Value, misuse: Misuse | undefined): Partial<Value> {
 }
 
 const none: Partial<Value> = {};
+const oneMeasure: Measure = { readings: [{ scale: Scale.one, weight: 0, zero: 0, nature: 'ratio' }], factors: [], radian: 0, cycle: 0, degrees: 0 };
 
 function taint(value: Value): Partial<Value> {
   return value.tainted ? { tainted: true } : none;
@@ -176,9 +179,16 @@ function withBareTerm(context: Context, expr: Expr, left: Value, right: Value, s
   if (bare.expr && value.form.dimension !== temperature && !(isConstant(value.form) && value.form.dimension.isOne)) {
     context.add({ kind: 'bare', anchor: context.anchor, span: bare.expr, literal, text: '', beside: value });
   }
-  const base = left.literal && sign === -1 ? scaleMeasure(value.measure, minusOne) : value.measure;
+  const own = isConstant(value.form) && value.form.dimension.isOne ? pureMeasure(value.measure) : value.measure;
+  const base = left.literal && sign === -1 ? scaleMeasure(own, minusOne) : own;
   const measure = left.literal ? shiftMeasure(base, literal, 1) : shiftMeasure(base, literal, sign);
   return { expr, form: value.form, measure, from: [value], ...taint(value), ...(value.misuse ? { misuse: value.misuse } : {}) };
+}
+
+/** Beside a bare number, degrees and per cent are plain numbers only if they were converted; else the number may hide a unit. */
+function pureMeasure(measure: Measure | undefined): Measure | undefined {
+  const pairs = measure ? matchScales(measure, oneMeasure) : [];
+  return pairs.length > 0 ? oneMeasure : undefined;
 }
 
 function halfKnown(expr: Expr, left: Value, right: Value): Value {

@@ -68,7 +68,7 @@ export function namesDifference(path: string, note: NoteInForce): boolean {
 
 /** Requires of an assigned value what the note on its target says. */
 export function checkTarget(context: Context, path: string, target: Span, value: Value, noted: Value, note: NoteInForce): void {
-  if (value.misuse) return reportMisuse(context, value);
+  if (value.misuse) return reportMisuse(context, value, value.form === noted.form);
   if (!value.form || value.fits || value.literal) return;
   agreeWithNote(context, value, noted, value.expr ?? target, { kind: 'target', path, note });
 }
@@ -78,9 +78,10 @@ export function agreeWithNote(context: Context, value: Value, noted: Value, span
   agree(context, value.expr as Expr, value, noted, reason, value.expr ?? span);
 }
 
-export function reportMisuse(context: Context, value: Value): void {
+/** `sure`: the dimensions come out right, so no literal hides a unit. */
+export function reportMisuse(context: Context, value: Value, sure = false): void {
   const misuse = value.misuse;
-  if (misuse && !value.tainted) context.add({ kind: 'point', anchor: context.anchor, span: misuse.span, value: misuse.value, use: misuse.use });
+  if (misuse && (sure || !value.tainted)) context.add({ kind: 'point', anchor: context.anchor, span: misuse.span, value: misuse.value, use: misuse.use });
 }
 
 export function reportDisagreement(context: Context, path: string, notes: readonly NoteInForce[]): void {

@@ -24,14 +24,14 @@ export type Cause =
   | { readonly kind: 'directive'; readonly problem: string };
 
 /** The findings of one function's faults. Several hidden units in one function are one finding: it is an empirical relation. */
-export function detectFaults(faults: readonly Fault[]): readonly Detected[] {
+export function detectFaults(faults: readonly Fault[], oneHidden = true): readonly Detected[] {
   const found: Detected[] = [];
   const hidden: Fault[] = [];
   const seen = new Set<string>();
   for (const fault of faults) {
     const check = checkOf(fault);
     if (!check || (needsNote(fault) && evidenceOf(fault).length === 0)) continue;
-    if (check.code === 'hidden-unit') {
+    if (check.code === 'hidden-unit' && oneHidden) {
       hidden.push(fault);
       continue;
     }

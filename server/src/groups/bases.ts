@@ -38,30 +38,34 @@ export function* repeatingSets(system: System): Generator<readonly KnownSymbol[]
   }
 }
 
-/** The most subspaces that `countSets` keeps apart before it settles for a lower bound. */
-const spanLimit = 3000;
+/** The most steps from one subspace to a wider one that `countSets` takes before it settles for a lower bound. */
+const stepLimit = 40_000;
 
 /**
  * How many sets `repeatingSets` would list. Symbols are taken class by class (parallel dimensions span the same line), and for
  * every subspace that independent classes span the number of ways to span it is kept: O(classes · subspaces · r²), which does not
- * depend on the number of sets. Beyond `spanLimit` subspaces the rest is left out, and the count is a lower bound.
+ * depend on the number of sets. After `limit` steps, each O(r²), the rest is left out, and the count is a lower bound.
  */
-export function countSets(system: System, limit: number = spanLimit): SetCount {
+export function countSets(system: System, limit: number = stepLimit): SetCount {
   const symbols = mayRepeat(system);
   const base = firstBase(symbols, system.bases).map((symbol) => symbol.dimension);
   if (base.length === 0) return { count: 0, exact: true };
   let states = new Map<string, { rows: readonly Vector[]; count: number }>([['', { rows: [], count: 1 }]]);
   let exact = true;
+  let steps = 0;
   for (const { direction, size } of lines(symbols, base)) {
     const next = new Map(states);
     for (const { rows, count } of states.values()) {
-      const wider = rows.length < base.length ? widen(rows, direction) : undefined;
+      if (rows.length === base.length) continue;
+      if (++steps > limit) {
+        exact = false;
+        break;
+      }
+      const wider = widen(rows, direction);
       if (wider === 'too large') exact = false;
       if (!wider || wider === 'too large') continue;
       const key = wider.map((row) => row.join(',')).join(';');
-      const same = next.get(key);
-      if (!same && next.size >= limit) exact = false;
-      else next.set(key, { rows: wider, count: (same?.count ?? 0) + count * size });
+      next.set(key, { rows: wider, count: (next.get(key)?.count ?? 0) + count * size });
     }
     states = next;
   }

@@ -30,6 +30,13 @@ export function kindsOf(dimension: Dimension): readonly string[] {
   return byDimension.get(dimension) ?? [];
 }
 
+/** How familiar a dimension is: its place in the table, for choosing between two ways to say the same. */
+export function familiarity(dimension: Dimension): number {
+  const first = kindsOf(dimension)[0];
+  const at = first === undefined ? -1 : table.findIndex(([, kinds]) => kinds.startsWith(first));
+  return at < 0 ? table.length : at;
+}
+
 function build(): Map<Dimension, readonly string[]> {
   const map = new Map<Dimension, readonly string[]>();
   for (const [unit, kinds] of table) {

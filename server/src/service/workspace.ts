@@ -2,8 +2,9 @@
 import { detect, type Engine, say, type Understood, understand } from '../analyze.ts';
 import type { Detected } from '../findings/collect.ts';
 import type { FrontEnd } from '../frontends/frontend.ts';
-import { nomenclatureFrontEnd, nomenclatureNotes } from '../frontends/nomenclature/index.ts';
+import { nomenclatureFrontEnd } from '../frontends/nomenclature/index.ts';
 import { createPythonFrontEnd } from '../frontends/python/index.ts';
+import { nomenclatureNotes } from '../notes/nomenclature/chunk-notes.ts';
 import { readChunkNotes } from '../notes/read-chunk.ts';
 import type { ChunkNotes } from '../notes/types.ts';
 import type { Chunk, LanguageId } from '../program/nodes.ts';

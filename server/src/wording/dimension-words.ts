@@ -1,5 +1,6 @@
 /** Sentences for terms and results that do not match. */
 import type { Reason } from '../constraints/problem.ts';
+import { familiarity } from '../quantities/kinds.ts';
 import { coherentUnit } from '../quantities/print-unit.ts';
 import type { Fault } from '../solver/fault.ts';
 import { chainOf, sideWords } from './sides.ts';
@@ -48,13 +49,10 @@ function openingOf(voice: Voice, reason: Reason, a: string, b: string, fault: Di
 function missing(voice: Voice, fault: DimensionFault): string {
   const lacking = fault.right.div(fault.left);
   const inverse = fault.left.div(fault.right);
-  const simpler = weight(coherentUnit(lacking)) <= weight(coherentUnit(inverse));
-  const left = nameOf(voice, fault.constraint.anchor, fault.constraint.left);
-  return simpler ? `${left} would have to be multiplied by something in ${unitWithKinds(lacking)}.` : `${left} would have to be divided by something in ${unitWithKinds(inverse)}.`;
-}
-
-function weight(unit: string): number {
-  return unit.length + (unit.startsWith('1/') ? 6 : 0) + (unit.includes('-') ? 2 : 0);
+  const { anchor, left, right, reason } = fault.constraint;
+  if (familiarity(lacking) <= familiarity(inverse)) return `${nameOf(voice, anchor, left)} would have to be multiplied by something in ${unitWithKinds(lacking)}.`;
+  if (isNoted(reason)) return `${nameOf(voice, anchor, left)} would have to be divided by something in ${unitWithKinds(inverse)}.`;
+  return `${nameOf(voice, anchor, right)} would have to be multiplied by something in ${unitWithKinds(inverse)}.`;
 }
 
 function isNoted(reason: Reason): boolean {

@@ -43,8 +43,14 @@ export function unitOf(value: Value, dimension: Dimension): string {
   const note = value.version?.note;
   if (note && note.unit.dimension === dimension && note.unit.text !== '') return unitWords(note.unit.text, dimension);
   const reading = value.measure?.readings.length === 1 && value.measure.factors.length === 0 ? value.measure.readings[0] : undefined;
-  if (reading && value.form?.terms.length === 0) return unitWords(printUnit({ dimension, scale: reading.scale, text: '' }), dimension);
+  if (reading && value.form?.terms.length === 0) return unitWords(turned(printUnit({ dimension, scale: reading.scale, text: '' }), value.measure), dimension);
   return unitWords(coherentUnit(dimension), dimension);
+}
+
+/** Revolutions and radians show in a plain rate: `1/s` of something in rpm is `rev/s`. */
+function turned(text: string, measure: Value['measure']): string {
+  if (!measure || !text.startsWith('1/')) return text;
+  return measure.cycle === 1 ? `rev${text.slice(1)}` : measure.radian === 1 ? `rad${text.slice(1)}` : text;
 }
 
 /** A dimensionless unit is said in words. */

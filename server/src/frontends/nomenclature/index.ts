@@ -1,0 +1,46 @@
+/** The nomenclature language as a program: each symbol with a value is an assignment, so that formulas are checked like scripts. */
+import { readLine } from '../../notes/nomenclature/line.ts';
+import type { Line } from '../../notes/nomenclature/model.ts';
+import { splitLines } from '../../notes/nomenclature/read.ts';
+import type { Chunk, NameExpr, Stmt } from '../../program/nodes.ts';
+import type { FrontEnd, Parsed } from '../frontend.ts';
+
+export const nomenclatureFrontEnd: FrontEnd = {
+  language: 'nomenclature',
+  endings: ['.nomen'],
+  style: { comment: '#', power: '^', pi: 'pi', print: () => '' },
+  parse,
+};
+
+function parse(text: string, file: string, previous?: Parsed): Parsed {
+  const pool = new Map<string, Chunk[]>();
+  for (const chunk of previous?.program.chunks ?? []) pool.set(chunk.text, [...(pool.get(chunk.text) ?? []), chunk]);
+  const chunks: Chunk[] = [];
+  for (const line of splitLines(text)) {
+    if (line.text.trim() === '') continue;
+    const kept = pool.get(line.text)?.shift();
+    if (kept) kept.anchor.start = line.start;
+    chunks.push(kept ?? chunkOf(line.text, line.start, file));
+  }
+  return { text, program: { language: 'nomenclature', file, chunks }, tree: undefined, release: () => undefined };
+}
+
+function chunkOf(text: string, start: number, file: string): Chunk {
+  const statement = statementOf(readLine(text), text);
+  return { anchor: { file, start }, text, statements: statement ? [statement] : [], problems: [], comments: commentOf(text) };
+}
+
+function statementOf(line: Line, text: string): Stmt | undefined {
+  if (line.kind !== 'symbol') return undefined;
+  const target: NameExpr = { kind: 'name', name: line.name, ...line.nameSpan };
+  const span = { start: line.nameSpan.start, end: text.trimEnd().length };
+  return line.value ? { kind: 'assign', targets: [target], value: line.value, ...span } : { kind: 'declare', target, ...span };
+}
+
+function commentOf(text: string): Chunk['comments'] {
+  const match = /(?:^|\s)#\s*(.*)$/.exec(text);
+  if (!match) return [];
+  const words = (match[1] as string).trimEnd();
+  const start = match.index + match[0].length - (match[1] as string).length;
+  return [{ text: words, start, end: start + words.length }];
+}

@@ -1,0 +1,124 @@
+/** Formulas of the nomenclature language: numbers, symbols, + - * / ^, brackets and calls; read as far as they go. */
+import type { Argument, BinaryExpr, Expr } from '../../program/nodes.ts';
+import { Rational } from '../../quantities/rational.ts';
+
+/** Reads an expression from an offset of a line; `end` is where it stops. Undefined where none begins. */
+export function readExpression(line: string, from: number): { readonly expr: Expr; readonly end: number } | undefined {
+  const reader = new Reader(line, from);
+  const expr = reader.sum(0);
+  return expr && { expr, end: reader.at };
+}
+
+const deepest = 60;
+
+class Reader {
+  constructor(private readonly line: string, public at: number) {}
+
+  sum(depth: number): Expr | undefined {
+    return this.chain(depth, ['+', '-'], () => this.product(depth));
+  }
+
+  private product(depth: number): Expr | undefined {
+    return this.chain(depth, ['*', '/', '·'], () => this.unary(depth));
+  }
+
+  private chain(depth: number, ops: readonly string[], next: () => Expr | undefined): Expr | undefined {
+    if (depth > deepest) return undefined;
+    let left = next();
+    while (left) {
+      const start = this.at;
+      this.skip();
+      const op = this.line[this.at];
+      const power = op === '*' && this.line[this.at + 1] === '*';
+      if (op === undefined || power || !ops.includes(op)) {
+        this.at = start;
+        break;
+      }
+      const opSpan = { start: this.at, end: this.at + 1 };
+      this.at++;
+      const right = next();
+      if (!right) {
+        this.at = start;
+        break;
+      }
+      left = { kind: 'binary', op: (op === '·' ? '*' : op) as BinaryExpr['op'], opSpan, left, right, start: left.start, end: right.end };
+    }
+    return left;
+  }
+
+  private unary(depth: number): Expr | undefined {
+    this.skip();
+    const start = this.at;
+    if (this.line[this.at] === '-' || this.line[this.at] === '+') {
+      const op = this.line[this.at] as '-' | '+';
+      this.at++;
+      const operand = this.unary(depth + 1);
+      return operand && { kind: 'unary', op, operand, start, end: operand.end };
+    }
+    return this.powered(depth);
+  }
+
+  private powered(depth: number): Expr | undefined {
+    const base = this.atom(depth);
+    if (!base) return undefined;
+    const start = this.at;
+    this.skip();
+    const mark = this.line.startsWith('**', this.at) ? 2 : this.line[this.at] === '^' ? 1 : 0;
+    if (mark === 0) {
+      this.at = start;
+      return base;
+    }
+    const opSpan = { start: this.at, end: this.at + mark };
+    this.at += mark;
+    const exponent = this.unary(depth + 1);
+    return exponent && { kind: 'binary', op: '**', opSpan, left: base, right: exponent, start: base.start, end: exponent.end };
+  }
+
+  private atom(depth: number): Expr | undefined {
+    this.skip();
+    const start = this.at;
+    const number = this.match(/(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/y);
+    if (number !== undefined) return { kind: 'number', value: Rational.parse(number), text: number, start, end: this.at };
+    const name = this.match(/[A-Za-z_Α-Ωα-ω][\w.Α-Ωα-ω]*/y);
+    if (name !== undefined) return this.line[this.at] === '(' ? this.call(name, start, depth) : { kind: 'name', name, start, end: this.at };
+    if (this.line[this.at] !== '(') return undefined;
+    this.at++;
+    const inner = this.sum(depth + 1);
+    this.skip();
+    if (!inner || this.line[this.at] !== ')') {
+      this.at = start;
+      return undefined;
+    }
+    this.at++;
+    return inner;
+  }
+
+  private call(name: string, start: number, depth: number): Expr | undefined {
+    const callee: Expr = { kind: 'name', name, start, end: this.at };
+    this.at++;
+    const args: Argument[] = [];
+    for (;;) {
+      this.skip();
+      if (this.line[this.at] === ')') break;
+      const value = this.sum(depth + 1);
+      if (!value) return undefined;
+      args.push({ value, start: value.start, end: value.end });
+      this.skip();
+      if (this.line[this.at] === ',') this.at++;
+      else if (this.line[this.at] !== ')') return undefined;
+    }
+    this.at++;
+    return { kind: 'call', callee, args, start, end: this.at };
+  }
+
+  private match(pattern: RegExp): string | undefined {
+    pattern.lastIndex = this.at;
+    const found = pattern.exec(this.line)?.[0];
+    if (found !== undefined) this.at += found.length;
+    return found;
+  }
+
+  private skip(): void {
+    while (this.line[this.at] === ' ' || this.line[this.at] === '\t') this.at++;
+  }
+}
