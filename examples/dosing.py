@@ -72,7 +72,7 @@ def dose_time(mass, density, Q):
     Parameters
     ----------
     mass : float
-        Mass of a dose [g]
+        Mass of a dose [kg]
     density : float
         Density of the paint [kg/m^3]
     Q : float
@@ -83,7 +83,7 @@ def dose_time(mass, density, Q):
     t : float
         Time [s]
     """
-    return mass / 1000 / density * Q
+    return mass / density * Q
 
 
 def shear_rate(Q, d_i):
@@ -115,7 +115,7 @@ def main():
     dp = laminar_loss(Q, bore / 1000, length, 0.38)
     p_end = tank_pressure(level, 1240.0) / 1000 - dp    # [kPa]
     print(f"w = {w:.2f} m/s, {p_end:.1f} kPa at the nozzle")
-    print(f"dose of 250 g: {dose_time(250.0, 1240.0, Q):.1f} s")
+    print(f"dose of 250 g: {dose_time(0.25, 1240.0, Q):.1f} s")
 
 
 if __name__ == "__main__":

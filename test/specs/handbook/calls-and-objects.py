@@ -232,30 +232,32 @@ P_slip = m_dot * T2     # [W]
 
 # ==== Results exchanged ====
 # Cengel and Boles, 8th ed., chapter 7
-def state(p, v, R):
-    """Temperature and density of an ideal gas.
+def state(T, cp, R, k):
+    """Speed of sound and enthalpy of an ideal gas.
 
     Parameters
     ----------
-    p : float
-        Pressure [Pa]
-    v : float
-        Specific volume [m^3/kg]
+    T : float
+        Temperature [K]
+    cp : float
+        Heat capacity [J/(kg K)]
     R : float
         Gas constant [J/(kg K)]
+    k : float
+        Ratio of the heat capacities [-]
 
     Returns
     -------
-    T : float
-        Temperature [K]
-    rho : float
-        Density [kg/m^3]
+    c : float
+        Speed of sound [m/s]
+    h : float
+        Enthalpy [J/kg]
     """
-    T = p * v / R
-    rho = 1 / v
-    return rho, T
-    #      ^^^ unlike-result
-    #           ^ unlike-result
+    c = (k * R * T)**0.5
+    h = cp * T
+    return h, c
+    #      ^ unlike-result
+    #         ^ unlike-result
 
 
 # ==== Properties as functions with units of their own ====

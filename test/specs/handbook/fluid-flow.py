@@ -315,7 +315,7 @@ def colebrook_slip(Re, eps, D):
     f : float
         Darcy friction factor [-]
     """
-    f = 0.02
+    f = 0.02    # [-]
     for _ in range(50):
         f = (-2 * log10(eps / (3.7 * D) + 2.51 / (Re * sqrt(f))))**-2
         #               ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ scale-mismatch

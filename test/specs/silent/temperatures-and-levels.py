@@ -14,7 +14,8 @@ dT = 5.0        # [K]
 T_b = T_a + dT          # [degC]
 rise = T_b - T_a        # [K]
 slope = 0.4             # [K/min]
-T_c = T_a + slope * 10  # [degC]
+t = 10.0                # [min]
+T_c = T_a + slope * t   # [degC]
 
 # ==== Interpolating between two temperatures ====
 x1, x2 = 0.0, 1.2       # [m]
@@ -136,7 +137,8 @@ p_g = 2.4e5         # [Pag]
 rho = 998.2         # [kg/m^3]
 g = 9.81            # [m/s^2]
 h = p_g / (rho * g)     # [m]
-p_b = p_g + rho * g * 2.0
+depth = 2.0         # [m]
+p_b = p_g + rho * g * depth
 
 # ==== Levels ====
 import math
