@@ -65,7 +65,7 @@ export function sameMeasure(a: Measure, b: Measure): boolean {
 
 export function product(expr: Expr, left: Value, right: Value): Value {
   if (left.literal && right.literal) return literalValue(expr, multiplyLiterals(left.literal, right.literal));
-  if (left.fits || right.fits) return { expr, form: undefined, fits: true, from: [] };
+  if ((left.fits && !left.literal?.value.isOne) || (right.fits && !right.literal?.value.isOne)) return { expr, form: undefined, fits: true, from: [] };
   if (left.literal) return scaled(expr, right, left.literal);
   if (right.literal) return scaled(expr, left, right.literal);
   if (!left.form || !right.form) return unknown(expr, [left, right]);
@@ -85,7 +85,7 @@ export function quotient(expr: Expr, left: Value, right: Value): Value {
   if (left.literal) {
     const measure = scaleMeasure(raiseMeasure(below, Rational.minusOne), left.literal);
     const value = { expr, form: raiseForm(right.form, Rational.minusOne), measure, from: [right], ...kept(right, misuse) };
-    return left.literal.pure ? value : { ...value, tainted: true };
+    return left.literal.pure && !right.tainted ? value : { ...value, tainted: true };
   }
   return productValue(expr, left, right, divideForms(left.form as typeof oneForm, right.form), divideMeasures(left.measure, below), misuse);
 }
@@ -96,7 +96,7 @@ export function power(context: Context, expr: Expr, base: Value, exponent: Value
   if (!exponent.literal) pureExponent(context, exponent);
   if (base.literal && constant) return literalPower(expr, base.literal, constant);
   if (base.fits) return { expr, form: undefined, fits: true, from: [] };
-  if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure ? {} : { tainted: true }) };
+  if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure && exponent.form && !exponent.tainted && exponent.expr?.kind !== 'binary' ? {} : { tainted: true }) };
   if (!base.form) return unknown(expr, [base]);
   if (constant && constant.pi === 0) return constantPower(expr, base, constant.value);
   if (isConstant(base.form) && base.form.dimension.isOne) return { expr, form: oneForm, from: [base, exponent], ...taint(base) };
@@ -205,7 +205,7 @@ function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
   const misuse = left.misuse ?? right.misuse;
   return {
     expr, form: lead.form, measure, from: [left, right],
-    ...(left.tainted && right.tainted ? { tainted: true } : {}), ...(misuse ? { misuse } : {}),
+    ...(left.tainted && right.tainted || ((left.tainted || right.tainted) && lead.form?.dimension.isOne) ? { tainted: true } : {}), ...(misuse ? { misuse } : {}),
   };
 }
 

@@ -76,6 +76,6 @@ function special(context: Context, expr: CallExpr, name: string, passed: readonl
   if (fitting.has(name)) return { expr, form: undefined, fits: true, from: [] };
   if (name === 'zip') return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: passed.map(({ value }) => elementOf(value)) } };
   if (name === 'enumerate' && first) return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: [unknown(expr), elementOf(first.value)] } };
-  if (ones.has(name)) return { expr, form: oneForm, literal: exactLiteral(Rational.one), from: [] };
+  if (ones.has(name)) return { expr, form: oneForm, literal: exactLiteral(Rational.one), fits: true, from: [] };
   return undefined;
 }

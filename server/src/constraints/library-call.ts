@@ -31,10 +31,21 @@ export function callLibrary(context: Context, expr: CallExpr, signature: Signatu
     if (param.claim.kind === 'unit') argument(context, signature, at, param, param.claim, given, binding);
   }
   for (const { param, given } of pairs) if (param.claim.kind === 'function') functionArgument(param.claim, given.value, binding);
-  const results = signature.results.map((claim) => resultOf(context, expr, claim, binding));
+  const doubtful = pairs.some(({ param, given }) => isPureClaim(param.claim) && mayHide(given.value));
+  const results = signature.results.map((claim) => resultOf(context, expr, claim, binding)).map((value) => (doubtful && value.form ? { ...value, tainted: true } : value));
   const values = pairs.map((pair) => pair.given.value);
   if (results.length === 0) return unknown(expr, values);
   return results.length === 1 ? { ...(results[0] as Value), expr, from: values } : { expr, form: undefined, items: results, from: values };
+}
+
+/** A function of a pure number: exp, log, sin. */
+function isPureClaim(claim: UnitClaim): boolean {
+  return claim.kind === 'unit' && claim.powers.length === 0 && claim.unit.dimension.isOne;
+}
+
+/** `exp(a + b/T)`: a sum in an exponent may hold the logarithm of a reference value, and so a unit. */
+function mayHide(value: Value): boolean {
+  return value.tainted === true || !value.form || (value.expr?.kind === 'binary' && (value.expr.op === '+' || value.expr.op === '-'));
 }
 
 function pairUp(signature: Signature, passed: readonly Passed[]): { param: SignatureParam; given: Passed }[] {

@@ -52,6 +52,11 @@ export function scaleMeasure(a: Measure | undefined, literal: Literal): Measure 
 /** Sum (`sign` 1) or difference (-1): the readings in which both sides agree; undefined where none does. */
 export function addMeasures(a: Measure | undefined, b: Measure | undefined, sign: 1 | -1): Measure | undefined {
   if (!a || !b) return undefined;
+  const shared = sharedFactors(a, b);
+  if (shared.length > 0) {
+    const sum = addMeasures({ ...a, factors: without(a.factors, shared) }, { ...b, factors: without(b.factors, shared) }, sign);
+    if (sum) return { ...sum, factors: [...sum.factors, ...shared] };
+  }
   const readings = matchScales(a, b).map(([left, right]) => sumReading(left, right, sign));
   if (readings.length === 0) return undefined;
   const [turns, degrees] = [a.radian === 0 && a.cycle === 0 ? b : a, a.degrees === 0 ? b.degrees : a.degrees];
@@ -59,6 +64,19 @@ export function addMeasures(a: Measure | undefined, b: Measure | undefined, sign
   const absolute = gauge.map((reading) => ({ ...reading, weight: 0, zero: 0, nature: 'ratio' as const }));
   const sums = sign === 1 && gauge.length > 0 && b.readings.concat(a.readings).some((r) => r.weight === 0) ? [...readings, ...absolute] : readings;
   return assemble(sums, [], turns.radian, turns.cycle, degrees);
+}
+
+/** Literals that multiply both terms: `x*0.3937` and `y*0.3937` convert alike, and their sum may still be converted by them. */
+function sharedFactors(a: Measure, b: Measure): readonly Factor[] {
+  return a.factors.filter((factor) => b.factors.some((other) => sameLiteral(factor.literal, other.literal)));
+}
+
+function without(factors: readonly Factor[], shared: readonly Factor[]): readonly Factor[] {
+  return factors.filter((factor) => !shared.some((other) => sameLiteral(factor.literal, other.literal)));
+}
+
+function sameLiteral(a: Literal, b: Literal): boolean {
+  return a.pi === b.pi && a.value.equals(b.value);
 }
 
 /** A literal added to a temperature or a gauge pressure: a difference, a point, or a change of zero. */

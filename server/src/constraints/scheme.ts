@@ -26,6 +26,8 @@ export interface SchemeParam {
 }
 
 export interface SchemeResult {
+  /** A literal that may hide a unit multiplies it. */
+  readonly tainted?: boolean;
   readonly form: Form | undefined;
   readonly measure: Measure | undefined;
   readonly note?: NoteInForce;

@@ -43,7 +43,7 @@ export function callLocal(context: Context, expr: CallExpr, local: LocalFunction
   });
   const result = local.result;
   if (result.items || result.literal) return { ...result, expr };
-  return resultValue(context, expr, { form: result.form, measure: result.measure }, instance, [...passed.map((each) => each.value)]);
+  return resultValue(context, expr, { form: result.form, measure: result.measure, ...(result.tainted ? { tainted: true } : {}) }, instance, [...passed.map((each) => each.value)]);
 }
 
 function pairUp(params: readonly SchemeParam[], passed: readonly Passed[], bound: boolean): { param: SchemeParam; given: Passed }[] {
@@ -74,7 +74,7 @@ function check(context: Context, scheme: Scheme, param: SchemeParam, given: Pass
     const noted = notedValue(param.name, param.note, context.anchor, undefined);
     return agree(context, given.argument.value, passed, noted, { kind: 'parameter', function: scheme.name, name: param.name, note: param.note }, given.argument.value);
   }
-  if (!param.form || !isConstant(param.form) || value.form === param.form) return;
+  if (!param.form || !isConstant(param.form) || param.form.dimension.isOne || value.form === param.form) return;
   const required: Value = { expr: undefined, form: param.form, from: [] };
   agree(context, given.argument.value, passed, required, { kind: 'inferred-parameter', function: scheme.name, name: param.name }, given.argument.value);
 }
@@ -84,7 +84,7 @@ function resultValue(context: Context, expr: CallExpr, result: SchemeResult, ins
   if (result.fields) return { expr, form: undefined, fields: result.fields, from };
   if (result.note) return { ...notedValue(expr.callee.kind === 'name' ? expr.callee.name : 'result', result.note, context.anchor, undefined), expr };
   if (!result.form) return unknown(expr, from);
-  return { expr, form: instantiate(context, result.form, instance), measure: instantiatedMeasure(result.form, result.measure, instance), from };
+  return { expr, form: instantiate(context, result.form, instance), measure: instantiatedMeasure(result.form, result.measure, instance), from, ...(result.tainted ? { tainted: true } : {}) };
 }
 
 function instantiate(context: Context, form: Form, instance: Instance): Form | undefined {

@@ -33,7 +33,7 @@ export function readLeadingUnit(text: string, options: ReadOptions = {}): (UnitR
   if (whole.ok) return { ...whole, end: text.length };
   for (const end of breaks(text)) {
     const result = parseUnit(text.slice(0, end).trimEnd(), options);
-    if (result.ok && result.beyondDoubt) return { ...result, end };
+    if (result.ok && result.beyondDoubt && !/^\s*(?:[\d(/]|to\b|->|→)/.test(text.slice(end))) return { ...result, end };
   }
   return undefined;
 }
@@ -51,6 +51,8 @@ function readAny(text: string, options: ReadOptions): UnitResult {
   if (trimmed.length > longest || unlikely.test(trimmed)) return refusal(text, { kind: 'unexpected', found: trimmed.slice(0, 10) });
   const dimension = /^dim\s+(.*)$/.exec(trimmed);
   if (dimension) return readDimension(text, dimension[1] as string);
+  const twice = readTwice(trimmed, options);
+  if (twice) return twice;
   const alternatives = readAlternatives(trimmed, options);
   if (alternatives) return alternatives;
   const result = new Reader(text, options).read();
@@ -77,6 +79,15 @@ function readDimension(text: string, body: string): UnitResult {
     result = result.mul(Dimension.base(match[1] === 'Theta' ? 'Θ' : (match[1] as string)).pow(power));
   }
   return read({ dimension: result, scale: undefined, text: text.trim() }, [], true);
+}
+
+/** `Kelvin (K)`, `kilopascal (kPa)`: a name and its symbol say one unit. */
+function readTwice(text: string, options: ReadOptions): UnitResult | undefined {
+  const match = /^([A-Za-z][A-Za-z /]{2,}?)\s*\(([^()]+)\)$/.exec(text);
+  if (!match) return undefined;
+  const [first, second] = [parseUnit(match[1] as string, options), parseUnit(match[2] as string, options)];
+  const same = first.ok && second.ok && first.unit.dimension === second.unit.dimension && first.unit.scale && second.unit.scale?.equals(first.unit.scale);
+  return same ? { ...first, unit: { ...first.unit, text } } : undefined;
 }
 
 /** `°F or °C`, `in/hr or mm/hr`, `mm/step`: the dimension is known, the scale is not. */
@@ -107,6 +118,9 @@ class Reader {
   private known = 0;
   private strong = false;
   private slashes = 0;
+  /** The last symbol's unit: said twice, as in `degrees °`, it counts once. */
+  private lastUnit: Unit | undefined;
+  private weak = false;
 
   constructor(private readonly text: string, private readonly options: ReadOptions) {
     this.tokens = trimTokens(tokenize(text));
@@ -115,7 +129,7 @@ class Reader {
   read(): UnitResult {
     const unit = this.expression(0);
     if (!this.fault && this.at < this.tokens.length) this.fail(this.tokens[this.at], { kind: 'unexpected', found: this.textOf(this.tokens[this.at]) });
-    if (!this.fault && unit && !this.onlyLetters()) return read({ ...unit, text: this.text.trim() }, this.hints, this.strong || this.isStructured());
+    if (!this.fault && unit && !this.onlyLetters() && !this.onlyNumber()) return read({ ...unit, text: this.text.trim() }, this.hints, this.strong || this.isStructured());
     return this.unread();
   }
 
@@ -133,8 +147,8 @@ class Reader {
     return { ok: false, span, reason: fault.reason, triesToBeUnit: tries && (suggestion !== undefined || fault.reason.kind !== 'unknown-symbol'), ...(suggestion ? { suggestion } : {}) };
   }
 
-  private isStructured(): boolean {
-    return this.tokens.some((token) => token.kind !== 'symbol' && !(token.kind === 'mark' && token.text === ' ')) || this.words().length > 1;
+  private isStructured(words = true): boolean {
+    return this.tokens.some((token) => token.kind !== 'symbol' && !(token.kind === 'mark' && token.text === ' ')) || (words && this.words().length > 1);
   }
 
   /** `a b`, `t h`: single letters side by side are names more often than units. */
@@ -142,6 +156,11 @@ class Reader {
     const words = this.words();
     const plain = this.tokens.every((token) => token.kind === 'symbol' || (token.kind === 'mark' && token.text === ' '));
     return plain && words.length > 1 && words.every((word) => word.length === 1) && !/^[NAWPVJ] [msK]$|^Pa s$/.test(this.text.trim());
+  }
+
+  /** `2`, `12`: a plain number is no unit; `10^-6` and `1e-3` are factors. */
+  private onlyNumber(): boolean {
+    return this.tokens.length === 1 && this.tokens[0]?.kind === 'number' && !/^1(?:e|0+$)/i.test(this.tokens[0].text);
   }
 
   private words(): readonly string[] {
@@ -195,7 +214,11 @@ class Reader {
         break;
       }
       if (this.skipLabel()) continue;
+      if (next.kind === 'number') return this.fail(next, { kind: 'unexpected', found: next.text });
+      const said = this.lastUnit;
       const factor = this.factor(depth);
+      if (factor && factor === said) continue;
+      if (this.weak && token?.kind === 'mark' && token.text === ' ' && this.words().length > 1 && !this.isStructured(false)) return this.fail(next, { kind: 'unexpected', found: this.textOf(next) });
       unit = factor && multiply(unit, factor, '');
     }
     return unit;
@@ -206,7 +229,9 @@ class Reader {
     if (!token) return this.fail(undefined, { kind: 'unexpected', found: 'the end' });
     if (token.kind === 'mark' && token.text === '(') {
       this.at++;
-      const inner = this.expression(depth + 1);
+      const symbols = this.tokens[this.at]?.kind === 'symbol' || this.tokens[this.at]?.kind === 'mark' || this.tokens[this.at + 2]?.kind === 'symbol';
+      const inner = symbols ? this.expression(depth + 1) : undefined;
+      if (!symbols) return this.fail(token, { kind: 'unexpected', found: '(' });
       if (!this.takeMark(')')) return this.fail(token, { kind: 'missing-bracket' });
       return inner && this.powered(inner);
     }
@@ -219,6 +244,7 @@ class Reader {
     if (token.kind !== 'symbol') return this.fail(token, { kind: 'unexpected', found: this.textOf(token) });
     this.at++;
     const unit = this.symbol(token);
+    this.lastUnit = unit;
     return unit && (this.reference(unit, token) ?? this.powered(unit));
   }
 
@@ -366,6 +392,7 @@ class Reader {
   private lookUp(token: Extract<Token, { kind: 'symbol' }>): Unit | undefined {
     const found = findSymbol(token.text) ?? (token.text.length > 1 ? findName(token.text) : undefined);
     if (found) {
+      this.weak ||= found.weak;
       this.strong ||= !found.weak && (found.prefixed || token.text.length > 2 || /[°%Ωµμ]/.test(token.text)) && !commonWords.has(token.text.toLowerCase());
       return found.unit;
     }

@@ -35,6 +35,22 @@ export class Elimination {
     return result;
   }
 
+  /** The form as far as equations without doubtful literals decide it. */
+  reduceSurely(form: Form): Form {
+    let result = form;
+    const sure = (unknown: Unknown): Form | undefined => {
+      const row = this.rows.get(unknown.id);
+      return row && !row.soft ? row.form : undefined;
+    };
+    while (result.terms.some((term) => sure(term.unknown))) result = substitute(result, sure);
+    return result;
+  }
+
+  /** Whether a form's reduction rests on a literal that may hide a unit. */
+  isDoubtful(form: Form): boolean {
+    return this.certificate(form).soft;
+  }
+
   /** Adds `left = right`. */
   equate(left: Form, right: Form, by: Constraint, soft: boolean): Outcome {
     const [a, b] = [this.reduce(left), this.reduce(right)];

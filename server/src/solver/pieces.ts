@@ -12,7 +12,7 @@ import type { Piece } from './definitions.ts';
 import type { Fault } from './fault.ts';
 import { schemeFingerprint } from './fingerprint.ts';
 import { rootCause } from './root-cause.ts';
-import { solve } from './solve.ts';
+import { type Solution, solve } from './solve.ts';
 
 /** What came of one function or of the top level. */
 export interface Solved {
@@ -60,7 +60,7 @@ function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surro
   const context = new Context(piece.chunk.anchor, without(surroundings, ignored), piece.fn);
   const params = readBody(context, piece.fn, selfOf(piece, owner));
   const solution = solve(context.constraints);
-  const scheme = schemeOf(piece, params, context.returns, context.surroundings.notes.results(piece.fn), solution.reduce);
+  const scheme = schemeOf(piece, params, context.returns, context.surroundings.notes.results(piece.fn), solution);
   return { faults: solution.faults, scheme, fields: fieldsOf(context, solution.reduce) };
 }
 
@@ -88,11 +88,11 @@ function without(surroundings: Surroundings, ignored: NoteInForce | undefined): 
   };
 }
 
-function schemeOf(piece: Piece, params: readonly ReadParam[], returns: readonly Value[], notes: readonly NoteInForce[], reduce: (form: Form) => Form): Scheme {
+function schemeOf(piece: Piece, params: readonly ReadParam[], returns: readonly Value[], notes: readonly NoteInForce[], solution: Solution): Scheme {
   const scheme = {
     name: piece.fn.name,
-    params: params.map((each) => schemeParam(each, reduce)),
-    result: notes.length > 0 ? notedResult(notes, returns) : joinedResult(returns, reduce),
+    params: params.map((each) => schemeParam(each, solution.reduceSurely)),
+    result: notes.length > 0 ? notedResult(notes, returns) : joinedResult(returns, solution),
   };
   return { ...scheme, fingerprint: schemeFingerprint(scheme) };
 }
@@ -117,21 +117,22 @@ function notedResult(notes: readonly NoteInForce[], returns: readonly Value[]): 
   return { form: undefined, measure: undefined, items: Array.from(items, (item) => item ?? { form: undefined, measure: undefined }) };
 }
 
-function joinedResult(returns: readonly Value[], reduce: (form: Form) => Form): SchemeResult | undefined {
+function joinedResult(returns: readonly Value[], solution: Solution): SchemeResult | undefined {
   const telling = returns.filter((value) => !value.fits);
   const first = telling[0];
   if (!first) return undefined;
   const items = first.items;
   if (items) {
     if (!telling.every((value) => value.items?.length === items.length)) return undefined;
-    const columns = items.map((_, at) => joinedResult(telling.map((value) => value.items?.[at] as Value), reduce));
+    const columns = items.map((_, at) => joinedResult(telling.map((value) => value.items?.[at] as Value), solution));
     return { form: undefined, measure: undefined, items: columns.map((each) => each ?? { form: undefined, measure: undefined }) };
   }
   if (telling.some((value) => !value.form || value.literal)) return telling.length === 1 && first.fields ? { form: undefined, measure: undefined, fields: first.fields } : undefined;
-  const forms = telling.map((value) => reduce(value.form as Form));
+  const forms = telling.map((value) => solution.reduce(value.form as Form));
   if (!forms.every((form) => sameForm(form, forms[0] as Form))) return undefined;
   const measure = telling.every((value) => value.measure === first.measure) && sameForm(forms[0] as Form, first.form as Form) && !first.misuse ? first.measure : undefined;
-  return { form: forms[0], measure };
+  const tainted = telling.some((value) => value.tainted || solution.isDoubtful(value.form as Form));
+  return { form: forms[0], measure, ...(tainted ? { tainted } : {}) };
 }
 
 function empiricalScheme(fn: FunctionStmt, chunk: Chunk, surroundings: Surroundings, units: readonly EmpiricalUnit[]): Scheme {

@@ -9,6 +9,8 @@ import { scaleFault } from './scales.ts';
 export interface Solution {
   readonly faults: readonly Fault[];
   reduce(form: Form): Form;
+  reduceSurely(form: Form): Form;
+  isDoubtful(form: Form): boolean;
 }
 
 /**
@@ -29,7 +31,7 @@ export function solve(constraints: readonly Constraint[]): Solution {
   for (const at of later) report(at, settle(constraints[at] as Constraint, elimination, true));
   for (const at of last) report(at, check(constraints[at] as Constraint, elimination));
   faults.sort((a, b) => a.at - b.at);
-  return { faults: faults.map((each) => each.fault), reduce: (form) => elimination.reduce(form) };
+  return { faults: faults.map((each) => each.fault), reduce: (form) => elimination.reduce(form), reduceSurely: (form) => elimination.reduceSurely(form), isDoubtful: (form) => elimination.isDoubtful(form) };
 }
 
 function isGentle(constraint: Constraint): boolean {
