@@ -101,7 +101,7 @@ def sheet(path):
     E = trial_energy(t, n, torque)
     N = np.mean(n) / 60     # [rev/s]
     gap = 4.0               # [mm] between impeller and wall
-    eta_end = 0.42          # [Pa.ss] viscosity at the end
+    eta_end = 0.42          # [kg/(m s] viscosity at the end
 
     P = shaft_power(1240.0, N, 0.085, 0.38)
     v = tip_speed(N, 0.085)
