@@ -39,7 +39,7 @@ export function* repeatingSets(system: System): Generator<readonly KnownSymbol[]
 }
 
 /** The most steps from one subspace to a wider one that `countSets` takes before it settles for a lower bound. */
-const stepLimit = 40_000;
+const stepLimit = 25_000;
 
 /**
  * How many sets `repeatingSets` would list. Symbols are taken class by class (parallel dimensions span the same line), and for
@@ -54,6 +54,7 @@ export function countSets(system: System, limit: number = stepLimit): SetCount {
   let exact = true;
   let steps = 0;
   for (const { direction, size } of lines(symbols, base)) {
+    if (steps > limit) break;
     const next = new Map(states);
     for (const { rows, count } of states.values()) {
       if (rows.length === base.length) continue;

@@ -43,7 +43,7 @@ function ratios(classes: ReadonlyMap<Dimension, readonly KnownSymbol[]>): Candid
 function numberCandidate({ form, powers, filled, evidence: told }: Instance, dependent: KnownSymbol | undefined): Candidate {
   const exponents = wholePowers([...powers]);
   const place = dependent ? filled.indexOf(dependent) : -1;
-  const found = place >= 0 && form.roles[place]?.kind.name === form.entry.finds;
+  const found = place >= 0 && form.entry.finds?.includes(form.roles[place]?.kind.name ?? '');
   const base = place < 0 ? classCost.number * form.entry.standing : found ? classCost.found + form.entry.standing : classCost.dependentNumber + 10 * form.entry.standing;
   return { exponents, cost: base + size(exponents) / 10 + powerCost(exponents, dependent) - told / 100 };
 }

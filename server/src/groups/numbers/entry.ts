@@ -11,8 +11,8 @@ export interface NumberEntry {
    * diffusivity and a length squared for an area are derived from these.
    */
   readonly forms: readonly string[];
-  /** The kind of quantity that the number is usually written to find. */
-  readonly finds?: string;
+  /** Kinds of quantity that the number is usually written to find. */
+  readonly finds?: readonly string[];
   /** 1: in every textbook of its field; 2: usual; 3: special. */
   readonly standing: 1 | 2 | 3;
   /** Standards and books are named as far as the definition is found there; no wording is taken from them. */

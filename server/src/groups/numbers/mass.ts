@@ -9,11 +9,11 @@ export const mass: NumberFamily = {
   numbers: [
     { names: ['Schmidt number'], symbol: 'Sc', expression: 'ν/D', forms: ['kinematic viscosity / diffusion coefficient'], standing: 1, source: 'ISO 80000-11:2019, constants of matter' },
     { names: ['Lewis number'], symbol: 'Le', expression: 'α/D', forms: ['thermal diffusivity / diffusion coefficient'], standing: 1, source: 'ISO 80000-11:2019, constants of matter' },
-    { names: ['Sherwood number', 'Nusselt number for mass transfer'], symbol: 'Sh', expression: 'k_c l/D', forms: ['mass transfer coefficient * length / diffusion coefficient'], finds: 'mass transfer coefficient', standing: 1, source: iso },
-    { names: ['Péclet number for mass transfer'], symbol: 'Pe_m', expression: 'v l/D', forms: ['velocity * length / diffusion coefficient'], standing: 1, source: iso },
+    { names: ['Sherwood number', 'Nusselt number for mass transfer'], symbol: 'Sh', expression: 'k_c l/D', forms: ['mass transfer coefficient * length / diffusion coefficient'], finds: ['mass transfer coefficient'], standing: 1, source: iso },
+    { names: ['Péclet number for mass transfer'], symbol: 'Pe_m', expression: 'v l/D', forms: ['velocity * length / diffusion coefficient'], standing: 2, source: iso },
     { names: ['Fourier number for mass transfer'], symbol: 'Fo_m', expression: 'D t/l²', forms: ['diffusion coefficient * time / length^2'], standing: 1, source: iso },
-    { names: ['Stanton number for mass transfer'], symbol: 'St_m', expression: 'k_c/v', forms: ['mass transfer coefficient / velocity'], finds: 'mass transfer coefficient', standing: 2, source: iso },
-    { names: ['Colburn factor for mass transfer'], symbol: 'j_D', expression: '(k_c/v) Sc^(2/3)', forms: ['mass transfer coefficient / velocity * kinematic viscosity^2/3 * diffusion coefficient^-2/3'], finds: 'mass transfer coefficient', standing: 2, source: iso },
+    { names: ['Stanton number for mass transfer'], symbol: 'St_m', expression: 'k_c/v', forms: ['mass transfer coefficient / velocity'], finds: ['mass transfer coefficient'], standing: 2, source: iso },
+    { names: ['Colburn factor for mass transfer'], symbol: 'j_D', expression: '(k_c/v) Sc^(2/3)', forms: ['mass transfer coefficient / velocity * kinematic viscosity^2/3 * diffusion coefficient^-2/3'], finds: ['mass transfer coefficient'], standing: 2, source: iso },
     { names: ['Graetz number for mass transfer'], symbol: 'Gz_m', expression: 'd² v/(D l)', forms: ['velocity * length^2 / diffusion coefficient / length', 'volume flow rate / diffusion coefficient / length'], standing: 3, source: iso },
     { names: ['Bejan number of mass transfer'], symbol: 'Be_m', expression: 'Δp l²/(μ D)', forms: ['pressure drop * length^2 / dynamic viscosity / diffusion coefficient'], standing: 3, source: iso },
     { names: ['Bodenstein number'], symbol: 'Bd', expression: 'v l/D_ax', forms: ['velocity * length / axial dispersion coefficient'], standing: 2, source: 'ISO 80000-11:2019, momentum transfer' },
@@ -30,6 +30,6 @@ export const mass: NumberFamily = {
     { names: ['Damköhler number, third'], symbol: 'Da_III', expression: 'H r l/(ρ c_p v T)', forms: ['molar energy * reaction rate * length / density / specific heat capacity / velocity / temperature'], standing: 3, source: reactors },
     { names: ['Damköhler number, fourth'], symbol: 'Da_IV', expression: 'H r l²/(k T)', forms: ['molar energy * reaction rate * length^2 / thermal conductivity / temperature'], standing: 3, source: reactors },
     { names: ['compressibility factor'], symbol: 'Z', expression: 'p V/(n R T)', forms: ['pressure * volume / amount of substance / molar gas constant / temperature', 'pressure * molar mass / density / molar gas constant / temperature', 'pressure / density / specific gas constant / temperature'], standing: 1, source: 'ISO 80000-5, compressibility factor' },
-    { names: ['molar Sherwood number'], symbol: 'Sh', expression: 'N l/(D c)', forms: ['molar flux * length / diffusion coefficient / amount concentration'], finds: 'molar flux', standing: 2, source: 'common practice, mass transfer' },
+    { names: ['molar Sherwood number'], symbol: 'Sh', expression: 'N l/(D c)', forms: ['molar flux * length / diffusion coefficient / amount concentration'], finds: ['molar flux'], standing: 2, source: 'common practice, mass transfer' },
   ],
 };
