@@ -54,7 +54,7 @@ function leadingCounts(words: string, behind: string, beyondDoubt: boolean): boo
   const described = /^\s*[,;(]\s*\(?[\p{L}]{3,}/u.test(behind) || /^\s+[-–—(]+\s*[\p{L}]{3,}/u.test(behind);
   if (described) return beyondDoubt || plain.has(words) || (/^[A-Za-z]{1,2}$/.test(words) && behind.startsWith(','));
   if (/^\s*:/.test(behind)) return beyondDoubt && structured.test(words);
-  if (!beyondDoubt || /^\s*(?:is|are|was|of|for|[=+*/<>])\b?/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;
+  if (!beyondDoubt || /^\s*(?:(?:is|are|was|of|for)\b|[=+*/<>])/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;
   return structured.test(words) || scaled.test(words);
 }
 

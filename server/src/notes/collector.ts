@@ -1,31 +1,54 @@
-import type { ChunkNotes, Directive, Note, NoteProblem, NoteSettings } from './types.ts';
+import type { LanguageId } from '../program/nodes.ts';
+import type { ReadOptions, Vocabulary } from '../quantities/unit-result.ts';
+import { besideUnit } from './describe.ts';
+import { type Found, type Looked, lookForUnits } from './find-unit.ts';
+import type { Surroundings } from './not-units.ts';
+import { type Piece, spanIn } from './piece.ts';
+import type { ChunkNotes, Directive, Note, NoteForm, NoteProblem, NoteSettings, NoteTarget } from './types.ts';
 
-/** Gathers what the readers find in one chunk. */
+/** Gathers what the readers find in one chunk, and holds what they all need. */
 export class Collector {
   private readonly notes: Note[] = [];
   private readonly problems: NoteProblem[] = [];
   private readonly directives: Directive[] = [];
-  private readonly left: { readonly text: string; readonly span: { readonly start: number; readonly end: number } }[] = [];
+  private readonly left: ChunkNotes['unread'][number][] = [];
+  private readonly places = new Set<number>();
 
-  constructor(readonly settings: NoteSettings) {}
+  constructor(readonly settings: NoteSettings, readonly vocabulary: Vocabulary, readonly language: LanguageId) {}
 
-  note(note: Note): void {
-    this.notes.push(note);
+  /** Options for units that stand beside a symbol and these words. */
+  options(symbol: string, words: string): ReadOptions {
+    return { vocabulary: this.vocabulary, describes: `${symbol} ${words}` };
   }
 
-  problem(problem: NoteProblem): void {
-    this.problems.push(problem);
+  /** Looks for brackets in a piece; failed units count as problems where a note would count. */
+  look(piece: Piece, place: Surroundings['place'], options: ReadOptions, counts: boolean, citations = false): Looked {
+    const looked = lookForUnits(piece, { place, language: this.language, citations }, this.settings.parentheses, options);
+    for (const each of looked.unread) this.unread(piece, each.span, each.text);
+    if (counts) for (const each of looked.problems) this.problems.push({ span: spanIn(piece, each.span.start, each.span.end), text: each.text, fault: each.fault });
+    return looked;
   }
 
-  directive(directive: Directive | undefined): void {
-    if (directive) this.directives.push(directive);
+  /** A note on a target by a unit found in a piece. */
+  note(target: NoteTarget, piece: Piece, found: Found, form: NoteForm): void {
+    this.places.add(piece.start + found.span.start);
+    this.notes.push({ target, unit: found.unit, span: spanIn(piece, found.span.start, found.span.end), form, hints: found.hints, ...besideUnit(piece.text, found.outer) });
   }
 
-  unread(brackets: ChunkNotes['unread']): void {
-    this.left.push(...brackets);
+  /** Units found in a piece that nothing could be done with. */
+  leave(piece: Piece, found: readonly Found[]): void {
+    for (const each of found) this.unread(piece, each.span, piece.text.slice(each.span.start, each.span.end));
+  }
+
+  directive(directive: Directive): void {
+    this.directives.push(directive);
   }
 
   get result(): ChunkNotes {
-    return { notes: this.notes, problems: this.problems, directives: this.directives, read: this.notes.length, unread: this.left };
+    return { notes: this.notes, problems: this.problems, directives: this.directives, read: this.places.size, unread: this.left };
+  }
+
+  private unread(piece: Piece, span: { start: number; end: number }, text: string): void {
+    this.left.push({ text, span: spanIn(piece, span.start, span.end) });
   }
 }

@@ -1,119 +1,136 @@
-/** Notes in comments: behind a statement, a parameter or an entry, and above. */
+/** Notes in the comment behind a statement, a parameter or an entry. */
 import { pathOf } from '../program/path.ts';
-import type { AssignStmt, Comment, DeclareStmt, Expr, FunctionStmt, LoopStmt, Param, RecordEntry, Stmt } from '../program/nodes.ts';
-import type { ReadOptions, Vocabulary } from '../quantities/unit-result.ts';
-import { bareUnit, lookForUnits, type UnitFound, unitInWords } from './candidates.ts';
+import type { AssignStmt, Chunk, Comment, DeclareStmt, Expr, FunctionStmt, LoopStmt, Param, RecordEntry, ReturnStmt, ScopeStmt } from '../program/nodes.ts';
+import type { ReadOptions } from '../quantities/unit-result.ts';
+import { bareUnit } from './bare-unit.ts';
 import type { Collector } from './collector.ts';
-import { rangeIn } from './ranges.ts';
-import type { Note, NoteTarget } from './types.ts';
+import { choose, type Found, type Looked } from './find-unit.ts';
+import { isCode } from './not-units.ts';
+import { partOf, type Piece } from './piece.ts';
+import { unitInWords } from './unit-words.ts';
 
-/** The note behind an assignment or declaration; one per target where there are as many. */
-export function trailingNotes(out: Collector, statement: AssignStmt | DeclareStmt | LoopStmt, vocabulary: Vocabulary): void {
+/** The note behind an assignment, a declaration, a loop's or a `with` statement's head; one per target where there are as many. */
+export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): void {
   const comment = statement.trailing;
-  if (!comment || isCode(comment.text)) return;
-  const paths = pathsOf(statement);
-  if (paths.length === 0) return;
-  const units = unitsInComment(out, comment, { vocabulary, describes: `${paths[0]} ${comment.text}` });
-  if (paths.length === 1) {
-    const unit = units[0];
-    if (unit) out.note(noteOf({ kind: 'statement', statement, path: paths[0] as string }, comment, unit, 'trailing'));
-  } else if (units.length === paths.length) {
-    units.forEach((unit, at) => out.note(noteOf({ kind: 'statement', statement, path: paths[at] as string }, comment, unit, 'trailing')));
+  if (!comment || (statement.kind !== 'loop' && statement.kind !== 'scope' && !belongs(chunk, statement, comment))) return;
+  const groups = targetsOf(statement);
+  const positions = Math.max(...groups.map((group) => group.length), 0);
+  const piece = noteText(comment);
+  const named = groups[0]?.find((path) => path !== undefined);
+  if (positions === 0 || named === undefined || piece.text === '' || isCode(piece.text)) return;
+  const options = out.options(named, piece.text);
+  const looked = out.look(piece, 'comment', options, true);
+  if (positions === 1) {
+    const found = unitOf(out, piece, looked, valueOf(statement), options);
+    if (found) for (const [path] of groups) if (path !== undefined) out.note({ kind: 'statement', statement, path }, piece, found, 'trailing');
+    return;
+  }
+  const each = looked.brackets.length > 0 ? looked.brackets : looked.parentheses;
+  if (each.length !== positions) return out.leave(piece, each);
+  for (const group of groups) group.forEach((path, at) => path !== undefined && group.length === positions && out.note({ kind: 'statement', statement, path }, piece, each[at] as Found, 'trailing'));
+}
+
+export function paramNote(out: Collector, chunk: Chunk, owner: FunctionStmt, param: Param): void {
+  const { comment } = param;
+  if (!comment || owner.params.some((each) => each !== param && each.comment?.start === comment.start) || !standsBehind(chunk, owner.start, param.end, comment)) return;
+  const piece = noteText(comment);
+  if (isCode(piece.text)) return;
+  const options = out.options(param.name, piece.text);
+  const found = unitOf(out, piece, out.look(piece, 'comment', options, true), param.default, options);
+  if (found) out.note({ kind: 'parameter', owner, param }, piece, found, 'trailing');
+}
+
+/** The notes behind the entries of a record, one entry to a line. */
+export function entryNotes(out: Collector, chunk: Chunk, record: { readonly start: number; readonly entries: readonly RecordEntry[] }): void {
+  for (const entry of record.entries) {
+    const { comment } = entry;
+    if (!comment || record.entries.some((each) => each !== entry && each.comment?.start === comment.start) || !standsBehind(chunk, record.start, entry.end, comment)) continue;
+    const piece = noteText(comment);
+    if (isCode(piece.text)) continue;
+    const options = out.options(entry.key, piece.text);
+    const found = unitOf(out, piece, out.look(piece, 'comment', options, true), entry.value, options);
+    if (found) out.note({ kind: 'entry', entry }, piece, found, 'trailing');
   }
 }
 
-export function paramNote(out: Collector, owner: FunctionStmt, param: Param, vocabulary: Vocabulary): void {
-  if (!param.comment || isCode(param.comment.text)) return;
-  const shared = owner.params.filter((each) => each.comment?.start === param.comment?.start).length > 1;
-  const unit = shared ? undefined : unitsInComment(out, param.comment, { vocabulary, describes: `${param.name} ${param.comment.text}` })[0];
-  if (unit) out.note(noteOf({ kind: 'parameter', owner, param }, param.comment, unit, 'trailing'));
+/** `return rho * V  # [kg/(m^2 s)]`: brackets behind a returned value. */
+export function returnNotes(out: Collector, owner: FunctionStmt, statement: ReturnStmt): void {
+  const { trailing: comment, value } = statement;
+  if (!comment || !value) return;
+  const piece = noteText(comment);
+  if (!piece.text.includes('[') || isCode(piece.text)) return;
+  const { brackets } = out.look(piece, 'comment', out.options(owner.name, piece.text), true);
+  const positions = value.kind === 'sequence' && value.form === 'tuple' ? value.items.length : 1;
+  if (positions === 1) {
+    const found = choose(piece.text, brackets);
+    if (found) out.note({ kind: 'result', owner }, piece, found, 'trailing');
+  } else if (brackets.length === positions) brackets.forEach((found, position) => out.note({ kind: 'result', owner, position }, piece, found, 'trailing'));
+  else out.leave(piece, brackets);
 }
 
-export function entryNote(out: Collector, entry: RecordEntry, vocabulary: Vocabulary): void {
-  if (!entry.comment) return;
-  const unit = unitsInComment(out, entry.comment, { vocabulary, describes: `${entry.key} ${entry.comment.text}` })[0];
-  if (unit) out.note(noteOf({ kind: 'entry', entry }, entry.comment, unit, 'trailing'));
+/** The text of a comment without a directive at its end. */
+export function noteText(comment: Comment): Piece {
+  const at = comment.text.search(/\btermwise:|\bempirical:/i);
+  return at < 0 ? comment : partOf({ text: comment.text, start: comment.start }, 0, at);
 }
 
-const listed = /(?:^|[,;]\s*|\band\s+)([A-Za-z_][\w.]*)\s*(?:\[([^\][]*)\])/g;
-const described = /^([A-Za-z_][\w.]*)\s*(?:[:=–]|\s-)\s*(?:[^[\]]*)\[([^\][]*)\]\s*[\w\s,.]*$/;
-
-/** `V [m/s], D [m]` in a comment: notes on the symbols it names, for the function or the file around it. */
-export function symbolNotes(out: Collector, comment: Comment, owner: FunctionStmt | undefined, vocabulary: Vocabulary): void {
-  const { text } = comment;
-  if (!text.includes('[') || isCode(text)) return;
-  const items = [...text.matchAll(listed)];
-  const single = items.length === 0 ? described.exec(text) : null;
-  if (!startsWithItem(text) && !single) return;
-  for (const item of single ? [single] : items) {
-    const name = item[1] as string;
-    const inside = item[2] as string;
-    const found = lookForUnits(` [${inside}]`, out.settings, { vocabulary, describes: `${name} ${text}` }).found[0];
-    if (!found || (inside.trim() === '' && items.length < 2)) continue;
-    const start = comment.start + (item.index ?? 0) + item[0].lastIndexOf('[') + 1;
-    const span = { start, end: start + inside.length };
-    out.note({ target: { kind: 'symbol', owner, name }, unit: found.result.unit, span, form: 'above', hints: found.result.hints, ...descriptionOf(text, items.length) });
+/** The one unit of a comment: brackets, then the whole text or its head, then parentheses, then words. */
+function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | undefined, options: ReadOptions): Found | undefined {
+  if (looked.brackets.length > 0) {
+    const chosen = choose(piece.text, looked.brackets);
+    if (!chosen) out.leave(piece, looked.brackets);
+    return chosen;
   }
+  if (looked.problems.length > 0 || (value && holdsNoNumber(value))) return undefined;
+  const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && isNumber(value), options) : undefined;
+  return bare ?? looked.parentheses[0] ?? unitInWords(piece, out.settings.bare, options);
 }
 
-function startsWithItem(text: string): boolean {
-  return /^[A-Za-z_][\w.]*\s+\[[^\][]*\]/.test(text);
+function valueOf(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): Expr | undefined {
+  return statement.kind === 'assign' ? statement.value : undefined;
 }
 
-function descriptionOf(text: string, items: number): { description?: string } {
-  const rest = text.replace(/^[A-Za-z_][\w.]*\s+\[[^\][]*\]\s*/, '').trim();
-  return items === 1 && rest !== '' ? { description: rest } : {};
+function holdsNoNumber(value: Expr): boolean {
+  return value.kind === 'text' || value.kind === 'truth' || value.kind === 'lambda' || value.kind === 'compare' || value.kind === 'logic';
 }
 
-/** A comment above a field of a class that carries one bracket and names no other symbol. */
-export function fieldAboveNote(out: Collector, statement: Stmt, vocabulary: Vocabulary): void {
-  if ((statement.kind !== 'declare' && statement.kind !== 'assign') || statement.trailing) return;
-  const comment = statement.above?.at(-1);
-  const path = pathsOf(statement)[0];
-  if (!comment || path === undefined || isCode(comment.text) || startsWithItem(comment.text)) return;
-  const found = lookForUnits(comment.text, out.settings, { vocabulary, describes: `${path} ${comment.text}` }).found;
-  const unit = found[0];
-  if (unit && found.length === 1) out.note(noteOf({ kind: 'statement', statement, path }, comment, unit, 'above'));
+/** A literal, its negative, or a product or list of literals. */
+function isNumber(value: Expr): boolean {
+  if (value.kind === 'number') return true;
+  if (value.kind === 'unary') return isNumber(value.operand);
+  if (value.kind === 'binary') return isNumber(value.left) && isNumber(value.right);
+  return value.kind === 'sequence' && value.items.length > 0 && value.items.every(isNumber);
 }
 
-function unitsInComment(out: Collector, comment: Comment, options: ReadOptions): readonly UnitFound[] {
-  const looked = lookForUnits(comment.text, out.settings, options);
-  out.unread(looked.unread.map((each) => ({ text: each.text, span: moved(each.span, comment.start) })));
-  for (const problem of looked.problems) out.problem({ text: problem.text, fault: problem.fault, span: moved(problem.span, comment.start) });
-  const brackets = looked.found.filter((each) => each.by === 'bracket');
-  if (brackets.length > 0) return brackets;
-  if (looked.problems.length > 0) return [];
-  const bare = out.settings.bare ? bareUnit(comment.text, options) : undefined;
-  if (bare) return [bare];
-  const round = looked.found.filter((each) => each.by === 'parenthesis');
-  if (round.length > 0) return round.slice(0, 1);
-  const words = unitInWords(comment.text, options);
-  return words ? [words] : [];
+/** Paths by target and position: `a = b = …` has two targets of one position, `a, b = …` one of two. */
+function targetsOf(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): readonly (readonly (string | undefined)[])[] {
+  const targets = statement.kind === 'assign' ? statement.targets : statement.kind === 'scope' ? statement.items.flatMap((item) => item.target ?? []) : statement.target ? [statement.target] : [];
+  if (statement.kind === 'scope' && targets.length > 1) return [];
+  return targets.map((target) => (target.kind === 'sequence' ? target.items.map(pathOf) : [pathOf(target)]));
 }
 
-function noteOf(target: NoteTarget, comment: Comment, found: UnitFound, form: Note['form']): Note {
-  const behind = comment.text.slice(found.outer.end);
-  const range = rangeIn(behind);
-  const rest = `${comment.text.slice(0, found.outer.start)} ${range ? behind.slice(range.length) : behind}`.replace(/\s+/g, ' ').replace(/^[\s,;:-]+|[\s,;:-]+$/g, '');
-  return {
-    target, unit: found.result.unit, span: moved(found.span, comment.start), form, hints: found.result.hints,
-    ...(rest === '' ? {} : { description: rest }), ...(range ? { range: { low: range.low, high: range.high } } : {}),
-  };
+/** Whether the comment is about the whole statement, and not about one of the parts that its lines hold. */
+function belongs(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Comment): boolean {
+  const inside = chunk.text.slice(statement.start, statement.end);
+  if (!inside.includes('\n')) return true;
+  if (comment.start < statement.end) return /[([{\\=+*/,-]\s*#*\s*$/.test(lineBefore(chunk, comment)) && opensOnly(chunk, statement, comment);
+  const value = statement.kind === 'assign' ? statement.value : undefined;
+  const several = value?.kind === 'record' || value?.kind === 'sequence';
+  return !several || /^\s*[)\]}]+/.test(lineBefore(chunk, comment));
 }
 
-function moved(span: { start: number; end: number }, by: number): { start: number; end: number } {
-  return { start: span.start + by, end: span.end + by };
+/** `x = (  # [m]`: the first line ends with the bracket that opens the value. */
+function opensOnly(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Comment): boolean {
+  return /=\s*[\w.]*[([{]?\s*\\?\s*#*\s*$/.test(chunk.text.slice(statement.start, comment.start));
 }
 
-/** Commented-out code is no note: an assignment, a call statement, a subscript that is assigned. */
-export function isCode(text: string): boolean {
-  return /^\s*[\w.[\]"']+\s*(?:[-+*/]?=)(?!=)\s*\S/.test(text) || /^\s*(?:return|if|for|while|print|import|from|def|elif|else|plt|assert)\b.*[(:=[]/.test(text);
+function lineBefore(chunk: Chunk, comment: Comment): string {
+  return chunk.text.slice(chunk.text.lastIndexOf('\n', comment.start) + 1, comment.start);
 }
 
-function pathsOf(statement: AssignStmt | DeclareStmt | LoopStmt): readonly string[] {
-  const targets: readonly (Expr | undefined)[] = statement.kind === 'assign' ? statement.targets : [statement.target];
-  const first = targets[0];
-  if (!first) return [];
-  const flat = first.kind === 'sequence' ? first.items.map(pathOf) : [pathOf(first)];
-  return flat.every((path) => path !== undefined) ? (flat as string[]) : [];
+/** Only punctuation stands between a part and its comment, and the part has a line of its own if anything closes there. */
+function standsBehind(chunk: Chunk, ownerStart: number, end: number, comment: Comment): boolean {
+  const between = chunk.text.slice(end, comment.start);
+  if (/^\s*,?\s*(?:#+:?|%+|!+<?|\/\/+[!<]*|\/\*+[!<]*)\s*$/.test(between)) return true;
+  return /^[\s,)\]}:]*(?:->[^#]*:)?\s*#+:?\s*$/.test(between) && chunk.text.slice(ownerStart, end).includes('\n');
 }

@@ -95,7 +95,7 @@ export function choose(text: string, found: readonly Found[]): Found | undefined
     if (/^\s*(?:to|into|-+>|→|=>)\s*$/.test(between)) return undefined;
     if (between.trim() === '') chosen = next;
     else if (/^\s*(?:or|\/|,?\s*or|,)\s+(?:in\s+)?$/i.test(between) || /^[^.]*\bor\b[^.]*$/.test(between)) {
-      const joined = alternatives(text, chosen, next);
+      const joined = alternatives(chosen, next);
       if (!joined) return undefined;
       chosen = joined;
     } else return chosen;
@@ -104,7 +104,7 @@ export function choose(text: string, found: readonly Found[]): Found | undefined
 }
 
 /** Two units of one quantity: the same unit, or the dimension that both have. */
-export function alternatives(text: string, first: Found, second: Found): Found | undefined {
+export function alternatives(first: Found, second: Found): Found | undefined {
   if (first.unit.dimension !== second.unit.dimension) return undefined;
   const same = first.unit.scale !== undefined && second.unit.scale !== undefined && first.unit.scale.equals(second.unit.scale) && first.unit.offset?.kind === second.unit.offset?.kind;
   if (same) return first;

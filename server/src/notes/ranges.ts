@@ -1,6 +1,7 @@
-const pattern = /^\s*(-?\d+(?:\.\d+)?(?:e[+-]?\d+)?)\s*(?:\.\.|to|…)\s*(-?\d+(?:\.\d+)?(?:e[+-]?\d+)?)/i;
+const number = '[-+]?\\d+(?:\\.\\d*)?(?:[eE][-+]?\\d+)?';
+const pattern = new RegExp(`^\\s*,?\\s*(${number})\\s*(?:\\.{2,3}|…|–|to\\b)\\s*(${number})(?![\\w.])`);
 
-/** A range behind a unit: `0.5 .. 3`, `0.5 to 3`. */
+/** A range at the head of a text: `0.5 .. 3`, `0.5 to 3`; `length` counts its characters. */
 export function rangeIn(text: string): { readonly low: number; readonly high: number; readonly length: number } | undefined {
   const match = pattern.exec(text);
   if (!match) return undefined;

@@ -1,109 +1,63 @@
-/** All unit notes and directives of one chunk, in one walk over its statements and one over its comments. */
-import type { Chunk, ClassStmt, Expr, FunctionStmt, LanguageId, Stmt } from '../program/nodes.ts';
+/** All unit notes and directives of one chunk: one walk over its statements, one over its comments. */
+import type { Chunk, Comment, DocText, FunctionStmt, LanguageId } from '../program/nodes.ts';
 import type { Vocabulary } from '../quantities/unit-result.ts';
+import { symbolNotes } from './above-notes.ts';
 import { Collector } from './collector.ts';
-import { entryNote, fieldAboveNote, paramNote, symbolNotes, trailingNotes } from './comment-notes.ts';
-import { directiveIn } from './directives.ts';
-import { classDocs, functionDocs } from './doc-notes.ts';
+import { directivesIn } from './directives.ts';
+import { linesOf } from './doc-lines.ts';
+import { Names } from './names.ts';
+import { partOf } from './piece.ts';
 import type { ChunkNotes, NoteSettings } from './types.ts';
+import { NoteWalk } from './walk.ts';
 
 /** Reads the notes of a chunk; spans are relative to it. Never throws. */
-export function readChunkNotes(chunk: Chunk, settings: NoteSettings, vocabulary: Vocabulary, _language: LanguageId): ChunkNotes {
-  const out = new Collector(settings);
-  const walk = new Walk(out, vocabulary);
+export function readChunkNotes(chunk: Chunk, settings: NoteSettings, vocabulary: Vocabulary, language: LanguageId): ChunkNotes {
+  const out = new Collector(settings, vocabulary, language);
+  const walk = new NoteWalk(out, chunk);
   walk.block(chunk.statements, undefined, undefined);
-  const firstCode = chunk.statements[0]?.start ?? Number.POSITIVE_INFINITY;
-  for (const comment of chunk.comments) {
-    out.directive(directiveIn(comment.text, comment.start, chunk.anchor.start === 0 && comment.end < firstCode, vocabulary));
-    if (!walk.used.has(comment.start)) symbolNotes(out, comment, walk.ownerAt(comment.start), vocabulary);
-  }
-  if (chunk.doc) docDirectives(out, chunk.doc.text, chunk.doc.start, true, vocabulary);
+  const names = new Names(chunk);
+  readComments(out, chunk, walk, names);
+  if (chunk.doc) docLines(out, chunk, chunk.doc, () => true, names);
+  for (const fn of walk.functions) if (fn.doc) docLines(out, chunk, fn.doc, () => false, names);
+  for (const cls of walk.classes) if (cls.doc) docLines(out, chunk, cls.doc, () => false, names);
   return out.result;
 }
 
-function docDirectives(out: Collector, text: string, start: number, wholeFile: boolean, vocabulary: Vocabulary): void {
-  if (!/termwise|empirical|depends on/.test(text)) return;
-  let offset = start;
-  for (const line of text.split('\n')) {
-    out.directive(directiveIn(line, offset, wholeFile, vocabulary));
-    offset += line.length + 1;
+function readComments(out: Collector, chunk: Chunk, walk: NoteWalk, names: Names): void {
+  const opening = chunk.statements[0]?.start ?? Number.POSITIVE_INFINITY;
+  for (let at = 0; at < chunk.comments.length; at++) {
+    const comment = chunk.comments[at] as Comment;
+    const heads = comment.end <= opening;
+    for (const directive of directivesIn(comment, () => heads && isFirst(chunk), out.vocabulary, names.occurs)) out.directive(directive);
+    if (!comment.text.includes('[') || walk.used.has(comment.start) || !names.standsAlone(comment)) continue;
+    symbolNotes(out, comment, walk.ownerAt(comment), hasCompany(chunk, at), names.occurs);
   }
 }
 
-class Walk {
-  /** Starts of comments that belong to a statement as its trailing note. */
-  readonly used = new Set<number>();
-  private readonly functions: FunctionStmt[] = [];
-
-  constructor(private readonly out: Collector, private readonly vocabulary: Vocabulary) {}
-
-  /** The innermost function around an offset. */
-  ownerAt(offset: number): FunctionStmt | undefined {
-    return this.functions.findLast((fn) => (fn.above?.[0]?.start ?? fn.start) <= offset && offset < fn.end);
-  }
-
-  block(statements: readonly Stmt[], owner: FunctionStmt | undefined, cls: ClassStmt | undefined): void {
-    for (const statement of statements) this.statement(statement, owner, cls);
-  }
-
-  private statement(statement: Stmt, owner: FunctionStmt | undefined, cls: ClassStmt | undefined): void {
-    if (statement.trailing) this.used.add(statement.trailing.start);
-    switch (statement.kind) {
-      case 'assign':
-      case 'declare':
-        trailingNotes(this.out, statement, this.vocabulary);
-        if (cls) fieldAboveNote(this.out, statement, this.vocabulary);
-        if (statement.kind === 'assign') this.entries(statement.value);
-        return;
-      case 'evaluate':
-        return this.entries(statement.value);
-      case 'return':
-        if (statement.value) this.entries(statement.value);
-        return;
-      case 'function':
-        return this.function(statement);
-      case 'class':
-        classDocs(this.out, statement, this.vocabulary);
-        return this.block(statement.body, undefined, statement);
-      case 'loop':
-        trailingNotes(this.out, statement, this.vocabulary);
-        this.block(statement.body, owner, undefined);
-        return this.block(statement.otherwise, owner, undefined);
-      case 'if':
-        for (const arm of statement.arms) this.block(arm.body, owner, cls);
-        return this.block(statement.otherwise, owner, cls);
-      case 'attempt':
-        for (const block of [statement.body, ...statement.handlers, statement.otherwise, statement.finally]) this.block(block, owner, undefined);
-        return;
-      case 'scope':
-        return this.block(statement.body, owner, undefined);
-      case 'match':
-        for (const each of statement.cases) this.block(each.body, owner, undefined);
-        return;
-      default:
-    }
-  }
-
-  private function(fn: FunctionStmt): void {
-    this.functions.push(fn);
-    for (const param of fn.params) {
-      if (param.comment) this.used.add(param.comment.start);
-      paramNote(this.out, fn, param, this.vocabulary);
-    }
-    functionDocs(this.out, fn, this.vocabulary);
-    if (fn.doc) docDirectives(this.out, fn.doc.text, fn.doc.start, false, this.vocabulary);
-    this.block(fn.body, fn, undefined);
-  }
-
-  /** Records anywhere in an expression may carry notes on their entries. */
-  private entries(expr: Expr): void {
-    if (expr.kind === 'record') {
-      for (const entry of expr.entries) {
-        if (entry.comment) this.used.add(entry.comment.start);
-        entryNote(this.out, entry, this.vocabulary);
-        this.entries(entry.value);
-      }
-    } else if (expr.kind === 'call') for (const argument of expr.args) this.entries(argument.value);
-    else if (expr.kind === 'sequence') for (const item of expr.items) this.entries(item);
-  }
+/** The chunk that opens the file; asked when a directive is applied, since chunks move. */
+function isFirst(chunk: Chunk): boolean {
+  return chunk.anchor.start < 3 || chunk.doc !== undefined;
 }
+
+/** A comment line beside another that names a symbol with its unit in the same way is one of a list. */
+function hasCompany(chunk: Chunk, at: number): boolean {
+  const item = /^\s*(?:[-*•]\s+)?[\p{L}_][\p{L}\p{N}_.]*\s*(?::.*|=.*|[-–—]\s.*)?\s\[[^\]]*\]/u;
+  return [chunk.comments[at - 1], chunk.comments[at + 1]].some((each) => each !== undefined && item.test(each.text) && adjacent(chunk, each, chunk.comments[at] as Comment));
+}
+
+function adjacent(chunk: Chunk, a: Comment, b: Comment): boolean {
+  const [first, second] = a.start < b.start ? [a, b] : [b, a];
+  return /^[ \t]*\r?\n[ \t]*\S{1,3}[ \t]*$/.test(chunk.text.slice(first.end, second.start));
+}
+
+/** Directives in documentation stand on lines of their own. */
+function docLines(out: Collector, chunk: Chunk, doc: DocText, wholeFile: () => boolean, names: Names): void {
+  if (!/termwise|empirical|depends on/i.test(doc.text)) return;
+  for (const line of linesOf(doc.text)) {
+    if (line.text === '') continue;
+    for (const directive of directivesIn(partOf(doc, line.start, line.end), wholeFile, out.vocabulary, names.occurs)) out.directive(directive);
+  }
+  void chunk;
+}
+
+export type { FunctionStmt };

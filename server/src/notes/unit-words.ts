@@ -124,7 +124,7 @@ function dualUnit(piece: Piece, options: ReadOptions): Found | undefined {
     if (!left.ok || left.unit.dimension !== right.unit.dimension) continue;
     const first = { start: match.index + word.index, end: match.index + before.length };
     const other = { start, end: start + second.length };
-    return alternatives(piece.text, { unit: left.unit, hints: [], span: first, outer: first, by: 'words' }, { unit: right.unit, hints: [], span: other, outer: { start: other.start, end: match.index + whole.length }, by: 'words' });
+    return alternatives({ unit: left.unit, hints: [], span: first, outer: first, by: 'words' }, { unit: right.unit, hints: [], span: other, outer: { start: other.start, end: match.index + whole.length }, by: 'words' });
   }
   return undefined;
 }

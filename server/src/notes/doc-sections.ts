@@ -1,0 +1,51 @@
+/** Sections of a documentation text: numpydoc's underlined headings and Google's headings with a colon. */
+import { isBlank, type Line } from './doc-lines.ts';
+
+export type Role = 'parameter' | 'result' | 'field';
+
+export interface Section {
+  readonly role: Role | 'skip';
+  readonly style: 'underlined' | 'colon';
+  /** Lines of the body, from and to (excluded). */
+  readonly from: number;
+  readonly to: number;
+}
+
+const roles: ReadonlyMap<string, Role | 'skip'> = new Map([
+  ...['parameters', 'other parameters', 'args', 'arguments', 'params', 'inputs', 'input', 'keyword arguments', 'keyword args', 'keyword parameters', 'kwargs', 'parameter', 'required parameters', 'optional parameters'].map((name) => [name, 'parameter'] as const),
+  ...['returns', 'return', 'yields', 'yield', 'outputs', 'output', 'receives'].map((name) => [name, 'result'] as const),
+  ...['attributes', 'fields', 'attribute', 'properties'].map((name) => [name, 'field'] as const),
+  ...['notes', 'note', 'examples', 'example', 'references', 'reference', 'raises', 'raise', 'warnings', 'warning', 'warns', 'see also', 'methods', 'todo', 'usage', 'description', 'summary', 'remarks', 'source', 'sources'].map((name) => [name, 'skip'] as const),
+]);
+
+/** All sections in order; what stands before the first belongs to none. */
+export function sectionsOf(lines: readonly Line[]): readonly Section[] {
+  const heads: { readonly at: number; readonly role: Role | 'skip'; readonly style: Section['style']; readonly indent: number }[] = [];
+  lines.forEach((line, at) => {
+    const head = headAt(lines, at);
+    if (head) heads.push({ at, ...head, indent: line.indent });
+  });
+  return heads.map((head, index) => {
+    const from = head.at + (head.style === 'underlined' ? 2 : 1);
+    const limit = heads[index + 1]?.at ?? lines.length;
+    const to = head.style === 'underlined' ? limit : dedent(lines, from, limit, head.indent);
+    return { role: head.role, style: head.style, from, to };
+  });
+}
+
+function headAt(lines: readonly Line[], at: number): { readonly role: Role | 'skip'; readonly style: Section['style'] } | undefined {
+  const line = lines[at] as Line;
+  if (isBlank(line) || line.text.length > 24) return undefined;
+  const below = lines[at + 1];
+  const plain = line.text.replace(/\s*:$/, '');
+  if (below && /^(?:-{3,}|={3,}|~{3,})$/.test(below.text)) return { role: roles.get(plain.toLowerCase()) ?? 'skip', style: 'underlined' };
+  if (!line.text.endsWith(':')) return undefined;
+  const role = roles.get(plain.trim().toLowerCase());
+  return role ? { role, style: 'colon' } : undefined;
+}
+
+/** The first line that stands no deeper than the heading. */
+function dedent(lines: readonly Line[], from: number, limit: number, indent: number): number {
+  for (let at = from; at < limit; at++) if ((lines[at] as Line).indent <= indent) return at;
+  return limit;
+}

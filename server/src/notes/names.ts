@@ -1,0 +1,33 @@
+import type { Chunk, Comment } from '../program/nodes.ts';
+
+/** The identifiers that a chunk's code uses, outside of comments and documentation; gathered at the first question. */
+export class Names {
+  private found: ReadonlySet<string> | undefined;
+
+  constructor(private readonly chunk: Chunk) {}
+
+  /** Whether the code of the chunk uses a name; of a dotted name, its last part. */
+  readonly occurs = (name: string): boolean => {
+    this.found ??= gather(this.chunk);
+    return this.found.has(name.slice(name.lastIndexOf('.') + 1).replace(/\[.*$/, ''));
+  };
+
+  /** Nothing but the comment's marker stands before it on its line. */
+  standsAlone(comment: Comment): boolean {
+    const { text } = this.chunk;
+    const line = text.lastIndexOf('\n', comment.start - 1) + 1;
+    return /^[\s#%!/*:;<]*$/.test(text.slice(line, comment.start));
+  }
+}
+
+function gather(chunk: Chunk): ReadonlySet<string> {
+  let code = '';
+  let from = 0;
+  for (const comment of chunk.comments) {
+    code += `${chunk.text.slice(from, comment.start)} `;
+    from = comment.end;
+  }
+  code += chunk.text.slice(from);
+  const plain = code.replace(/("""|''')[\s\S]*?\1/g, ' ');
+  return new Set(plain.match(/[\p{L}_][\p{L}\p{N}_]*/gu) ?? []);
+}
