@@ -51,7 +51,7 @@ export function understand(text: string, file: string, engine: Engine, previous?
   };
   const { library, nomenclature, importFile, cache } = engine;
   const solver = new FileSolver({ program: parsed.program, indexOf, library, nomenclature, importFile, cache });
-  return { parsed, lines: new LineIndex(text), notes, solver };
+  return { parsed, lines: LineIndex.of(text), notes, solver };
 }
 
 /** Solver to findings: solve every function, classify, drop what is allowed. */

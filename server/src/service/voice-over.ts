@@ -8,7 +8,7 @@ export function voiceOver(file: string, textOf: (file: string) => string): Voice
   const indexOf = (name: string): LineIndex => {
     let index = indexes.get(name);
     if (!index) {
-      index = new LineIndex(textOf(name));
+      index = LineIndex.of(textOf(name));
       indexes.set(name, index);
     }
     return index;

@@ -1,12 +1,19 @@
 /** Turns offsets into lines and columns and back; `\n`, `\r\n` and a lone `\r` end a line. */
 export class LineIndex {
-  private readonly starts: number[] = [0];
+  private readonly starts: readonly number[];
 
   constructor(readonly text: string) {
-    for (let at = 0; at < text.length; at++) {
-      const code = text.charCodeAt(at);
-      if (code === 10 || (code === 13 && text.charCodeAt(at + 1) !== 10)) this.starts.push(at + 1);
-    }
+    this.starts = text.includes('\r') ? startsWithReturns(text) : startsOf(text);
+  }
+
+  /** The index of a text, kept for the texts asked for last: every stage of a check wants the same one. */
+  static of(text: string): LineIndex {
+    const known = recent.find((each) => each.text === text);
+    if (known) return known;
+    const made = new LineIndex(text);
+    recent.unshift(made);
+    if (recent.length > 4) recent.pop();
+    return made;
   }
 
   get lineCount(): number {
@@ -52,4 +59,21 @@ export class LineIndex {
   lineText(line: number): string {
     return this.text.slice(this.lineStart(line), this.lineEnd(line));
   }
+}
+
+const recent: LineIndex[] = [];
+
+function startsOf(text: string): readonly number[] {
+  const starts = [0];
+  for (let at = text.indexOf('\n'); at >= 0; at = text.indexOf('\n', at + 1)) starts.push(at + 1);
+  return starts;
+}
+
+function startsWithReturns(text: string): readonly number[] {
+  const starts = [0];
+  for (let at = 0; at < text.length; at++) {
+    const code = text.charCodeAt(at);
+    if (code === 10 || (code === 13 && text.charCodeAt(at + 1) !== 10)) starts.push(at + 1);
+  }
+  return starts;
 }

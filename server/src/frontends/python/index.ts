@@ -8,28 +8,35 @@ import { differenceOf } from './difference.ts';
 import type { Lowering } from './lower-expression.ts';
 import { docText, lowerStatements } from './lower-statement.ts';
 import { printPython } from './print.ts';
-import { copyTree, partsOf, type Syntax } from './syntax.ts';
+import { partsOf, type Syntax, TreeCopier } from './syntax.ts';
 
 /** Loads the grammar; both arguments are WASM bytes. */
 export async function createPythonFrontEnd(runtime: Uint8Array, grammar: Uint8Array): Promise<FrontEnd> {
   await Parser.init({ wasmBinary: runtime });
   const parser = new Parser();
-  parser.setLanguage(await Language.load(grammar));
+  const language = await Language.load(grammar);
+  parser.setLanguage(language);
+  const copier = new TreeCopier(language);
   return {
     language: 'python',
     endings: ['.py', '.pyw'],
     style: { comment: '#', power: '**', pi: 'math.pi', print: printPython },
-    parse: (text, file, previous, edits) => parse(parser, text, file, previous, edits),
+    parse: (text, file, previous, edits) => parse({ parser, copier }, text, file, previous, edits),
   };
 }
 
-function parse(parser: Parser, text: string, file: string, previous: Parsed | undefined, edits: readonly TextEdit[] | undefined): Parsed {
+interface Tools {
+  readonly parser: Parser;
+  readonly copier: TreeCopier;
+}
+
+function parse({ parser, copier }: Tools, text: string, file: string, previous: Parsed | undefined, edits: readonly TextEdit[] | undefined): Parsed {
   const old = previous?.tree as Tree | undefined;
-  const lines = new LineIndex(text);
+  const lines = LineIndex.of(text);
   if (old && previous) for (const edit of edits ?? differenceOf(previous.text, text)) applyEdit(old, previous.text, edit);
   const tree = parser.parse(text, old ?? null);
   old?.delete();
-  const chunks = tree ? chunksOf(tree.rootNode, lines, file, previous) : [];
+  const chunks = tree ? chunksOf(tree.rootNode, copier, lines, file, previous) : [];
   let open = tree;
   return {
     text,
@@ -45,7 +52,7 @@ function parse(parser: Parser, text: string, file: string, previous: Parsed | un
 }
 
 function applyEdit(tree: Tree, before: string, edit: TextEdit): void {
-  const index = new LineIndex(before);
+  const index = LineIndex.of(before);
   const after = edit.start + edit.text.length;
   const start = index.position(edit.start);
   const inserted = edit.text.split('\n');
@@ -66,7 +73,7 @@ interface Group {
 }
 
 /** One group per top-level statement: with the comments directly above it and what stands on its lines. */
-function chunksOf(root: TreeNode, lines: LineIndex, file: string, previous: Parsed | undefined): readonly Chunk[] {
+function chunksOf(root: TreeNode, copier: TreeCopier, lines: LineIndex, file: string, previous: Parsed | undefined): readonly Chunk[] {
   const pool = poolOf(previous);
   const groups: Group[] = [];
   let lastLine = -1;
@@ -88,7 +95,7 @@ function chunksOf(root: TreeNode, lines: LineIndex, file: string, previous: Pars
     }
     lastLine = lines.lineAt(Math.max(node.endIndex - (lines.text[node.endIndex - 1] === '\n' ? 1 : 0), node.startIndex));
   }
-  return groups.map((group, at) => reuse(group, lines, pool) ?? lower(group, lines, file, at === 0));
+  return groups.map((group, at) => reuse(group, lines, pool) ?? lower(group, copier, lines, file, at === 0));
 }
 
 function poolOf(previous: Parsed | undefined): Map<string, Chunk[]> {
@@ -105,8 +112,8 @@ function reuse(group: Group, lines: LineIndex, pool: Map<string, Chunk[]>): Chun
   return chunk;
 }
 
-function lower(group: Group, lines: LineIndex, file: string, first: boolean): Chunk {
-  const nodes = group.nodes.map(copyTree);
+function lower(group: Group, copier: TreeCopier, lines: LineIndex, file: string, first: boolean): Chunk {
+  const nodes = group.nodes.map((node) => copier.copy(node, group.broken));
   const comments = new Comments(nodes, lines, group.start);
   const low: Lowering = { text: lines.text, base: group.start, comments, depth: 0 };
   const problems: SyntaxProblem[] = [];

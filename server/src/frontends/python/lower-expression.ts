@@ -106,8 +106,16 @@ function opaque(low: Lowering, node: Syntax, span: Span): Expr {
 
 function number(low: Lowering, node: Syntax, span: Span): Expr {
   const text = textOf(low, node);
-  return { kind: 'number', value: readNumber(text), text, ...span };
+  let value = numbers.get(text);
+  if (value === undefined && !numbers.has(text)) {
+    value = readNumber(text);
+    if (numbers.size > 5000) numbers.clear();
+    numbers.set(text, value);
+  }
+  return { kind: 'number', value, text, ...span };
 }
+
+const numbers = new Map<string, Rational | undefined>();
 
 function readNumber(text: string): Rational | undefined {
   const plain = text.replaceAll('_', '');
@@ -146,7 +154,7 @@ function comparison(low: Lowering, node: Syntax, span: Span): Expr {
 function sequence(form: 'tuple' | 'list' | 'set'): Lower {
   return (low, node, span) => {
     const parts = partsOf(node);
-    const comments = parts.map((part) => low.comments.beside(spanOf(low, part)));
+    const comments = low.text.slice(node.start, node.end).includes('\n') ? parts.map((part) => low.comments.beside(spanOf(low, part))) : [];
     const items = parts.map((part) => lowerExpression(low, part));
     return { kind: 'sequence', form, items, ...(comments.some((each) => each) ? { comments } : {}), ...span };
   };
