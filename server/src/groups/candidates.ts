@@ -45,7 +45,10 @@ function numberCandidate({ form, powers, filled, evidence: told }: Instance, dep
   const place = dependent ? filled.indexOf(dependent) : -1;
   const found = place >= 0 && form.entry.finds?.includes(form.roles[place]?.kind.name ?? '');
   const base = place < 0 ? classCost.number * form.entry.standing : found ? classCost.found + form.entry.standing : classCost.dependentNumber + 10 * form.entry.standing;
-  return { exponents, cost: base + size(exponents) / 10 + powerCost(exponents, dependent) - told / 100 };
+  // A form with a factor that the number does not usually have, or a dependent symbol below the line, reads less plainly.
+  const power = dependent && powers.get(dependent.name);
+  const awkwardness = (form.factor.isOne || power ? 0 : 5) + (power && power.sign < 0 ? 10 : 0);
+  return { exponents, cost: base + (size(exponents) + awkwardness) / 10 + powerCost(exponents, dependent) - told / 100 };
 }
 
 function productCandidate(exponents: ReadonlyMap<string, Rational>, dependent: KnownSymbol | undefined): Candidate {

@@ -33,12 +33,13 @@ export class Composer {
         const pair = this.pairWith(first, sign, target);
         if (!pair || pair.some(({ instance }) => sizeOf(instance.powers) >= limit || own.has(nameOf(instance)))) continue;
         if (nameOf(pair[0].instance) === nameOf(pair[1].instance)) continue;
-        const ordered = [...pair].sort((a, b) => b.power.compare(a.power) || (nameOf(a.instance) < nameOf(b.instance) ? -1 : 1));
+        const ordered = [...pair].sort((a, b) => b.power.compare(a.power) || sizeOf(b.instance.powers) - sizeOf(a.instance.powers));
         const parts = ordered.map((part) => ({ number: nameOf(part.instance), symbol: part.instance.form.entry.symbol, power: part.power.mul(power) }));
         found.set(parts.map((part) => `${part.number}^${part.power}`).join(' '), parts);
       }
     }
-    return [...found.values()].slice(0, 2);
+    const quotients = (parts: readonly CompositePart[]) => parts.filter((part) => part.power.sign !== power.sign).length;
+    return [...found.values()].sort((a, b) => quotients(a) - quotients(b)).slice(0, 2);
   }
 
   private pairWith(first: Instance, sign: Rational, target: Exponents): readonly [Part, Part] | undefined {

@@ -70,8 +70,9 @@ export function equation(result: GroupsResult, syntax: HostSyntax, naming: 'name
   if (!first || dependent === undefined || first.group.role !== 'dependent') return undefined;
   const scale = solvedFor(first.group.exponents, dependent);
   const args = others.map((one) => (naming === 'expressions' || one.group.role === 'ratio' ? one.expression : one.name));
-  const unknown = args.length > 0 ? `${unused('phi', new Set(result.relation.symbols.map(({ name }) => name)))}(${args.join(', ')})` : unused('C', new Set(result.columns));
-  const product = scale.size > 0 ? `${expression(scale, syntax, first.group.order)} ${syntax.times} ` : '';
+  const taken = new Set(result.relation.symbols.map(({ name }) => name));
+  const unknown = args.length > 0 ? `${firstUnused(['phi', 'psi', 'func'], taken)}(${args.join(', ')})` : firstUnused(['C', 'const'], taken);
+  const product = scale.size > 0 ? `${scaleExpression(scale, syntax, first.group.order)} ${syntax.times} ` : '';
   return `${dependent} = ${product}${unknown}`;
 }
 
@@ -79,6 +80,16 @@ export function equation(result: GroupsResult, syntax: HostSyntax, naming: 'name
 export function solvedFor(exponents: Exponents, dependent: string): Map<string, Rational> {
   const own = exponents.get(dependent) ?? Rational.one;
   return new Map([...exponents].filter(([name]) => name !== dependent).map(([name, power]) => [name, power.div(own).neg()]));
+}
+
+/** One root over the whole where every symbol is under one: `sqrt(l/g)` rather than `sqrt(l)/sqrt(g)`. */
+function scaleExpression(scale: Exponents, syntax: HostSyntax, order: readonly string[]): string {
+  const powers = [...scale.values()];
+  const den = powers[0]?.den ?? 1n;
+  if (den === 1n || scale.size < 2 || powers.some((power) => power.den !== den)) return expression(scale, syntax, order);
+  const below = Rational.of(1n, den);
+  const inside = expression(new Map([...scale].map(([name, power]) => [name, power.div(below)])), syntax, order);
+  return factor(den === 2n || syntax.power === 'pow' ? inside : `(${inside})`, below, syntax);
 }
 
 function factor(name: string, power: Rational, syntax: HostSyntax): string {
@@ -101,8 +112,16 @@ function identifierOf(group: Group, place: number): string {
   const symbol = number?.symbol.replace(/[^\p{L}\p{N}_]/gu, '') ?? '';
   const plain = number !== undefined && number.power.isOne && number.coefficient.isOne && group.recognised.length === 1;
   if (plain && /^[A-Za-z]\w*$/.test(symbol) && symbol === number?.symbol) return symbol;
-  if (group.role === 'ratio') return group.order.map((name) => name.replace(/\W+/g, '_')).join('_');
+  if (group.role === 'ratio') return [...group.order].sort((a, b) => signOf(group, b) - signOf(group, a)).map((name) => name.replace(/\W+/g, '_')).join('_');
   return `Pi_${place}`;
+}
+
+function signOf(group: Group, name: string): number {
+  return group.exponents.get(name)?.sign ?? 0;
+}
+
+function firstUnused(names: readonly string[], taken: ReadonlySet<string>): string {
+  return names.find((name) => !taken.has(name)) ?? unused(names[0] as string, taken);
 }
 
 function unused(name: string, taken: ReadonlySet<string>): string {

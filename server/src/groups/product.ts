@@ -24,7 +24,7 @@ export function recogniseProduct(exponents: Exponents, symbols: readonly Relatio
   if (parts.length < used.length || !isDimensionless(used, known)) return undefined;
   const whole = wholePowers(used);
   const recognised = recognise(new Map(used), known);
-  return { recognised, composites: new Composer(instancesOf(parts)).compose(recognised.length > 0 ? new Map(used) : whole, recognised) };
+  return { recognised, composites: new Composer(instancesOf([...known.values()])).compose(recognised.length > 0 ? new Map(used) : whole, recognised) };
 }
 
 function isDimensionless(powers: readonly (readonly [string, Rational])[], known: ReadonlyMap<string, KnownSymbol>): boolean {

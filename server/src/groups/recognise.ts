@@ -27,7 +27,7 @@ export function recognise(exponents: Exponents, symbols: ReadonlyMap<string, Kno
   return strongest(direct.length > 0 ? direct : matches(merged(factors)));
 }
 
-function matches(factors: readonly Factor[]): Recognition[] {
+function matches(factors: readonly Factor[]): Match[] {
   if (factors.length === 0) return [];
   const parts = factors.map(({ symbols, exponent }) => ({ dimensionKey: (symbols[0] as KnownSymbol).dimension.key, exponent }));
   return formsLike(parts).flatMap((form) => {
@@ -36,15 +36,29 @@ function matches(factors: readonly Factor[]): Recognition[] {
   });
 }
 
-/** One recognition per number, those with the most evidence only, the best known first. */
-function strongest(found: readonly Recognition[]): Recognition[] {
+/**
+ * One recognition per number, those with the most evidence only: plain ones first, the best known before the others. A power of a
+ * number stands beside a plain one only where it is as well known (Hartmann squared beside Chandrasekhar).
+ */
+function strongest(found: readonly Match[]): Recognition[] {
   const best = Math.max(...found.map((one) => one.evidence));
-  const kept = new Map<string, Recognition>();
-  for (const one of found) if (one.evidence === best && !kept.has(one.number)) kept.set(one.number, one);
-  return [...kept.values()];
+  const kept = new Map<string, Match>();
+  const likely = found.filter((one) => one.evidence === best).sort((a, b) => plainness(a) - plainness(b) || a.standing - b.standing);
+  const known = likely[0]?.standing ?? 0;
+  for (const one of likely) {
+    if (plainness(one) > plainness(likely[0] as Match) && one.standing > known) continue;
+    if (!kept.has(one.number)) kept.set(one.number, one);
+  }
+  return [...kept.values()].map(({ standing: _standing, ...recognition }) => recognition);
 }
 
-function matchForm(form: Form, factors: readonly Factor[], sign: number): Recognition | undefined {
+type Match = Recognition & { readonly standing: number };
+
+function plainness({ power }: Recognition): number {
+  return power.abs().isOne ? 0 : 1;
+}
+
+function matchForm(form: Form, factors: readonly Factor[], sign: number): Match | undefined {
   const power = powerBetween(form, factors, sign);
   const assigned = assign(form, factors, power);
   if (!assigned) return undefined;
@@ -59,8 +73,8 @@ function matchForm(form: Form, factors: readonly Factor[], sign: number): Recogn
     kinds: assigned.kinds,
     expression: entry.expression,
     source: entry.source,
-    // A number to another power than one is a step away from how it is written.
-    evidence: assigned.evidence - (power.abs().isOne ? 0 : 0.25),
+    evidence: assigned.evidence,
+    standing: entry.standing,
   };
 }
 

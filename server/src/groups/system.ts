@@ -24,7 +24,7 @@ export interface System {
 
 /** Sorts the symbols of a relation: O(n r²) for n symbols of rank r. A repeated name counts once, as first given. */
 export function systemOf(relation: Relation): System {
-  const symbols = [...new Map([...relation.symbols].reverse().map((symbol) => [symbol.name, symbol])).values()].reverse();
+  const symbols = relation.symbols.filter(({ name }, at) => relation.symbols.findIndex((other) => other.name === name) === at);
   const known = symbols.filter((symbol): symbol is KnownSymbol => symbol.dimension !== undefined);
   const unknown = symbols.filter((symbol) => symbol.dimension === undefined);
   const bases = basesOf(known.map((symbol) => symbol.dimension));
@@ -83,7 +83,8 @@ function reasons(lone: readonly KnownSymbol[], all: readonly KnownSymbol[]): Unm
 }
 
 function loneBase(symbol: KnownSymbol, all: readonly KnownSymbol[]): string | undefined {
-  const bases = symbol.dimension.exponents.map(([base]) => base);
+  // Mass first: in mechanics it is the one that most often nothing else has.
+  const bases = symbol.dimension.exponents.map(([base]) => base).sort((a, b) => Number(b === 'M') - Number(a === 'M'));
   return bases.find((base) => all.every((other) => other === symbol || other.dimension.exponent(base).isZero));
 }
 

@@ -8,7 +8,7 @@ export const machines: NumberFamily = {
   field: 'fluid machinery',
   numbers: [
     { names: ['power number', 'Newton number of stirring'], symbol: 'Ne', expression: 'P/(ρ n³ d⁵)', forms: ['power / density / rotational frequency^3 / length^5'], finds: ['power'], standing: 1, source: 'ISO 80000-11:2019, momentum transfer' },
-    { names: ['flow coefficient', 'pumping number'], symbol: 'φ', expression: 'Q/(n d³)', forms: ['volume flow rate / rotational frequency / length^3'], finds: ['volume flow rate'], standing: 1, source: common },
+    { names: ['flow coefficient', 'pumping number', 'aeration number'], symbol: 'φ', expression: 'Q/(n d³)', forms: ['volume flow rate / rotational frequency / length^3'], finds: ['volume flow rate'], standing: 1, source: common },
     { names: ['head coefficient'], symbol: 'ψ', expression: 'g H/(n² d²)', forms: ['acceleration of gravity * head / rotational frequency^2 / length^2', 'specific energy / rotational frequency^2 / length^2', 'pressure drop / density / rotational frequency^2 / length^2'], finds: ['specific energy', 'head'], standing: 1, source: common },
     { names: ['specific speed'], symbol: 'n_q', expression: 'n √Q/(g H)^(3/4)', forms: ['rotational frequency * volume flow rate^1/2 * specific energy^-3/4', 'rotational frequency * volume flow rate^1/2 * acceleration of gravity^-3/4 * head^-3/4'], standing: 1, source: common },
     { names: ['power specific speed'], symbol: 'n_s', expression: 'n √(P/ρ)/(g H)^(5/4)', forms: ['rotational frequency * power^1/2 * density^-1/2 * specific energy^-5/4', 'rotational frequency * power^1/2 * density^-1/2 * acceleration of gravity^-5/4 * head^-5/4'], standing: 2, source: common },
@@ -19,8 +19,6 @@ export const machines: NumberFamily = {
     { names: ['tip speed ratio'], symbol: 'λ', expression: 'ω r/v', forms: ['rotor angular velocity * length / velocity'], standing: 1, source: 'common practice, wind turbines' },
     { names: ['power coefficient'], symbol: 'C_P', expression: 'P/(½ ρ v³ A)', forms: ['2 * power / density / velocity^3 / area'], finds: ['power'], standing: 1, source: 'common practice, wind turbines' },
     { names: ['mixing number'], symbol: 'n t', expression: 'n t', forms: ['rotational frequency * time'], finds: ['time'], standing: 1, source: 'common practice, stirred tanks' },
-    { names: ['gas flow number', 'aeration number'], symbol: 'Fl_g', expression: 'Q/(n d³)', forms: ['volume flow rate / rotational frequency / length^3'], standing: 3, source: 'common practice, stirred tanks' },
-    { names: ['swirl parameter'], symbol: 'S', expression: 'ω r/v', forms: ['angular velocity * length / velocity'], standing: 3, source: 'common practice, swirling flow' },
     { names: ['rotational Mach number'], symbol: 'Ma_n', expression: 'n d/c', forms: ['rotational frequency * length / speed of sound'], standing: 2, source: common },
   ],
 };
