@@ -42,7 +42,7 @@ describe('for any relation', () => {
           for (const [name, power] of exponents) {
             const at = one.symbols.findIndex((symbol) => symbol.name === name);
             const own = Math.log(values[at] as number);
-            const factor = (one.symbols[at]?.dimension as Dimension).exponents.reduce((sum, [base, p]) => sum + p.toNumber() * Math.log(change[base] as number), 0);
+            const factor = (one.symbols[at] as { dimension: Dimension }).dimension.exponents.reduce((sum, [base, p]) => sum + p.toNumber() * Math.log(change[base] as number), 0);
             before += power.toNumber() * own;
             after += power.toNumber() * (own + factor);
           }

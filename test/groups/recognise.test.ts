@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { compositeText, recognitionText } from '../../server/src/groups/names.ts';
 import { recogniseProduct } from '../../server/src/groups/product.ts';
+import { parseUnit } from '../../server/src/quantities/parse-unit.ts';
 import { product } from './checks.ts';
 import { relation } from './relations.ts';
 
@@ -69,6 +70,26 @@ describe('where dimensions cannot tell', () => {
     ['dT c / L', 'dT temperature; c heat; L specific heat of vaporisation', 'Jakob number'],
   ])('%s of %s: %s', (source, symbols, expected) => {
     expect(names(source, symbols)).toBe(expected);
+  });
+});
+
+describe('the unit as evidence', () => {
+  const rotating = (unitText: string) => {
+    const read = parseUnit(unitText);
+    if (!read.ok) throw new Error(unitText);
+    const symbols = relation('rho density; x rate; D length; P power; eta viscosity; V speed').symbols;
+    return symbols.map((symbol) => (symbol.name === 'x' ? { ...symbol, unit: read.unit } : symbol));
+  };
+  const named = (source: string, unitText: string) => recogniseProduct(product(source), rotating(unitText))?.recognised.map(recognitionText).join('; ');
+
+  it.each([
+    ['P / rho x^3 D^5', 'rev/s', 'power number'],
+    ['P / rho x^3 D^5', 'rad/s', '1/(8*pi^3) times power number'],
+    ['x D / V', 'Hz', 'Strouhal number'],
+    ['x D / V', 'rev/s', 'reciprocal of advance ratio'],
+    ['rho x D^2 / eta', 'rad/s', 'Reynolds number'],
+  ])('%s with x in %s: %s', (source, unitText, expected) => {
+    expect(named(source, unitText)).toBe(expected);
   });
 });
 

@@ -125,7 +125,10 @@ describe('many symbols', () => {
   /** A fixed sequence of dimensions with exponents from -2 to 2. */
   const symbols = (count: number) => {
     let state = 1;
-    const next = () => (state = (state * 48271) % 2147483647) % 5;
+    const next = () => {
+      state = (state * 48271) % 2147483647;
+      return state % 5;
+    };
     return Array.from({ length: count }, (_, at) => ({ name: `x${at}`, dimension: Dimension.from(bases.map((base) => [base, Rational.of(next() - 2)] as const)) }));
   };
 

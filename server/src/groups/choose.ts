@@ -2,7 +2,7 @@
  * The choice of groups. Candidates are taken from the cheapest up as long as they are independent: for vectors this greedy choice has
  * the least total cost of all bases that the candidates offer (Rado 1957; Edmonds 1971), and it costs one elimination per candidate.
  */
-import { Rational } from '../quantities/rational.ts';
+import type { Rational } from '../quantities/rational.ts';
 import { groupWith } from './bases.ts';
 import { type Candidate, candidatesOf } from './candidates.ts';
 import type { Instance } from './instances.ts';

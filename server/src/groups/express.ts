@@ -110,7 +110,7 @@ function exponentText(power: Rational): string {
 function identifierOf(group: Group, place: number): string {
   const [number] = group.recognised;
   const symbol = number?.symbol.replace(/[^\p{L}\p{N}_]/gu, '') ?? '';
-  const plain = number !== undefined && number.power.isOne && number.coefficient.isOne && group.recognised.length === 1;
+  const plain = group.recognised.length === 1 && number?.power.isOne === true && number.coefficient.isOne;
   if (plain && /^[A-Za-z]\w*$/.test(symbol) && symbol === number?.symbol) return symbol;
   if (group.role === 'ratio') return [...group.order].sort((a, b) => signOf(group, b) - signOf(group, a)).map((name) => name.replace(/\W+/g, '_')).join('_');
   return `Pi_${place}`;

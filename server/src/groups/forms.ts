@@ -48,8 +48,8 @@ function signatureOf(parts: readonly { readonly dimensionKey: string; readonly e
   const whole = primitive(parts.map(({ exponent }) => exponent));
   const sides = [whole, whole.map((power) => power.neg())].map((powers) =>
     parts.map(({ dimensionKey }, at) => `${dimensionKey}^${powers[at]}`).sort().join('|'),
-  ) as [string, string];
-  return sides[0] < sides[1] ? sides[0] : sides[1];
+  );
+  return sides.sort()[0] as string;
 }
 
 function compile(entry: NumberEntry, field: string, text: string): Form[] {

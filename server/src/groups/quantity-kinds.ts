@@ -43,6 +43,7 @@ const entries: readonly Entry[] = [
   ['second moment of area', 'L^4', 'any', 'moment of area|moment of inertia|second moment', 'I J'],
   ['time', 'T', 'any', 'time|duration', 't'],
   ['relaxation time', 'T', 'told', 'relax'],
+  ['mixing time', 'T', 'told', '\\bmix|blend'],
   ['residence time', 'T', 'told', 'residence|space time|retention'],
   ['period', 'T', 'told', 'period'],
   ['particle response time', 'T', 'told', 'particle|response|stopping'],

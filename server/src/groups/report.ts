@@ -40,7 +40,7 @@ export function markdownReport(result: GroupsResult): string {
 export function latexEquation(result: GroupsResult): string | undefined {
   const first = result.groups[0];
   const dependent = result.relation.dependent;
-  if (!first || first.role !== 'dependent' || dependent === undefined) return undefined;
+  if (first?.role !== 'dependent' || dependent === undefined) return undefined;
   const scale = solvedFor(first.exponents, dependent);
   const others = result.groups.slice(1).map((_group, at) => `\\Pi_{${at + 2}}`);
   const unknown = others.length > 0 ? `\\varphi\\left(${others.join(', ')}\\right)` : 'C';

@@ -1,6 +1,6 @@
 /** Checks what the user asked for: repeating symbols, groups to keep. */
 import { Dimension } from '../quantities/dimension.ts';
-import { Rational } from '../quantities/rational.ts';
+import type { Rational } from '../quantities/rational.ts';
 import { groupWith, mayRepeat } from './bases.ts';
 import { dimensionRow, Echelon, wholePowers } from './matrix.ts';
 import { firstBase, type KnownSymbol, type System } from './system.ts';

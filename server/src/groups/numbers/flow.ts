@@ -12,6 +12,7 @@ export const flow: NumberFamily = {
       forms: [
         'velocity * length / kinematic viscosity',
         'rotational frequency * length^2 / kinematic viscosity',
+        'angular velocity * length^2 / kinematic viscosity',
         'mass flux * length / dynamic viscosity',
         '4/pi * mass flow rate / length / dynamic viscosity',
         '4/pi * volume flow rate / length / kinematic viscosity',
