@@ -56,9 +56,12 @@ export function understand(text: string, file: string, engine: Engine, previous?
 
 /** Solver to findings: solve every function, classify, drop what is allowed. */
 export function detect(understood: Understood): readonly Detected[] {
-  const { solver, notes, lines } = understood;
+  const { parsed, solver, notes, lines } = understood;
   const detected: Detected[] = [];
-  detected.push(...detectFaults(solver.topLevel()?.faults ?? [], false));
+  const formulas = parsed.program.language === 'nomenclature';
+  const top = solver.topLevel()?.faults ?? [];
+  // Formulas of a nomenclature file are evaluated in units: what differs by a factor is converted there.
+  detected.push(...detectFaults(formulas ? top.filter((fault) => fault.kind !== 'scale') : top, false));
   for (const piece of solver.pieces()) detected.push(...detectFaults(solver.piece(piece)?.faults ?? []));
   for (const [chunk, read] of notes) {
     detected.push(...detectUnreadable(read.problems, chunk.anchor), ...detectAmbiguous(read.notes, chunk.anchor), ...detectDirectives(read.directives, chunk.anchor));

@@ -6,7 +6,7 @@ import type { Expr } from '../program/nodes.ts';
 import type { Span } from '../text/span.ts';
 import type { Context } from './context.ts';
 import { divideForms, isConstant, multiplyForms, oneForm, raiseForm, sameForm } from './form.ts';
-import { addLiterals, exactLiteral, invertLiteral, type Literal, literalNumber, multiplyLiterals, negateLiteral, raiseLiteral } from './literal.ts';
+import { addLiterals, exactLiteral, invertLiteral, type Literal, literalNumber, multiplyLiterals, negateLiteral, raiseLiteral, simpleExponent } from './literal.ts';
 import type { Measure } from './measure.ts';
 import { addMeasures, divideMeasures, isGauge, isPoint, multiplyMeasures, raiseMeasure, scaleMeasure, shiftMeasure } from './measure-algebra.ts';
 import { matchScales } from './measure-match.ts';
@@ -69,8 +69,19 @@ export function product(expr: Expr, left: Value, right: Value): Value {
   if (left.literal) return scaled(expr, right, left.literal);
   if (right.literal) return scaled(expr, left, right.literal);
   if (!left.form || !right.form) return unknown(expr, [left, right]);
-  const misuse = left.misuse ?? right.misuse ?? (isPoint(left.measure) && isPoint(right.measure) ? misused(expr, 'product', left) : undefined);
-  return productValue(expr, left, right, multiplyForms(left.form, right.form), multiplyMeasures(left.measure, right.measure), misuse);
+  const open = hasOpenUnit(left) || hasOpenUnit(right);
+  const misuse = open ? undefined : (left.misuse ?? right.misuse ?? (isPoint(left.measure) && isPoint(right.measure) ? misused(expr, 'product', left) : undefined));
+  const measure = open && (hasPoint(left) || hasPoint(right)) ? undefined : multiplyMeasures(left.measure, right.measure);
+  return productValue(expr, left, right, multiplyForms(left.form, right.form), measure, misuse);
+}
+
+/** A factor whose unit is open may carry whatever makes a temperature in °C right: a coefficient of a correlation. */
+function hasOpenUnit(value: Value): boolean {
+  return value.form !== undefined && !isConstant(value.form);
+}
+
+function hasPoint(value: Value): boolean {
+  return value.misuse !== undefined || isPoint(value.measure);
 }
 
 export function quotient(expr: Expr, left: Value, right: Value): Value {
@@ -98,7 +109,7 @@ export function power(context: Context, expr: Expr, base: Value, exponent: Value
   if (base.fits) return { expr, form: undefined, fits: true, from: [] };
   if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure && exponent.form && !exponent.tainted && exponent.expr?.kind !== 'binary' ? {} : { tainted: true }) };
   if (!base.form) return unknown(expr, [base]);
-  if (constant && constant.pi === 0) return constantPower(expr, base, constant.value);
+  if (constant && constant.pi === 0) return constantPower(expr, base, simpleExponent(constant));
   if (isConstant(base.form) && base.form.dimension.isOne) return { expr, form: oneForm, from: [base, exponent], ...taint(base) };
   context.add({ kind: 'varying-power', anchor: context.anchor, span, base, exponent });
   return unknown(expr, [base]);

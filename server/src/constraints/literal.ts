@@ -17,7 +17,8 @@ const cache = new Map<string, Literal>();
 export function readLiteral(value: Rational, text: string): Literal {
   const known = cache.get(text);
   if (known) return known;
-  const literal = { value, pi: 0, pure: isPure(value), tolerance: toleranceOf(value, text) };
+  const tolerance = toleranceOf(value, text);
+  const literal = roundedPi(value, tolerance) ?? { value, pi: 0, pure: isPure(value), tolerance };
   if (cache.size > 5000) cache.clear();
   cache.set(text, literal);
   return literal;
@@ -59,6 +60,31 @@ export function raiseLiteral(a: Literal, power: Rational): Literal | undefined {
 /** The floating-point value, for display and tolerant comparison. */
 export function literalNumber(a: Literal): number {
   return a.pi === 0 ? a.value.toNumber() : a.value.toNumber() * Math.PI ** a.pi;
+}
+
+/** What of π engineers write in digits: π itself, 2π, π/2, π/4, π/180 and 180/π. */
+const piParts: readonly (readonly [number, Rational, number])[] = [
+  [Math.PI, Rational.one, 1], [2 * Math.PI, Rational.of(2), 1], [Math.PI / 2, Rational.of(1, 2), 1], [Math.PI / 4, Rational.of(1, 4), 1],
+  [Math.PI / 180, Rational.of(1, 180), 1], [180 / Math.PI, Rational.of(180), -1],
+];
+
+/** `3.1416`, `0.7854`, `57.2958`: π in at least three digits, right within half a unit of the last. */
+function roundedPi(value: Rational, tolerance: number): Literal | undefined {
+  if (tolerance === 0 || tolerance > 0.002) return undefined;
+  const size = value.toNumber();
+  const part = piParts.find(([exact]) => Math.abs(size / exact - 1) <= tolerance);
+  return part && { value: part[1], pi: part[2], pure: true, tolerance };
+}
+
+/** An exponent such as 0.333 or 0.6667 means a third or two; three digits at least. */
+export function simpleExponent(literal: Literal): Rational {
+  if (literal.tolerance === 0 || literal.tolerance > 0.002) return literal.value;
+  const size = literal.value.toNumber();
+  for (const below of [3, 6, 9]) {
+    const above = Math.round(size * below);
+    if (above !== 0 && above % below !== 0 && Math.abs(size / (above / below) - 1) <= literal.tolerance) return Rational.of(above, below);
+  }
+  return literal.value;
 }
 
 function isPure(value: Rational): boolean {

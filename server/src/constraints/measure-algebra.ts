@@ -135,7 +135,7 @@ function shifted(reading: Reading, size: number): Reading[] {
   const known = knownZeros.find((candidate) => Math.abs(candidate - zero) < zeroTolerance);
   if (known === 0) results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'absolute' });
   else if (known !== undefined) results.push({ scale: reading.scale, weight: 1, zero: known, nature: 'point' });
-  if (reading.weight === 1 || reading.nature === 'absolute') results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'difference' });
+  if (reading.weight === 1 || reading.nature === 'absolute') results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'shifted' });
   return results;
 }
 

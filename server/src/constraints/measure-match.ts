@@ -1,9 +1,11 @@
-import { literalNumber } from './literal.ts';
+import { Rational } from '../quantities/rational.ts';
+import { Scale } from '../quantities/scale.ts';
+import { type Literal, literalNumber } from './literal.ts';
 import type { Factor, Measure, Reading } from './measure.ts';
 
 const close = 1e-9;
-/** Keeps the search to 2^12 products. */
-const mostPerSide = 6;
+/** Keeps the search to some thousand products. */
+const mostPerSide = 5;
 const tau = 2 * Math.PI;
 
 /** Pairs of readings, one of each side, in which both numbers are counted in the same scale; literal factors may convert. */
@@ -44,28 +46,69 @@ function convertedPairs(a: Measure, left: Reading, b: Measure, right: Reading, t
   if (turns[0] === 1 && left.scale.equals(right.scale)) return [[left, right]];
   const ratio = left.scale.toNumber() / right.scale.toNumber();
   const slack = close + 3 * (left.scale.uncertainty + right.scale.uncertainty);
-  const products = subsets(a.factors, b.factors);
-  for (const product of products) {
+  for (const product of products(a.factors, b.factors)) {
     for (const turn of turns) {
-      if (Math.abs((ratio * turn) / product.size - 1) <= slack + product.tolerance) return [[{ ...left, scale: right.scale }, right]];
+      if (Math.abs((ratio * turn) / product.size - 1) > slack + product.tolerance) continue;
+      const scale = commonScale(left, right, product, turn);
+      return [[{ ...left, scale }, { ...right, scale }]];
     }
   }
   return [];
 }
 
+/** The scale that both numbers are counted in once their conversions are taken out: the one that needs no rounding. */
+function commonScale(left: Reading, right: Reading, product: Product, turn: number): Scale {
+  if (product.right === 1) return right.scale;
+  if (product.left === 1 && turn === 1) return left.scale;
+  const value = Rational.parse(product.right.toPrecision(15));
+  return value && value.sign > 0 ? right.scale.div(Scale.of(value)) : right.scale;
+}
+
 interface Product {
+  /** What the left factors chosen come to, over what the right ones come to. */
   readonly size: number;
+  readonly left: number;
+  readonly right: number;
   readonly tolerance: number;
 }
 
-/** Products of every subset of the literal factors, those of the right side inverted; the empty product first. */
-function subsets(left: readonly Factor[], right: readonly Factor[]): readonly Product[] {
-  let products: Product[] = [{ size: 1, tolerance: 0 }];
-  const extend = (factor: Factor, power: 1 | -1): void => {
-    const size = literalNumber(factor.literal) ** power;
-    products = products.concat(products.map((p) => ({ size: p.size * size, tolerance: p.tolerance + factor.literal.tolerance })));
+/** Products of every choice of conversions among the literal factors; the empty choice first. */
+function products(left: readonly Factor[], right: readonly Factor[]): readonly Product[] {
+  let found: Product[] = [{ size: 1, left: 1, right: 1, tolerance: 0 }];
+  const extend = (factor: Factor, side: 'left' | 'right'): void => {
+    const before = found;
+    for (const part of partsOf(factor.literal)) {
+      const more = before.map((each) => {
+        const [l, r] = side === 'left' ? [each.left * part, each.right] : [each.left, each.right * part];
+        return { size: l / r, left: l, right: r, tolerance: each.tolerance + factor.literal.tolerance };
+      });
+      found = found.concat(more);
+    }
   };
-  for (const factor of left.slice(0, mostPerSide)) extend(factor, 1);
-  for (const factor of right.slice(0, mostPerSide)) extend(factor, -1);
-  return products;
+  for (const factor of left.slice(0, mostPerSide)) extend(factor, 'left');
+  for (const factor of right.slice(0, mostPerSide)) extend(factor, 'right');
+  return found;
+}
+
+const parts = new WeakMap<Literal, readonly number[]>();
+/** Conversions that engineers fold into one number with a pure one: 120 is 2 times 60, 20 is 2 times 10. */
+const foldable = [10, 100, 1000, 1e4, 1e5, 1e6, 60, 3600, 86400];
+
+/** The conversions a literal may stand for: itself, or a familiar one that leaves a pure number. */
+function partsOf(literal: Literal): readonly number[] {
+  let found = parts.get(literal);
+  if (!found) {
+    const size = literalNumber(literal);
+    const plain = literal.value.toNumber();
+    const inner = literal.pure ? [] : foldable.flatMap((each) => [each, 1 / each]).filter((each) => literal.value.num !== 0n && isSmall(plain / each) && Math.abs(size / each - 1) > close);
+    found = [size, ...inner];
+    parts.set(literal, found);
+  }
+  return found;
+}
+
+function isSmall(value: number): boolean {
+  const size = Math.abs(value);
+  const whole = size >= 1 ? size : 1 / size;
+  return whole > 1 && whole <= 12 && Math.abs(whole - Math.round(whole)) < close;
 }

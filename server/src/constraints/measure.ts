@@ -39,9 +39,9 @@ export interface Reading {
 
 /**
  * `absolute`: noted as an absolute temperature; `ratio`: counted from zero or a difference, nobody can tell; `difference`:
- * surely one. Points are temperatures in °C or °F; gauge pressures count from the atmosphere.
+ * surely one; `shifted`: a point minus a bare number, which may be one. Points are temperatures in °C or °F; gauge pressures count from the atmosphere.
  */
-export type Nature = 'absolute' | 'ratio' | 'difference' | 'point' | 'gauge';
+export type Nature = 'absolute' | 'ratio' | 'difference' | 'shifted' | 'point' | 'gauge';
 
 /** The measure of a number that a note gives a unit; undefined where the scale is not known. `difference`: the symbol names a difference. */
 export function measureOf(unit: Unit, difference = false): Measure | undefined {

@@ -40,6 +40,8 @@ export interface ClassInfo {
   readonly name: string;
   readonly statement: ClassStmt;
   readonly fields: () => ReadonlyMap<string, Value>;
+  /** Fields without what the constructor adds: what the constructor itself sees. */
+  readonly declared: () => ReadonlyMap<string, Value>;
   readonly method: (name: string) => Scheme | undefined;
   readonly fingerprint: () => string;
 }

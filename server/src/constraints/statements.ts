@@ -119,11 +119,11 @@ function empiricalStatement(context: Context, statement: AssignStmt, units: NonN
 function returned(context: Context, statement: Extract<Stmt, { kind: 'return' }>): void {
   if (!statement.value) return;
   const value = evaluate(context, statement.value);
-  if (value.misuse) reportMisuse(context, value);
   context.returns.push(value);
   const owner = context.owner;
+  const notes = owner ? context.surroundings.notes.results(owner) : [];
+  if (value.misuse) reportMisuse(context, value, notes.some((note) => value.form?.terms.length === 0 && note.unit.dimension === value.form.dimension));
   if (!owner) return;
-  const notes = context.surroundings.notes.results(owner);
   for (const note of notes) {
     const target = note.note.target;
     const position = target.kind === 'result' ? target.position : undefined;

@@ -2,6 +2,7 @@
 import { pathOf } from '../program/path.ts';
 import type { Expr, Stmt } from '../program/nodes.ts';
 import type { Anchor, Span } from '../text/span.ts';
+import { Dimension } from '../quantities/dimension.ts';
 import { agree } from './arithmetic.ts';
 import type { Context } from './context.ts';
 import { constantForm, unknownForm } from './form.ts';
@@ -9,6 +10,8 @@ import type { Literal } from './literal.ts';
 import { type Measure, measureOf } from './measure.ts';
 import { Scale } from '../quantities/scale.ts';
 import { type NoteInForce, type Value, type Version, unknown } from './value.ts';
+
+const temperature = Dimension.base('Θ');
 
 /** Assigns a value to a target of any shape. */
 export function assign(context: Context, target: Expr, value: Value, statement: Stmt): void {
@@ -60,7 +63,7 @@ export function notedValue(path: string, note: NoteInForce, anchor: Anchor, targ
 
 /** Names and descriptions that engineers give to differences: `dT`, `delta_p`, `LMTD`, "temperature rise". */
 export function namesDifference(path: string, note: NoteInForce): boolean {
-  if (!note.unit.offset) return false;
+  if (note.unit.dimension !== temperature) return false;
   const name = path.slice(path.lastIndexOf('.') + 1);
   return /^(?:d[A-Z_]|d[Tt]|[dD]elta|Δ|[Ll]mtd|LMTD|[Dd]iff)/.test(name) || /(?:^|_)(?:diff|rise|drop|delta|dT|superheat|subcool\w*|lmtd|approach|pinch)(?:_|$)/i.test(name)
     || /\b(?:difference|rise|drop|superheat|subcooling|approach|change|gradient|increment|lmtd|uncertainty|tolerance)\b/i.test(note.note.description ?? '');

@@ -17,7 +17,7 @@ export function callScheme(context: Context, expr: CallExpr, scheme: Scheme, pas
   const instance: Instance = new Map();
   const pairs = pairUp(scheme.params, passed, bound);
   for (const { param, given } of pairs) open(param, given, instance);
-  for (const { param, given } of pairs) check(context, scheme, param, given);
+  for (const { param, given } of pairs) check(context, scheme, param, given, instance);
   return scheme.result ? resultValue(context, expr, scheme.result, instance, pairs.map((pair) => pair.given.value)) : unknown(expr);
 }
 
@@ -34,7 +34,7 @@ export function callLocal(context: Context, expr: CallExpr, local: LocalFunction
   const instance: Instance = new Map();
   local.params.forEach((param, at) => {
     const given = passed.find((each) => each.argument.name === param.name) ?? (passed[at]?.argument.name === undefined ? passed[at] : undefined);
-    if (param.unknown && given) instance.set(param.unknown.id, given.value);
+    if (param.unknown && given && !given.value.literal && !given.value.fits) instance.set(param.unknown.id, given.value);
     if (param.note && given?.value.form && !given.value.literal && !given.value.fits) {
       const noted = notedValue(param.name, param.note, context.anchor, undefined);
       const name = local.definition.kind === 'function' ? local.definition.name : 'lambda';
@@ -65,7 +65,7 @@ function open(param: SchemeParam, given: Passed, instance: Instance): void {
   if (alone && !instance.has(term.unknown.id) && !given.value.literal && !given.value.fits) instance.set(term.unknown.id, given.value);
 }
 
-function check(context: Context, scheme: Scheme, param: SchemeParam, given: Passed): void {
+function check(context: Context, scheme: Scheme, param: SchemeParam, given: Passed, instance: Instance): void {
   const value = given.value;
   if (value.misuse) reportMisuse(context, value);
   if (!value.form || value.literal || value.fits) return;
@@ -74,9 +74,27 @@ function check(context: Context, scheme: Scheme, param: SchemeParam, given: Pass
     const noted = notedValue(param.name, param.note, context.anchor, undefined);
     return agree(context, given.argument.value, passed, noted, { kind: 'parameter', function: scheme.name, name: param.name, note: param.note }, given.argument.value);
   }
-  if (!param.form || !isConstant(param.form) || param.form.dimension.isOne || value.form === param.form) return;
+  if (!param.form || !param.unknown || value.form === param.form) return;
+  if (!isConstant(param.form)) return checkAlike(context, scheme, param, given, instance);
+  if (param.form.dimension.isOne) return;
   const required: Value = { expr: undefined, form: param.form, from: [] };
   agree(context, given.argument.value, passed, required, { kind: 'inferred-parameter', function: scheme.name, name: param.name }, given.argument.value);
+}
+
+/** A parameter that the body ties to another: `a + b` inside asks for like arguments. Scales are left alone, the body may convert. */
+function checkAlike(context: Context, scheme: Scheme, param: SchemeParam, given: Passed, instance: Instance): void {
+  const form = param.form as Form;
+  const [term] = form.terms;
+  const other = term && instance.get(term.unknown.id);
+  if (!term || !other?.form || other === given.value || form.terms.some((each) => !instance.get(each.unknown.id)?.form)) return;
+  const required = substitute(form, (unknown) => instance.get(unknown.id)?.form);
+  const first = scheme.params.findIndex((each) => each.unknown === term.unknown);
+  const at = scheme.params.indexOf(param);
+  const alike = form.terms.length === 1 && term.power.isOne && form.dimension.isOne && first >= 0;
+  const passed: Value = { ...given.value, expr: given.argument.value, measure: undefined };
+  const reason = alike ? ({ kind: 'alike', function: scheme.name, positions: [first, at] } as const) : ({ kind: 'inferred-parameter', function: scheme.name, name: param.name } as const);
+  if (alike) agree(context, given.argument.value, { ...other, measure: undefined }, passed, reason, given.argument.value);
+  else agree(context, given.argument.value, passed, { expr: undefined, form: required, from: [other] }, reason, given.argument.value);
 }
 
 function resultValue(context: Context, expr: CallExpr, result: SchemeResult, instance: Instance, from: readonly Value[]): Value {

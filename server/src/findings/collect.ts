@@ -36,7 +36,7 @@ export function detectFaults(faults: readonly Fault[], oneHidden = true): readon
       continue;
     }
     const place = placeOf(fault);
-    const key = `${check.code} ${place.start} ${place.end} ${place.anchor.start}`;
+    const key = `${check.code} ${place.start} ${place.end} ${place.anchor.start} ${edgeOf(fault)}`;
     if (seen.has(key)) continue;
     seen.add(key);
     found.push({ code: check.code, severity: check.milder?.(fault) ?? check.severity, place, cause: { kind: 'fault', fault, alike: [] } });
@@ -71,6 +71,11 @@ export function detectDirectives(directives: readonly Directive[], anchor: Ancho
       ? [{ code: 'unreadable-unit', severity: severityOf('unreadable-unit'), place: placeAt(anchor, directive.span), cause: { kind: 'directive', problem: directive.problem } }]
       : [],
   );
+}
+
+/** An empirical relation has as many edges as it names symbols, all at one place. */
+function edgeOf(fault: Fault): string {
+  return (fault.kind === 'scale' || fault.kind === 'dimension') && fault.constraint.reason.kind === 'conversion-edge' ? fault.constraint.reason.path : '';
 }
 
 /** Where a fault is shown. */

@@ -1,5 +1,6 @@
 import { constants } from './constants/index.ts';
 import type { Dimension } from './dimension.ts';
+import { parseFactor } from './factor.ts';
 import { parseUnit } from './parse-unit.ts';
 
 export interface KnownConstant {
@@ -16,8 +17,8 @@ export function knownConstant(size: number, dimension: Dimension): KnownConstant
   for (const constant of constants) {
     const forms = [{ value: constant.value, unit: constant.unit }, ...constant.metAs];
     for (const form of forms) {
-      const value = Number(form.value);
-      if (!(Math.abs(size / value - 1) < tolerance(form.value))) continue;
+      const value = sizeOf(form.value);
+      if (!(Math.abs(size - value) <= tolerance(form.value))) continue;
       const unit = parseUnit(form.unit);
       if (unit.ok && unit.unit.dimension === dimension) return { name: constant.name, value: form.value, unit: form.unit };
     }
@@ -25,7 +26,15 @@ export function knownConstant(size: number, dimension: Dimension): KnownConstant
   return undefined;
 }
 
+/** The size of a constant's value, which may be a product such as `0.5/pi`. */
+function sizeOf(value: string): number {
+  const plain = Number(value);
+  return Number.isNaN(plain) ? parseFactor(value).toNumber() : plain;
+}
+
+/** Half a unit of the last digit written. */
 function tolerance(digits: string): number {
-  const significant = digits.replace(/e.*$/i, '').replace(/[^\d]/g, '').replace(/^0+/, '').length;
-  return 0.51 * 10 ** -(Math.min(significant, 6) - 1);
+  const match = /^(\d*)\.?(\d*)(?:e([+-]?\d+))?$/i.exec(digits);
+  if (!match) return 0;
+  return 0.51 * 10 ** (Number(match[3] ?? 0) - (match[2] as string).length);
 }

@@ -15,15 +15,20 @@ export function classInfo(statement: ClassStmt, chunk: Chunk, file: FileSolver):
     const fn = methods.get(name);
     return fn ? file.scheme(fn, statement, chunk) : baseOf(statement, file)?.method(name);
   };
+  const declared = (): Map<string, Value> => {
+    const found = new Map(baseOf(statement, file)?.fields() ?? []);
+    declaredFields(statement, chunk, file, found);
+    for (const [name, fn] of methods) found.set(name, methodValue(name, () => file.scheme(fn, statement, chunk)));
+    return found;
+  };
   return {
     name: statement.name,
     statement,
     method,
+    declared,
     fields: () => {
       if (fields) return fields;
-      fields = new Map(baseOf(statement, file)?.fields() ?? []);
-      declaredFields(statement, chunk, file, fields);
-      for (const [name, fn] of methods) fields.set(name, methodValue(name, () => file.scheme(fn, statement, chunk)));
+      fields = new Map(declared());
       const constructor = methods.get('__init__');
       const made = constructor && file.piece({ fn: constructor, owner: statement, chunk });
       for (const [name, value] of made?.fields ?? []) if (!fields.get(name)?.version?.note) fields.set(name, value);

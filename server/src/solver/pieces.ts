@@ -66,7 +66,8 @@ function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surro
 
 function selfOf(piece: Piece, owner: ClassInfo | undefined): Value | undefined {
   const plain = piece.fn.decorators.every((each) => each.kind !== 'name' || each.name !== 'staticmethod');
-  return owner && plain ? { expr: undefined, form: undefined, fields: owner.fields(), from: [] } : undefined;
+  const fields = owner && (piece.fn.name === '__init__' ? owner.declared() : owner.fields());
+  return fields && plain ? { expr: undefined, form: undefined, fields, from: [] } : undefined;
 }
 
 /** The same surroundings as if one note had not been written. */

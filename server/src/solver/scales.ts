@@ -71,7 +71,7 @@ function turnsWithoutPi(left: Measure, right: Measure): boolean {
 /** Points agree where they hold the same number of points from the same zero; a difference is counted like its scale's points. */
 function sameZero(a: Reading, b: Reading): boolean {
   if (a.nature === 'gauge' || b.nature === 'gauge') return true;
-  if (a.weight === 0 && b.weight === 0) return true;
-  if (a.weight === 0 || b.weight === 0) return (a.weight === 0 ? a : b).nature !== 'absolute';
-  return Math.abs(a.weight - b.weight) < 1e-6 && (a.pending || b.pending || Math.abs(a.zero - b.zero) < zeroTolerance);
+  if (a.pending || b.pending || (a.weight === 0 && b.weight === 0)) return true;
+  if (a.weight === 0 || b.weight === 0) return (a.weight === 0 ? a : b).nature !== 'absolute' && (a.weight === 0 ? a : b).nature !== 'shifted';
+  return Math.abs(a.weight - b.weight) < 1e-6 && Math.abs(a.zero - b.zero) < zeroTolerance;
 }

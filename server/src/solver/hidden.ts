@@ -1,0 +1,79 @@
+/** The numbers that may hide a unit in a contradiction, and which unit that would be. */
+import { literalNumber, readLiteral } from '../constraints/literal.ts';
+import type { Constraint } from '../constraints/problem.ts';
+import type { Value } from '../constraints/value.ts';
+import type { Expr } from '../program/nodes.ts';
+import { Dimension } from '../quantities/dimension.ts';
+import { knownConstant } from '../quantities/known-constants.ts';
+import type { Fault, Involved } from './fault.ts';
+import { sidesOf } from './root-cause.ts';
+
+export interface HiddenNumber {
+  readonly text: string;
+  /** Not a number for a constant that is known by name only. */
+  readonly size: number;
+  readonly below: boolean;
+  readonly side: 'left' | 'right' | 'value';
+}
+
+type Contradiction = Extract<Fault, { kind: 'dimension' | 'pure' | 'varying-power' }>;
+
+/** The impure literals that multiply either side, and the constants without notes that were solved on the way. */
+export function hiddenNumbers(constraint: Constraint, involved: readonly Involved[]): readonly HiddenNumber[] {
+  const found: HiddenNumber[] = [];
+  const [first, second] = sidesOf(constraint);
+  const same = constraint.kind === 'same';
+  collect(first, same ? 'left' : 'value', found);
+  if (same) collect(second, 'right', found);
+  for (const each of involved) {
+    if (each.unknown.origin === 'constant' && each.unknown.name !== '') found.push({ text: each.unknown.name, size: Number.NaN, below: false, side: 'left' });
+  }
+  return found.sort((a, b) => Number(Number.isNaN(a.size)) - Number(Number.isNaN(b.size)));
+}
+
+/** The dimension that the first hidden number would have to carry. */
+export function neededDimension(fault: Contradiction, found: readonly HiddenNumber[]): Dimension | undefined {
+  const first = found[0];
+  if (!first) return fault.kind === 'dimension' ? fault.right.div(fault.left) : undefined;
+  const raw = fault.kind === 'dimension' ? (first.side === 'right' ? fault.left.div(fault.right) : fault.right.div(fault.left)) : inverse(fault.dimension);
+  return first.below ? inverse(raw) : raw;
+}
+
+const conversions = new Set([10, 100, 1000, 1e4, 1e5, 1e6, 60, 3600, 24, 86400, 0.1, 0.01, 1e-3, 1e-4, 1e-5, 1e-6]);
+
+/**
+ * Whether a contradiction is excused by its literals. A number that engineers convert with (1000, 60, 3600) hides a unit only
+ * where it is a known constant of just the missing dimension, as 1000 kg/m³ for water.
+ */
+export function isExcused(fault: Contradiction): boolean {
+  if (!fault.hidden) return false;
+  const found = hiddenNumbers(fault.constraint, fault.involved);
+  if (found.length === 0 || !found.every((each) => conversions.has(each.size))) return true;
+  const needed = neededDimension(fault, found);
+  return needed !== undefined && found.some((each) => knownConstant(each.size, needed) !== undefined);
+}
+
+function inverse(dimension: Dimension): Dimension {
+  return Dimension.one.div(dimension);
+}
+
+/** Through the symbols without notes that a value was computed from. */
+function collect(value: Value | undefined, side: HiddenNumber['side'], found: HiddenNumber[], depth = 0): void {
+  if (!value || depth > 12 || found.length > 4) return;
+  const before = found.length;
+  if (value.tainted && value.expr) collectFrom(value.expr, false, side, found);
+  if (found.length > before) return;
+  collect(value.version?.note ? undefined : value.version?.assigned, side, found, depth + 1);
+  for (const part of value.from) if (part.tainted) collect(part, side, found, depth + 1);
+}
+
+function collectFrom(expr: Expr, below: boolean, side: HiddenNumber['side'], found: HiddenNumber[]): void {
+  if (expr.kind === 'number' && expr.value) {
+    const literal = readLiteral(expr.value, expr.text);
+    if (!literal.pure) found.push({ text: expr.text, size: literalNumber(literal), below, side });
+  } else if (expr.kind === 'unary') collectFrom(expr.operand, below, side, found);
+  else if (expr.kind === 'binary' && (expr.op === '*' || expr.op === '/' || expr.op === '//')) {
+    collectFrom(expr.left, below, side, found);
+    collectFrom(expr.right, expr.op === '*' ? below : !below, side, found);
+  } else if (expr.kind === 'binary' && (expr.op === '+' || expr.op === '-' || expr.op === '**')) collectFrom(expr.left, below, side, found);
+}
