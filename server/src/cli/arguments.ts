@@ -1,0 +1,135 @@
+/** The command line, read into plain options. */
+import { parseArgs } from 'node:util';
+import { type FindingCode, findingCodes, type Severity } from '../findings/finding.ts';
+import type { LanguageId } from '../program/nodes.ts';
+import { languageNames } from './languages.ts';
+import { didYouMean } from './suggest.ts';
+
+export type FormatName = 'text' | 'json' | 'sarif';
+export type Level = Severity | 'off';
+
+export interface CheckOptions {
+  /** Files and folders as given; `-` is standard input. */
+  readonly paths: readonly string[];
+  readonly format: FormatName;
+  readonly severities: Readonly<Partial<Record<FindingCode, Level>>>;
+  readonly hints: boolean;
+  readonly stats: boolean;
+  readonly color: boolean;
+  readonly language?: LanguageId;
+  /** The name under which standard input is checked. */
+  readonly stdinFile?: string;
+  readonly config?: string;
+}
+
+export type Request =
+  | { readonly kind: 'check'; readonly options: CheckOptions }
+  | { readonly kind: 'help'; readonly command?: 'check' }
+  | { readonly kind: 'version' }
+  /** What is wrong with the command line, in a sentence. */
+  | { readonly kind: 'misuse'; readonly problem: string };
+
+export const formatNames: readonly FormatName[] = ['text', 'json', 'sarif'];
+export const levels: readonly Level[] = ['error', 'warning', 'information', 'hint', 'off'];
+
+const optionTypes = {
+  format: { type: 'string' },
+  severity: { type: 'string', multiple: true },
+  hints: { type: 'boolean' },
+  stats: { type: 'boolean' },
+  language: { type: 'string' },
+  'stdin-file': { type: 'string' },
+  config: { type: 'string' },
+  'no-color': { type: 'boolean' },
+  help: { type: 'boolean', short: 'h' },
+  version: { type: 'boolean', short: 'V' },
+} as const;
+type OptionName = keyof typeof optionTypes;
+
+const commands = ['check', 'help', 'version'];
+
+/** Reads the arguments after the program's name. Never throws. */
+export function readArguments(args: readonly string[]): Request {
+  const { tokens } = parseArgs({ args: [...args], options: optionTypes, strict: false, allowPositionals: true, tokens: true });
+  const positionals: string[] = [];
+  const given = new Map<OptionName, string[]>();
+  for (const token of tokens) {
+    if (token.kind === 'positional') positionals.push(token.value);
+    if (token.kind !== 'option') continue;
+    const problem = optionProblem(token);
+    if (problem) return { kind: 'misuse', problem };
+    const name = token.name as OptionName;
+    given.set(name, [...(given.get(name) ?? []), token.value ?? '']);
+  }
+  return requestOf(positionals, given);
+}
+
+function optionProblem(token: { name: string; rawName: string; value?: string | undefined; inlineValue?: boolean | undefined }): string | undefined {
+  if (!Object.hasOwn(optionTypes, token.name)) return `Unknown option ${token.rawName}.${didYouMean(token.rawName, Object.keys(optionTypes).map((name) => `--${name}`))}`;
+  const takesValue = optionTypes[token.name as OptionName].type === 'string';
+  if (!takesValue) return token.inlineValue ? `${token.rawName} takes no value.` : undefined;
+  const missing = token.value === undefined || token.value === '' || (!token.inlineValue && token.value.startsWith('-') && token.value !== '-');
+  return missing ? `${token.rawName} needs a value: ${valueHelp[token.name] ?? 'a name'}.` : undefined;
+}
+
+const valueHelp: Record<string, string> = {
+  format: formatNames.join(', '),
+  severity: 'code=level, as in hidden-unit=error',
+  language: languageNames.join(', '),
+  'stdin-file': 'a file name',
+  config: 'a configuration file',
+};
+
+function requestOf(positionals: readonly string[], given: ReadonlyMap<OptionName, readonly string[]>): Request {
+  const [command, ...rest] = positionals;
+  if (given.has('version') || command === 'version') return { kind: 'version' };
+  if (given.has('help') || command === 'help') return helpRequest(command === 'help' ? rest[0] : command);
+  if (command === undefined) return { kind: 'misuse', problem: 'No command given.' };
+  if (command !== 'check') return { kind: 'misuse', problem: unknownCommand(command) };
+  return checkRequest(rest, given);
+}
+
+function helpRequest(command: string | undefined): Request {
+  if (command === undefined || command === 'help') return { kind: 'help' };
+  return command === 'check' ? { kind: 'help', command } : { kind: 'misuse', problem: unknownCommand(command) };
+}
+
+function unknownCommand(word: string): string {
+  const asFile = /[./\\]/.test(word) || word === '-';
+  return asFile ? `"${word}" is no command; to check a file, say termwise check ${word}` : `Unknown command ${word}.${didYouMean(word, commands)}`;
+}
+
+function checkRequest(paths: readonly string[], given: ReadonlyMap<OptionName, readonly string[]>): Request {
+  const last = (name: OptionName): string | undefined => given.get(name)?.at(-1);
+  const misuse = (problem: string): Request => ({ kind: 'misuse', problem });
+  if (paths.length === 0) return misuse('Nothing to check: name files or folders, or - for standard input.');
+  const format = last('format') ?? 'text';
+  if (!isOneOf(formatNames, format)) return misuse(`Unknown format ${format}: it is one of ${formatNames.join(', ')}.${didYouMean(format, formatNames)}`);
+  const language = last('language');
+  if (language !== undefined && !isOneOf(languageNames, language)) return misuse(`Unknown language ${language}: it is one of ${languageNames.join(', ')}.${didYouMean(language, languageNames)}`);
+  const severities: Partial<Record<FindingCode, Level>> = {};
+  for (const setting of given.get('severity') ?? []) {
+    const read = severitySetting(setting);
+    if (typeof read === 'string') return misuse(read);
+    severities[read.code] = read.level;
+  }
+  const [stdinFile, config] = [last('stdin-file'), last('config')];
+  const options: CheckOptions = {
+    paths, format, severities, hints: given.has('hints'), stats: given.has('stats'), color: !given.has('no-color'),
+    ...(language !== undefined && { language }), ...(stdinFile !== undefined && { stdinFile }), ...(config !== undefined && { config }),
+  };
+  return { kind: 'check', options };
+}
+
+function severitySetting(text: string): { code: FindingCode; level: Level } | string {
+  const at = text.indexOf('=');
+  if (at < 0) return `--severity ${text}: expected code=level, as in hidden-unit=error.`;
+  const [code, level] = [text.slice(0, at), text.slice(at + 1)];
+  if (!isOneOf(findingCodes, code)) return `--severity ${text}: unknown code ${code}.${didYouMean(code, findingCodes)}`;
+  if (!isOneOf(levels, level)) return `--severity ${text}: unknown level ${level}; it is one of ${levels.join(', ')}.`;
+  return { code, level };
+}
+
+function isOneOf<T extends string>(known: readonly T[], word: string): word is T {
+  return (known as readonly string[]).includes(word);
+}

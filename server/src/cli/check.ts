@@ -1,0 +1,182 @@
+/** `termwise check`: walks the paths, checks one file after the other, and shows what was found. */
+import { readFileSync } from 'node:fs';
+import { dirname, resolve } from 'node:path';
+import { diskFiles } from '../platform/disk.ts';
+import type { CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
+import type { CheckOptions } from './arguments.ts';
+import { type Configuration, type ConfigurationProblem, Configurations, readConfiguration } from './configuration.ts';
+import { jsonFormat } from './formats/json.ts';
+import { sarifFormat } from './formats/sarif.ts';
+import { statisticsText, textFormat } from './formats/text.ts';
+import { readStream, readText } from './input.ts';
+import { languageNames, languageOf } from './languages.ts';
+import { displayName, folderUri, slashed } from './names.ts';
+import { progressLine } from './progress.ts';
+import { type Format, reportedOf } from './report.ts';
+import { Tally } from './tally.ts';
+import { walk, whyUnreadable } from './walk.ts';
+
+/** What the command needs of its surroundings. */
+export interface Surroundings {
+  readonly workingFolder: string;
+  readonly version: string;
+  /** Writes to standard output; false once nobody reads it any more. */
+  readonly out: (text: string) => boolean;
+  readonly complain: (text: string) => void;
+  /** Set where standard error is a terminal. */
+  readonly progress: ((text: string) => void) | undefined;
+  /** Columns of the terminal. */
+  readonly width: number;
+  /** Standard output is a terminal that may be coloured. */
+  readonly color: boolean;
+  readonly input: AsyncIterable<Uint8Array>;
+  readonly createWorkspace: (source: FileSource, settings: Settings) => Promise<Workspace>;
+}
+
+/** Runs the command; the answer is its exit status. */
+export async function check(options: CheckOptions, around: Surroundings): Promise<0 | 1 | 2> {
+  const only = options.config === undefined ? undefined : givenConfiguration(resolve(around.workingFolder, options.config), options.config);
+  if (only && 'problem' in only) {
+    around.complain(`termwise: ${only.problem}\n`);
+    return 2;
+  }
+  const run = new Run(options, around, only?.configuration);
+  for (const problem of only?.problems ?? []) run.configurationProblem(resolve(around.workingFolder, options.config ?? ''), problem);
+  return run.all();
+}
+
+type GivenConfiguration = { readonly configuration: Configuration; readonly problems: readonly ConfigurationProblem[] } | { readonly problem: string };
+
+function givenConfiguration(path: string, name: string): GivenConfiguration {
+  try {
+    return readConfiguration(readFileSync(path, 'utf8').replace(/^\uFEFF/, ''), path);
+  } catch (error) {
+    return { problem: `${name}: ${whyUnreadable(error)}` };
+  }
+}
+
+class Run {
+  private readonly start = performance.now();
+  private readonly tally = new Tally();
+  private readonly format: Format;
+  private readonly progress;
+  private readonly configurations: Configurations;
+  private readonly source: FileSource = diskFiles();
+  private readonly workspaces = new Map<Configuration, Workspace>();
+  private failed = false;
+
+  constructor(private readonly options: CheckOptions, private readonly around: Surroundings, only: Configuration | undefined) {
+    this.format = formatOf(options, around);
+    this.progress = progressLine(around.progress, around.width, () => performance.now());
+    this.configurations = new Configurations((file, problem) => this.configurationProblem(file, problem), only);
+  }
+
+  async all(): Promise<0 | 1 | 2> {
+    let reading = this.around.out(this.format.begin());
+    for (const path of this.options.paths) {
+      if (path === '-') reading &&= await this.standardInput();
+    }
+    const paths = this.options.paths.filter((path) => path !== '-').map((path) => resolve(this.around.workingFolder, path));
+    for (const walked of walk(paths, (folder) => this.configurations.at(folder))) {
+      if (!reading) break;
+      if (walked.kind === 'unreadable') this.unreadable(walked.path, walked.problem);
+      else reading = await this.file(walked.path, walked.named);
+    }
+    const summary = this.tally.summary((performance.now() - this.start) / 1000);
+    this.progress.clear();
+    this.around.out(this.format.end(summary));
+    if (this.options.stats && this.options.format !== 'text') this.around.complain(statisticsText(summary));
+    return this.failed ? 2 : summary.bySeverity.error > 0 ? 1 : 0;
+  }
+
+  configurationProblem(file: string, { line, column, message }: ConfigurationProblem): void {
+    this.complain(`${this.nameOf(file)}:${line}:${column}: ${message}`);
+    this.failed = true;
+  }
+
+  private async file(path: string, named: boolean): Promise<boolean> {
+    this.progress.step(this.tally.files, this.nameOf(path));
+    const language = (named ? this.options.language : undefined) ?? languageOf(path);
+    if (!language) {
+      this.unreadable(path, `its ending names no language; --language says which it is (${languageNames.join(', ')})`);
+      return true;
+    }
+    const read = readText(path);
+    if (!read.ok) {
+      this.unreadable(path, read.problem);
+      return true;
+    }
+    return this.checkText(slashed(path), read.text, language);
+  }
+
+  private async standardInput(): Promise<boolean> {
+    const { stdinFile, language: given } = this.options;
+    const language = given ?? (stdinFile === undefined ? undefined : languageOf(stdinFile));
+    if (!language) {
+      this.complain(`standard input: its language is not known; --language says which it is (${languageNames.join(', ')})`);
+      this.failed = true;
+      return true;
+    }
+    const file = slashed(resolve(this.around.workingFolder, stdinFile ?? inputName));
+    const read = await readStream(this.around.input);
+    if (!read.ok) {
+      this.unreadable(file, read.problem);
+      return true;
+    }
+    return this.checkText(file, read.text, language);
+  }
+
+  private async checkText(file: string, text: string, language: CheckResult['language']): Promise<boolean> {
+    const workspace = await this.workspaceFor(dirname(file));
+    let findings: ReturnType<typeof reportedOf>;
+    try {
+      const result = workspace.check(file, text, language);
+      this.tally.count(result);
+      findings = reportedOf(result, (other) => this.source.read(other), (other) => this.nameOf(other));
+    } catch (error) {
+      this.unreadable(file, `it could not be checked because of a fault in termwise (${error instanceof Error ? (error.stack ?? error.message) : String(error)})`);
+      return true;
+    } finally {
+      workspace.forget(file);
+    }
+    if (findings.length === 0) return true;
+    this.progress.clear();
+    return this.around.out(this.format.file(findings));
+  }
+
+  private async workspaceFor(folder: string): Promise<Workspace> {
+    const configuration = this.configurations.at(folder);
+    let workspace = this.workspaces.get(configuration);
+    if (!workspace) {
+      const severities = { ...configuration.severities, ...this.options.severities };
+      workspace = await this.around.createWorkspace(this.source, { severities, notes: configuration.notes });
+      this.workspaces.set(configuration, workspace);
+    }
+    return workspace;
+  }
+
+  private unreadable(path: string, problem: string): void {
+    const name = this.nameOf(path);
+    this.tally.countUnreadable(name, problem.split('\n', 1)[0] as string);
+    this.complain(`${name}: ${problem}`);
+    this.failed = true;
+  }
+
+  private complain(sentence: string): void {
+    this.progress.clear();
+    this.around.complain(`termwise: ${sentence}\n`);
+  }
+
+  private nameOf(file: string): string {
+    return this.options.stdinFile === undefined && file === slashed(resolve(this.around.workingFolder, inputName)) ? inputName : displayName(file, this.around.workingFolder);
+  }
+}
+
+/** What standard input is called; no file of a folder has this name. */
+const inputName = '<stdin>';
+
+function formatOf(options: CheckOptions, around: Surroundings): Format {
+  if (options.format === 'json') return jsonFormat();
+  if (options.format === 'sarif') return sarifFormat(around.version, folderUri(around.workingFolder));
+  return textFormat({ color: options.color && around.color, width: around.width, hints: options.hints, stats: options.stats });
+}

@@ -1,0 +1,42 @@
+/** What `--help` prints. */
+export const generalHelp = `termwise reads the units written in the comments and documentation of scripts, carries
+them through every expression without running anything, and reports what cannot be right.
+
+Usage
+  termwise check <paths…>     check files and folders
+  termwise help check         the options of check
+  termwise --version          the version
+
+Exit status: 0 nothing found at severity error, 1 findings at error, 2 bad usage or input that cannot be read.
+`;
+
+export const checkHelp = `Checks the units of scripts and nomenclature files.
+
+Usage
+  termwise check <paths…> [options]
+
+  A path is a file, a folder (searched for *.py, *.pyw and *.nomen), or - for standard input.
+  Folders are searched without what .gitignore files exclude, folders whose names begin with a dot,
+  node_modules, __pycache__ and virtual environments. A file that is named is always checked.
+
+Options
+  --format text|json|sarif    form of the output (text)
+  --severity code=level       severity of one code; level is error, warning, information, hint or off (repeatable)
+  --hints                     shows hints in text output; json and sarif always hold them
+  --stats                     adds functions, notes read and not read, findings by code, files and time
+  --language name             language of standard input and of the files named: python, nomenclature
+  --stdin-file name           name under which standard input is checked: decides its folder and language
+  --config file               configuration file, instead of the nearest termwise.json at or above each file
+  --no-color                  no colours (also: the environment variable NO_COLOR)
+  -h, --help                  this text
+
+Configuration: termwise.json, with comments allowed. All keys are optional.
+  {
+    "severities": { "hidden-unit": "error", "bare-addend": "off" },
+    "notes": { "parentheses": true, "bare": true },
+    "exclude": ["old/", "*_generated.py"]
+  }
+
+Exit status: 0 nothing found at severity error, 1 findings at error, 2 bad usage or input that cannot be read
+(the remaining files are still checked).
+`;

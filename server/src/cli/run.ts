@@ -1,0 +1,24 @@
+/** The program behind the command: reads the arguments and does what they ask. */
+import { readArguments } from './arguments.ts';
+import type { Surroundings } from './check.ts';
+import { checkHelp, generalHelp } from './help.ts';
+
+/** Runs a command line; the answer is the exit status. Only what is asked for is loaded: the version answers at once. */
+export async function run(args: readonly string[], around: Surroundings): Promise<number> {
+  const request = readArguments(args);
+  switch (request.kind) {
+    case 'version':
+      around.out(`termwise ${around.version}\n`);
+      return 0;
+    case 'help':
+      around.out(request.command === 'check' ? checkHelp : generalHelp);
+      return 0;
+    case 'misuse':
+      around.complain(`termwise: ${request.problem}\n${args.length === 0 ? `\n${generalHelp}` : 'See termwise --help.\n'}`);
+      return 2;
+    case 'check': {
+      const { check } = await import('./check.ts');
+      return check(request.options, around);
+    }
+  }
+}
