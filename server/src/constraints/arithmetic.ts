@@ -37,7 +37,7 @@ export function alternatives(context: Context, expr: Expr, values: readonly Valu
   if (!first) return values.every((value) => value.fits) && values.length > 0 ? { ...(values[0] as Value), expr } : unknown(expr, values);
   for (const other of known.slice(1)) agree(context, expr, first, other, reason(values.indexOf(other)), expr);
   const steady = known.every((value) => value.form && first.form && sameForm(value.form, first.form));
-  if (!steady && known.every((value) => value.form && isConstant(value.form))) return { expr, form: undefined, from: known };
+  if (!steady && known.every((value) => value.form && isConstant(value.form))) return { expr, form: undefined, from: known, spoilt: true };
   const measure = known.every((value) => value.measure && first.measure && sameMeasure(value.measure, first.measure)) ? first.measure : undefined;
   return { expr, form: first.form, measure, from: known, ...(known.every((value) => value.tainted) ? { tainted: true } : {}) };
 }
@@ -68,11 +68,28 @@ export function product(expr: Expr, left: Value, right: Value): Value {
   if ((left.fits && !left.literal?.value.isOne) || (right.fits && !right.literal?.value.isOne)) return { expr, form: undefined, fits: true, from: [] };
   if (left.literal) return scaled(expr, right, left.literal);
   if (right.literal) return scaled(expr, left, right.literal);
-  if (!left.form || !right.form) return unknown(expr, [left, right]);
+  if (!left.form || !right.form) return correlated(expr, left, right) ?? unknown(expr, [left, right]);
   const open = hasOpenUnit(left) || hasOpenUnit(right);
   const misuse = open ? undefined : (left.misuse ?? right.misuse ?? (isPoint(left.measure) && isPoint(right.measure) ? misused(expr, 'product', left) : undefined));
   const measure = open && (hasPoint(left) || hasPoint(right)) ? undefined : multiplyMeasures(left.measure, right.measure);
   return productValue(expr, left, right, multiplyForms(left.form, right.form), measure, misuse);
+}
+
+/**
+ * A power of something unknown. An exponent such as 0.8 or 0.14 belongs to a correlation, where it is put on characteristic
+ * numbers (common practice): the result is a pure number, with the doubt of every literal there.
+ */
+function unknownPower(expr: Expr, base: Value, exponent: Rational): Value {
+  if (base.spoilt || base.fits || exponent.isInteger) return unknown(expr, [base]);
+  const simple = exponent.den === 2n || exponent.den === 3n || exponent.den === 4n;
+  return simple ? { expr, form: undefined, from: [base], fractional: true } : { expr, form: oneForm, from: [base], tainted: true };
+}
+
+/** `Re**0.8*Pr**(1/3)`: beside one characteristic number the other is one too. */
+function correlated(expr: Expr, left: Value, right: Value): Value | undefined {
+  const [known, other] = left.form ? [left, right] : [right, left];
+  if (!other.fractional || !known.tainted || !known.form?.dimension.isOne || !isConstant(known.form)) return undefined;
+  return { expr, form: oneForm, from: [left, right], tainted: true };
 }
 
 /** A factor whose unit is open may carry whatever makes a temperature in °C right: a coefficient of a correlation. */
@@ -108,7 +125,7 @@ export function power(context: Context, expr: Expr, base: Value, exponent: Value
   if (base.literal && constant) return literalPower(expr, base.literal, constant);
   if (base.fits) return { expr, form: undefined, fits: true, from: [] };
   if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure && exponent.form && !exponent.tainted && exponent.expr?.kind !== 'binary' ? {} : { tainted: true }) };
-  if (!base.form) return unknown(expr, [base]);
+  if (!base.form) return constant && constant.pi === 0 ? unknownPower(expr, base, simpleExponent(constant)) : unknown(expr, [base]);
   if (constant && constant.pi === 0) return constantPower(expr, base, simpleExponent(constant));
   if (isConstant(base.form) && base.form.dimension.isOne) return { expr, form: oneForm, from: [base, exponent], ...taint(base) };
   context.add({ kind: 'varying-power', anchor: context.anchor, span, base, exponent });
@@ -117,7 +134,7 @@ export function power(context: Context, expr: Expr, base: Value, exponent: Value
 
 /** A root or another constant power that a library function stands for. */
 export function constantPower(expr: Expr, base: Value, exponent: Rational): Value {
-  if (!base.form) return unknown(expr, [base]);
+  if (!base.form) return unknownPower(expr, base, exponent);
   if (exponent.isZero) return { expr, form: oneForm, from: [base] };
   const point = !exponent.isOne && isPoint(base.measure);
   const misuse = base.misuse ?? (point ? misused(expr, 'power', base) : undefined);
@@ -210,7 +227,7 @@ function halfKnown(expr: Expr, left: Value, right: Value): Value {
 
 function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
   if (!left.form || !right.form) return unknown(expr);
-  if (isConstant(left.form) && isConstant(right.form) && left.form !== right.form) return { expr, form: undefined, from: [left, right] };
+  if (isConstant(left.form) && isConstant(right.form) && left.form !== right.form) return { expr, form: undefined, from: [left, right], spoilt: true };
   const lead = isConstant(left.form) && !(left.tainted && !right.tainted) ? left : isConstant(right.form) ? right : left.tainted ? right : left;
   const measure = sumMeasure(left, right, sign);
   const misuse = left.misuse ?? right.misuse;

@@ -55,6 +55,8 @@ export class Context {
   /** Names that assignments reach outside for. */
   readonly outer = new Set<string>();
   returns: Value[] = [];
+  /** What augmented products multiplied or divided by. */
+  readonly corrections = new Map<Stmt, Value>();
   depth = 0;
   /** Set while a value is only looked at again (loops), so that nothing is reported twice. */
   readonly sightings: Map<Span, Value> | undefined;

@@ -5,7 +5,7 @@ import { agree, product, quotient, sum, power } from './arithmetic.ts';
 import { assignedPaths } from './assigned.ts';
 import type { Bindings, Context } from './context.ts';
 import { bindElement, evaluate } from './expressions.ts';
-import { unknownForm, sameForm } from './form.ts';
+import { multiplyForms, unknownForm, sameForm } from './form.ts';
 import { assign, notedValue, reportDisagreement, reportMisuse } from './targets.ts';
 import { type Value, unknown } from './value.ts';
 
@@ -80,9 +80,11 @@ function augmented(context: Context, statement: AssignStmt): Value {
     case '-':
       return sum(context, whole, left, right, statement.op, { start: target.start, end: statement.value.end });
     case '*':
+      context.corrections.set(statement, right);
       return product(whole, left, right);
     case '/':
     case '//':
+      context.corrections.set(statement, right);
       return quotient(whole, left, right);
     case '**':
       return power(context, whole, left, right, whole);
@@ -146,7 +148,22 @@ function branches(context: Context, statement: Extract<Stmt, { kind: 'if' }>): b
   context.bindings = new Map(before);
   if (walk(context, statement.otherwise)) ends.push(context.bindings);
   context.bindings = ends.length === 0 ? before : joined(ends);
+  if (ends.length > 1) for (const arm of statement.arms) for (const inner of arm.body) correction(context, inner, before);
   return ends.length > 0;
+}
+
+/** `if hot: Nu *= (mu/mu_w)**0.14`: a correction that is applied only sometimes must leave the dimension as it is. */
+function correction(context: Context, statement: Stmt, before: Bindings): void {
+  if (statement.kind !== 'assign' || (statement.op !== '*' && statement.op !== '/')) return;
+  const target = statement.targets[0];
+  const path = target && pathOf(target);
+  const earlier = path === undefined ? undefined : before.get(path);
+  if (!target || !earlier?.form || earlier.literal || earlier.fits || earlier.version?.origin === 'constant') return;
+  const factor = context.corrections.get(statement);
+  if (!factor?.form || factor.literal || factor.fits) return;
+  const kept: Value = { ...earlier, expr: target, measure: undefined };
+  const changed: Value = { expr: { ...statement.value, start: target.start }, form: multiplyForms(earlier.form, factor.form), from: [earlier, factor], ...(earlier.tainted || factor.tainted ? { tainted: true } : {}) };
+  agree(context, target, changed, kept, { kind: 'choice', of: 'if' }, { start: target.start, end: statement.value.end });
 }
 
 function cases(context: Context, statement: Extract<Stmt, { kind: 'match' }>): boolean {

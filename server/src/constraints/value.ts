@@ -21,6 +21,10 @@ export interface Value {
   readonly fits?: boolean;
   /** A literal that may hide a unit multiplies it. */
   readonly tainted?: boolean;
+  /** Unknown because of a contradiction that was reported: nothing is to be concluded from it. */
+  readonly spoilt?: boolean;
+  /** Unknown, but raised to a simple fraction: beside other characteristic numbers it is one. */
+  readonly fractional?: boolean;
   /** A tuple's positions. */
   readonly items?: readonly Value[];
   /** What a member is, for what is only run over: `zip`, `enumerate`. */
@@ -81,6 +85,7 @@ export const unknownValue: Value = { expr: undefined, form: undefined, from: [] 
 
 /** A value about which nothing is known, for this expression. */
 export function unknown(expr: Expr, from: readonly Value[] = []): Value {
+  if (from.some((value) => value.spoilt)) return { expr, form: undefined, from, spoilt: true };
   return from.length === 0 && expr.kind !== 'name' ? unknownValue : { expr, form: undefined, from };
 }
 

@@ -62,7 +62,7 @@ export function evidenceOf(fault: Fault): readonly Value[] {
 }
 
 function isContradiction(fault: Fault): boolean {
-  return fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power' || fault.kind === 'scale';
+  return fault.kind === 'scale' || ((fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power') && !fault.hidden);
 }
 
 function sharedNotes(faults: readonly Fault[]): readonly NoteInForce[] {
