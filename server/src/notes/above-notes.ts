@@ -95,8 +95,8 @@ export function fieldAboveNote(out: Collector, statement: AssignStmt | DeclareSt
   if (path === undefined || !comment || statement.trailing) return false;
   const piece = noteText(comment);
   if (!piece.text.includes('[') || isCode(piece.text)) return false;
-  const other = unitsByName(out, piece);
-  if (other.length > 0 && !other.every((each) => each.name === path || !isShort(each.name))) return false;
+  const first = (firstItem.exec(piece.text.slice(0, Math.max(piece.text.indexOf('['), 0))) ?? describedItem.exec(piece.text))?.[1];
+  if (first !== undefined && first !== path && isShort(first)) return false;
   const looked = out.look(piece, 'comment', out.options(path, piece.text), true);
   const found = looked.brackets.length === 1 ? looked.brackets[0] : undefined;
   if (found) out.note({ kind: 'statement', statement, path }, piece, found, 'above');

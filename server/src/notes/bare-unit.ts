@@ -3,15 +3,19 @@ import { parseUnit } from '../quantities/parse-unit.ts';
 import type { ReadOptions } from '../quantities/unit-result.ts';
 import type { Found } from './find-unit.ts';
 import type { Piece } from './piece.ts';
+import { mayStandAlone } from './plain-words.ts';
 
-/** The bare unit at the head of a comment. `number`: the value beside it is a plain number, so that one weak symbol counts. */
-export function bareUnit(piece: Piece, number: boolean, options: ReadOptions): Found | undefined {
+/**
+ * The bare unit at the head of a comment. `number`: the value beside it is a plain number, so that one weak symbol counts.
+ * `taken`: a word is a name of the code around, so that one letter is that name and no unit.
+ */
+export function bareUnit(piece: Piece, number: boolean, taken: (name: string) => boolean, options: ReadOptions): Found | undefined {
   const text = piece.text.trimEnd();
   if (text === '' || text.length > 200) return undefined;
   for (const end of endsOf(text)) {
-    const words = text.slice(0, end).trimEnd();
+    const words = text.slice(0, end).replace(/[\s,;:.]+$/, '');
     const result = read(words, options);
-    if (!result) continue;
+    if (!result || (isLetter(words) && taken(words))) continue;
     const behind = text.slice(words.length);
     if (!(end === text.length ? wholeCounts(words, result.beyondDoubt, number) : leadingCounts(words, behind, result.beyondDoubt))) continue;
     return { unit: result.unit, hints: result.hints, span: { start: 0, end: words.length }, outer: { start: 0, end: words.length }, by: 'bare' };
@@ -30,14 +34,16 @@ function endsOf(text: string): readonly number[] {
 }
 
 function read(words: string, options: ReadOptions) {
-  if (words === '' || words.length > 50 || /^[\d.]/.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
-  if (numbersOfNoUnit.has(words.toLowerCase())) return undefined;
+  if (words === '' || words.length > 50 || /^(?:[\d.[(]|in\s)/i.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
+  if (numbersOfNoUnit.has(words.toLowerCase()) || !mayStandAlone(words) || derived.test(words) || (/^[A-Za-z]\d$/.test(words) && !/^(?:m[234]|s2)$/.test(words))) return undefined;
   const result = parseUnit(words, options);
   return result.ok ? result : undefined;
 }
 
 /** Spellings of a pure number that are remarks where no bracket stands around them. */
 const numbersOfNoUnit = new Set(['1', '--', '---', '–', '—', 'none', 'n/a', 'no unit', 'no units', 'decimal', 'fraction', 'fractional', 'ratio']);
+/** `mol fraction`: a number named after a unit. */
+const derived = /\s(?:fractions?|ratios?|numbers?|balance|chart)\b/i;
 /** Words that are units and more often something else. */
 const ordinary = new Set(['min', 'in', 'mil', 'met', 'var', 'point', 'line', 'part', 'parts', 'turn', 'all', 'each', 'cycle', 'link', 'chain', 'count', 'counts', 'item', 'items', 'max', 'era', 'rev', 'drop', 'hand', 'cup', 'are', 'second', 'dash', 'grade', 'stone', 'pole']);
 /** One or two letters that stand for a unit beside any value; common practice. */
@@ -50,12 +56,17 @@ function wholeCounts(words: string, beyondDoubt: boolean, number: boolean): bool
 
 /** A unit in front of a description: behind a comma a symbol is enough, before plain words it needs the look of a unit. */
 function leadingCounts(words: string, behind: string, beyondDoubt: boolean): boolean {
-  if (ordinary.has(words.toLowerCase())) return false;
+  if (ordinary.has(words.toLowerCase()) || /\sof\s/.test(words)) return false;
   const described = /^\s*[,;(]\s*\(?[\p{L}]{3,}/u.test(behind) || /^\s+[-–—(]+\s*[\p{L}]{3,}/u.test(behind);
   if (described) return beyondDoubt || plain.has(words) || (/^[A-Za-z]{1,2}$/.test(words) && behind.startsWith(','));
   if (/^\s*:/.test(behind)) return beyondDoubt && structured.test(words);
   if (!beyondDoubt || /^\s*(?:(?:is|are|was|of|for)\b|[=+*/<>])/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;
   return structured.test(words) || scaled.test(words);
+}
+
+/** One letter that a formula may use as a name; `m` and `s` are units first. */
+export function isLetter(words: string): boolean {
+  return /^[A-Za-z]$/.test(words) && words !== 'm' && words !== 's';
 }
 
 const structured = /[/^*·⋅²³⁻°℃µμΩ]|\*\*|[\p{L}]\s*-?\d|\p{L}\s\p{L}/u;

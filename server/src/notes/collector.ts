@@ -2,6 +2,7 @@ import type { LanguageId } from '../program/nodes.ts';
 import type { ReadOptions, Vocabulary } from '../quantities/unit-result.ts';
 import { besideUnit } from './describe.ts';
 import { type Found, type Looked, lookForUnits } from './find-unit.ts';
+import type { Names } from './names.ts';
 import type { Surroundings } from './not-units.ts';
 import { type Piece, spanIn } from './piece.ts';
 import type { ChunkNotes, Directive, Note, NoteForm, NoteProblem, NoteSettings, NoteTarget } from './types.ts';
@@ -14,7 +15,7 @@ export class Collector {
   private readonly left: ChunkNotes['unread'][number][] = [];
   private readonly places = new Set<number>();
 
-  constructor(readonly settings: NoteSettings, readonly vocabulary: Vocabulary, readonly language: LanguageId) {}
+  constructor(readonly settings: NoteSettings, readonly vocabulary: Vocabulary, readonly language: LanguageId, readonly names: Names) {}
 
   /** Options for units that stand beside a symbol and these words. */
   options(symbol: string, words: string): ReadOptions {

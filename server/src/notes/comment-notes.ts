@@ -7,6 +7,7 @@ import type { Collector } from './collector.ts';
 import { choose, type Found, type Looked } from './find-unit.ts';
 import { isCode } from './not-units.ts';
 import { partOf, type Piece } from './piece.ts';
+import type { NoteTarget } from './types.ts';
 import { unitInWords } from './unit-words.ts';
 
 /** The note behind an assignment, a declaration, a loop's or a `with` statement's head; one per target where there are as many. */
@@ -27,7 +28,7 @@ export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStm
   }
   const each = looked.brackets.length > 0 ? looked.brackets : looked.parentheses;
   if (each.length !== positions) return out.leave(piece, each);
-  for (const group of groups) group.forEach((path, at) => path !== undefined && group.length === positions && out.note({ kind: 'statement', statement, path }, piece, each[at] as Found, 'trailing'));
+  for (const group of groups) group.forEach((path, at) => path !== undefined && group.length === positions && noteAlone(out, { kind: 'statement', statement, path }, piece, each[at] as Found));
 }
 
 export function paramNote(out: Collector, chunk: Chunk, owner: FunctionStmt, param: Param): void {
@@ -64,8 +65,15 @@ export function returnNotes(out: Collector, owner: FunctionStmt, statement: Retu
   if (positions === 1) {
     const found = choose(piece.text, brackets);
     if (found) out.note({ kind: 'result', owner }, piece, found, 'trailing');
-  } else if (brackets.length === positions) brackets.forEach((found, position) => out.note({ kind: 'result', owner, position }, piece, found, 'trailing'));
+  } else if (brackets.length === positions) brackets.forEach((found, position) => noteAlone(out, { kind: 'result', owner, position }, piece, found));
   else out.leave(piece, brackets);
+}
+
+/** One of several notes in a comment: the words beside it are not its own. */
+function noteAlone(out: Collector, target: NoteTarget, piece: Piece, found: Found): void {
+  const { start, end } = found.outer;
+  const moved = { start: found.span.start - start, end: found.span.end - start };
+  out.note(target, partOf(piece, start, end), { ...found, span: moved, outer: { start: 0, end: end - start } }, 'trailing');
 }
 
 /** The text of a comment without a directive at its end. */
@@ -82,8 +90,8 @@ function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | unde
     return chosen;
   }
   if (looked.problems.length > 0 || (value && holdsNoNumber(value))) return undefined;
-  const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && isNumber(value), options) : undefined;
-  return bare ?? looked.parentheses[0] ?? unitInWords(piece, out.settings.bare, options);
+  const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && isNumber(value), out.names.occurs, options) : undefined;
+  return bare ?? looked.parentheses[0] ?? unitInWords(piece, out.settings.bare, out.names.occurs, options);
 }
 
 function valueOf(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): Expr | undefined {
@@ -115,7 +123,7 @@ function belongs(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Com
   if (!inside.includes('\n')) return true;
   if (comment.start < statement.end) return /[([{\\=+*/,-]\s*#*\s*$/.test(lineBefore(chunk, comment)) && opensOnly(chunk, statement, comment);
   const value = statement.kind === 'assign' ? statement.value : undefined;
-  const several = value?.kind === 'record' || value?.kind === 'sequence';
+  const several = value?.kind === 'record' || value?.kind === 'sequence' || chunk.comments.some((each) => each.start > statement.start && each.end < statement.end && each.text.includes('['));
   return !several || /^\s*[)\]}]+/.test(lineBefore(chunk, comment));
 }
 

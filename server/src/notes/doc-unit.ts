@@ -3,8 +3,9 @@ import { parseUnit } from '../quantities/parse-unit.ts';
 import type { ReadOptions } from '../quantities/unit-result.ts';
 import type { Collector } from './collector.ts';
 import type { DocEntry } from './doc-entries.ts';
-import { choose, followsNumber, type Found, type Looked } from './find-unit.ts';
+import { choose, isValue, type Found, type Looked } from './find-unit.ts';
 import { type Piece, partOf } from './piece.ts';
+import { mayStandAlone } from './plain-words.ts';
 import { unitInWords } from './unit-words.ts';
 
 export interface EntryUnit {
@@ -27,45 +28,45 @@ export function unitOfEntry(out: Collector, entry: DocEntry, citations: boolean,
     if (telling.length > 0) return undefined;
   }
   if (looked.some((each) => each.looked.problems.length > 0)) return undefined;
-  return withoutBracket(looked, type, body, options);
+  return withoutBracket(out.names.occurs, looked, type, body, options);
 }
 
-function withoutBracket(looked: readonly { readonly piece: Piece; readonly looked: Looked }[], type: Piece | undefined, body: Piece | undefined, options: ReadOptions): EntryUnit | undefined {
+function withoutBracket(taken: (name: string) => boolean, looked: readonly { readonly piece: Piece; readonly looked: Looked }[], type: Piece | undefined, body: Piece | undefined, options: ReadOptions): EntryUnit | undefined {
   for (const { piece, looked: each } of looked) {
-    const found = each.parentheses.find((one) => !followsNumber(piece.text, one.outer.start));
+    const found = each.parentheses.find((one) => !isValue(piece.text, one));
     if (found) return { piece, found };
   }
-  const typed = type && unitOfType(type, options);
+  const typed = type && unitOfType(type, taken, options);
   if (type && typed) return { piece: type, found: typed };
-  const found = body && unitInWords(body, true, options);
+  const found = body && unitInWords(body, true, taken, options);
   return body && found ? { piece: body, found } : undefined;
 }
 
 /** A value with its unit in prose is no note, unless it is the default. */
 function counted(text: string, found: Found): boolean {
-  return !followsNumber(text, found.outer.start) || /\bdefaults?\b[^.]*$/i.test(text.slice(0, found.outer.start));
+  return !isValue(text, found) || /\bdefaults?\b[^.]*$/i.test(text.slice(0, found.outer.start));
 }
 
 const types = /^(?:\w+\s+of\s+)?(?:float|int|integer|array|array[_-]?like|ndarray|np\.\w+|numpy\.\w+|numeric|number|scalar|real|double|Series|pd\.\w+|pandas\.\w+|list|tuple|sequence|floats|arrays?)\b/i;
 /** No quantity is counted in these. */
-const others = /\b(?:bool|boolean|str|string|dict|OrderedDict|DataFrame|object|callable|function|class|Dataset|path|file|module|instance|datetime|DatetimeIndex|Timestamp)\b/i;
+const others = /\b(?:bool|boolean|str|string|dict|OrderedDict|DataFrame|object|callable|function|class|Dataset|path|file|module|instance|datetime|DatetimeIndex|Timestamp|dictionary|date)\b/i;
 
 function holdsNoNumber(type: string): boolean {
   return others.test(type) && !/\b(?:float|int|array|array[_-]?like|ndarray|numeric|number|scalar|Series)\b/i.test(type);
 }
 
 /** `float, m/s`, `array-like, kg/kg`, `float in m`, or the unit itself: `m/s`. */
-function unitOfType(type: Piece, options: ReadOptions): Found | undefined {
+function unitOfType(type: Piece, taken: (name: string) => boolean, options: ReadOptions): Found | undefined {
   const { text } = type;
   const commas = [...text.matchAll(/,\s*/g)];
   for (const comma of commas.reverse()) {
     const start = comma.index + comma[0].length;
     const part = text.slice(start).replace(/\.?\s*$/, '').replace(/,.*$/s, '');
-    if (part === '' || !types.test(text) || /^(?:optional|default|in|shape|length)\b/i.test(part) || part === '1') continue;
+    if (part === '' || /^\d(?!\/)|[{}'"]/.test(part) || !types.test(text) || /^(?:optional|default|in|shape|length)\b/i.test(part) || part === '1' || !mayStandAlone(part)) continue;
     const result = parseUnit(part, options);
     if (result.ok) return { unit: result.unit, hints: result.hints, span: { start, end: start + part.length }, outer: { start: comma.index, end: start + part.length }, by: 'words' };
   }
-  const worded = unitInWords(partOf(type, 0), false, options);
+  const worded = unitInWords(partOf(type, 0), false, taken, options);
   if (worded) return worded;
   if (types.test(text) || text.length > 30 || !/[/^*²³⁻°·]|\d/.test(text) || /^\d/.test(text)) return undefined;
   const whole = parseUnit(text, options);

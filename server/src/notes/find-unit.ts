@@ -4,8 +4,9 @@ import type { ReadOptions, UnitHint, UnitUnread } from '../quantities/unit-resul
 import type { Unit } from '../quantities/unit.ts';
 import type { Span } from '../text/span.ts';
 import { type Bracketed, bracketsIn } from './brackets.ts';
-import { isNoUnit, type Surroundings } from './not-units.ts';
+import { isNoUnit, isSeries, type Surroundings } from './not-units.ts';
 import type { Piece } from './piece.ts';
+import { mayStandAlone } from './plain-words.ts';
 
 /** A unit read from a text. */
 export interface Found {
@@ -34,60 +35,70 @@ export function lookForUnits(piece: Piece, around: Surroundings, parentheses: bo
   if (!text.includes('[') && !text.includes('(')) return nothing;
   const looked = { brackets: [] as Found[], parentheses: [] as Found[], problems: [] as Looked['problems'][number][], unread: [] as Looked['unread'][number][] };
   let taken = 0;
+  let round = 0;
   for (const bracket of bracketsIn(text)) {
     if (bracket.start < taken) continue;
-    const span = { start: bracket.start + 1, end: bracket.end - 1 };
+    const blank = bracket.inner.length - bracket.inner.trimStart().length;
+    const inner = bracket.inner.trim();
+    const span = { start: bracket.start + 1 + blank, end: bracket.start + 1 + blank + inner.length };
     const outer = { start: bracket.start, end: bracket.end };
-    const unread = { text: bracket.inner, span };
+    const unread = { text: inner, span };
     if (bracket.open === '(') {
-      const found = parentheses && !bracket.glued ? readParenthesis(bracket, span, outer, options) : undefined;
+      if (bracket.start < round) continue;
+      const found = parentheses && standsFree(text, bracket) ? readParenthesis(bracket, span, outer, options) : undefined;
       if (found) {
         looked.parentheses.push(found);
         taken = bracket.end;
-      } else if (!bracket.glued && bracket.inner.length < 30) looked.unread.push(unread);
+      } else if (inExpression(text, bracket)) round = Math.max(round, bracket.end);
+      else if (!bracket.glued && bracket.inner.length < 30) looked.unread.push(unread);
     } else if (bracket.glued && !gluedUnit.test(bracket.inner)) looked.unread.push(unread);
     else if (isNoUnit(text, bracket, around)) looked.unread.push(unread);
     else {
-      const lead = unitLabel.exec(bracket.inner)?.[0].length ?? 0;
-      const result = parseUnit(bracket.inner.slice(lead), options);
-      if (result.ok && (!bracket.glued || result.beyondDoubt)) looked.brackets.push({ unit: result.unit, hints: result.hints, span: { start: span.start + lead, end: span.end }, outer, by: 'bracket' });
+      const lead = unitLabel.exec(inner)?.[0].length ?? 0;
+      const result = parseUnit(inner.slice(lead), options);
+      if (result.ok && (!bracket.glued || result.beyondDoubt || inner === '-')) looked.brackets.push({ unit: result.unit, hints: result.hints, span: { start: span.start + lead, end: span.end }, outer, by: 'bracket' });
       else {
         looked.unread.push(unread);
-        if (!result.ok && result.triesToBeUnit && !bracket.glued) looked.problems.push({ text: bracket.inner.slice(lead), span: { start: span.start + lead, end: span.end }, fault: result });
+        if (!result.ok && result.triesToBeUnit && !bracket.glued) looked.problems.push({ text: inner.slice(lead), span: { start: span.start + lead, end: span.end }, fault: result });
       }
     }
   }
   return looked;
 }
 
+/** A parenthesis in running text: not part of an expression such as `K/((g/kg)^2)`. */
+function standsFree(text: string, bracket: Bracketed): boolean {
+  return !inExpression(text, bracket) && (bracket.start === 0 || /\s/.test(text[bracket.start - 1] as string)) && /^(?:[\s.,;:]|$)/.test(text.slice(bracket.end, bracket.end + 1));
+}
+
+function inExpression(text: string, { start, glued }: Bracketed): boolean {
+  return glued || /[/*^·⋅=+(-]\s*$/.test(text.slice(Math.max(start - 3, 0), start));
+}
+
 /** `[units: m/s]`, `[unit = m]`. */
 const unitLabel = /^\s*(?:units?|in)\s*[:=]\s*/i;
 /** `velocity[m/s]`: glued, and no index. */
-const gluedUnit = /[\p{L})]\s*\/\s*[\p{L}(]|\^|°|[²³⁻]/u;
+const gluedUnit = /^-$|[\p{L})]\s*\/\s*[\p{L}(]|\^|°|[²³⁻]/u;
 /** Symbols of two letters that are seldom names, in `(Pa)`; common practice. */
 const plainInParentheses = new Set(['Pa', 'Hz', 'ft', 'kg', '°', '%']);
 
 function readParenthesis(bracket: Bracketed, span: Span, outer: Span, options: ReadOptions): Found | undefined {
   const inner = bracket.inner.trim();
-  if (inner === '' || /[:=,;'"]/.test(inner.replace(/:math:/g, '')) || doubtful.test(inner)) return undefined;
-  const result = parseUnit(bracket.inner, options);
-  if (!result.ok || !(result.beyondDoubt || plainInParentheses.has(inner)) || isNumberOnly(inner)) return undefined;
+  if (inner === '' || /[:=,;'"]/.test(inner.replace(/:math:/g, '')) || isSeries(inner) || !mayStandAlone(inner) || doubtful.test(inner) || /^\d(?!\/|0\^|0?e)/.test(inner)) return undefined;
+  const result = parseUnit(inner, options);
+  if (!result.ok || !(result.beyondDoubt || plainInParentheses.has(inner))) return undefined;
   return { unit: result.unit, hints: result.hints, span, outer, by: 'parenthesis' };
 }
 
 /** Words in parentheses that read as units and are others: `(min)`, `(max)`, `(sec)`, `(s)`. */
 const doubtful = /^(?:min|max|sec|rev|mil|met|var|none|total|dim|fraction|ratio|decimal|dimensionless units?)$/i;
 
-function isNumberOnly(text: string): boolean {
-  return /^[\d\s.,+\-*/^eE·×%]*$/.test(text) && /\d/.test(text);
-}
-
 /**
  * The bracket that counts among several: side by side, the last (a symbol stands before its unit); alternatives of one
  * dimension give the dimension without a scale; of several, nothing; otherwise the first.
  */
 export function choose(text: string, found: readonly Found[]): Found | undefined {
-  const telling = found.length > 1 ? found.filter((each) => !followsNumber(text, each.outer.start)) : found;
+  const telling = found.length > 1 ? found.filter((each) => !isValue(text, each)) : found;
   let [chosen, ...rest] = telling.length > 0 ? telling : found;
   for (const next of rest) {
     if (!chosen) return undefined;
@@ -113,7 +124,14 @@ export function alternatives(first: Found, second: Found): Found | undefined {
   return { unit: { dimension: first.unit.dimension, scale: undefined, text: written }, hints: [], span, outer: { start: first.outer.start, end: second.outer.end }, by: first.by };
 }
 
-/** `25 [degC]`: a value and its unit, in prose. */
-export function followsNumber(text: string, at: number): boolean {
-  return /\d\s*$/.test(text.slice(Math.max(at - 8, 0), at)) && !/[\p{L}_]\d+\s*$/u.test(text.slice(Math.max(at - 20, 0), at));
+const value = /(?:^|[=<>≤≥~±,(]|\b(?:at|of|to|than|by|from|above|below|over|under|is|are|was|about|around|approximately|and|between|until|or|only|up|minus|plus|equals?|be|with|in|every|within|exceeds?|defaults?|default:))\s*[-+]?\d[\d.,]*(?:[eE][-+]?\d+)?\s*$/i;
+
+/** A value with its unit; a plain number carries none. */
+export function isValue(text: string, found: Found): boolean {
+  return !found.unit.dimension.isOne && followsNumber(text, found.outer.start);
+}
+
+/** `at 25 [degC]`: a value and its unit, in prose; `stream 1 [K]` is none. */
+function followsNumber(text: string, at: number): boolean {
+  return /\d\s*$/.test(text.slice(Math.max(at - 4, 0), at)) && value.test(text.slice(Math.max(at - 40, 0), at));
 }

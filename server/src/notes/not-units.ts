@@ -15,7 +15,14 @@ const marks = /^(?:out|in\s*[,/]\s*out|inout|i|o|i\s*[,/]\s*o|opt|optional|optio
 const numbers = /^[\s\d.,:;+\-–~<>=eE]*$/;
 const shape = /\d\s*[x×]|[x×]\s*\d|\b[A-Za-z]\w{0,2}\s+x\s+[A-Za-z]\w{0,2}\b|\bby\b/;
 const converts = /->|→|=>/;
+/** `k1-k6`, `a1, a2`. */
+const series = /^([A-Za-z]+)\d+\s*(?:[-–,]|to|and)\s*\1\d+$/;
 const textual = /["'=<>!?{}@]|\.\.(?!\.?$)|[^\s.\d]\.{2,}/;
+
+/** `k1-k6`: members of a numbered series. */
+export function isSeries(text: string): boolean {
+  return series.test(text);
+}
 
 /** True where a square bracket cannot hold a unit, whatever its symbols read as. */
 export function isNoUnit(text: string, bracket: Bracketed, around: Surroundings): boolean {
@@ -26,7 +33,7 @@ export function isNoUnit(text: string, bracket: Bracketed, around: Surroundings)
   if (inner === '1') return isCitation(text, bracket, around);
   if (inner === 'in') return isDirection(text, bracket, around);
   if (marks.test(inner) || converts.test(inner) || (numbers.test(inner) && /\d/.test(inner))) return true;
-  if (textual.test(inner.replace(/<\/?su[pb]>|\\[a-z]+\{|\{[^{}]*\}/gi, '')) || shape.test(inner)) return true;
+  if (textual.test(inner.replace(/<\/?su[pb]>|\\[a-z]+\{|\{[^{}]*\}/gi, '')) || shape.test(inner) || series.test(inner)) return true;
   return followsCode(text, bracket.start);
 }
 
@@ -40,7 +47,7 @@ function followsCode(text: string, at: number): boolean {
 
 function isEmptyList(text: string, bracket: Bracketed): boolean {
   const before = text.slice(0, bracket.start).trimEnd();
-  return before !== '' && !/[\p{L})]$/u.test(before);
+  return before !== '' && !/[\p{L}),]$/u.test(before);
 }
 
 const cites = /(?:\b(?:see|from|by|in|of|ref|refs|reference|eq|eqn|equation|after|and|table|fig|figure|al|per|source|model|method|paper|also)\.?|[,;&]|\d\))\s*$/i;

@@ -1,5 +1,5 @@
 /** All unit notes and directives of one chunk: one walk over its statements, one over its comments. */
-import type { Chunk, Comment, DocText, FunctionStmt, LanguageId } from '../program/nodes.ts';
+import type { Chunk, Comment, DocText, LanguageId } from '../program/nodes.ts';
 import type { Vocabulary } from '../quantities/unit-result.ts';
 import { symbolNotes } from './above-notes.ts';
 import { Collector } from './collector.ts';
@@ -12,14 +12,14 @@ import { NoteWalk } from './walk.ts';
 
 /** Reads the notes of a chunk; spans are relative to it. Never throws. */
 export function readChunkNotes(chunk: Chunk, settings: NoteSettings, vocabulary: Vocabulary, language: LanguageId): ChunkNotes {
-  const out = new Collector(settings, vocabulary, language);
+  const names = new Names(chunk);
+  const out = new Collector(settings, vocabulary, language, names);
   const walk = new NoteWalk(out, chunk);
   walk.block(chunk.statements, undefined, undefined);
-  const names = new Names(chunk);
   readComments(out, chunk, walk, names);
-  if (chunk.doc) docLines(out, chunk, chunk.doc, () => true, names);
-  for (const fn of walk.functions) if (fn.doc) docLines(out, chunk, fn.doc, () => false, names);
-  for (const cls of walk.classes) if (cls.doc) docLines(out, chunk, cls.doc, () => false, names);
+  if (chunk.doc) docLines(out, chunk.doc, () => true, names);
+  for (const fn of walk.functions) if (fn.doc) docLines(out, fn.doc, () => false, names);
+  for (const cls of walk.classes) if (cls.doc) docLines(out, cls.doc, () => false, names);
   return out.result;
 }
 
@@ -51,13 +51,10 @@ function adjacent(chunk: Chunk, a: Comment, b: Comment): boolean {
 }
 
 /** Directives in documentation stand on lines of their own. */
-function docLines(out: Collector, chunk: Chunk, doc: DocText, wholeFile: () => boolean, names: Names): void {
+function docLines(out: Collector, doc: DocText, wholeFile: () => boolean, names: Names): void {
   if (!/termwise|empirical|depends on/i.test(doc.text)) return;
   for (const line of linesOf(doc.text)) {
     if (line.text === '') continue;
     for (const directive of directivesIn(partOf(doc, line.start, line.end), wholeFile, out.vocabulary, names.occurs)) out.directive(directive);
   }
-  void chunk;
 }
-
-export type { FunctionStmt };

@@ -1,12 +1,17 @@
 /** Units without brackets in running text: "in degrees C", "units: m/s", "Sea pressure, dbar", "°F [IP] or °C [SI]". */
 import { parseUnit } from '../quantities/parse-unit.ts';
 import type { ReadOptions, UnitRead } from '../quantities/unit-result.ts';
+import { isLetter } from './bare-unit.ts';
 import { alternatives, type Found } from './find-unit.ts';
 import type { Piece } from './piece.ts';
+import { mayStandAlone } from './plain-words.ts';
 
-/** Any of the forms, the most explicit first. `last`: words behind the last comma count. */
-export function unitInWords(piece: Piece, last: boolean, options: ReadOptions): Found | undefined {
-  return dualUnit(piece, options) ?? introducedUnit(piece, options) ?? (last ? unitBehindComma(piece, options) : undefined);
+/** Any of the forms, the most explicit first. `last`: words behind the last comma count. `taken`: a word is a name of the code around. */
+export function unitInWords(piece: Piece, last: boolean, taken: (name: string) => boolean, options: ReadOptions): Found | undefined {
+  if (isDual(piece.text)) return dualUnit(piece, options);
+  const found = introducedUnit(piece, options) ?? (last ? unitBehindComma(piece, options) : undefined);
+  const words = found && piece.text.slice(found.span.start, found.span.end);
+  return words !== undefined && isLetter(words) && taken(words) ? undefined : found;
 }
 
 const introductions = /(?:^|[\s(,;:])(?:in\s+(?:the\s+)?units?\s+of|in|units?\s*(?:[:=]|is|are|of)|expressed\s+(?:in|as)|measured\s+in)\s+(?=\S)/gi;
@@ -24,7 +29,7 @@ function introducedUnit(piece: Piece, options: ReadOptions): Found | undefined {
 }
 
 const mostWords = 6;
-const segmentEnd = /[;:)!?[]|[.,](?=\s|$)|\n\s*\n|\s[-–—]+\s/;
+const segmentEnd = /[;:)!?[]|[.,](?=\s|$)|\n\s*\n|\s[-–—]+\s|(?<![/*·^])\s\(/;
 
 /** The longest run of words from `start` that is a unit. */
 function leadingWords(text: string, start: number, options: ReadOptions): { readonly result: UnitRead; readonly end: number } | undefined {
@@ -34,7 +39,7 @@ function leadingWords(text: string, start: number, options: ReadOptions): { read
   const ends = [...segment.matchAll(/\S+/g)].slice(0, mostWords).map((word) => word.index + word[0].length);
   for (let at = ends.length - 1; at >= 0; at--) {
     const words = segment.slice(0, ends[at]);
-    if (notUnits.has(words.toLowerCase()) || /^\d/.test(words)) continue;
+    if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?)$/i.test(words) || /^\d/.test(words) || !mayStandAlone(words)) continue;
     const result = parseUnit(words, options);
     if (!result.ok || isPureNumber(words)) continue;
     const whole = ends[at] === segment.trimEnd().length;
@@ -93,7 +98,7 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
   const tail = text.slice(comma + 1, end);
   const start = comma + 1 + tail.length - tail.trimStart().length;
   const words = tail.trim();
-  if (words === '' || /^\d/.test(words) || isListed(text.slice(0, comma))) return undefined;
+  if (words === '' || /^\d/.test(words) || /^\w+\s+\/\s/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
   const result = parseUnit(words, options);
   if (!result.ok || /^(?:1|-+|none|n\/a|ratio|decimal|fraction)$/i.test(words)) return undefined;
   const sure = result.beyondDoubt || fullNames.test(words) || (whole && /^[A-Za-zµΩ]{1,3}$/.test(words) && !notUnits.has(words.toLowerCase()) && /[A-Za-z]{4}/.test(text.slice(0, comma)));
@@ -106,25 +111,29 @@ function isListed(before: string): boolean {
   return /(?:^|[\s,])[A-Za-z]\w?\s*$/.test(before) && !/(?:^|,\s*)(?:up|to|in)\s*$/.test(before);
 }
 
-const dual = /^(.*?)\s*[[(](?:IP|SI|US|imperial|metric)[\])]\s*(?:,?\s*or|,|\/)\s*(.{1,40}?)\s*[[(](?:IP|SI|US|imperial|metric)[\])]/is;
+const mark = '[[(](?:IP|SI|US|imperial|metric)[\\])]';
+const dual = new RegExp(`^(.*?)\\s*${mark}\\s*(?:,?\\s*or|,|/)\\s*(?:in\\s+)?(.{1,40}?)\\s*(?:${mark}|$)`, 'is');
+
+/** Whether a text names a unit in each of two systems. */
+function isDual(text: string): boolean {
+  return /[[(](?:IP|SI|US|imperial|metric)[\])]\s*(?:,?\s*or|,|\/)\s/i.test(text);
+}
 
 /** `°F [IP] or °C [SI]`: one quantity in two systems. */
 function dualUnit(piece: Piece, options: ReadOptions): Found | undefined {
-  if (!/[[(](?:IP|SI|US)[\])]/.test(piece.text)) return undefined;
   const match = dual.exec(piece.text);
   if (!match) return undefined;
   const [whole, before = '', second = ''] = match;
-  const start = match.index + whole.lastIndexOf(second);
+  const start = whole.lastIndexOf(second);
   const right = parseUnit(second, options);
   if (!right.ok) return undefined;
-  const words = [...before.matchAll(/\S+/g)].slice(-mostWords);
-  for (const word of words) {
-    const text = before.slice(word.index);
-    const left = parseUnit(text, options);
+  for (const word of [...before.matchAll(/\S+/g)].slice(-mostWords)) {
+    if (/^in$/i.test(word[0])) continue;
+    const left = parseUnit(before.slice(word.index), options);
     if (!left.ok || left.unit.dimension !== right.unit.dimension) continue;
-    const first = { start: match.index + word.index, end: match.index + before.length };
+    const first = { start: word.index, end: before.length };
     const other = { start, end: start + second.length };
-    return alternatives({ unit: left.unit, hints: [], span: first, outer: first, by: 'words' }, { unit: right.unit, hints: [], span: other, outer: { start: other.start, end: match.index + whole.length }, by: 'words' });
+    return alternatives({ unit: left.unit, hints: [], span: first, outer: first, by: 'words' }, { unit: right.unit, hints: [], span: other, outer: { start: other.start, end: whole.length }, by: 'words' });
   }
   return undefined;
 }
