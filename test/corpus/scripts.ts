@@ -1,0 +1,23 @@
+/** The scripts of a corpus, as the command would find and read them. */
+import { resolve } from 'node:path';
+import { defaultConfiguration } from '../../server/src/cli/configuration.ts';
+import { readText } from '../../server/src/cli/input.ts';
+import { languageOf } from '../../server/src/cli/languages.ts';
+import { walk } from '../../server/src/cli/walk.ts';
+
+export interface Script {
+  readonly file: string;
+  readonly text: string;
+}
+
+/** Python scripts below a folder, or the one that is named; what cannot be read is told to `unreadable`. */
+export function* scriptsIn(folder: string, unreadable: (file: string, problem: string) => void): Generator<Script> {
+  for (const walked of walk([resolve(folder)], () => defaultConfiguration)) {
+    if (walked.kind === 'unreadable') unreadable(walked.path, walked.problem);
+    else if (languageOf(walked.path) === 'python') {
+      const read = readText(walked.path);
+      if (read.ok) yield { file: walked.path, text: read.text };
+      else unreadable(walked.path, read.problem);
+    }
+  }
+}
