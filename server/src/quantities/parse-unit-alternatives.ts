@@ -5,7 +5,7 @@ import { sameUnit } from './unit.ts';
 /** The dimension that all alternatives share; the scale stays unknown unless they are one unit. Undefined where it is none of this kind. */
 export function readAlternatives(text: string, options: ReadOptions, parse: (text: string, options: ReadOptions) => UnitResult): UnitRead | undefined {
   if (!/\sor\s|\|/.test(text)) return undefined;
-  const parts = text.split(/\s+or\s+|\s*\|\s*/).map((part) => part.replace(/\s*[[(]\s*(?:IP|SI|US|USC|imperial|metric)\s*[\])]\s*$/i, '').trim());
+  const parts = text.split(/\s+or\s+(?:in\s+)?|\s*\|\s*/).map((part) => part.replace(/\s*[[(]\s*(?:IP|SI|US|USC|imperial|metric)\s*[\])]\s*$/i, '').trim());
   if (parts.length < 2 || parts.length > 3 || parts.some((part) => part === '' || /^[-\d]/.test(part))) return undefined;
   const units = parts.map((part) => parse(part, options));
   const first = units[0];

@@ -17,6 +17,7 @@ export function unread(text: string, span: Span, reason: UnitFault, plain: strin
 /** A few words, most of them units, with a slash, a power or a product sign between them. */
 function looksLikeUnit(plain: string, reason: UnitFault): boolean {
   if (!/[/^*·]|\p{L}-\d/u.test(plain) || /\p{L}\(/u.test(plain.replace(/\bsqrt\(/g, '')) || plain.length > 50) return false;
+  if (reason.kind === 'unexpected' && !/^[)(/*^.·]$/.test(reason.found)) return false;
   const words = plain.match(/[\p{L}°%]+/gu) ?? [];
   const spaces = plain.trim().split(/\s+/).length - 1;
   if (words.length === 0 || words.length > 6 || spaces > 4) return false;

@@ -246,6 +246,7 @@ class Reader {
     if (!match) return Rational.one;
     const value = ratio(match[2] ?? match[3] ?? '');
     if (!value || value.isZero || value.compare(largest) > 0) return this.badPower(from);
+    if (match[1] === undefined && (value.isOne || value.compare(largestDigit) > 0)) return this.badPower(from);
     if (match[1] !== undefined) this.marks.powers++;
     return match[1] === '-' ? value.neg() : value;
   }
@@ -318,6 +319,8 @@ const base = (name: string): Dimension => Dimension.base(name);
 const pressure = base('M').div(base('L')).div(base('T').pow(Rational.of(2)));
 const voltage = base('M').mul(base('L').pow(Rational.of(2))).div(base('T').pow(Rational.of(3))).div(base('I'));
 const largest = Rational.of(20);
+/** Digits behind a symbol without a caret: beyond this they number a name. */
+const largestDigit = Rational.of(12);
 /** The standard atmosphere in pascal: the zero of gauge pressures. */
 const standardAtmosphere = Rational.of(101325);
 

@@ -30,8 +30,8 @@ export interface SymbolContext {
   readonly first: boolean;
 }
 
-const word = /[\p{L}°º℃℉%‰％℧′″#☉⊕€£$_]+/uy;
-const wordWithDigits = /[\p{L}°º℃℉%‰％℧′″#☉⊕€£$_]+(?:\d+[\p{L}_]+)*\d*/uy;
+const word = /[\p{L}°º℃℉%‰％℧′″☉⊕€£$_]+|#(?=\s*\/)/uy;
+const wordWithDigits = /[\p{L}°º℃℉%‰％℧′″☉⊕€£$_]+(?:\d+[\p{L}_]+)*\d*|#(?=\s*\/)/uy;
 
 /** The symbol or name that begins at an offset; undefined where none is known. */
 export function symbolAt(text: string, at: number, context: SymbolContext): SymbolFound | undefined {
@@ -84,9 +84,11 @@ function own(whole: string, plain: string, at: number, vocabulary: Vocabulary | 
   return undefined;
 }
 
-const degrees = /(?:deg(?:ree)?s?\.?|°|º)[\s_-]*(celsius|centigrade|fahrenheit|rankine|kelvins?|[cfkr])(?![\p{L}])/iuy;
+const degrees = /(?:deg(?:ree)?s?\.?|°|º)[\s_-]*(cel[sc]ius|centigrade|fahrenheit|rankine|kelvins?|[cfkr])(?![\p{L}])/iuy;
 const scales: Readonly<Record<string, string>> = { c: 'degC', f: 'degF', r: 'degR', k: 'K' };
-const scaleNames = /(celsius|centigrade|fahrenheit|rankine)(?:\s+degrees?)?(?!\p{L})/iuy;
+const scaleNames = /(cel[sc]ius|centigrade|fahrenheit|rankine)(?:\s+degrees?)?(?!\p{L})/iuy;
+/** Heating and cooling degree-days: of which degree, the house decides. */
+const degreeTimes = /deg(?:ree)?[\s-](?:days?|hours?)(?!\p{L})/iuy;
 const compass = /[°º][NSEW](?![\p{L}\d])/uy;
 
 /** `deg C`, `degrees Celsius`, `°F`, `Celsius degree`; `°N` is an angle. */
@@ -99,6 +101,8 @@ function degree(text: string, at: number): SymbolFound | undefined {
     const unit = findSymbol(symbol)?.unit;
     return unit && one(at + found[0].length, unit, symbol, 'sure');
   }
+  const days = match(degreeTimes, text, at);
+  if (days !== undefined) return one(at + days.length, { dimension: Dimension.base('Θ').mul(Dimension.base('T')), scale: undefined, text: days }, days, 'sure');
   if (match(compass, text, at) === undefined) return undefined;
   const angle = findSymbol('deg')?.unit;
   return angle && one(at + 2, angle, 'deg', 'sure');
@@ -113,7 +117,8 @@ function compound(text: string, at: number, plain: string): SymbolFound | undefi
     const next = text.slice(end, end + 2);
     if (/^[\p{L}_]/u.test(next) || (each.text.includes('-') && /^(?:[\^²³\d]|[-+]\d)/.test(next))) continue;
     const { unit, weak } = compoundUnit(each);
-    return one(end, unit, each.entry.symbols[0] as string, weak && each.text.length < 5 ? 'weak' : 'sure');
+    const phrase = each.named && !/ (?:per|of) | (?:gauge|gage|absolute)$/.test(each.text) && !each.text.endsWith('s');
+    return one(end, unit, each.entry.symbols[0] as string, weak && each.text.length < 5 ? 'weak' : phrase ? 'word' : 'sure');
   }
   return undefined;
 }

@@ -25,7 +25,7 @@ export function parseUnit(text: string, options: ReadOptions = {}): UnitResult {
   const key = `${options.vocabulary?.fingerprint ?? ''}|${describesTemperature(options.describes) ? 't' : ''}|${text}`;
   const known = cache.get(key);
   if (known) return known;
-  const result = readAny(text, options);
+  const result = readAny(text, options, true);
   if (cache.size > 20000) cache.clear();
   cache.set(key, result);
   return result;
@@ -37,39 +37,65 @@ export function readLeadingUnit(text: string, options: ReadOptions = {}): (UnitR
   if (whole.ok) return { ...whole, end: text.length };
   const ends = [...text.slice(0, longest).matchAll(/[,;:]| [-–—=(]|\s/g)].map((match) => match.index);
   for (const end of ends.slice(0, 6).reverse()) {
-    const part = text.slice(0, end).trimEnd();
+    const part = text.slice(0, end).replace(/[\s,;:]+$/, '');
+    const rest = text.slice(end);
+    if (/^\d/.test(part) && !/^1\s*\/|^10\s*(?:\^|\*\*|[⁻⁰-⁹])/.test(part)) continue;
     const result = parseUnit(part, options);
-    if (result.ok && result.beyondDoubt && !endsInWord(part, text.slice(end))) return { ...result, end: part.length };
+    if (!result.ok || !result.beyondDoubt || endsInWord(part, rest)) continue;
+    return goesOn(rest, options) ? undefined : { ...result, end: part.length };
   }
   return undefined;
 }
 
 /** `m2 a wall`, `m/s in pipe`: the last word belongs to the description. */
 function endsInWord(part: string, rest: string): boolean {
-  return /^\s*\p{L}/u.test(rest) && /[\s.](?:a|in|at|h|d|t|u|r|y|S|T|H|A|L|G|P|C|F|N|g|l|per|of|for|or|to|air|water|gas|steam|fuel|ice|snow|soil|wet|dry)$/.test(part) && !/^\S+$/.test(part);
+  return /^\s*\p{L}/u.test(rest) && !/(?:deg(?:ree)?s?\.?|°)\s?[CFKR]$/.test(part) && /[\s.](?:a|in|at|h|d|t|u|r|y|S|T|H|A|L|G|P|C|F|N|g|l|per|of|for|or|to|air|water|gas|steam|fuel|ice|snow|soil|wet|dry)$/.test(part) && !/^\S+$/.test(part);
 }
 
-function readAny(text: string, options: ReadOptions): UnitResult {
-  const trimmed = text.trim().replace(/(?<=[^.\s])[.,;:]$/, (mark, at: number, whole: string) => (mark === '.' && /(?:^|\W)(?:in|ft|sq|cu|lbs?|yd|pc|min|abs)$/.test(whole.slice(0, at)) ? mark : ''));
+/** `mm to m`, `kB * T / q`, `ft [IP] or m [SI]`: what follows says that more than one unit is meant, or none. */
+function goesOn(rest: string, options: ReadOptions): boolean {
+  if (/^\s*(?:[/*+=^<>→]|->)/.test(rest) || /^\s*,\s*\p{L}+ or\s/u.test(rest) || /^\s*-\s*\w+\s*=/.test(rest)) return true;
+  const other = /^\s*(?:\[\w+\]\s*)?(?:or|to)\s+(?:in\s+)?(\S+)/.exec(rest)?.[1];
+  const next = other === undefined ? undefined : parseUnit(other, options);
+  return next?.ok === true && (next.beyondDoubt || (other as string).length < 4);
+}
+
+/** `in` before a unit that makes no inch of it: `in metres`, but `in lbf` and `in Hg`. */
+const preposition = /^in\s+(?=[\p{L}°%(])(?!(?:lbf?|oz|ozf|kip|kips|hg|h2o|wg|wc|w\.?[cg]|of|water|per|ton|ft|kgf|tonf)(?!\p{L}))/iu;
+
+/** `nearest`: look for the nearest spelling where the text cannot be read. */
+function readAny(text: string, options: ReadOptions, nearest: boolean): UnitResult {
+  const trimmed = withoutStop(text.trim());
   if (trimmed !== 'None' && nothings.has(trimmed.toLowerCase())) return read({ ...pureNumber, text: text.trim() }, [], /less|dimension/i.test(trimmed));
   if (trimmed.length > longest) return refusal(text, { kind: 'unexpected', found: trimmed.slice(0, 10) });
   if (/^dim(?:ension)?\s/.test(trimmed)) return readDimension(text) ?? refusal(text, { kind: 'unexpected', found: trimmed.slice(0, 10) });
-  const plain = plainText(trimmed);
+  if (/\\(?:left|right)(?![a-z])/.test(trimmed) && !/\\(?:text|mathrm|rm|unit|si)(?![a-z])/.test(trimmed)) return refusal(text, { kind: 'unexpected', found: '\\' });
+  const body = trimmed.replace(preposition, '');
+  const plain = plainText(body);
   const alternatives = readAlternatives(trimmed, options, parseUnit);
   if (alternatives) return alternatives;
   const odd = /[\\{}]/.exec(plain.text) ?? unlikely.exec(plain.text);
   if (odd) return refusal(text, { kind: 'unexpected', found: odd[0] });
-  return readPlain(text, plain, text.indexOf(trimmed), options);
+  return readPlain(text, plain, text.indexOf(trimmed) + trimmed.length - body.length, options, nearest);
 }
 
-function readPlain(text: string, plain: PlainText, shift: number, options: ReadOptions): UnitResult {
+/** Text without a stop at its end; `in.` keeps its point. */
+function withoutStop(text: string): string {
+  const stopped = /^(.*[^.\s])[.,;:]$/s.exec(text)?.[1];
+  return stopped === undefined || (text.endsWith('.') && /(?:^|\W)(?:in|ft|sq|cu|lbs?|yd|abs)$/.test(stopped)) ? text : stopped;
+}
+
+function readPlain(text: string, plain: PlainText, shift: number, options: ReadOptions, nearest: boolean): UnitResult {
   const temperature = describesTemperature(options.describes);
   const reading = readProduct(plain.text, options.vocabulary);
   const place = (start: number, end: number): { start: number; end: number } => {
     const span = originalSpan(plain, start, end);
     return { start: span.start + shift, end: span.end + shift };
   };
-  if (reading.fault) return unread(text, place(reading.fault.start, reading.fault.end), reading.fault.reason, plain.text, (other) => parseUnit(other, options));
+  if (reading.fault) {
+    const span = place(reading.fault.start, reading.fault.end);
+    return nearest ? unread(text, span, reading.fault.reason, plain.text, (other) => readAny(other, options, false)) : { ok: false, span, reason: reading.fault.reason, triesToBeUnit: false };
+  }
   if (isBareR(reading.factors, temperature)) return refusal(text, { kind: 'unknown-symbol', symbol: 'R' });
   return judged(text, plain, reading, settleLetters(reading.factors, temperature), place, options);
 }
@@ -78,7 +104,7 @@ function judged(text: string, plain: PlainText, reading: Reading, factors: reado
   const worth = worthOf(plain.text, factors, reading.marks);
   if (worth === 'nothing') return refusal(text, { kind: 'unexpected', found: text.trim().slice(0, 10) });
   const hints = hintsOf(text, plain.text, factors, reading.marks, place, options.describes);
-  return read(productOf(factors, text.trim()), hints, worth === 'beyond doubt');
+  return read(productOf(factors, withoutStop(text.trim()).replace(preposition, '')), hints, worth === 'beyond doubt');
 }
 
 function read(unit: Unit, hints: UnitRead['hints'], beyondDoubt: boolean): UnitRead {

@@ -16,12 +16,13 @@ export function worthOf(text: string, factors: readonly Factor[], marks: Marks):
   if (symbols.length === 1 && marks.operators === 0) return worthOfOne(text, symbols[0] as Factor, marks, numbers.length > 0);
   if (symbols.some((factor) => factor.hint === 'case') && symbols.every((factor) => factor.text.length === 1 && factor.sure !== 'sure') && !/^w\/m/.test(text)) return 'nothing';
   if (marks.operators + marks.powers === 0 && !hasDigitPower(text)) return worthOfWords(text, symbols);
-  if (marks.operators > 0 && symbols.length === 1) return symbols[0]?.sure === 'weak' && symbols[0].text.length === 1 ? 'doubtful' : 'beyond doubt';
+  if (marks.operators > 0 && symbols.length === 1) return worthOfInverse(text, symbols[0] as Factor, numbers);
   return onlyLetters(text) ? worthOfLetters(text, symbols, marks) : symbols.every((factor) => factor.sure === 'weak') ? 'doubtful' : 'beyond doubt';
 }
 
 /** A leading number is a power of ten, or 1; elsewhere any number may stand. `20 cm` is a value. */
 function numbersFit(text: string, factors: readonly Factor[]): boolean {
+  if (factors.some((factor) => factor.sure === 'number' && (factor.below || factor.power.sign < 0) && factor.text.includes('.'))) return false;
   const first = factors[0];
   if (first?.sure !== 'number' || first.below || first.power.sign < 0) return true;
   const rest = text.slice(first.end);
@@ -53,7 +54,7 @@ function isMassLabel(text: string): boolean {
 function digitPower(text: string, factor: Factor): Worth {
   const digits = /\d+(?:\.\d+)?$/.exec(text)?.[0] ?? '';
   if (factor.sure === 'weak' || /^[01]$|^0/.test(digits) || Number(digits) > 6) return 'nothing';
-  if (factor.text.length === 1) return /^m[234]$|^m\d\.\d|^[mM]\d\/\d$/.test(text) || factor.hint === 'case' ? 'beyond doubt' : 'nothing';
+  if (factor.text.length === 1) return /^m[234]$|^m\d\.\d|^[mM]\d\/\d$/.test(text) || /^M[23]$/.test(text) ? 'beyond doubt' : 'nothing';
   return factor.unit.dimension === Dimension.base('L') ? 'beyond doubt' : 'doubtful';
 }
 
@@ -71,14 +72,20 @@ function worthOfWords(text: string, symbols: readonly Factor[]): Worth {
   return symbols.some((factor) => factor.sure === 'sure') && symbols.filter((factor) => factor.sure === 'word').length <= 1 ? 'beyond doubt' : 'doubtful';
 }
 
+/** `1/s`, `per metre`, `/day`: beyond doubt unless it is one letter that is often a name. */
+function worthOfInverse(text: string, factor: Factor, numbers: readonly Factor[]): Worth {
+  if (numbers.some((number) => number.text !== '1' && number.power.isOne && number.power.sign > 0 && !number.below)) return 'nothing';
+  return factor.text.length === 1 && !/^[smKhdVWCFJ%°Ω]$/.test(factor.text) && /\//.test(text) ? 'doubtful' : factor.sure === 'weak' ? 'doubtful' : 'beyond doubt';
+}
+
 function onlyLetters(text: string): boolean {
-  return /^\(?[\p{L}](?:\s*[/*. ·-]\s*\(?[\p{L}]\)?)+\)?$/u.test(text);
+  return /^\(?\p{L}\)?(?:\s*[/*. ·-]\s*\(?\p{L}\)?)+\)?$/u.test(text);
 }
 
 /** `m/s` is a unit, `h/D` hardly. */
 function worthOfLetters(text: string, symbols: readonly Factor[], marks: Marks): Worth {
   if (symbols.some((factor) => factor.sure === 'weak' && letters.has(factor.text)) || isRatioOfNames(text)) return 'nothing';
-  const plain = text.replace(/\s*([/*])\s*/g, '$1').replace(/\*/g, ' ');
+  const plain = text.replace(/[()]/g, '').replace(/\s*([/*])\s*/g, '$1').replace(/\*/g, ' ');
   if (usualLetters.has(plain)) return 'beyond doubt';
   if (symbols.length > 2 && text.includes('/')) return 'beyond doubt';
   return marks.operators > 0 && !text.includes('/') ? 'nothing' : 'doubtful';

@@ -1,7 +1,7 @@
 /** English words and letters that look like units: data for deciding what a text may be. Source: common practice, as met in public code. */
 
 /** Never units, though the prefixes would make one of them. */
-export const never: ReadonlySet<string> = new Set(['as', 'As', 'AS', 'am', 'Am', 'AM', 'PM', 'pm', 'at', 'At', 'is', 'to', 'has', 'das', 'had', 'All', 'all', 'TM', 'mas', 'MAS', 'Es', 'Ts', 'fs', 'Em', 'num', 'NUM']);
+export const never: ReadonlySet<string> = new Set(['as', 'As', 'AS', 'am', 'Am', 'AM', 'PM', 'pm', 'at', 'At', 'is', 'to', 'has', 'das', 'had', 'All', 'all', 'TM', 'mas', 'MAS', 'Es', 'Ts', 'fs', 'Em', 'num', 'NUM', 'damp', 'camp', 'ramp', 'tamp', 'dimensionless', 'unitless', 'nondimensional', 'adimensional', 'ubar', 'hbar', 'abar', 'fbar', 'pbar', 'ybar', 'zbar', 'rbar', 'qbar', 'Rbar', 'Ebar', 'Pbar', 'Tbar', 'Gbar', 'Qbar', 'Ybar', 'Zbar', 'nbar']);
 
 /** Units of three letters and more whose name or symbol is also an everyday word or a common name in scripts: alone they leave doubt. */
 export const everyday: ReadonlySet<string> = new Set([
@@ -14,7 +14,7 @@ export const everyday: ReadonlySet<string> = new Set([
 
 /** Symbols of two letters that are neither words nor usual names. */
 export const distinct: ReadonlySet<string> = new Set([
-  'kg', 'mg', 'ug', 'mm', 'cm', 'km', 'um', 'ms', 'us', 'Pa', 'Hz', 'kW', 'mW', 'MW', 'GW', 'kJ', 'MJ', 'GJ', 'kV', 'mV', 'MV', 'kN', 'MN', 'mA', 'kA', 'uA', 'dB', 'ft', 'hr', 'lb', 'ml', 'mL', 'eV', 'kK', 'mK', 'mT', 'Wh', 'Ah', 'VA', 'yd', 'cP', 'nF', 'uF', 'pF', 'mH', 'uH', 'Gs', 'Mt', 'oC', 'oF', 'in.',
+  'kg', 'mg', 'ug', 'mm', 'cm', 'km', 'um', 'ms', 'Pa', 'Hz', 'kW', 'mW', 'MW', 'GW', 'kJ', 'MJ', 'GJ', 'kV', 'mV', 'MV', 'kN', 'MN', 'mA', 'kA', 'uA', 'dB', 'ft', 'hr', 'lb', 'ml', 'mL', 'eV', 'kK', 'mK', 'mT', 'Wh', 'Ah', 'VA', 'yd', 'cP', 'nF', 'uF', 'pF', 'mH', 'uH', 'Gs', 'Mt', 'oC', 'oF', 'in.',
 ]);
 
 /** Weak letters that alone are names of variables rather than units. */
