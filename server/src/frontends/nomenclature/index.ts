@@ -3,15 +3,18 @@ import { readLine } from '../../notes/nomenclature/line.ts';
 import type { Line } from '../../notes/nomenclature/model.ts';
 import { splitLines } from '../../notes/nomenclature/read.ts';
 import type { Chunk, NameExpr, Stmt } from '../../program/nodes.ts';
+import { withoutComment } from '../../signatures/notation.ts';
 import type { FrontEnd, Parsed } from '../frontend.ts';
+import { printFormula } from './print.ts';
 
 export const nomenclatureFrontEnd: FrontEnd = {
   language: 'nomenclature',
   endings: ['.nomen'],
-  style: { comment: '#', power: '^', pi: 'pi', print: () => '' },
+  style: { comment: '#', power: '^', pi: 'pi', print: printFormula },
   parse,
 };
 
+/** One chunk per line; a line that did not change keeps its chunk, wherever it stands now. */
 function parse(text: string, file: string, previous?: Parsed): Parsed {
   const pool = new Map<string, Chunk[]>();
   for (const chunk of previous?.program.chunks ?? []) pool.set(chunk.text, [...(pool.get(chunk.text) ?? []), chunk]);
@@ -33,12 +36,12 @@ function chunkOf(text: string, start: number, file: string): Chunk {
 function statementOf(line: Line, text: string): Stmt | undefined {
   if (line.kind !== 'symbol') return undefined;
   const target: NameExpr = { kind: 'name', name: line.name, ...line.nameSpan };
-  const span = { start: line.nameSpan.start, end: text.trimEnd().length };
+  const span = { start: line.nameSpan.start, end: line.value?.end ?? withoutComment(text).length };
   return line.value ? { kind: 'assign', targets: [target], value: line.value, ...span } : { kind: 'declare', target, ...span };
 }
 
 function commentOf(text: string): Chunk['comments'] {
-  const match = /(?:^|\s)#\s*(.*)$/.exec(text);
+  const match = /(?:^|(?<=\s))#\s*(.*)$/.exec(text);
   if (!match) return [];
   const words = (match[1] as string).trimEnd();
   const start = match.index + match[0].length - (match[1] as string).length;

@@ -1,7 +1,6 @@
 import type { Comment } from '../../program/nodes.ts';
 import type { LineIndex } from '../../text/line-index.ts';
 import type { Span } from '../../text/span.ts';
-import type { Syntax } from './syntax.ts';
 
 interface Placed {
   readonly comment: Comment;
@@ -13,59 +12,64 @@ interface Placed {
 /** The comments of one chunk by line, with offsets relative to the chunk. */
 export class Comments {
   private readonly byLine = new Map<number, Placed>();
-  readonly all: Comment[] = [];
+  private readonly owned = new Set<Comment>();
+  readonly all: readonly Comment[];
 
-  constructor(nodes: readonly Syntax[], private readonly lines: LineIndex, private readonly base: number) {
-    for (const node of nodes) this.collect(node);
+  /** `found`: where comments stand in the file, markers included, in order. */
+  constructor(found: readonly Span[], private readonly lines: LineIndex, private readonly base: number) {
+    this.all = found.map((each) => this.place(each));
   }
 
   /** The comment on the line where a span ends, else on the line where it starts. */
   trailing(span: Span): Comment | undefined {
-    return this.onLine(this.lines.lineAt(this.base + span.end), span.end) ?? this.onLine(this.lines.lineAt(this.base + span.start), span.start);
+    return this.beside(span) ?? this.behind(span.start);
   }
 
-  /** The comment behind something on its own line. */
+  /** The comment behind the end of something, on the same line. */
   beside(span: Span): Comment | undefined {
-    return this.onLine(this.lines.lineAt(this.base + span.end), span.end);
+    return this.behind(span.end);
   }
 
-  /** The comment lines directly above, top to bottom, of the same indentation. */
+  /** The comment on the line of an offset and behind it. */
+  behind(offset: number): Comment | undefined {
+    if (this.all.length === 0) return undefined;
+    const placed = this.byLine.get(this.lines.lineAt(this.base + offset));
+    return placed && !placed.alone && placed.comment.start >= offset ? placed.comment : undefined;
+  }
+
+  /** The comment lines directly above, top to bottom, of the same indentation; they belong to what asked. */
   above(span: Span): readonly Comment[] {
+    if (this.all.length === 0) return [];
     const line = this.lines.lineAt(this.base + span.start);
     const column = this.base + span.start - this.lines.lineStart(line);
     const found: Comment[] = [];
     for (let at = line - 1; at >= 0; at--) {
       const placed = this.byLine.get(at);
       if (!placed?.alone || placed.column !== column) break;
-      found.unshift(placed.comment);
+      found.push(placed.comment);
+      this.owned.add(placed.comment);
     }
-    return found;
+    return found.reverse();
   }
 
-  /** Comments that stand alone between two offsets. */
-  between(start: number, end: number): readonly Comment[] {
-    return this.all.filter((comment) => comment.start >= start && comment.end <= end);
+  /** Comments on lines of their own between two offsets that belong to nothing yet; they belong to what asked. */
+  loose(start: number, end: number): readonly Comment[] {
+    if (this.all.length === 0) return [];
+    const found = [...this.byLine.values()].filter(({ alone, comment }) => alone && comment.start >= start && comment.end <= end && !this.owned.has(comment));
+    for (const { comment } of found) this.owned.add(comment);
+    return found.map((each) => each.comment);
   }
 
-  private onLine(line: number, after: number): Comment | undefined {
-    const placed = this.byLine.get(line);
-    return placed && !placed.alone && placed.comment.start >= after ? placed.comment : undefined;
-  }
-
-  private collect(node: Syntax): void {
-    if (node.type !== 'comment') {
-      node.children.forEach((child) => this.collect(child));
-      return;
-    }
-    const raw = this.lines.text.slice(node.start, node.end);
-    const lead = /^#+:?[ \t]*/.exec(raw)?.[0].length ?? 1;
+  private place(at: Span): Comment {
+    const raw = this.lines.text.slice(at.start, at.end);
+    const lead = /^#+:?[^\S\n]*/.exec(raw)?.[0].length ?? 0;
     const text = raw.slice(lead).trimEnd();
-    const start = node.start + lead - this.base;
+    const start = at.start + lead - this.base;
     const comment = { text, start, end: start + text.length };
-    const line = this.lines.lineAt(node.start);
+    const line = this.lines.lineAt(at.start);
     const lineStart = this.lines.lineStart(line);
-    const alone = this.lines.text.slice(lineStart, node.start).trim() === '';
-    this.byLine.set(line, { comment, alone, column: node.start - lineStart });
-    this.all.push(comment);
+    const alone = this.lines.text.slice(lineStart, at.start).trim() === '';
+    this.byLine.set(line, { comment, alone, column: at.start - lineStart });
+    return comment;
   }
 }

@@ -2,26 +2,10 @@
 import type { Argument, BinaryExpr, CompareOp, Expr, Param, RecordEntry } from '../../program/nodes.ts';
 import { Rational } from '../../quantities/rational.ts';
 import type { Span } from '../../text/span.ts';
-import type { Comments } from './comments.ts';
+import { type Lowering, spanOf, textOf } from './lowering.ts';
 import { fieldOf, fieldsOf, partsOf, type Syntax } from './syntax.ts';
 
-/** What lowering needs besides the tree: offsets are relative to the chunk's start. */
-export interface Lowering {
-  readonly text: string;
-  readonly base: number;
-  readonly comments: Comments;
-  depth: number;
-}
-
 const deepest = 400;
-
-export function spanOf(low: Lowering, node: Syntax): Span {
-  return { start: node.start - low.base, end: node.end - low.base };
-}
-
-export function textOf(low: Lowering, node: Syntax): string {
-  return low.text.slice(node.start, node.end);
-}
 
 export function lowerExpression(low: Lowering, node: Syntax): Expr {
   const span = spanOf(low, node);
@@ -54,7 +38,7 @@ const byType: Record<string, Lower> = {
     return { kind: 'unary', op: operator === '-' ? '-' : operator === '+' ? '+' : 'bits', operand: child(low, node, 'argument'), ...span };
   },
   not_operator: (low, node, span) => ({ kind: 'unary', op: 'not', operand: child(low, node, 'argument'), ...span }),
-  boolean_operator: (low, node, span) => ({ kind: 'logic', op: fieldOf(node, 'operator')?.type === 'or' ? 'or' : 'and', operands: [child(low, node, 'left'), child(low, node, 'right')], ...span }),
+  boolean_operator: logic,
   comparison_operator: comparison,
   conditional_expression: (low, node, span) => {
     const [then, condition, otherwise] = partsOf(node);
@@ -74,7 +58,7 @@ const byType: Record<string, Lower> = {
     const keys = fieldsOf(node, 'subscript').flatMap((key) => (key.type === 'tuple' ? partsOf(key) : [key]));
     return { kind: 'index', object: child(low, node, 'value'), keys: keys.map((key) => lowerExpression(low, key)), ...span };
   },
-  slice: (low, node, span) => ({ kind: 'slice', parts: partsOf(node).map((part) => lowerExpression(low, part)), ...span }),
+  slice,
   tuple: sequence('tuple'),
   expression_list: sequence('tuple'),
   pattern_list: sequence('tuple'),
@@ -87,10 +71,8 @@ const byType: Record<string, Lower> = {
   set_comprehension: comprehension,
   generator_expression: comprehension,
   dictionary_comprehension: comprehension,
-  lambda: (low, node, span) => {
-    const params = fieldOf(node, 'parameters');
-    return { kind: 'lambda', params: params ? lowerParams(low, params) : [], body: child(low, node, 'body'), ...span };
-  },
+  lambda,
+  lambda_within_for_in_clause: lambda,
   named_expression: (low, node, span) => ({ kind: 'bind', target: child(low, node, 'name'), value: child(low, node, 'value'), ...span }),
   as_pattern: (low, node, span) => (partsOf(node)[0] ? lowerExpression(low, partsOf(node)[0] as Syntax) : opaque(low, node, span)),
 };
@@ -130,11 +112,19 @@ function readNumber(text: string): Rational | undefined {
 }
 
 function string(low: Lowering, node: Syntax, span: Span): Expr {
-  const parts = partsOf(node);
-  const holes = parts.filter((part) => part.type === 'interpolation');
-  if (holes.length > 0) return { kind: 'opaque', parts: holes.flatMap((hole) => fieldsOf(hole, 'expression').map((each) => lowerExpression(low, each))), ...span };
-  const content = parts.filter((part) => part.type === 'string_content');
+  const holes: Expr[] = [];
+  fillHoles(low, node, holes);
+  if (node.parts.some((part) => part.type === 'interpolation')) return { kind: 'opaque', parts: holes, ...span };
+  const content = node.parts.filter((part) => part.type === 'string_content');
   return { kind: 'text', value: content.map((part) => textOf(low, part)).join(''), ...span };
+}
+
+/** The expressions in a formatted string, and those in their formats. */
+function fillHoles(low: Lowering, node: Syntax, holes: Expr[]): void {
+  for (const part of node.parts) {
+    if (part.type === 'format_expression' || part.type === 'interpolation') for (const each of fieldsOf(part, 'expression')) holes.push(lowerExpression(low, each));
+    if (part.type === 'interpolation' || part.type === 'format_specifier') fillHoles(low, part, holes);
+  }
 }
 
 const operators: Record<string, BinaryExpr['op']> = { '+': '+', '-': '-', '*': '*', '/': '/', '//': '//', '%': '%', '**': '**', '@': '@' };
@@ -145,10 +135,50 @@ function binary(low: Lowering, node: Syntax, span: Span): Expr {
   return { kind: 'binary', op: operators[operator?.type ?? ''] ?? 'bits', opSpan, left: child(low, node, 'left'), right: child(low, node, 'right'), ...span };
 }
 
+/** `a and b and c` is one expression of three operands; the parser nests them to the left. */
+function logic(low: Lowering, node: Syntax, span: Span): Expr {
+  const op = operatorOf(node) === 'or' ? 'or' : 'and';
+  const nodes: Syntax[] = [];
+  let at: Syntax | undefined = node;
+  while (at?.type === 'boolean_operator' && operatorOf(at) === op) {
+    const right = fieldOf(at, 'right');
+    if (right) nodes.push(right);
+    at = fieldOf(at, 'left');
+  }
+  if (at) nodes.push(at);
+  return { kind: 'logic', op, operands: nodes.reverse().map((each) => lowerExpression(low, each)), ...span };
+}
+
+function operatorOf(node: Syntax): string | undefined {
+  return fieldOf(node, 'operator')?.type;
+}
+
 function comparison(low: Lowering, node: Syntax, span: Span): Expr {
-  const operands = partsOf(node).filter((part) => part.field !== 'operators');
-  const ops = node.children.filter((part) => part.field === 'operators').map((part) => textOf(low, part).replace(/\s+/g, ' ').replace('<>', '!=') as CompareOp);
-  return { kind: 'compare', operands: operands.map((each) => lowerExpression(low, each)), ops, ...span };
+  const operands = node.parts.map((each) => lowerExpression(low, each));
+  const ops = node.children.filter((each) => !each.named).map((each) => (each.type === '<>' ? '!=' : each.type) as CompareOp);
+  return operands.length === ops.length + 1 ? { kind: 'compare', operands, ops, ...span } : { kind: 'opaque', parts: operands, ...span };
+}
+
+/** Start, end and step by position: what is left out is nothing, without extent. */
+function slice(low: Lowering, node: Syntax, span: Span): Expr {
+  const parts: Expr[] = [];
+  let missing = true;
+  for (const each of node.children) {
+    if (each.type !== ':') parts.push(lowerExpression(low, each));
+    else if (missing) parts.push(nothingAt(each.start - low.base));
+    missing = each.type === ':';
+  }
+  if (missing) parts.push(nothingAt(span.end));
+  return { kind: 'slice', parts, ...span };
+}
+
+function nothingAt(offset: number): Expr {
+  return { kind: 'nothing', start: offset, end: offset };
+}
+
+function lambda(low: Lowering, node: Syntax, span: Span): Expr {
+  const params = fieldOf(node, 'parameters');
+  return { kind: 'lambda', params: params ? lowerParams(low, params) : [], body: child(low, node, 'body'), ...span };
 }
 
 function sequence(form: 'tuple' | 'list' | 'set'): Lower {

@@ -1,7 +1,11 @@
 /** Python statements in the common form. */
-import type { BinaryExpr, DocText, Expr, NameExpr, Stmt } from '../../program/nodes.ts';
-import { type Lowering, lowerArguments, lowerExpression, lowerParams, spanOf, textOf } from './lower-expression.ts';
-import { fieldOf, fieldsOf, partsOf, type Syntax } from './syntax.ts';
+import type { BinaryExpr, Comment, Expr, Stmt } from '../../program/nodes.ts';
+import { docOf, withFieldDocs } from './documentation.ts';
+import { importedModules, importedNames } from './lower-import.ts';
+import { lowerArguments, lowerExpression, lowerParams } from './lower-expression.ts';
+import { type Lowering, spanOf, textOf } from './lowering.ts';
+import { matchParts } from './lower-match.ts';
+import { fieldOf, partsOf, type Syntax } from './syntax.ts';
 
 export function lowerBlock(low: Lowering, node: Syntax | undefined): readonly Stmt[] {
   return node ? lowerStatements(low, partsOf(node)) : [];
@@ -15,32 +19,43 @@ export function lowerStatements(low: Lowering, nodes: readonly Syntax[]): readon
   });
 }
 
-type Lower = (low: Lowering, node: Syntax, base: Base) => Stmt | undefined;
+/** Whether a top-level node of this type is whole: a statement, a comment, or what stands between statements. */
+export function isStatement(type: string): boolean {
+  return byType[type] !== undefined || besides.has(type);
+}
+
+const besides = new Set(['comment', ';', 'pass_statement', 'type_alias_statement']);
+
+type Lower = (low: Lowering, node: Syntax, base: Base) => Stmt | readonly Stmt[] | undefined;
 type Base = Pick<Stmt, 'start' | 'end' | 'trailing' | 'above'>;
+
+const deepest = 200;
 
 function lowerStatement(low: Lowering, node: Syntax): readonly Stmt[] {
   const lower = byType[node.type];
-  if (!lower || low.depth > 200) return [];
+  if (!lower || low.depth > deepest) return [];
   low.depth++;
-  const statement = lower(low, node, baseOf(low, node));
+  const lowered = lower(low, node, baseOf(low, node)) ?? [];
   low.depth--;
-  return statement ? [statement] : [];
+  return 'kind' in lowered ? [lowered] : lowered;
 }
 
 function baseOf(low: Lowering, node: Syntax): Base {
   const span = spanOf(low, node);
-  const trailing = compound.has(node.type) ? low.comments.trailing({ start: headEnd(low, node), end: headEnd(low, node) }) : low.comments.trailing(span);
+  const trailing = compound.has(node.type) ? headComment(low, node) : low.comments.trailing(span);
   const above = low.comments.above(span);
   return { ...span, ...(trailing ? { trailing } : {}), ...(above.length > 0 ? { above } : {}) };
 }
 
-const compound = new Set(['if_statement', 'for_statement', 'while_statement', 'try_statement', 'with_statement', 'match_statement', 'function_definition', 'class_definition', 'decorated_definition']);
+const compound = new Set(['if_statement', 'for_statement', 'while_statement', 'try_statement', 'with_statement', 'match_statement', 'function_definition', 'class_definition']);
 
-/** The end of a compound statement's first part: its colon. */
-function headEnd(low: Lowering, node: Syntax): number {
-  const inner = node.type === 'decorated_definition' ? (fieldOf(node, 'definition') ?? node) : node;
-  const colon = inner.children.find((each) => each.type === ':');
-  return (colon ?? inner).start - low.base;
+/** The comment behind a compound statement's first colon, else behind the opening of its head. */
+function headComment(low: Lowering, node: Syntax): Comment | undefined {
+  const colon = node.children.find((each) => each.type === ':');
+  const params = fieldOf(node, 'parameters') ?? fieldOf(node, 'superclasses');
+  const first = params?.parts[0] ?? colon;
+  const opening = params && low.comments.behind(params.start - low.base);
+  return (colon && low.comments.behind(colon.start - low.base)) ?? (opening && first && opening.end < first.start - low.base ? opening : undefined);
 }
 
 const byType: Record<string, Lower> = {
@@ -63,18 +78,13 @@ const byType: Record<string, Lower> = {
     finally: lowerBlock(low, blockIn(node.children.find((each) => each.type === 'finally_clause'))), ...base,
   }),
   with_statement: withStatement,
-  match_statement: matchStatement,
-  function_definition: functionStatement,
-  class_definition: classStatement,
-  decorated_definition: (low, node, base) => {
-    const definition = fieldOf(node, 'definition');
-    if (!definition) return undefined;
-    const decorators = node.children.filter((each) => each.type === 'decorator').flatMap((each) => partsOf(each).map((part) => lowerExpression(low, part)));
-    const statement = byType[definition.type]?.(low, definition, { ...baseOf(low, definition), ...base });
-    return statement?.kind === 'function' || statement?.kind === 'class' ? { ...statement, decorators } : statement;
-  },
-  import_statement: importStatement,
-  import_from_statement: importFrom,
+  match_statement: (low, node, base) => ({ ...matchParts(low, node, (block) => lowerBlock(low, block)), ...base }),
+  function_definition: (low, node, base) => functionStatement(low, node, base),
+  class_definition: (low, node, base) => classStatement(low, node, base),
+  decorated_definition: decorated,
+  import_statement: (low, node, base) => importedModules(low, node).map((each) => ({ ...each, ...base })),
+  import_from_statement: importOfNames,
+  future_import_statement: importOfNames,
   raise_statement: leave('raise'),
   break_statement: leave('break'),
   continue_statement: leave('continue'),
@@ -149,103 +159,48 @@ function withStatement(low: Lowering, node: Syntax, base: Base): Stmt {
   return { kind: 'scope', items, body: lowerBlock(low, fieldOf(node, 'body')), ...base };
 }
 
-function matchStatement(low: Lowering, node: Syntax, base: Base): Stmt {
-  const block = fieldOf(node, 'body');
-  const cases = (block ? partsOf(block) : []).filter((each) => each.type === 'case_clause').map((each) => {
-    const guard = fieldOf(each, 'guard');
-    const bindings: NameExpr[] = [];
-    for (const part of partsOf(each)) if (part.type === 'case_pattern') collectNames(low, part, bindings);
-    const test = guard && partsOf(guard)[0];
-    return { bindings, ...(test ? { guard: lowerExpression(low, test) } : {}), body: lowerBlock(low, fieldOf(each, 'consequence')) };
-  });
-  return { kind: 'match', subject: need(low, node, 'subject'), cases, ...base };
+function importOfNames(low: Lowering, node: Syntax, base: Base): Stmt | undefined {
+  const imported = importedNames(low, node);
+  return imported && { ...imported, ...base };
 }
 
-function collectNames(low: Lowering, node: Syntax, names: NameExpr[]): void {
-  if (node.type === 'identifier') names.push({ kind: 'name', name: textOf(low, node), ...spanOf(low, node) });
-  for (const part of partsOf(node)) collectNames(low, part, names);
+function decorated(low: Lowering, node: Syntax, outer: Base): Stmt | undefined {
+  const definition = fieldOf(node, 'definition');
+  if (!definition) return undefined;
+  const marks = node.parts.filter((each) => each.type === 'decorator');
+  const decorators = marks.flatMap((each) => each.parts.map((part) => lowerExpression(low, part)));
+  const inner = baseOf(low, definition);
+  const trailing = inner.trailing ?? marks.map((each) => low.comments.beside(spanOf(low, each))).find((each) => each);
+  const above = [...(outer.above ?? []), ...(inner.above ?? [])];
+  const base = { start: outer.start, end: outer.end, ...(trailing ? { trailing } : {}), ...(above.length > 0 ? { above } : {}) };
+  return definition.type === 'class_definition' ? classStatement(low, definition, base, decorators) : functionStatement(low, definition, base, decorators);
 }
 
-function functionStatement(low: Lowering, node: Syntax, base: Base): Stmt | undefined {
+function functionStatement(low: Lowering, node: Syntax, base: Base, decorators: readonly Expr[] = []): Stmt | undefined {
   const name = fieldOf(node, 'name');
   if (!name) return undefined;
   const params = fieldOf(node, 'parameters');
-  const body = fieldOf(node, 'body');
+  const block = fieldOf(node, 'body');
   const type = fieldOf(node, 'return_type');
-  const doc = docOf(low, body);
-  const loose = body ? looseOf(low, body) : [];
+  const doc = docOf(low, block);
+  const body = lowerBlock(low, block);
+  const loose = low.comments.loose((params ?? name).end - low.base, base.end);
   return {
-    kind: 'function', name: textOf(low, name), nameSpan: spanOf(low, name), params: params ? lowerParams(low, params) : [],
-    body: lowerBlock(low, body), decorators: [],
+    kind: 'function', name: textOf(low, name), nameSpan: spanOf(low, name), params: params ? lowerParams(low, params) : [], body, decorators,
     ...(doc ? { doc } : {}), ...(type ? { annotation: textOf(low, type) } : {}), ...(loose.length > 0 ? { loose } : {}), ...base,
   };
 }
 
-function looseOf(low: Lowering, body: Syntax): ReturnType<Lowering['comments']['between']> {
-  const last = partsOf(body).at(-1);
-  return last ? low.comments.between(last.end - low.base, body.end - low.base).filter((each) => low.comments.trailing(spanOf(low, last)) !== each) : [];
-}
-
-function classStatement(low: Lowering, node: Syntax, base: Base): Stmt | undefined {
+function classStatement(low: Lowering, node: Syntax, base: Base, decorators: readonly Expr[] = []): Stmt | undefined {
   const name = fieldOf(node, 'name');
   if (!name) return undefined;
+  const block = fieldOf(node, 'body');
   const bases = fieldOf(node, 'superclasses');
-  const body = fieldOf(node, 'body');
-  const doc = docOf(low, body);
+  const doc = docOf(low, block);
   return {
     kind: 'class', name: textOf(low, name), nameSpan: spanOf(low, name), bases: bases ? lowerArguments(low, bases).filter((each) => !each.name).map((each) => each.value) : [],
-    body: withFieldDocs(low, body), decorators: [], ...(doc ? { doc } : {}), ...base,
+    body: withFieldDocs(low, block, lowerBlock(low, block)), decorators, ...(doc ? { doc } : {}), ...base,
   };
-}
-
-/** A text right behind a field is its documentation. */
-function withFieldDocs(low: Lowering, body: Syntax | undefined): readonly Stmt[] {
-  const statements = lowerBlock(low, body);
-  return statements.map((statement, at) => {
-    const next = statements[at + 1];
-    const documented = (statement.kind === 'assign' || statement.kind === 'declare') && !statement.trailing;
-    if (!documented || next?.kind !== 'evaluate' || next.value.kind !== 'text' || next.value.value.includes('\n')) return statement;
-    const start = low.text.slice(low.base).indexOf(next.value.value, next.start);
-    return { ...statement, trailing: { text: next.value.value, start, end: start + next.value.value.length } };
-  });
-}
-
-/** The documentation at the head of a block. */
-export function docOf(low: Lowering, block: Syntax | undefined): DocText | undefined {
-  const first = block && partsOf(block)[0];
-  const text = first?.type === 'expression_statement' ? partsOf(first)[0] : undefined;
-  return text ? docText(low, text) : undefined;
-}
-
-export function docText(low: Lowering, node: Syntax): DocText | undefined {
-  if (node.type !== 'string') return undefined;
-  const open = node.children.find((each) => each.type === 'string_start');
-  const close = node.children.find((each) => each.type === 'string_end');
-  if (!open || !close || node.children.some((each) => each.type === 'interpolation')) return undefined;
-  return { text: low.text.slice(open.end, close.start), start: open.end - low.base, end: close.start - low.base };
-}
-
-function importStatement(low: Lowering, node: Syntax, base: Base): Stmt | undefined {
-  const [first] = fieldsOf(node, 'name');
-  if (!first) return undefined;
-  if (first.type === 'aliased_import') {
-    const [module, alias] = [fieldOf(first, 'name'), fieldOf(first, 'alias')];
-    return module && alias ? { kind: 'import', module: textOf(low, module), level: 0, alias: textOf(low, alias), ...base } : undefined;
-  }
-  return { kind: 'import', module: textOf(low, first), level: 0, ...base };
-}
-
-function importFrom(low: Lowering, node: Syntax, base: Base): Stmt | undefined {
-  const module = fieldOf(node, 'module_name');
-  if (!module) return undefined;
-  const path = textOf(low, module);
-  const level = /^\.*/.exec(path)?.[0].length ?? 0;
-  const star = node.children.some((each) => each.type === 'wildcard_import');
-  const names = fieldsOf(node, 'name').map((each) => {
-    const [name, alias] = each.type === 'aliased_import' ? [fieldOf(each, 'name'), fieldOf(each, 'alias')] : [each, each];
-    return { name: name ? textOf(low, name) : '', alias: alias ? textOf(low, alias) : '' };
-  });
-  return { kind: 'import', module: path.slice(level).trim(), level, names: star ? [{ name: '*', alias: '*' }] : names, ...base };
 }
 
 function leave(flow: 'break' | 'continue' | 'raise' | 'none'): Lower {

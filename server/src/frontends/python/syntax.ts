@@ -1,31 +1,46 @@
 /**
  * The syntax tree as plain objects, copied from the parser in one walk: every question to its own nodes or cursor is a call
- * across WASM, so as few as possible are asked. Tokens without a name carry a span only where lowering uses it.
+ * across WASM, so as few as possible are asked. Punctuation is left out, and comments and syntax errors are gathered on the way.
  */
 import type { Language, Node as TreeNode, TreeCursor } from 'web-tree-sitter';
+import type { SyntaxProblem } from '../../program/nodes.ts';
+import type { Span } from '../../text/span.ts';
 
-export interface Syntax {
+export interface Syntax extends Span {
   readonly type: string;
   readonly field: string | undefined;
   readonly named: boolean;
   readonly missing: boolean;
-  readonly start: number;
-  readonly end: number;
+  /** Everything below but punctuation and comments. */
   readonly children: readonly Syntax[];
+  /** The children that are no tokens. */
+  readonly parts: readonly Syntax[];
+}
+
+/** What a walk meets besides nodes; offsets in the file. */
+export interface Found {
+  readonly comments: Span[];
+  readonly problems: SyntaxProblem[];
 }
 
 const deepest = 900;
 const none: readonly Syntax[] = [];
 /** Node types without children worth a look. */
 const leaves = new Set(['identifier', 'integer', 'float', 'true', 'false', 'none', 'comment', 'string_start', 'string_content', 'string_end', 'ellipsis', 'pass_statement', 'break_statement', 'continue_statement']);
-/** Tokens whose place matters: the colon of a compound statement, operators. */
-const placed = /^(?::|\W{1,3}=?|and|or|not|in|is)$/;
+/** Node types whose children carry no field that lowering asks for. */
+const fieldless = new Set([
+  'argument_list', 'block', 'comment', 'concatenated_string', 'conditional_expression', 'decorator', 'dictionary', 'dotted_name', 'ERROR', 'expression_list', 'expression_statement',
+  'list', 'module', 'parameters', 'lambda_parameters', 'parenthesized_expression', 'pattern_list', 'return_statement', 'set', 'slice', 'string', 'tuple', 'tuple_pattern', 'type', 'with_clause',
+]);
+/** Tokens that lowering looks at; all others are punctuation. */
+const kept = /^(?::|[+\-*/%@&|^~]|\*\*|\/\/|<<|>>|[+\-*/%@&|^]=|(?:\*\*|\/\/|<<|>>)=|[<>]=?|==|!=|<>|and|or|not|in|is|not in|is not)$/;
 
 interface Kind {
   readonly type: string;
   readonly named: boolean;
   readonly leaf: boolean;
-  readonly placed: boolean;
+  readonly kept: boolean;
+  readonly fieldless: boolean;
 }
 
 /** Copies trees of one grammar. */
@@ -36,27 +51,34 @@ export class TreeCopier {
   constructor(private readonly language: Language) {}
 
   /** A node and everything below it; `broken` where it holds a syntax error, so that missing tokens are looked for. */
-  copy(node: TreeNode, broken: boolean): Syntax {
+  copy(node: TreeNode, broken: boolean, found: Found): Syntax {
     const cursor = node.walk();
-    const copy = this.copyAt(cursor, 0, broken);
+    const kind = this.kindOf(cursor);
+    if (broken) note(cursor, kind, found);
+    const copy = this.copyAt(cursor, kind, false, 0, broken, found);
     cursor.delete();
     return copy;
   }
 
-  private copyAt(cursor: TreeCursor, depth: number, broken: boolean): Syntax {
-    const kind = this.kindOf(cursor);
-    const fieldId = cursor.currentFieldId;
-    const field = fieldId === 0 ? undefined : this.fieldOf(fieldId);
-    const place = kind.named || kind.placed || broken;
-    const start = place ? cursor.startIndex : 0;
-    const end = place ? cursor.endIndex : 0;
+  private copyAt(cursor: TreeCursor, kind: Kind, fieldable: boolean, depth: number, broken: boolean, found: Found): Syntax {
+    const field = fieldable ? this.fieldOf(cursor.currentFieldId) : undefined;
+    const start = cursor.startIndex;
+    const end = kind.named || broken ? cursor.endIndex : start + kind.type.length;
     const missing = broken && cursor.nodeIsMissing;
-    if (kind.leaf || depth >= deepest || !cursor.gotoFirstChild()) return { type: kind.type, field, named: kind.named, missing, start, end, children: none };
+    if (kind.leaf || depth >= deepest || !cursor.gotoFirstChild()) return { type: kind.type, field, named: kind.named, missing, start, end, children: none, parts: none };
     const children: Syntax[] = [];
-    do children.push(this.copyAt(cursor, depth + 1, broken));
-    while (cursor.gotoNextSibling());
+    let tokens = 0;
+    do {
+      const below = this.kindOf(cursor);
+      if (broken) note(cursor, below, found);
+      if (below.type === 'comment') found.comments.push({ start: cursor.startIndex, end: cursor.endIndex });
+      if (!below.kept) continue;
+      if (!below.named) tokens++;
+      children.push(this.copyAt(cursor, below, !kind.fieldless, depth + 1, broken, found));
+    } while (cursor.gotoNextSibling());
     cursor.gotoParent();
-    return { type: kind.type, field, named: kind.named, missing, start, end, children };
+    const parts = tokens === 0 ? children : children.filter((each) => each.named);
+    return { type: kind.type, field, named: kind.named, missing, start, end, children, parts };
   }
 
   private kindOf(cursor: TreeCursor): Kind {
@@ -65,18 +87,24 @@ export class TreeCopier {
     if (known) return known;
     const type = cursor.nodeType;
     const named = cursor.nodeIsNamed;
-    const kind = { type, named, leaf: !named || leaves.has(type), placed: placed.test(type) };
+    const kind = { type, named, leaf: !named || leaves.has(type), kept: named ? type !== 'comment' : kept.test(type), fieldless: fieldless.has(type) };
     if (type !== 'ERROR') this.kinds[id] = kind;
     return kind;
   }
 
   private fieldOf(id: number): string | undefined {
-    const known = this.fields[id];
-    if (known !== undefined) return known;
-    const name = this.language.fieldNameForId(id) ?? undefined;
-    this.fields[id] = name;
-    return name;
+    if (id === 0) return undefined;
+    return (this.fields[id] ??= this.language.fieldNameForId(id) ?? undefined);
   }
+}
+
+/** Writes a syntax error down, unless it lies in one that is. */
+function note(cursor: TreeCursor, kind: Kind, found: Found): void {
+  const error = kind.type === 'ERROR';
+  if (!error && !cursor.nodeIsMissing) return;
+  const { startIndex: start, endIndex: end } = cursor;
+  const last = found.problems.at(-1);
+  if (!last || end > last.end) found.problems.push({ start, end, message: error ? 'cannot be parsed' : `missing ${kind.type}` });
 }
 
 export function fieldOf(node: Syntax, name: string): Syntax | undefined {
@@ -85,10 +113,10 @@ export function fieldOf(node: Syntax, name: string): Syntax | undefined {
 }
 
 export function fieldsOf(node: Syntax, name: string): readonly Syntax[] {
-  return node.children.filter((child) => child.field === name && child.named && child.type !== 'comment');
+  return node.parts.filter((child) => child.field === name);
 }
 
 /** Named children that are no comments. */
 export function partsOf(node: Syntax): readonly Syntax[] {
-  return node.children.filter((child) => child.named && child.type !== 'comment');
+  return node.parts;
 }
