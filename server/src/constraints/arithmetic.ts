@@ -26,8 +26,19 @@ export function sum(context: Context, expr: Expr, left: Value, right: Value, op:
   if (left.fits || right.fits) return left.fits ? { ...right, expr } : { ...left, expr };
   if (left.literal || right.literal) return withBareTerm(context, expr, left, right, sign);
   if (!left.form || !right.form) return halfKnown(expr, left, right);
+  if (isConstantOf(left) || isConstantOf(right)) return besideConstant(expr, left, right, sign);
   agree(context, expr, left, right, { kind: 'sum', op }, opSpan);
   return sumValue(expr, left, right, sign);
+}
+
+/** A constant that was given a bare number: in a sum it is read in its neighbour's unit, like the number itself. */
+function isConstantOf(value: Value): boolean {
+  return value.version?.origin === 'constant';
+}
+
+function besideConstant(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
+  const value = isConstantOf(left) ? right : left;
+  return { expr, form: value.form, measure: sumMeasure(left, right, sign), from: [value], ...taint(value), ...(value.misuse ? { misuse: value.misuse } : {}) };
 }
 
 /** Terms that must be alike and give one of their kind: the choices of a conditional, the arguments of max. Open ones drop out. */
@@ -222,7 +233,8 @@ function pureMeasure(measure: Measure | undefined): Measure | undefined {
 function halfKnown(expr: Expr, left: Value, right: Value): Value {
   const known = left.form ? left : right;
   if (!known.form) return unknown(expr, [left, right]);
-  return { expr, form: known.form, from: [known], ...taint(known) };
+  // What is unknown may be a correlation: whatever rests on this sum is in doubt.
+  return { expr, form: known.form, from: [known], tainted: true };
 }
 
 function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {

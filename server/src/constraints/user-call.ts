@@ -87,14 +87,12 @@ function checkAlike(context: Context, scheme: Scheme, param: SchemeParam, given:
   const [term] = form.terms;
   const other = term && instance.get(term.unknown.id);
   if (!term || !other?.form || other === given.value || form.terms.some((each) => !instance.get(each.unknown.id)?.form)) return;
-  const required = substitute(form, (unknown) => instance.get(unknown.id)?.form);
   const first = scheme.params.findIndex((each) => each.unknown === term.unknown);
   const at = scheme.params.indexOf(param);
   const alike = form.terms.length === 1 && term.power.isOne && form.dimension.isOne && first >= 0;
   const passed: Value = { ...given.value, expr: given.argument.value, measure: undefined };
-  const reason = alike ? ({ kind: 'alike', function: scheme.name, positions: [first, at] } as const) : ({ kind: 'inferred-parameter', function: scheme.name, name: param.name } as const);
+  const reason = { kind: 'alike', function: scheme.name, positions: [first, at] } as const;
   if (alike) agree(context, given.argument.value, { ...other, measure: undefined }, passed, reason, given.argument.value);
-  else agree(context, given.argument.value, passed, { expr: undefined, form: required, from: [other] }, reason, given.argument.value);
 }
 
 function resultValue(context: Context, expr: CallExpr, result: SchemeResult, instance: Instance, from: readonly Value[]): Value {

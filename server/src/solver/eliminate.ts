@@ -76,7 +76,7 @@ export class Elimination {
     };
     for (const form of forms) if (form) visit(form);
     const rows = [...seen.values()];
-    return { involved: rows.map((row) => ({ unknown: row.unknown, by: row.by })), soft: rows.some((row) => row.soft || row.unknown.origin === 'constant') };
+    return { involved: rows.map((row) => ({ unknown: row.unknown, by: row.by })), soft: rows.some((row) => row.soft) };
   }
 }
 

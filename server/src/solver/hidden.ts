@@ -4,7 +4,6 @@ import type { Constraint } from '../constraints/problem.ts';
 import type { Value } from '../constraints/value.ts';
 import type { Expr } from '../program/nodes.ts';
 import { Dimension } from '../quantities/dimension.ts';
-import { knownConstant } from '../quantities/known-constants.ts';
 import type { Fault, Involved } from './fault.ts';
 import { sidesOf } from './root-cause.ts';
 
@@ -37,20 +36,6 @@ export function neededDimension(fault: Contradiction, found: readonly HiddenNumb
   if (!first) return fault.kind === 'dimension' ? fault.right.div(fault.left) : undefined;
   const raw = fault.kind === 'dimension' ? (first.side === 'right' ? fault.left.div(fault.right) : fault.right.div(fault.left)) : inverse(fault.dimension);
   return first.below ? inverse(raw) : raw;
-}
-
-const conversions = new Set([10, 100, 1000, 1e4, 1e5, 1e6, 60, 3600, 24, 86400, 0.1, 0.01, 1e-3, 1e-4, 1e-5, 1e-6]);
-
-/**
- * Whether a contradiction is excused by its literals. A number that engineers convert with (1000, 60, 3600) hides a unit only
- * where it is a known constant of just the missing dimension, as 1000 kg/m³ for water.
- */
-export function isExcused(fault: Contradiction): boolean {
-  if (!fault.hidden) return false;
-  const found = hiddenNumbers(fault.constraint, fault.involved);
-  if (found.length === 0 || !found.every((each) => conversions.has(each.size))) return true;
-  const needed = neededDimension(fault, found);
-  return needed !== undefined && found.some((each) => knownConstant(each.size, needed) !== undefined);
 }
 
 function inverse(dimension: Dimension): Dimension {

@@ -60,7 +60,8 @@ function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surro
   const context = new Context(piece.chunk.anchor, without(surroundings, ignored), piece.fn);
   const params = readBody(context, piece.fn, selfOf(piece, owner));
   const solution = solve(context.constraints);
-  const scheme = schemeOf(piece, params, context.returns, context.surroundings.notes.results(piece.fn), solution);
+  const sound = !solution.faults.some((fault) => fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power');
+  const scheme = schemeOf(piece, params, context.returns, context.surroundings.notes.results(piece.fn), solution, sound);
   return { faults: solution.faults, scheme, fields: fieldsOf(context, solution.reduce) };
 }
 
@@ -89,15 +90,16 @@ function without(surroundings: Surroundings, ignored: NoteInForce | undefined): 
   };
 }
 
-function schemeOf(piece: Piece, params: readonly ReadParam[], returns: readonly Value[], notes: readonly NoteInForce[], solution: Solution): Scheme {
+function schemeOf(piece: Piece, params: readonly ReadParam[], returns: readonly Value[], notes: readonly NoteInForce[], solution: Solution, sound: boolean): Scheme {
   const scheme = {
     name: piece.fn.name,
-    params: params.map((each) => schemeParam(each, solution.reduceSurely)),
+    params: params.map((each) => schemeParam(each, sound ? solution.reduceSurely : (form) => form)),
     result: notes.length > 0 ? notedResult(notes, returns) : joinedResult(returns, solution),
   };
   return { ...scheme, fingerprint: schemeFingerprint(scheme) };
 }
 
+/** A body that contradicts itself says nothing of its parameters: the fault is reported there, not at every call. */
 function schemeParam({ param, note, unknown }: ReadParam, reduce: (form: Form) => Form): SchemeParam {
   const open = unknown && reduce(unknownForm(unknown));
   return { name: param.name, mode: param.mode, optional: param.default !== undefined, form: open, unknown, ...(note ? { note } : {}) };

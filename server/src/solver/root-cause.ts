@@ -10,12 +10,13 @@ const mostTries = 6;
  * the fault.
  */
 export function rootCause(faults: readonly Fault[], solveWithout: (note: NoteInForce) => readonly Fault[]): readonly Fault[] {
-  const serious = faults.filter(isContradiction);
+  const serious = faults.filter(isSerious);
   if (serious.length < 2) return faults;
+  const doubtful = faults.filter(isContradiction).length - serious.length;
   const shared = sharedNotes(serious).slice(0, mostTries);
   for (const note of shared) {
     const rest = solveWithout(note).filter(isContradiction);
-    if (rest.length === 0) return [{ kind: 'note', note, path: nameOf(note), faults: serious }, ...faults.filter((fault) => !isContradiction(fault))];
+    if (rest.length <= doubtful && !rest.some(isSerious)) return [{ kind: 'note', note, path: nameOf(note), faults: serious }, ...faults.filter((fault) => !isSerious(fault))];
   }
   return faults;
 }
@@ -61,8 +62,15 @@ export function evidenceOf(fault: Fault): readonly Value[] {
   return noteLeaves(...sidesOf(fault.constraint), ...involved);
 }
 
+/** A contradiction between dimensions, whatever excuses it. */
 function isContradiction(fault: Fault): boolean {
-  return fault.kind === 'scale' || ((fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power') && !fault.hidden);
+  return fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power';
+}
+
+/** One that no literal excuses and no logarithm softens. */
+function isSerious(fault: Fault): boolean {
+  if (fault.kind === 'pure' && fault.constraint.reason.kind === 'pure-argument' && fault.constraint.reason.gentle) return false;
+  return (fault.kind === 'dimension' || fault.kind === 'pure' || fault.kind === 'varying-power') && !fault.hidden;
 }
 
 function sharedNotes(faults: readonly Fault[]): readonly NoteInForce[] {

@@ -3,7 +3,6 @@ import type { Constraint } from '../constraints/problem.ts';
 import type { Form } from '../constraints/form.ts';
 import { Elimination } from './eliminate.ts';
 import type { Fault } from './fault.ts';
-import { isExcused } from './hidden.ts';
 import { scaleFault } from './scales.ts';
 
 /** What came of a problem. Inert: plain results and the means to reduce a form by them. */
@@ -21,7 +20,7 @@ export interface Solution {
 export function solve(constraints: readonly Constraint[]): Solution {
   const elimination = new Elimination();
   const faults: { readonly at: number; readonly fault: Fault }[] = [];
-  const report = (at: number, fault: Fault | undefined): void => void (fault && faults.push({ at, fault: judged(fault) }));
+  const report = (at: number, fault: Fault | undefined): void => void (fault && faults.push({ at, fault }));
   const later: number[] = [];
   const last: number[] = [];
   constraints.forEach((constraint, at) => {
@@ -33,11 +32,6 @@ export function solve(constraints: readonly Constraint[]): Solution {
   for (const at of last) report(at, check(constraints[at] as Constraint, elimination));
   faults.sort((a, b) => a.at - b.at);
   return { faults: faults.map((each) => each.fault), reduce: (form) => elimination.reduce(form), reduceSurely: (form) => elimination.reduceSurely(form), isDoubtful: (form) => elimination.isDoubtful(form) };
-}
-
-/** Settles whether a contradiction's literals excuse it. */
-function judged(fault: Fault): Fault {
-  return 'hidden' in fault && fault.hidden ? { ...fault, hidden: isExcused(fault) } : fault;
 }
 
 function isGentle(constraint: Constraint): boolean {
