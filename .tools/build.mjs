@@ -1,30 +1,31 @@
-/** Builds what is shipped into dist/: the command, the grammars, the signatures. */
+/** Builds what is shipped into dist/, or into the folder that is named: the command, the grammars, the signatures. */
 import { chmodSync, cpSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
+import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { build as bundle } from 'esbuild';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '..');
-const dist = join(root, 'dist');
 
 /** WASM files of the packages that ship them. */
 const grammars = ['web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tree-sitter-python.wasm'];
 
-export async function build() {
-  const { outputFiles } = await bundleCommand();
-  rmSync(dist, { recursive: true, force: true });
-  mkdirSync(dist);
+/** An earlier build stays where this one fails; a folder that is named is written into and not emptied. */
+export async function build(folder) {
+  const dist = folder ?? join(root, 'dist');
+  const { outputFiles } = await bundleCommand(dist);
+  if (!folder) rmSync(dist, { recursive: true, force: true });
+  mkdirSync(dist, { recursive: true });
   for (const file of outputFiles) writeFileSync(file.path, file.contents);
   chmodSync(join(dist, 'termwise.js'), 0o755);
-  copyAssets();
+  copyAssets(dist);
 }
 
 /** Everything stays in one folder: the assets are looked for beside the file that asks for them. */
-function bundleCommand() {
+function bundleCommand(dist) {
   return bundle({
     absWorkingDir: root,
     entryPoints: { termwise: 'server/src/cli/termwise.ts' },
-    outdir: 'dist',
+    outdir: dist,
     bundle: true,
     write: false,
     splitting: true,
@@ -40,10 +41,10 @@ function bundleCommand() {
   });
 }
 
-function copyAssets() {
+function copyAssets(dist) {
   mkdirSync(join(dist, 'grammars'), { recursive: true });
   for (const grammar of grammars) cpSync(join(root, 'node_modules', grammar), join(dist, 'grammars', grammar.split('/')[1]));
   cpSync(join(root, 'server/src/signatures'), join(dist, 'signatures'), { recursive: true, filter: (path) => !path.endsWith('.ts') });
 }
 
-if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) await build();
+if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) await build(process.argv[2] && resolve(process.argv[2]));

@@ -39,8 +39,12 @@ function byDeclaration(bytes: Uint8Array): Decoded {
   const name = declaredEncoding(bytes);
   if (name === undefined || /^utf[-_]?8/i.test(name)) return utf8(bytes);
   if (/^(latin[-_]?1|iso[-_]?8859[-_]?1|l1)$/i.test(name)) return { ok: true, text: latin1(bytes) };
+  if (/^(cp|windows[-_]?)1252$/i.test(name)) return { ok: true, text: latin1(bytes).replace(/[\u0080-\u009F]/g, (character) => windows1252[character.charCodeAt(0) - 0x80] as string) };
   return through(name.replaceAll('_', '-'), bytes, name);
 }
+
+/** What windows-1252 has in place of the control characters of latin-1; Node 20's decoder does not know them. Source: WHATWG Encoding, index windows-1252. */
+const windows1252 = '€\u0081‚ƒ„…†‡ˆ‰Š‹Œ\u008DŽ\u008F\u0090‘’“”•–—˜™š›œ\u009DžŸ';
 
 /** The encoding named in one of the first two lines, as Python's PEP 263 has it. */
 function declaredEncoding(bytes: Uint8Array): string | undefined {

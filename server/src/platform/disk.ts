@@ -1,5 +1,6 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import type { FileSource } from '../service/contract.ts';
+import { decode } from './decode.ts';
 
 /** Files of the disk as they are; what cannot be read is not there. Folder listings are kept until `forget`. */
 export function diskFiles(): FileSource & { forget(): void } {
@@ -7,7 +8,8 @@ export function diskFiles(): FileSource & { forget(): void } {
   return {
     read(file) {
       try {
-        return readFileSync(file, 'utf8');
+        const decoded = decode(readFileSync(file));
+        return decoded.ok ? decoded.text : undefined;
       } catch {
         return undefined;
       }
