@@ -20,6 +20,10 @@ describe('a comment behind an assignment', () => {
     ['q = 12.0  # flux [units: W/m2]', 'q: W/m2 (trailing) "flux"'],
     ['self.rho = 998.2  # [kg/m^3]', 'self.rho: kg/m^3 (trailing)'],
     ['df["p"] = x  # [kPa] inlet', 'df["p"]: kPa (trailing) "inlet"'],
+    ['P = 0.12  # (m) perimeter', 'P: m (trailing) "perimeter"'],
+    ['k = 0.6  # (W/m-K)', 'k: W/m-K (trailing)'],
+    ['eta = a / b  # (-)', 'eta: - (trailing)'],
+    ['D = 2.0  # outer diameter (m)', 'D: m (trailing) "outer diameter"'],
     ['x: float = 3.0  # [m]', 'x: m (trailing)'],
     ['x: float  # [m]', 'x: m (trailing)'],
     ['x += dx  # [m]', 'x: m (trailing)'],
@@ -80,7 +84,7 @@ describe('brackets that are no units', () => {
   test.each([
     'phi = 0.4  # [0 .. 1]', 'lat = 52.0  # [-90, 90]', 'v = w  # [u, v, w]', 'n = 4  # [0-10]', 'opts = x  # [a, b, c]', 'a = x  # first [u, v] of the row', 'y = x  # see [3]', 'y = x  # after [1]', 'm = a  # [n x 3] matrix',
     'm = a  # [13x36 double]', 'x = 1  # [OPTION]', 'x = 1  # [SI]', 'x = 1  # [out]', 'x = 1  # [in,out]', 'x = 1  # [optional]', 'y = a  # x[i] + y[i]', 'y = a  # z = [m]', 'y = a  # f(t, [m])', 'k = 1  # factors (k1-k6)', 'y = a  # x = y[3]',
-    'x = a  # from [m] to [mm]', 'x = a  # [m] -> [mm]', 'x = a  # see [the manual](link)', 'x = a  # `[m]` in code', 'x = a  # "[m]" as text', 'n = 4  # passes (a)', 'n = 4  # parameter(s)', 'x = a  # 3 bars (20 cm)', 'x = a  # one more (closed) end', 'r = a  # rho(S,T,p)',
+    'x = a  # from [m] to [mm]', 'x = a  # [m] -> [mm]', 'x = a  # see [the manual](link)', 'x = a  # `[m]` in code', 'x = a  # "[m]" as text', 'n = 4  # passes (a)', 'M = 4.2  # mass (m)', 'N = 12  # number of rows (N)', 's = 2  # spacing (s)', 'n = 4  # parameter(s)', 'x = a  # 3 bars (20 cm)', 'x = a  # one more (closed) end', 'r = a  # rho(S,T,p)',
     'a, b = f()  # [m]', 'a, b, c = f()  # [m], [s]', 'params = [\n    0.5,  # [m]\n    3.0]  # [s]', 'x = f(a,  # [m]\n    b)  # [s]', 'def f(a, b):  # [m]\n    return a', 'd = {"a": 1, "b": 2}\nx = 4  # [k1-k6]',
   ])('%s', (text) => {
     expect(unitsOf(text)).toBe('none');

@@ -14,6 +14,6 @@ export function besideUnit(text: string, unit: Span): Beside {
   let behind = text.slice(unit.end);
   const range = rangeIn(behind);
   if (range) behind = behind.slice(range.length);
-  const words = `${text.slice(0, unit.start)} ${behind}`.replace(/\s+/g, ' ').replace(/^[\s,;:.–—-]+|[\s,;:.(–—-]+$/g, '').replace(/\s+([.,;:])/g, '$1').slice(0, longest);
+  const words = `${text.slice(0, unit.start)} ${behind}`.replace(/\s+/g, ' ').replace(/^[\s,;:.–—-]+|[\s,;:.(–—-]+$/g, '').replace(/\s+([.,;:])(?=\s|$)/g, '$1').slice(0, longest);
   return { ...(words === '' ? {} : { description: words }), ...(range ? { range: { low: range.low, high: range.high } } : {}) };
 }

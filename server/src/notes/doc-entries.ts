@@ -37,7 +37,7 @@ export function readDocumentation(doc: Piece): Documentation {
   const limit = sections.some((section) => section.role !== 'skip') ? first : lines.length;
   if (doc.text.includes(':')) entries.push(...sphinxEntries(doc, lines));
   if (entries.length === 0) entries.push(...plainEntries(doc, lines.slice(0, Math.min(first, limit))));
-  return { entries, citations: /^\s*\.\.\s+\[\d+\]/m.test(doc.text), opening: partOf(doc, 0, lines[Math.min(first, lines.length - 1)]?.start ?? doc.text.length) };
+  return { entries, citations: /^\s*\.\.\s+\[\d+\]/m.test(doc.text), opening: partOf(doc, 0, lines[first]?.start ?? doc.text.length) };
 }
 
 function firstLineOf(section: Section): number {

@@ -35,7 +35,7 @@ export function classDocs(out: Collector, cls: ClassStmt): void {
 
 /** Without a bracket, a parenthesis, a comma, a digit or "in", no form of note is there. */
 function mayHoldUnits(doc: DocText): boolean {
-  return /[[(,]|\bin\b|unit/.test(doc.text);
+  return /[[(,]|\bin\b|unit/i.test(doc.text);
 }
 
 type Targets = (entry: DocEntry, name: string | undefined) => readonly NoteTarget[];

@@ -32,14 +32,22 @@ export function unitOfEntry(out: Collector, entry: DocEntry, citations: boolean,
 }
 
 function withoutBracket(taken: (name: string) => boolean, looked: readonly { readonly piece: Piece; readonly looked: Looked }[], type: Piece | undefined, body: Piece | undefined, options: ReadOptions): EntryUnit | undefined {
-  for (const { piece, looked: each } of looked) {
-    const found = each.parentheses.find((one) => !isValue(piece.text, one));
-    if (found) return { piece, found };
-  }
   const typed = type && unitOfType(type, taken, options);
   if (type && typed) return { piece: type, found: typed };
+  for (const { piece, looked: each } of looked) {
+    const found = parenthesisOf(piece.text, each.parentheses);
+    if (found) return { piece, found };
+  }
   const found = body && unitInWords(body, true, taken, options);
   return body && found ? { piece: body, found } : undefined;
+}
+
+/** The unit in parentheses of a first sentence, where no other is there: `the irradiance (W/m2) that …`. */
+function parenthesisOf(text: string, parentheses: readonly Found[]): Found | undefined {
+  const [first, ...others] = parentheses.filter((one) => !isValue(text, one));
+  if (!first || others.some((other) => other.unit.dimension !== first.unit.dimension)) return undefined;
+  const sentence = /[.;]\s/.exec(text)?.index ?? text.length;
+  return first.outer.end <= sentence ? first : undefined;
 }
 
 /** A value with its unit in prose is no note, unless it is the default. */

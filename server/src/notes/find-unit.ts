@@ -45,7 +45,7 @@ export function lookForUnits(piece: Piece, around: Surroundings, parentheses: bo
     const unread = { text: inner, span };
     if (bracket.open === '(') {
       if (bracket.start < round) continue;
-      const found = parentheses && standsFree(text, bracket) ? readParenthesis(bracket, span, outer, options) : undefined;
+      const found = parentheses && standsFree(text, bracket) ? readParenthesis(text, bracket, span, outer, options) : undefined;
       if (found) {
         looked.parentheses.push(found);
         taken = bracket.end;
@@ -55,7 +55,7 @@ export function lookForUnits(piece: Piece, around: Surroundings, parentheses: bo
     else if (isNoUnit(text, bracket, around)) looked.unread.push(unread);
     else {
       const lead = unitLabel.exec(inner)?.[0].length ?? 0;
-      const result = parseUnit(inner.slice(lead), options);
+      const result = parseUnit(inner.slice(lead).replace(/\s+/g, ' '), options);
       if (result.ok && (!bracket.glued || result.beyondDoubt || inner === '-')) looked.brackets.push({ unit: result.unit, hints: result.hints, span: { start: span.start + lead, end: span.end }, outer, by: 'bracket' });
       else {
         looked.unread.push(unread);
@@ -82,16 +82,29 @@ const gluedUnit = /^-$|[\p{L})]\s*\/\s*[\p{L}(]|\^|°|[²³⁻]/u;
 /** Symbols of two letters that are seldom names, in `(Pa)`; common practice. */
 const plainInParentheses = new Set(['Pa', 'Hz', 'ft', 'kg', '°', '%']);
 
-function readParenthesis(bracket: Bracketed, span: Span, outer: Span, options: ReadOptions): Found | undefined {
+function readParenthesis(text: string, bracket: Bracketed, span: Span, outer: Span, options: ReadOptions): Found | undefined {
   const inner = bracket.inner.trim();
-  if (inner === '' || /[:=,;'"]/.test(inner.replace(/:math:/g, '')) || isSeries(inner) || !mayStandAlone(inner) || doubtful.test(inner) || /^\d(?!\/|0\^|0?e)/.test(inner)) return undefined;
-  const result = parseUnit(inner, options);
-  if (!result.ok || !(result.beyondDoubt || plainInParentheses.has(inner))) return undefined;
-  return { unit: result.unit, hints: result.hints, span, outer, by: 'parenthesis' };
+  if (inner === '' || /[:=,;'"]/.test(inner.replace(/:math:/g, '')) || isSeries(inner) || !mayStandAlone(inner) || doubtful.test(inner) || /[.!?]$|(?:\S+\s+){5}/.test(inner) || /^\d(?!\/|0\^|0?e)/.test(inner)) return undefined;
+  const lead = /^in\s+/i.exec(inner)?.[0].length ?? 0;
+  if (lead > 0 && !/^\s*(?:[.;,]?\s*$|\.\s)/.test(text.slice(bracket.end))) return undefined;
+  const result = parseUnit(inner.slice(lead), options);
+  if (!result.ok || !(result.beyondDoubt || plainInParentheses.has(inner) || weakCounts(text, bracket, inner))) return undefined;
+  return { unit: result.unit, hints: result.hints, span: { start: span.start + lead, end: span.end }, outer, by: 'parenthesis' };
+}
+
+/** Letters in parentheses count at the head of a text, `(m) perimeter`, and the most usual at its end, `outer diameter (m)`. */
+const atHead = new Set(['m', 's', 'K', 'W', 'N', 'J', 'V', 'A', '-', '--', '1', 'h', 'g', 'L', 'bar', 'psi', 'rpm', 'deg', 'rad', 'sec']);
+const atEnd = new Set(['m', 's', 'K', '-', '--']);
+
+function weakCounts(text: string, bracket: Bracketed, inner: string): boolean {
+  if (text.slice(0, bracket.start).trim() === '') return atHead.has(inner) && inner !== '1';
+  if (!atEnd.has(inner) || !/^[\s.,;]*$/.test(text.slice(bracket.end))) return false;
+  const before = /([\p{L}_]+)\s*$/u.exec(text.slice(0, bracket.start))?.[1] ?? '';
+  return before.length > 2 && (before[0]?.toLowerCase() !== inner.toLowerCase() || /^(?:seconds|met(?:re|er)s|kelvins?)$/i.test(before));
 }
 
 /** Words in parentheses that read as units and are others: `(min)`, `(max)`, `(sec)`, `(s)`. */
-const doubtful = /^(?:min|max|sec|rev|mil|met|var|none|total|dim|fraction|ratio|decimal|dimensionless units?)$/i;
+const doubtful = /^(?:min|max|rev|mil|met|var|none|total|dim|fraction|ratio|decimal|dimensionless units?|[A-Z]{2,}-\d+)$/i;
 
 /**
  * The bracket that counts among several: side by side, the last (a symbol stands before its unit); alternatives of one

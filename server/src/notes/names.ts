@@ -28,6 +28,6 @@ function gather(chunk: Chunk): ReadonlySet<string> {
     from = comment.end;
   }
   code += chunk.text.slice(from);
-  const plain = code.replace(/("""|''')[\s\S]*?\1/g, ' ');
+  const plain = code.replace(/("""|''')[\s\S]*?\1/g, ' ').replace(/(['"])(?:\\.|(?!\1)[^\\\n])*\1/g, ' ');
   return new Set(plain.match(/[\p{L}_][\p{L}\p{N}_]*/gu) ?? []);
 }

@@ -28,7 +28,7 @@ function introducedUnit(piece: Piece, options: ReadOptions): Found | undefined {
   return undefined;
 }
 
-const mostWords = 6;
+const mostWords = 7;
 const segmentEnd = /[;:)!?[]|[.,](?=\s|$)|\n\s*\n|\s[-–—]+\s|(?<![/*·^])\s\(/;
 
 /** The longest run of words from `start` that is a unit. */
@@ -39,8 +39,8 @@ function leadingWords(text: string, start: number, options: ReadOptions): { read
   const ends = [...segment.matchAll(/\S+/g)].slice(0, mostWords).map((word) => word.index + word[0].length);
   for (let at = ends.length - 1; at >= 0; at--) {
     const words = segment.slice(0, ends[at]);
-    if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?)$/i.test(words) || /^\d/.test(words) || !mayStandAlone(words)) continue;
-    const result = parseUnit(words, options);
+    if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?|of|per|and|in|at|the)$/i.test(words) || /^\d/.test(words) || !mayStandAlone(words)) continue;
+    const result = parseUnit(words.replace(/\s+/g, ' '), options);
     if (!result.ok || isPureNumber(words)) continue;
     const whole = ends[at] === segment.trimEnd().length;
     const sure = result.beyondDoubt || fullNames.test(words);
@@ -108,7 +108,7 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
 
 /** A list of letters: `coefficients a, b, m`. */
 function isListed(before: string): boolean {
-  return /(?:^|[\s,])[A-Za-z]\w?\s*$/.test(before) && !/(?:^|,\s*)(?:up|to|in)\s*$/.test(before);
+  return /(?:^|[\s,])[A-Za-z]\s*$/.test(before) || /,\s*[A-Za-z]\w?\s*$/.test(before);
 }
 
 const mark = '[[(](?:IP|SI|US|imperial|metric)[\\])]';
