@@ -1,6 +1,7 @@
 /** From faults and note problems to what is reported: classified, one per cause, without what is allowed. */
 import type { Directive, Note, NoteProblem } from '../notes/types.ts';
 import type { UnitHint } from '../quantities/unit-result.ts';
+import type { Constraint } from '../constraints/problem.ts';
 import type { Fault } from '../solver/fault.ts';
 import { evidenceOf } from '../solver/root-cause.ts';
 import type { Anchor, Place, Span } from '../text/span.ts';
@@ -28,9 +29,14 @@ export function detectFaults(faults: readonly Fault[], oneHidden = true): readon
   const found: Detected[] = [];
   const hidden: Fault[] = [];
   const seen = new Set<string>();
+  const blamed = new Set<Constraint>();
   for (const fault of faults) {
     const check = checkOf(fault);
     if (!check || (needsNote(fault) && evidenceOf(fault).length === 0)) continue;
+    // What rests on an inference that a reported contradiction rests on too has the same cause.
+    const rows = 'involved' in fault ? fault.involved.map((each) => each.by) : [];
+    if (rows.some((row) => blamed.has(row))) continue;
+    for (const row of rows) blamed.add(row);
     if (check.code === 'hidden-unit' && oneHidden) {
       hidden.push(fault);
       continue;
