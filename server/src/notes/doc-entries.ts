@@ -25,6 +25,7 @@ const names = `${name}(?:\\s*,\\s*${name})*`;
 const underlinedHead = new RegExp(`^[\`]{0,2}(${names})[\`]{0,2}\\s*(?::(?!:)\\s*(.*))?$`, 'su');
 const colonHead = new RegExp(`^(?:[-*•]\\s+)?[\`]{0,2}(${names})[\`]{0,2}\\s*(?:\\(([^()]*(?:\\([^()]*\\)[^()]*)*)\\)|\\[([^\\]]*)\\])?\\s*(?::(?!:)|\\s[-–—]+\\s)\\s*(.*)$`, 'su');
 const sphinxHead = /^:(param|parameter|arg|argument|key|keyword|ivar|cvar|var|returns?|yields?|type|rtype)\b\s*([^:]*):\s*/;
+const anySphinx = /(?:^|\n)[ \t]*[:@](?:param|arg|key|ivar|cvar|var|return|yield|type|rtype)/;
 const plainHead = new RegExp(`^(?:[-*•+]\\s+|[@\\\\]param\\s+)?[\`]{0,2}(${names})[\`]{0,2}(?:\\s*:\\s*|\\s*=\\s*|\\s+[-–—]+\\s+|\\s+(?=\\[)|\\s{2,}|\\t+)(\\S.*)$`, 'su');
 
 /** All entries of a documentation text. */
@@ -35,7 +36,7 @@ export function readDocumentation(doc: Piece): Documentation {
   for (const section of sections) if (section.role !== 'skip') entries.push(...sectionEntries(doc, lines, section));
   const first = sections[0] ? firstLineOf(sections[0]) : lines.length;
   const limit = sections.some((section) => section.role !== 'skip') ? first : lines.length;
-  if (doc.text.includes(':')) entries.push(...sphinxEntries(doc, lines));
+  if (anySphinx.test(doc.text)) entries.push(...sphinxEntries(doc, lines));
   if (entries.length === 0) entries.push(...plainEntries(doc, lines.slice(0, Math.min(first, limit))));
   return { entries, citations: /^\s*\.\.\s+\[\d+\]/m.test(doc.text), opening: partOf(doc, 0, lines[first]?.start ?? doc.text.length) };
 }
@@ -67,7 +68,7 @@ function underlinedEntry(doc: Piece, body: readonly Line[], at: number, to: numb
   const line = body[at] as Line;
   const match = underlinedHead.exec(line.text);
   const below = textOf(doc, body, at + 1, to);
-  const named = match && (match[2] !== undefined || role !== 'result') && !isType(match[1] as string, match[2] !== undefined);
+  const named = match && (match[2] !== undefined || role !== 'result') && !isType(match[1] as string);
   if (!named) {
     if (role === 'result') return { role, names: [], type: pieceOf(doc, line, line.text), body: below };
     const spaced = plainHead.exec(line.text);
@@ -84,7 +85,7 @@ function colonEntry(doc: Piece, body: readonly Line[], at: number, to: number, r
   const type = match[2] ?? match[3];
   const typeAt = type === undefined ? -1 : line.text.indexOf(type, (match[1] as string).length);
   const start = line.start + line.indent + line.text.length - rest.length;
-  const anonymous = isType(match[1] as string, true) && role === 'result';
+  const anonymous = isType(match[1] as string) && role === 'result';
   return {
     role, names: anonymous ? [] : namesIn(match[1] as string),
     type: type === undefined || type === '' ? undefined : partOf(doc, line.start + line.indent + typeAt - (match[3] === undefined ? 0 : 1), line.start + line.indent + typeAt + type.length + (match[3] === undefined ? 0 : 1)),
@@ -93,8 +94,8 @@ function colonEntry(doc: Piece, body: readonly Line[], at: number, to: number, r
 }
 
 /** `float`, `array_like`: a type where a name could stand. */
-function isType(text: string, colon: boolean): boolean {
-  return /^(?:float|int|array|array_like|arraylike|ndarray|numeric|number|scalar|list|tuple|bool|str|string|dict|Series|DataFrame|None)$/.test(text) && (colon || true);
+function isType(text: string): boolean {
+  return /^(?:float|int|array|array_like|arraylike|ndarray|numeric|number|scalar|list|tuple|bool|str|string|dict|Series|DataFrame|None)$/.test(text);
 }
 
 function sphinxEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] {

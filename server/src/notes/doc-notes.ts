@@ -11,7 +11,7 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
   if (!fn.doc || !mayHoldUnits(fn.doc)) return;
   const doc = readDocumentation(fn.doc);
   const params = new Map(fn.params.map((param) => [param.name, param]));
-  readEntries(out, doc, fn.name, (entry, name) => {
+  readEntries(out, doc, (entry, name) => {
     if (entry.role === 'field') return owner && name !== undefined ? [{ kind: 'field', owner, name }] : [];
     const param = name === undefined ? undefined : params.get(name);
     return param ? [{ kind: 'parameter', owner: fn, param }] : [];
@@ -25,7 +25,7 @@ export function classDocs(out: Collector, cls: ClassStmt): void {
   const doc = readDocumentation(cls.doc);
   const constructor = cls.body.find((each): each is FunctionStmt => each.kind === 'function' && each.name === '__init__');
   const said = new Set(constructor?.doc ? readDocumentation(constructor.doc).entries.flatMap((entry) => entry.names) : []);
-  readEntries(out, doc, cls.name, (entry, name) => {
+  readEntries(out, doc, (entry, name) => {
     if (name === undefined || entry.role === 'result') return [];
     const param = said.has(name) || entry.role === 'field' ? undefined : constructor?.params.find((each) => each.name === name);
     const field: NoteTarget = { kind: 'field', owner: cls, name };
@@ -40,7 +40,7 @@ function mayHoldUnits(doc: DocText): boolean {
 
 type Targets = (entry: DocEntry, name: string | undefined) => readonly NoteTarget[];
 
-function readEntries(out: Collector, doc: Documentation, _of: string, targetsOf: Targets, fn: FunctionStmt | undefined): void {
+function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn: FunctionStmt | undefined): void {
   const results = doc.entries.filter((entry) => entry.role === 'result');
   const several = results.reduce((sum, entry) => sum + Math.max(entry.names.length, 1), 0) > 1 && !results.every((entry) => entry.names.length === 0 && entry.type === undefined);
   const told = new Set<string>();

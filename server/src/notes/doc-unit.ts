@@ -59,8 +59,10 @@ const types = /^(?:\w+\s+of\s+)?(?:float|int|integer|array|array[_-]?like|ndarra
 /** No quantity is counted in these. */
 const others = /\b(?:bool|boolean|str|string|dict|OrderedDict|DataFrame|object|callable|function|class|Dataset|path|file|module|instance|datetime|DatetimeIndex|Timestamp|dictionary|date)\b/i;
 
+const numeric = /\b(?:float|int|array|array[_-]?like|ndarray|numeric|number|scalar|Series)\b/i;
+
 function holdsNoNumber(type: string): boolean {
-  return others.test(type) && !/\b(?:float|int|array|array[_-]?like|ndarray|numeric|number|scalar|Series)\b/i.test(type);
+  return others.test(type) && !numeric.test(type.replace(/\([^()]*\)/g, ''));
 }
 
 /** `float, m/s`, `array-like, kg/kg`, `float in m`, or the unit itself: `m/s`. */

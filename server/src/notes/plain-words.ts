@@ -12,6 +12,7 @@ const others = /^(?:diagrams?|programs?|histograms?|parameters?|perimeters?|diam
 /** True for a spelling with other marks than letters, and for letters alone where those are a unit's usual ones. */
 export function mayStandAlone(text: string): boolean {
   if (!/^[A-Za-z]+$/.test(text)) return true;
+  if (text.length > 16) return false;
   if (text.length <= 3) return short.has(text) || /^[a-z]{1,2}[A-Z]/.test(text);
   return /^[a-z]{1,2}[A-Z]|^[a-z]+[CFKR]$/.test(text) || (names.test(text) && !others.test(text));
 }
