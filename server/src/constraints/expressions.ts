@@ -89,8 +89,8 @@ function unary(op: string, expr: Expr, operand: Value): Value {
 }
 
 function binary(context: Context, expr: Extract<Expr, { kind: 'binary' }>): Value {
-  const left = evaluate(context, expr.left);
-  const right = evaluate(context, expr.right);
+  const left = settled(context, evaluate(context, expr.left));
+  const right = settled(context, evaluate(context, expr.right));
   if (expr.left.kind === 'text' || expr.right.kind === 'text' || isList(left, expr.left) || isList(right, expr.right)) return listArithmetic(expr, left, right);
   switch (expr.op) {
     case '+':
@@ -112,6 +112,14 @@ function binary(context: Context, expr: Extract<Expr, { kind: 'binary' }>): Valu
     default:
       return unknown(expr);
   }
+}
+
+/** A symbol that an if left in two dimensions cannot be right in arithmetic. */
+function settled(context: Context, value: Value): Value {
+  if (!value.split || !value.expr) return value;
+  const [first, other] = value.split;
+  agree(context, value.expr, { ...first, measure: undefined }, { ...other, measure: undefined }, { kind: 'choice', of: 'branches' }, value.expr);
+  return { expr: value.expr, form: undefined, from: [first, other], spoilt: true };
 }
 
 function isList(value: Value, expr: Expr): boolean {

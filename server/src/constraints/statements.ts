@@ -5,7 +5,7 @@ import { agree, product, quotient, sum, power } from './arithmetic.ts';
 import { assignedPaths } from './assigned.ts';
 import type { Bindings, Context } from './context.ts';
 import { bindElement, evaluate } from './expressions.ts';
-import { multiplyForms, unknownForm, sameForm } from './form.ts';
+import { isConstant, oneForm, sameForm, unknownForm } from './form.ts';
 import { assign, notedValue, reportDisagreement, reportMisuse } from './targets.ts';
 import { type Value, unknown } from './value.ts';
 
@@ -147,7 +147,7 @@ function branches(context: Context, statement: Extract<Stmt, { kind: 'if' }>): b
   }
   context.bindings = new Map(before);
   if (walk(context, statement.otherwise)) ends.push(context.bindings);
-  context.bindings = ends.length === 0 ? before : joined(ends);
+  context.bindings = ends.length === 0 ? before : joined(ends, true);
   if (ends.length > 1) for (const arm of statement.arms) for (const inner of arm.body) correction(context, inner, before);
   return ends.length > 0;
 }
@@ -158,12 +158,10 @@ function correction(context: Context, statement: Stmt, before: Bindings): void {
   const target = statement.targets[0];
   const path = target && pathOf(target);
   const earlier = path === undefined ? undefined : before.get(path);
-  if (!target || !earlier?.form || earlier.literal || earlier.fits || earlier.version?.origin === 'constant') return;
   const factor = context.corrections.get(statement);
-  if (!factor?.form || factor.literal || factor.fits) return;
-  const kept: Value = { ...earlier, expr: target, measure: undefined };
-  const changed: Value = { expr: { ...statement.value, start: target.start }, form: multiplyForms(earlier.form, factor.form), from: [earlier, factor], ...(earlier.tainted || factor.tainted ? { tainted: true } : {}) };
-  agree(context, target, changed, kept, { kind: 'choice', of: 'if' }, { start: target.start, end: statement.value.end });
+  if (!target || !earlier || earlier.fits || earlier.spoilt || !factor?.form || factor.literal || factor.fits) return;
+  const pure: Value = { expr: undefined, form: oneForm, from: [] };
+  agree(context, statement.value, { ...factor, measure: undefined }, pure, { kind: 'choice', of: 'correction' }, statement.value);
 }
 
 function cases(context: Context, statement: Extract<Stmt, { kind: 'match' }>): boolean {
@@ -209,7 +207,7 @@ function attempt(context: Context, statement: Extract<Stmt, { kind: 'attempt' }>
 }
 
 /** Versions after several ways: the same everywhere, or alike, or unknown. A bare number gives way to a quantity. */
-function joined(ends: readonly Bindings[]): Bindings {
+function joined(ends: readonly Bindings[], chosen = false): Bindings {
   const first = ends[0] as Bindings;
   if (ends.length === 1) return first;
   const result: Bindings = new Map(first);
@@ -217,19 +215,31 @@ function joined(ends: readonly Bindings[]): Bindings {
   for (const path of paths) {
     const values = ends.flatMap((end) => end.get(path) ?? []);
     if (values.every((value) => value === values[0])) result.set(path, values[0] as Value);
-    else result.set(path, joinedValue(values));
+    else result.set(path, joinedValue(values, chosen && values.length === ends.length));
   }
   return result;
 }
 
-function joinedValue(values: readonly Value[]): Value {
+function joinedValue(values: readonly Value[], chosen: boolean): Value {
   const telling = values.filter((value) => !value.fits && value.version?.origin !== 'constant');
   const first = telling[0] ?? values.find((value) => !value.fits) ?? values[0];
   if (!first) return { expr: undefined, form: undefined, from: [] };
   const alike = telling.every((value) => value === first || (value.form && first.form && sameForm(value.form, first.form) && !value.items));
+  if (!alike && chosen) {
+    const split = splitOf(telling);
+    if (split) return { expr: undefined, form: undefined, from: values, split };
+  }
   if (!alike || (telling.length === 0 && values.length > 1 && !values.every((value) => value.fits))) return { expr: undefined, form: undefined, from: values };
   const measured = telling.every((value) => value.measure === first.measure);
   return measured ? first : { ...first, measure: undefined };
+}
+
+/** Two ways through an if that leave a symbol in two dimensions: told where it is used. */
+function splitOf(values: readonly Value[]): readonly [Value, Value] | undefined {
+  const known = values.filter((value) => value.form && isConstant(value.form) && !value.tainted && !value.items && value.version);
+  const first = known[0];
+  const other = known.find((value) => value.form !== first?.form);
+  return first && other && known.length === values.length ? [first, other] : undefined;
 }
 
 /** A nested function is read once where it stands, its parameters open. */

@@ -25,6 +25,8 @@ export interface Value {
   readonly spoilt?: boolean;
   /** Unknown, but raised to a simple fraction: beside other characteristic numbers it is one. */
   readonly fractional?: boolean;
+  /** Left in two dimensions by the ways through an if; reported where arithmetic uses it. */
+  readonly split?: readonly [Value, Value];
   /** A tuple's positions. */
   readonly items?: readonly Value[];
   /** What a member is, for what is only run over: `zip`, `enumerate`. */

@@ -211,8 +211,14 @@ export class FileSolver {
     const submodule = this.inputs.importFile(statement, name);
     if (submodule) return moduleValue(name, submodule);
     const file = this.inputs.importFile(statement);
-    return file ? file.global(name) : this.inputs.library.find(`${statement.module}.${name}`);
+    if (file) return file.global(name);
+    return this.inputs.library.find(`${statement.module}.${name}`) ?? commonConstant(statement.module, name, this.inputs.library);
   }
+}
+
+/** Modules named `constants` of packages that are not at hand use the names and SI values of SciPy's (common practice). */
+function commonConstant(module: string, name: string, library: Library): Value | undefined {
+  return /(?:^|\.)constants$/.test(module) ? library.find(`scipy.constants.${name}`) : undefined;
 }
 
 function moduleValue(name: string, file: FileSolver): Value {

@@ -25,6 +25,8 @@ function openingOf(voice: Voice, reason: Reason, a: string, b: string, fault: Di
     case 'comparison':
       return `This comparison (${reason.op}) sets ${a} against ${b}.`;
     case 'choice':
+      if (reason.of === 'correction') return `This factor is applied only under a condition, so it has to be a pure number, but it is ${a}.`;
+      if (reason.of === 'branches') return `The ways through the if above leave this in different units: ${a} and ${b}.`;
       return `The two choices are not alike: ${a} and ${b}.`;
     case 'alike':
       return `\`${short(reason.function)}\` needs its arguments ${reason.positions[0] + 1} and ${reason.positions[1] + 1} in one unit; here they are ${a} and ${b}.`;
