@@ -1,14 +1,14 @@
 /** Docstrings: of functions, classes and modules, and those behind a field. */
 import type { DocText, Stmt } from '../../program/nodes.ts';
-import { type Lowering } from './lowering.ts';
+import { type Lowering, textOf } from './lowering.ts';
 import type { Syntax } from './syntax.ts';
 
-/** The text between the quotes of a single plain or raw string; undefined for joined, formatted and unfinished ones. */
+/** The text between the quotes of a single plain or raw string; undefined for joined and formatted texts, bytes, and unfinished ones. */
 export function docText(low: Lowering, node: Syntax): DocText | undefined {
   if (node.type !== 'string') return undefined;
   const open = node.parts.find((each) => each.type === 'string_start');
   const close = node.parts.find((each) => each.type === 'string_end');
-  if (!open || !close || close.missing || node.parts.some((each) => each.type === 'interpolation')) return undefined;
+  if (!open || !close || close.broken || /[bft]/i.test(textOf(low, open)) || node.parts.some((each) => each.type === 'interpolation')) return undefined;
   return { text: low.text.slice(open.end, close.start), start: open.end - low.base, end: close.start - low.base };
 }
 

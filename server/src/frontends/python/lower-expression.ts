@@ -9,7 +9,7 @@ const deepest = 400;
 
 export function lowerExpression(low: Lowering, node: Syntax): Expr {
   const span = spanOf(low, node);
-  if (low.depth > deepest || node.missing) return { kind: 'opaque', parts: [], ...span };
+  if (low.depth > deepest || node.broken) return { kind: 'opaque', parts: [], ...span };
   low.depth++;
   const expr = byType[node.type]?.(low, node, span) ?? opaque(low, node, span);
   low.depth--;
@@ -77,7 +77,8 @@ const byType: Record<string, Lower> = {
   as_pattern: (low, node, span) => (partsOf(node)[0] ? lowerExpression(low, partsOf(node)[0] as Syntax) : opaque(low, node, span)),
 };
 
-function child(low: Lowering, node: Syntax, field: string): Expr {
+/** The expression in a field, or unknown where there is none. */
+export function child(low: Lowering, node: Syntax, field: string): Expr {
   const found = fieldOf(node, field);
   return found ? lowerExpression(low, found) : { kind: 'opaque', parts: [], ...spanOf(low, node) };
 }

@@ -1,8 +1,9 @@
 /** Python statements in the common form. */
 import type { BinaryExpr, Comment, Expr, Stmt } from '../../program/nodes.ts';
+import type { Span } from '../../text/span.ts';
 import { docOf, withFieldDocs } from './documentation.ts';
 import { importedModules, importedNames } from './lower-import.ts';
-import { lowerArguments, lowerExpression, lowerParams } from './lower-expression.ts';
+import { child, lowerArguments, lowerExpression, lowerParams } from './lower-expression.ts';
 import { type Lowering, spanOf, textOf } from './lowering.ts';
 import { matchParts } from './lower-match.ts';
 import { fieldOf, partsOf, type Syntax } from './syntax.ts';
@@ -65,12 +66,12 @@ const byType: Record<string, Lower> = {
     return { kind: 'return', ...(value ? { value: lowerExpression(low, value) } : {}), ...base };
   },
   if_statement: (low, node, base) => {
-    const arms = [{ condition: need(low, node, 'condition'), body: lowerBlock(low, fieldOf(node, 'consequence')) }];
-    for (const each of node.children) if (each.type === 'elif_clause') arms.push({ condition: need(low, each, 'condition'), body: lowerBlock(low, fieldOf(each, 'consequence')) });
+    const arms = [{ condition: child(low, node, 'condition'), body: lowerBlock(low, fieldOf(node, 'consequence')) }];
+    for (const each of node.children) if (each.type === 'elif_clause') arms.push({ condition: child(low, each, 'condition'), body: lowerBlock(low, fieldOf(each, 'consequence')) });
     return { kind: 'if', arms, otherwise: elseOf(low, node), ...base };
   },
-  for_statement: (low, node, base) => ({ kind: 'loop', target: need(low, node, 'left'), iterable: need(low, node, 'right'), body: lowerBlock(low, fieldOf(node, 'body')), otherwise: elseOf(low, node), ...base }),
-  while_statement: (low, node, base) => ({ kind: 'loop', condition: need(low, node, 'condition'), body: lowerBlock(low, fieldOf(node, 'body')), otherwise: elseOf(low, node), ...base }),
+  for_statement: (low, node, base) => ({ kind: 'loop', target: child(low, node, 'left'), iterable: child(low, node, 'right'), body: lowerBlock(low, fieldOf(node, 'body')), otherwise: elseOf(low, node), ...base }),
+  while_statement: (low, node, base) => ({ kind: 'loop', condition: child(low, node, 'condition'), body: lowerBlock(low, fieldOf(node, 'body')), otherwise: elseOf(low, node), ...base }),
   try_statement: (low, node, base) => ({
     kind: 'attempt', body: lowerBlock(low, fieldOf(node, 'body')),
     handlers: node.children.filter((each) => each.type.startsWith('except')).map((each) => lowerBlock(low, blockIn(each))),
@@ -104,7 +105,7 @@ function expressionStatement(low: Lowering, node: Syntax, base: Base): Stmt | un
   if (first.type === 'augmented_assignment') {
     const op = (fieldOf(first, 'operator')?.type ?? '').slice(0, -1);
     const known = ['+', '-', '*', '/', '//', '%', '**', '@'].includes(op);
-    return { kind: 'assign', targets: [need(low, first, 'left')], value: need(low, first, 'right'), op: known ? (op as BinaryExpr['op']) : 'bits', ...base };
+    return { kind: 'assign', targets: [child(low, first, 'left')], value: first.broken ? unknownAt(spanOf(low, first)) : child(low, first, 'right'), op: known ? (op as BinaryExpr['op']) : 'bits', ...base };
   }
   if (first.type === 'yield') {
     const value = partsOf(first)[0];
@@ -119,7 +120,7 @@ function assignment(low: Lowering, node: Syntax, base: Base): Stmt {
   let at: Syntax = node;
   const annotation = fieldOf(node, 'type');
   for (;;) {
-    targets.push(need(low, at, 'left'));
+    targets.push(child(low, at, 'left'));
     const right = fieldOf(at, 'right');
     if (right?.type !== 'assignment') break;
     at = right;
@@ -127,12 +128,12 @@ function assignment(low: Lowering, node: Syntax, base: Base): Stmt {
   const value = fieldOf(at, 'right');
   const type = annotation ? { annotation: textOf(low, annotation) } : {};
   if (!value) return { kind: 'declare', target: targets[0] as Expr, ...type, ...base };
-  return { kind: 'assign', targets, value: lowerExpression(low, value), ...type, ...base };
+  return { kind: 'assign', targets, value: node.broken ? unknownAt(spanOf(low, value)) : lowerExpression(low, value), ...type, ...base };
 }
 
-function need(low: Lowering, node: Syntax, field: string): Expr {
-  const found = fieldOf(node, field);
-  return found ? lowerExpression(low, found) : { kind: 'opaque', parts: [], ...spanOf(low, node) };
+/** In a broken statement the parser guesses where the value ends. */
+function unknownAt(span: Span): Expr {
+  return { kind: 'opaque', parts: [], ...span };
 }
 
 function elseOf(low: Lowering, node: Syntax): readonly Stmt[] {
@@ -170,7 +171,7 @@ function decorated(low: Lowering, node: Syntax, outer: Base): Stmt | undefined {
   const marks = node.parts.filter((each) => each.type === 'decorator');
   const decorators = marks.flatMap((each) => each.parts.map((part) => lowerExpression(low, part)));
   const inner = baseOf(low, definition);
-  const trailing = inner.trailing ?? marks.map((each) => low.comments.beside(spanOf(low, each))).find((each) => each);
+  const trailing = inner.trailing ?? marks.map((each) => low.comments.behind((each.parts.at(-1) ?? each).end - low.base)).find((each) => each);
   const above = [...(outer.above ?? []), ...(inner.above ?? [])];
   const base = { start: outer.start, end: outer.end, ...(trailing ? { trailing } : {}), ...(above.length > 0 ? { above } : {}) };
   return definition.type === 'class_definition' ? classStatement(low, definition, base, decorators) : functionStatement(low, definition, base, decorators);

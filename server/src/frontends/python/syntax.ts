@@ -10,7 +10,8 @@ export interface Syntax extends Span {
   readonly type: string;
   readonly field: string | undefined;
   readonly named: boolean;
-  readonly missing: boolean;
+  /** A syntax error stands in it: what it says cannot be trusted. */
+  readonly broken: boolean;
   /** Everything below but punctuation and comments. */
   readonly children: readonly Syntax[];
   /** The children that are no tokens. */
@@ -64,21 +65,23 @@ export class TreeCopier {
     const field = fieldable ? this.fieldOf(cursor.currentFieldId) : undefined;
     const start = cursor.startIndex;
     const end = kind.named || broken ? cursor.endIndex : start + kind.type.length;
-    const missing = broken && cursor.nodeIsMissing;
-    if (kind.leaf || depth >= deepest || !cursor.gotoFirstChild()) return { type: kind.type, field, named: kind.named, missing, start, end, children: none, parts: none };
+    let faulty = broken && (kind.type === 'ERROR' || cursor.nodeIsMissing);
+    if (kind.leaf || depth >= deepest || !cursor.gotoFirstChild()) return { type: kind.type, field, named: kind.named, broken: faulty, start, end, children: none, parts: none };
     const children: Syntax[] = [];
     let tokens = 0;
     do {
       const below = this.kindOf(cursor);
-      if (broken) note(cursor, below, found);
+      if (broken && note(cursor, below, found)) faulty = true;
       if (below.type === 'comment') found.comments.push({ start: cursor.startIndex, end: cursor.endIndex });
       if (!below.kept) continue;
       if (!below.named) tokens++;
-      children.push(this.copyAt(cursor, below, !kind.fieldless, depth + 1, broken, found));
+      const child = this.copyAt(cursor, below, !kind.fieldless, depth + 1, broken, found);
+      faulty ||= child.broken;
+      children.push(child);
     } while (cursor.gotoNextSibling());
     cursor.gotoParent();
     const parts = tokens === 0 ? children : children.filter((each) => each.named);
-    return { type: kind.type, field, named: kind.named, missing, start, end, children, parts };
+    return { type: kind.type, field, named: kind.named, broken: faulty, start, end, children, parts };
   }
 
   private kindOf(cursor: TreeCursor): Kind {
@@ -98,13 +101,14 @@ export class TreeCopier {
   }
 }
 
-/** Writes a syntax error down, unless it lies in one that is. */
-function note(cursor: TreeCursor, kind: Kind, found: Found): void {
+/** Whether this is a syntax error; it is written down unless it lies in one that is. */
+function note(cursor: TreeCursor, kind: Kind, found: Found): boolean {
   const error = kind.type === 'ERROR';
-  if (!error && !cursor.nodeIsMissing) return;
+  if (!error && !cursor.nodeIsMissing) return false;
   const { startIndex: start, endIndex: end } = cursor;
   const last = found.problems.at(-1);
   if (!last || end > last.end) found.problems.push({ start, end, message: error ? 'cannot be parsed' : `missing ${kind.type}` });
+  return true;
 }
 
 export function fieldOf(node: Syntax, name: string): Syntax | undefined {
