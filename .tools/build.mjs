@@ -1,4 +1,4 @@
-/** Builds what is shipped into dist/, or into the folder that is named: the command, the grammars, the signatures. */
+/** Builds what is shipped into dist/, or into the folder that is named: the command, the grammars, the signatures, the pages. */
 import { chmodSync, cpSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
@@ -45,6 +45,7 @@ function copyAssets(dist) {
   mkdirSync(join(dist, 'grammars'), { recursive: true });
   for (const grammar of grammars) cpSync(join(root, 'node_modules', grammar), join(dist, 'grammars', grammar.split('/')[1]));
   cpSync(join(root, 'server/src/signatures'), join(dist, 'signatures'), { recursive: true, filter: (path) => !path.endsWith('.ts') });
+  cpSync(join(root, 'server/src/findings/checks'), join(dist, 'pages'), { recursive: true, filter: (path) => !path.endsWith('.ts') });
 }
 
 if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) await build(process.argv[2] && resolve(process.argv[2]));

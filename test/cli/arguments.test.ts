@@ -41,9 +41,10 @@ test.each([
   ['--help', { kind: 'help' }],
   ['help', { kind: 'help' }],
   ['-h', { kind: 'help' }],
-  ['help check', { kind: 'help', command: 'check' }],
-  ['check --help', { kind: 'help', command: 'check' }],
-  ['check a.py -h', { kind: 'help', command: 'check' }],
+  ['help check', { kind: 'help', about: 'check' }],
+  ['help hidden-unit', { kind: 'help', about: 'hidden-unit' }],
+  ['check --help', { kind: 'help', about: 'check' }],
+  ['check a.py -h', { kind: 'help', about: 'check' }],
 ])('%s', (line, request) => {
   expect(read(line)).toEqual(request);
 });
@@ -55,6 +56,7 @@ describe('refusals name what is wrong', () => {
     ['pump.py', 'termwise check pump.py'],
     ['frobnicate', 'Unknown command frobnicate.'],
     ['help chekc', 'Did you mean check?'],
+    ['help hiden-unit', 'Did you mean hidden-unit?'],
     ['check', 'Nothing to check'],
     ['check a --formt json', 'Did you mean --format?'],
     ['check a --stat', 'Did you mean --stats?'],

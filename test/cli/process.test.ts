@@ -37,6 +37,10 @@ test('checks with the grammars and signatures that lie beside it', () => {
   expect(JSON.parse(logarithm.stdout)).toMatchObject({ findings: [{ code: 'dimensioned-argument' }] });
 });
 
+test('explains a code', () => {
+  expect(termwise(['help', 'scale-mismatch'])).toMatchObject({ status: 0, stdout: readFileSync(join(root, 'server/src/findings/checks/scale-mismatch.md'), 'utf8') });
+});
+
 test('bad usage goes to standard error with status 2', () => {
   expect(termwise(['check', '--formt', 'json'])).toEqual(expect.objectContaining({ status: 2, stdout: '', stderr: 'termwise: Unknown option --formt. Did you mean --format?\nSee termwise --help.\n' }));
   expect(termwise([])).toMatchObject({ status: 2, stdout: '' });

@@ -24,7 +24,7 @@ export interface CheckOptions {
 
 export type Request =
   | { readonly kind: 'check'; readonly options: CheckOptions }
-  | { readonly kind: 'help'; readonly command?: 'check' }
+  | { readonly kind: 'help'; readonly about?: 'check' | FindingCode }
   | { readonly kind: 'version' }
   /** What is wrong with the command line, in a sentence. */
   | { readonly kind: 'misuse'; readonly problem: string };
@@ -91,7 +91,8 @@ function requestOf(positionals: readonly string[], given: ReadonlyMap<OptionName
 
 function helpRequest(command: string | undefined): Request {
   if (command === undefined || command === 'help') return { kind: 'help' };
-  return command === 'check' ? { kind: 'help', command } : { kind: 'misuse', problem: unknownCommand(command) };
+  if (command === 'check' || isOneOf(findingCodes, command)) return { kind: 'help', about: command };
+  return { kind: 'misuse', problem: `No help on ${command}.${didYouMean(command, [...commands, ...findingCodes])}` };
 }
 
 function unknownCommand(word: string): string {

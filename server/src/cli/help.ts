@@ -5,6 +5,7 @@ them through every expression without running anything, and reports what cannot 
 Usage
   termwise check <paths…>     check files and folders
   termwise help check         the options of check
+  termwise help <code>        what a finding means, with examples: termwise help scale-mismatch
   termwise --version          the version
 
 Exit status: 0 nothing found at severity error, 1 findings at error, 2 bad usage or input that cannot be read.

@@ -1,6 +1,7 @@
 /** The program behind the command: reads the arguments and does what they ask. */
 import { readArguments } from './arguments.ts';
 import type { Surroundings } from './check.ts';
+import type { FindingCode } from '../program/codes.ts';
 import { checkHelp, generalHelp } from './help.ts';
 
 /** Runs a command line; the answer is the exit status. Only what is asked for is loaded: the version answers at once. */
@@ -11,7 +12,7 @@ export async function run(args: readonly string[], around: Surroundings): Promis
       around.out(`termwise ${around.version}\n`);
       return 0;
     case 'help':
-      around.out(request.command === 'check' ? checkHelp : generalHelp);
+      around.out(request.about === undefined ? generalHelp : request.about === 'check' ? checkHelp : await page(request.about));
       return 0;
     case 'misuse':
       around.complain(`termwise: ${request.problem}\n${args.length === 0 ? `\n${generalHelp}` : 'See termwise --help.\n'}`);
@@ -21,4 +22,9 @@ export async function run(args: readonly string[], around: Surroundings): Promis
       return check(request.options, around);
     }
   }
+}
+
+async function page(code: FindingCode): Promise<string> {
+  const { pageOf } = await import('../platform/pages.ts');
+  return pageOf(code);
 }

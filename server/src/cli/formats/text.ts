@@ -2,7 +2,7 @@
 import type { FindingCode } from '../../findings/finding.ts';
 import { findingCodes } from '../../findings/finding.ts';
 import type { Format, Region, Reported, ReportedPlace, Summary } from '../report.ts';
-import { painter, type Paint, showLine, wrap } from '../terminal.ts';
+import { painter, type Paint, showLine, type Style, wrap } from '../terminal.ts';
 
 export interface TextOptions {
   readonly color: boolean;
@@ -33,10 +33,10 @@ function findingText(finding: Reported, width: number, paint: Paint): string {
 function relatedLines(related: ReportedPlace, file: string, gutter: number, width: number, paint: Paint): readonly string[] {
   const place = related.file === file ? `line ${related.line}` : `${related.file}:${related.line}:${related.column}`;
   const said = wrap(`${place}: ${related.message}`, width - 4).map((line, at) => (at === 0 ? `  - ${line}` : `    ${line}`));
-  return [...said, ...sourceLines(related, gutter, width, paint, 'faint')];
+  return [...said, ...sourceLines(related, gutter, width, paint).slice(0, 1)];
 }
 
-function sourceLines(place: ReportedPlace, gutter: number, width: number, paint: Paint, style: 'faint' | Reported['severity']): readonly string[] {
+function sourceLines(place: ReportedPlace, gutter: number, width: number, paint: Paint, style: Style = 'faint'): readonly string[] {
   if (place.source.trim() === '') return [];
   const end = place.endLine === place.line ? place.endColumn - 1 : place.source.trimEnd().length;
   const indent = ' '.repeat(gutter + 2);
