@@ -108,6 +108,13 @@ describe('numpydoc results', () => {
   });
 });
 
+test('keys of a returned record', () => {
+  const doc = ['    """Sums.', '', '    Returns', '    -------', '    out : dict', '        * Q : Heat flow through', '          the wall, [W]', '        * Cr : Ratio, [-]', '        * W : Width, [m]', '    """'].join('\n');
+  expect(unitsOf(`def f(x):\n${doc}\n    return {'Q': x, 'Cr': 2 * x}`)).toBe('{Q} W; {Cr} -');
+  expect(unitsOf(`def f(x):\n${doc}\n    out = {'Q': x}\n    if x:\n        return out\n    return None`)).toBe('{Q} W');
+  expect(unitsOf(`def f(x):\n${doc}\n    return dict(Q=x)`)).toBe('none');
+});
+
 describe('other styles', () => {
   test('Google', () => {
     const lines = ['Args:', '    V (float): Mean velocity [m/s]', '    D: Bore in mm,', '        inside.', '    T : Dry bulb temperature in °F [IP] or °C [SI]', '', 'Returns:', '    Pressure drop over the', '    pipe [Pa]', '', 'Raises:', '    ValueError: below 0 [K]'];

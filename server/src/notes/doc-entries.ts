@@ -10,9 +10,12 @@ export interface DocEntry {
   /** What stands where a type would: `float, m/s`. */
   readonly type: Piece | undefined;
   readonly body: Piece | undefined;
+  /** The lines of the body, for the lists in it. */
+  readonly lines?: readonly Line[];
 }
 
 export interface Documentation {
+  readonly text: Piece;
   readonly entries: readonly DocEntry[];
   /** The text lists numbered references, so that `[1]` in it is a citation. */
   readonly citations: boolean;
@@ -38,7 +41,7 @@ export function readDocumentation(doc: Piece): Documentation {
   const limit = sections.some((section) => section.role !== 'skip') ? first : lines.length;
   if (anySphinx.test(doc.text)) entries.push(...sphinxEntries(doc, lines));
   if (entries.length === 0) entries.push(...plainEntries(doc, lines.slice(0, Math.min(first, limit))));
-  return { entries, citations: /^\s*\.\.\s+\[\d+\]/m.test(doc.text), opening: partOf(doc, 0, lines[first]?.start ?? doc.text.length) };
+  return { text: doc, entries, citations: /^\s*\.\.\s+\[\d+\]/m.test(doc.text), opening: partOf(doc, 0, lines[first]?.start ?? doc.text.length) };
 }
 
 function firstLineOf(section: Section): number {
@@ -68,13 +71,14 @@ function underlinedEntry(doc: Piece, body: readonly Line[], at: number, to: numb
   const line = body[at] as Line;
   const match = underlinedHead.exec(line.text);
   const below = textOf(doc, body, at + 1, to);
+  const lines = body.slice(at + 1, to);
   const named = match && (match[2] !== undefined || role !== 'result') && !isType(match[1] as string);
   if (!named) {
-    if (role === 'result') return { role, names: [], type: pieceOf(doc, line, line.text), body: below };
+    if (role === 'result') return { role, names: [], type: pieceOf(doc, line, line.text), body: below, lines };
     const spaced = plainHead.exec(line.text);
     return spaced ? { role, names: namesIn(spaced[1] as string), type: pieceOf(doc, line, spaced[2] as string), body: below } : undefined;
   }
-  return { role, names: namesIn(match[1] as string), type: match[2] ? pieceOf(doc, line, match[2]) : undefined, body: below };
+  return { role, names: namesIn(match[1] as string), type: match[2] ? pieceOf(doc, line, match[2]) : undefined, body: below, lines };
 }
 
 function colonEntry(doc: Piece, body: readonly Line[], at: number, to: number, role: Role): DocEntry | undefined {
@@ -115,8 +119,8 @@ function sphinxEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] 
   return entries;
 }
 
-/** `V [m/s] velocity`, `V: velocity [m/s]` in free text; whoever asks drops the names that are none. */
-function plainEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] {
+/** Entries such as `V [m/s] velocity`, `V: velocity [m/s]` among lines of `doc`; whoever asks drops the names that are none. */
+export function plainEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] {
   return lines.flatMap((line, at): DocEntry[] => {
     const match = line.text.length < 400 ? plainHead.exec(line.text) : null;
     if (!match) return [];

@@ -1,9 +1,11 @@
 /** Notes in the documentation of functions, classes and modules. */
 import type { ClassStmt, DocText, Expr, FunctionStmt } from '../program/nodes.ts';
 import type { Collector } from './collector.ts';
-import { type DocEntry, type Documentation, readDocumentation } from './doc-entries.ts';
+import { type DocEntry, type Documentation, plainEntries, readDocumentation } from './doc-entries.ts';
 import { unitOfEntry } from './doc-unit.ts';
 import { choose } from './find-unit.ts';
+import type { Line } from './doc-lines.ts';
+import { returnedRecords } from './returned-records.ts';
 import type { NoteTarget } from './types.ts';
 
 /** Parameters and results of a function; of a constructor also the fields that its documentation lists. */
@@ -17,6 +19,7 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
     return param ? [{ kind: 'parameter', owner: fn, param }] : [];
   }, fn);
   if (isProperty(fn)) propertyNote(out, fn, doc);
+  for (const entry of doc.entries) if (entry.role === 'result' && entry.lines && entry.type && isRecord(entry.type.text)) recordNotes(out, fn, doc, entry.lines);
 }
 
 /** Fields of a class, and its constructor's parameters where that says nothing of them itself. */
@@ -65,6 +68,19 @@ function readEntry(out: Collector, doc: Documentation, entry: DocEntry, targets:
   if (targets.length === 0) out.leave(unit.piece, [unit.found]);
   for (const target of targets) out.note(target, unit.piece, unit.found, 'documentation');
   return true;
+}
+
+function isRecord(type: string): boolean {
+  return /\b(?:dict|dictionary|OrderedDict|mapping|record)\b/i.test(type);
+}
+
+/** `* Q : heat flow, [W]` below a returned record: the unit of the entry with that key. */
+function recordNotes(out: Collector, fn: FunctionStmt, doc: Documentation, lines: readonly Line[]): void {
+  const entries = returnedRecords(fn).flatMap((record) => record.entries);
+  for (const item of plainEntries(doc.text, lines)) {
+    const targets = entries.filter((entry) => item.names.includes(entry.key)).map((entry): NoteTarget => ({ kind: 'entry', entry }));
+    readEntry(out, doc, item, targets);
+  }
 }
 
 function isProperty(fn: FunctionStmt): boolean {
