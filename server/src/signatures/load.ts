@@ -1,6 +1,7 @@
 import type { NamedConstant, Signature } from '../program/signature.ts';
 import type { Vocabulary } from '../quantities/unit-result.ts';
-import { looksLikeSignature, type NotationProblem, readConstant, readSignature } from './notation.ts';
+import { looksLikeSignature, readConstant, readSignature, withoutComment } from './notation.ts';
+import { type NotationProblem, notationProblem } from './problem.ts';
 
 /** Signatures and constants by dotted name; methods by `.name`. */
 export interface LoadedSignatures {
@@ -10,7 +11,7 @@ export interface LoadedSignatures {
   readonly problems: readonly (NotationProblem & { readonly file: string })[];
 }
 
-/** Reads signature files; what cannot be read is listed and the rest is kept. */
+/** Reads signature files; what cannot be read is listed and the rest is kept. Of two lines for one name the later counts. */
 export function loadSignatures(files: readonly { readonly file: string; readonly text: string }[], vocabulary?: Vocabulary): LoadedSignatures {
   const functions = new Map<string, Signature>();
   const methods = new Map<string, Signature>();
@@ -19,15 +20,15 @@ export function loadSignatures(files: readonly { readonly file: string; readonly
   for (const { file, text } of files) {
     let offset = 0;
     for (const raw of text.split('\n')) {
-      const line = raw.replace(/(?:^|\s)#.*$/, '').trimEnd();
+      const line = withoutComment(raw);
       if (looksLikeSignature(line)) {
         const read = readSignature(line, offset, vocabulary);
-        if (read.ok) for (const signature of read.value) (signature.name.startsWith('.') ? methods : functions).set(signature.name, signature);
-        else problems.push({ ...read.problem, file });
+        for (const signature of read.signatures) (signature.name.startsWith('.') ? methods : functions).set(signature.name, signature);
+        for (const problem of read.problems) problems.push({ ...problem, file });
       } else if (line.trim() !== '') {
         const read = readConstant(line, offset, vocabulary);
-        if (read?.ok) constants.set(read.value.name, read.value);
-        else problems.push(read ? { ...read.problem, file } : { span: { start: offset, end: offset + line.length }, message: 'This line is neither a signature nor a constant.', file });
+        if (read) constants.set(read.constant.name, read.constant);
+        for (const problem of read?.problems ?? [notationProblem('not-a-line', offset + line.length - line.trimStart().length, offset + line.length)]) problems.push({ ...problem, file });
       }
       offset += raw.length + 1;
     }

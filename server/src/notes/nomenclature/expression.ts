@@ -2,14 +2,16 @@
 import type { Argument, BinaryExpr, Expr } from '../../program/nodes.ts';
 import { Rational } from '../../quantities/rational.ts';
 
-/** Reads an expression from an offset of a line; `end` is where it stops. Undefined where none begins. */
-export function readExpression(line: string, from: number): { readonly expr: Expr; readonly end: number } | undefined {
+/** Reads an expression from an offset of a line, as far as it goes; `end` is where it stops, `from` where none begins. */
+export function readExpression(line: string, from: number): { readonly expr: Expr | undefined; readonly end: number } {
   const reader = new Reader(line, from);
   const expr = reader.sum(0);
-  return expr && { expr, end: reader.at };
+  return { expr, end: expr ? reader.at : from };
 }
 
 const deepest = 60;
+const numberForm = /(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/y;
+const nameForm = /[\p{L}_][\p{L}\p{N}_]*(?:\.[\p{L}_][\p{L}\p{N}_]*)*/uy;
 
 class Reader {
   constructor(private readonly line: string, public at: number) {}
@@ -52,7 +54,8 @@ class Reader {
     if (this.line[this.at] === '-' || this.line[this.at] === '+') {
       const op = this.line[this.at] as '-' | '+';
       this.at++;
-      const operand = this.unary(depth + 1);
+      const operand = depth > deepest ? undefined : this.unary(depth + 1);
+      if (!operand) this.at = start;
       return operand && { kind: 'unary', op, operand, start, end: operand.end };
     }
     return this.powered(depth);
@@ -70,17 +73,26 @@ class Reader {
     }
     const opSpan = { start: this.at, end: this.at + mark };
     this.at += mark;
-    const exponent = this.unary(depth + 1);
-    return exponent && { kind: 'binary', op: '**', opSpan, left: base, right: exponent, start: base.start, end: exponent.end };
+    const exponent = depth > deepest ? undefined : this.unary(depth + 1);
+    if (!exponent) {
+      this.at = start;
+      return base;
+    }
+    return { kind: 'binary', op: '**', opSpan, left: base, right: exponent, start: base.start, end: exponent.end };
   }
 
   private atom(depth: number): Expr | undefined {
     this.skip();
     const start = this.at;
-    const number = this.match(/(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/y);
+    const number = this.match(numberForm);
     if (number !== undefined) return { kind: 'number', value: Rational.parse(number), text: number, start, end: this.at };
-    const name = this.match(/[A-Za-z_Α-Ωα-ω][\w.Α-Ωα-ω]*/y);
-    if (name !== undefined) return this.line[this.at] === '(' ? this.call(name, start, depth) : { kind: 'name', name, start, end: this.at };
+    const name = this.match(nameForm);
+    if (name !== undefined) {
+      const plain: Expr = { kind: 'name', name, start, end: this.at };
+      const called = this.line[this.at] === '(' ? this.call(plain, depth) : undefined;
+      if (!called) this.at = plain.end;
+      return called ?? plain;
+    }
     if (this.line[this.at] !== '(') return undefined;
     this.at++;
     const inner = this.sum(depth + 1);
@@ -93,8 +105,7 @@ class Reader {
     return inner;
   }
 
-  private call(name: string, start: number, depth: number): Expr | undefined {
-    const callee: Expr = { kind: 'name', name, start, end: this.at };
+  private call(callee: Expr, depth: number): Expr | undefined {
     this.at++;
     const args: Argument[] = [];
     for (;;) {
@@ -108,7 +119,7 @@ class Reader {
       else if (this.line[this.at] !== ')') return undefined;
     }
     this.at++;
-    return { kind: 'call', callee, args, start, end: this.at };
+    return { kind: 'call', callee, args, start: callee.start, end: this.at };
   }
 
   private match(pattern: RegExp): string | undefined {

@@ -1,8 +1,7 @@
-import { parseUnit } from '../../quantities/parse-unit.ts';
 import type { Unit } from '../../quantities/unit.ts';
 import type { Anchor } from '../../text/span.ts';
 import type { Note } from '../types.ts';
-import type { Nomenclature } from './model.ts';
+import type { Nomenclature, NomenclatureSymbol } from './model.ts';
 
 /** A nomenclature symbol's note with the place it stands at. */
 export interface NomenclatureNote {
@@ -14,16 +13,16 @@ export interface NomenclatureNote {
 /** The symbols of a file as notes; the first line of a symbol counts. */
 export function nomenclatureNotesInForce(nomenclature: Nomenclature, file: string): ReadonlyMap<string, NomenclatureNote> {
   const notes = new Map<string, NomenclatureNote>();
-  const { vocabulary } = nomenclature;
-  for (const { start, line } of nomenclature.lines) {
-    if (line.kind !== 'symbol' || line.unitText === undefined || notes.has(line.name)) continue;
-    const result = parseUnit(line.unitText, { vocabulary, describes: `${line.name} ${line.description}` });
-    if (!result.ok) continue;
-    const note: Note = {
-      target: { kind: 'symbol', owner: undefined, name: line.name }, unit: result.unit, span: line.unitSpan, form: 'nomenclature', hints: result.hints,
-      ...(line.description === '' ? {} : { description: line.description }), ...(line.range ? { range: line.range } : {}),
-    };
-    notes.set(line.name, { note, unit: result.unit, anchor: { file, start } });
+  const anchor: Anchor = { file, start: 0 };
+  for (const symbol of nomenclature.symbols.values()) {
+    if (symbol.unit) notes.set(symbol.name, { note: noteOf(symbol, symbol.unit), unit: symbol.unit, anchor });
   }
   return notes;
+}
+
+function noteOf(symbol: NomenclatureSymbol, unit: Unit): Note {
+  return {
+    target: { kind: 'symbol', owner: undefined, name: symbol.name }, unit, span: symbol.unitSpan, form: 'nomenclature', hints: symbol.hints,
+    ...(symbol.description === '' ? {} : { description: symbol.description }), ...(symbol.range ? { range: symbol.range } : {}),
+  };
 }

@@ -1,78 +1,92 @@
 /** One line of a nomenclature file; never throws, and a line that cannot be read does not disturb the next. */
-import { looksLikeSignature, readSignature } from '../../signatures/notation.ts';
+import type { Expr } from '../../program/nodes.ts';
+import { looksLikeSignature, readSignature, withoutComment } from '../../signatures/notation.ts';
+import { parseUnit } from '../../quantities/parse-unit.ts';
+import { sameUnit } from '../../quantities/unit.ts';
 import type { Vocabulary } from '../../quantities/unit-result.ts';
 import { rangeIn } from '../ranges.ts';
 import { readExpression } from './expression.ts';
-import type { Line, NomenclatureProblem } from './model.ts';
+import type { Line, SymbolLine } from './model.ts';
+import { type NomenclatureProblem, problemAt } from './problem.ts';
+import { readRelation } from './relation-line.ts';
+import { readUnit } from './unit-line.ts';
 
-const relation = /^\s*([A-Za-z_][\w.]*)\s+depends\s+on\s+(.+?)\s*$/;
-const unit = /^\s*unit\s+([A-Za-z_%°µ]\w*)\s*(?:=\s*([-+]?[\d.]+(?:e[+-]?\d+)?)?\s*(.*?))?\s*$/;
-const symbol = /^\s*([A-Za-z_Α-Ωα-ω][\w.Α-Ωα-ω]*)\s*(?:\[([^\]]*)\])?/;
+const symbol = /^(\s*)([\p{L}_][\p{L}\p{N}_]*(?:\.[\p{L}_][\p{L}\p{N}_]*)*)\s*(?:\[([^\]]*)\])?/u;
 
-/** Reads a line without its line break. */
+/** Reads a line without its line break. The vocabulary is needed for the units in signatures only. */
 export function readLine(raw: string, vocabulary?: Vocabulary): Line {
-  const text = raw.replace(/(?:^|\s)#.*$/, '').trimEnd();
-  if (text.trim() === '') return { kind: 'blank' };
-  if (looksLikeSignature(text)) {
-    const read = readSignature(text, 0, vocabulary);
-    return read.ok ? { kind: 'signature', signatures: read.value, span: spanOf(text) } : { kind: 'problem', problem: read.problem };
-  }
+  const text = withoutComment(raw);
+  if (text.trim() === '') return { kind: 'blank', problems: [] };
+  if (looksLikeSignature(text)) return { kind: 'signature', ...readSignature(text, 0, vocabulary), span: { start: text.length - text.trimStart().length, end: text.length } };
   return readRelation(text) ?? readUnit(text) ?? readSymbol(text);
 }
 
-function readRelation(text: string): Line | undefined {
-  const match = relation.exec(text);
-  if (!match) return undefined;
-  const on = (match[2] as string).split(/\s*,\s*/);
-  const bad = on.find((name) => !/^[A-Za-z_Α-Ωα-ω][\w.Α-Ωα-ω]*$/.test(name));
-  if (bad !== undefined) return problem(text, text.indexOf(bad, text.indexOf(' on ') + 4), bad.length, `\`${bad}\` is no symbol; write the symbols with commas between them.`);
-  return { kind: 'relation', dependent: match[1] as string, on, span: spanOf(text) };
-}
-
-function readUnit(text: string): Line | undefined {
-  const match = /^\s*unit\s+[^\s[]+\s*(?:=|$)/.test(text) ? unit.exec(text) : null;
-  if (!match) return undefined;
-  const [, name = '', factor, of] = match;
-  if (of === undefined) return { kind: 'base', name, span: spanOf(text) };
-  if (of === '' && factor === undefined) return problem(text, text.length, 0, 'A unit needs a value: `unit crate = 18.5 kg`.');
-  const start = text.length - of.length;
-  return { kind: 'unit', name, factor: factor ?? '1', of, span: spanOf(text), ofSpan: { start, end: text.length } };
-}
+type Head = Pick<SymbolLine, 'kind' | 'name' | 'nameSpan' | 'unitText' | 'unitSpan'>;
 
 function readSymbol(text: string): Line {
   const match = symbol.exec(text);
-  if (!match) return problem(text, 0, text.length, 'A line begins with a symbol: `D [m] = 0.085 impeller diameter`.');
-  const [whole, name = '', unitText] = match;
-  const nameStart = text.indexOf(name);
-  const unitStart = unitText === undefined ? whole.length : whole.indexOf('[') + 1;
-  const common = { kind: 'symbol' as const, name, nameSpan: { start: nameStart, end: nameStart + name.length }, unitText, unitSpan: { start: unitStart, end: unitStart + (unitText?.length ?? 0) } };
+  const first = text.length - text.trimStart().length;
+  if (!match) return { kind: 'blank', problems: [problemAt('no-symbol', first, text.length)] };
+  const [whole, blank = '', name = '', unitText] = match;
+  const nameSpan = { start: blank.length, end: blank.length + name.length };
+  const unitStart = unitText === undefined ? whole.length : whole.length - 1 - unitText.length;
+  const head: Head = { kind: 'symbol', name, nameSpan, unitText, unitSpan: { start: unitStart, end: unitStart + (unitText?.length ?? 0) } };
   const rest = text.slice(whole.length);
   const equals = /^\s*=\s*/.exec(rest);
-  if (equals) return withValue(text, whole.length + equals[0].length, common);
-  if (unitText === undefined) return unclosed(text, whole.length) ?? problem(text, nameStart, text.length - nameStart, `\`${name}\` needs a unit in square brackets, or a value: \`${name} [m] …\`.`);
+  if (equals) return withValue(text, whole.length + equals[0].length, head);
+  if (unitText !== undefined) return withRange(text, whole.length, head);
+  const open = text.indexOf('[', whole.length);
+  const kind = open >= 0 && !text.includes(']', open) ? 'square-not-closed' : 'needs-unit';
+  return { kind: 'blank', problems: [kind === 'needs-unit' ? problemAt(kind, nameSpan.start, nameSpan.end, name) : problemAt(kind, open, text.length)] };
+}
+
+const lonelyNumber = /^\s*([-+]?\d+(?:\.\d*)?(?:[eE][-+]?\d+)?)\s*$/;
+const anyRange = /^\s*,?\s*([-+]?\d[\d.eE+-]*?)\s*(?:\.{2,3}|…)\s*(\S*)/;
+
+function withRange(text: string, from: number, head: Head): Line {
+  const rest = text.slice(from);
   const range = rangeIn(rest);
-  return { ...common, value: undefined, range: range && { low: range.low, high: range.high }, description: rest.slice(range?.length ?? 0).trim() };
+  const plain = { ...head, value: undefined, range: range && { low: range.low, high: range.high }, description: rest.slice(range?.length ?? 0).trim() };
+  if (range) return { ...plain, problems: [] };
+  const start = from + rest.length - rest.trimStart().length;
+  const tried = anyRange.exec(rest);
+  const end = tried ? from + tried[0].length : text.length;
+  const problems: NomenclatureProblem[] = [];
+  if (tried && /^[-+]?\d/.test(tried[2] as string)) problems.push(problemAt('range-reversed', start, end, text.slice(start, end)));
+  else if (tried) problems.push(problemAt('range-breaks-off', start, end));
+  else if (lonelyNumber.test(rest)) problems.push(problemAt('value-without-equals', start, text.length, rest.trim()));
+  return problems.length > 0 ? { ...plain, description: text.slice(end).trim(), problems } : { ...plain, problems };
 }
 
-function withValue(text: string, from: number, common: Omit<Extract<Line, { kind: 'symbol' }>, 'value' | 'range' | 'description'>): Line {
-  const read = readExpression(text, from);
-  if (!read) return { ...common, value: undefined, range: undefined, description: '', rest: { span: { start: from, end: text.length }, message: 'A value or a formula was expected here.' } };
-  const behind = text.slice(read.end);
-  const broken = /^\s*[-+*/^()=]/.test(behind) ? { rest: { span: { start: read.end, end: text.length }, message: 'This formula cannot be read from here on.' } } : {};
-  return { ...common, value: read.expr, range: undefined, description: behind.trim(), ...broken };
+function withValue(text: string, from: number, head: Head): Line {
+  const { expr, end } = readExpression(text, from);
+  const behind = text.slice(end);
+  const at = end + behind.length - behind.trimStart().length;
+  const valued = { ...head, value: expr, range: undefined, description: behind.trim() };
+  if (!expr) return { ...valued, description: '', problems: [problemAt(at >= text.length ? 'no-value' : 'formula-breaks-off', Math.min(at, text.length), text.length)] };
+  if (/^[-+*/^()[\]=·.]/.test(behind.trimStart()) || !/^(?:\s|,|;|$)/.test(behind)) return { ...valued, value: undefined, description: '', problems: [problemAt('formula-breaks-off', at, text.length)] };
+  const description = behind.replace(/^[\s,;]+/, '').trim();
+  if (isNumber(expr) && otherUnit(description, head.unitText)) return { ...valued, description: '', problems: [problemAt('unit-behind-value', at, text.length, description)] };
+  if (setOff(behind) || (isNumber(expr) && !likeFactor.test(description))) return { ...valued, description, problems: [] };
+  return { ...valued, value: undefined, description: '', problems: [problemAt('two-symbols', at, text.length, behind.trim())] };
 }
 
-function unclosed(text: string, at: number): Line | undefined {
-  const open = text.indexOf('[', at);
-  return open >= 0 && !text.includes(']', open) ? problem(text, open, text.length - open, 'This square bracket is not closed.') : undefined;
+/** A description behind a formula is set off, so that a forgotten `*` does not pass for one. */
+function setOff(behind: string): boolean {
+  return behind.trim() === '' || /^(?:\s\s|\t|\s*[,;–—])/.test(behind);
 }
 
-function problem(text: string, start: number, length: number, message: string): Line {
-  const from = Math.min(Math.max(start, 0), text.length);
-  const found: NomenclatureProblem = { span: { start: from, end: Math.min(from + length, text.length) }, message };
-  return { kind: 'problem', problem: found };
+/** `2 r`, `0.5 rho*v^2`: a product without its sign rather than a description. */
+const likeFactor = /^(?:[\p{L}_][\p{L}\p{N}_]?$|[\p{L}_][\p{L}\p{N}_.]*\s*[*^])/u;
+
+/** `p [Pa] = 5 bar`: one word behind the value that is a unit beyond doubt, and another one than the symbol's. */
+function otherUnit(description: string, unitText: string | undefined): boolean {
+  if (unitText === undefined || description === '' || /\s/.test(description)) return false;
+  const [other, own] = [parseUnit(description), parseUnit(unitText)];
+  return other.ok && own.ok && (other.beyondDoubt || other.unit.dimension === own.unit.dimension) && !other.unit.dimension.isOne && !sameUnit(other.unit, own.unit);
 }
 
-function spanOf(text: string): { start: number; end: number } {
-  return { start: text.length - text.trimStart().length, end: text.length };
+/** A plain number, with its sign. */
+export function isNumber(expr: Expr): boolean {
+  return expr.kind === 'number' || (expr.kind === 'unary' && (expr.op === '-' || expr.op === '+') && expr.operand.kind === 'number');
 }
