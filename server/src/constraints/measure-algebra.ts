@@ -1,6 +1,6 @@
 import { Rational } from '../quantities/rational.ts';
 import { Scale } from '../quantities/scale.ts';
-import { exactLiteral, invertLiteral, type Literal, literalNumber, raiseLiteral } from './literal.ts';
+import { invertLiteral, type Literal, literalNumber } from './literal.ts';
 import type { Factor, Measure, Nature, Reading } from './measure.ts';
 import { matchScales } from './measure-match.ts';
 
@@ -23,12 +23,7 @@ export function multiplyMeasures(a: Measure | undefined, b: Measure | undefined)
 export function raiseMeasure(a: Measure | undefined, power: Rational): Measure | undefined {
   if (!a || power.isOne) return a;
   const size = power.toNumber();
-  const factors: Factor[] = [];
-  for (const factor of a.factors) {
-    const literal = raiseLiteral(factor.literal, power) ?? approximatePower(factor.literal, size);
-    if (!literal) return undefined;
-    factors.push({ ...factor, literal });
-  }
+  const factors = a.factors.map((factor) => ({ ...factor, power: (factor.power ?? 1) * size }));
   const readings = a.readings.map((reading) => ({ scale: reading.scale.pow(power), weight: 0, zero: 0, nature: 'ratio' as const }));
   return assemble(readings, factors, a.radian * size, a.cycle * size, a.degrees * size);
 }
@@ -68,15 +63,15 @@ export function addMeasures(a: Measure | undefined, b: Measure | undefined, sign
 
 /** Literals that multiply both terms: `x*0.3937` and `y*0.3937` convert alike, and their sum may still be converted by them. */
 function sharedFactors(a: Measure, b: Measure): readonly Factor[] {
-  return a.factors.filter((factor) => b.factors.some((other) => sameLiteral(factor.literal, other.literal)));
+  return a.factors.filter((factor) => b.factors.some((other) => sameFactor(factor, other)));
 }
 
 function without(factors: readonly Factor[], shared: readonly Factor[]): readonly Factor[] {
-  return factors.filter((factor) => !shared.some((other) => sameLiteral(factor.literal, other.literal)));
+  return factors.filter((factor) => !shared.some((other) => sameFactor(factor, other)));
 }
 
-function sameLiteral(a: Literal, b: Literal): boolean {
-  return a.pi === b.pi && a.value.equals(b.value);
+function sameFactor(a: Factor, b: Factor): boolean {
+  return (a.power ?? 1) === (b.power ?? 1) && a.literal.pi === b.literal.pi && a.literal.value.equals(b.literal.value);
 }
 
 /** A literal added to a temperature or a gauge pressure: a difference, a point, or a change of zero. */
@@ -154,11 +149,6 @@ function scaleOf(literal: Literal): Scale {
 
 function positive(literal: Literal): Literal {
   return literal.value.sign < 0 ? { ...literal, value: literal.value.neg() } : literal;
-}
-
-function approximatePower(literal: Literal, power: number): Literal | undefined {
-  const value = Rational.parse((literalNumber(literal) ** power).toPrecision(15));
-  return value && !value.isZero ? { ...exactLiteral(value), pure: literal.pure, tolerance: literal.tolerance * Math.abs(power) + 1e-12 } : undefined;
 }
 
 function tidy(weight: number): number {

@@ -77,10 +77,11 @@ function products(left: readonly Factor[], right: readonly Factor[]): readonly P
   let found: Product[] = [{ size: 1, left: 1, right: 1, tolerance: 0 }];
   const extend = (factor: Factor, side: 'left' | 'right'): void => {
     const before = found;
-    for (const part of partsOf(factor.literal)) {
+    for (const plain of partsOf(factor.literal)) {
+      const part = plain ** (factor.power ?? 1);
       const more = before.map((each) => {
         const [l, r] = side === 'left' ? [each.left * part, each.right] : [each.left, each.right * part];
-        return { size: l / r, left: l, right: r, tolerance: each.tolerance + factor.literal.tolerance };
+        return { size: l / r, left: l, right: r, tolerance: each.tolerance + factor.literal.tolerance * Math.abs(factor.power ?? 1) };
       });
       found = found.concat(more);
     }

@@ -23,6 +23,8 @@ export interface Measure {
 
 export interface Factor {
   readonly literal: Literal;
+  /** The power it stands under; absent: 1. */
+  readonly power?: number;
   /** For a constant without a note: it counts as a literal only if this unknown turns out dimensionless. */
   readonly unless?: Unknown;
 }

@@ -46,6 +46,11 @@ export class Elimination {
     return result;
   }
 
+  /** Whether a form's reduction rests on a unit that was inferred and not noted. */
+  isInferred(form: Form): boolean {
+    return this.certificate(form).involved.some(({ unknown }) => this.rows.get(unknown.id)?.form.terms.length === 0);
+  }
+
   /** Whether a form's reduction rests on a literal that may hide a unit. */
   isDoubtful(form: Form): boolean {
     return this.certificate(form).soft;

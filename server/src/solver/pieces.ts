@@ -131,6 +131,8 @@ function joinedResult(returns: readonly Value[], solution: Solution): SchemeResu
     return { form: undefined, measure: undefined, items: columns.map((each) => each ?? { form: undefined, measure: undefined }) };
   }
   if (telling.some((value) => !value.form || value.literal)) return telling.length === 1 && first.fields ? { form: undefined, measure: undefined, fields: first.fields } : undefined;
+  // What a body merely infers is no claim on its callers: two inferences in a row are too far from any note.
+  if (telling.some((value) => solution.isInferred(value.form as Form))) return undefined;
   const forms = telling.map((value) => solution.reduce(value.form as Form));
   if (!forms.every((form) => sameForm(form, forms[0] as Form))) return undefined;
   const measure = telling.every((value) => value.measure === first.measure) && sameForm(forms[0] as Form, first.form as Form) && !first.misuse ? first.measure : undefined;

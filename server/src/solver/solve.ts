@@ -11,6 +11,7 @@ export interface Solution {
   reduce(form: Form): Form;
   reduceSurely(form: Form): Form;
   isDoubtful(form: Form): boolean;
+  isInferred(form: Form): boolean;
 }
 
 /**
@@ -31,7 +32,7 @@ export function solve(constraints: readonly Constraint[]): Solution {
   for (const at of later) report(at, settle(constraints[at] as Constraint, elimination, true));
   for (const at of last) report(at, check(constraints[at] as Constraint, elimination));
   faults.sort((a, b) => a.at - b.at);
-  return { faults: faults.map((each) => each.fault), reduce: (form) => elimination.reduce(form), reduceSurely: (form) => elimination.reduceSurely(form), isDoubtful: (form) => elimination.isDoubtful(form) };
+  return { faults: faults.map((each) => each.fault), reduce: (form) => elimination.reduce(form), reduceSurely: (form) => elimination.reduceSurely(form), isDoubtful: (form) => elimination.isDoubtful(form), isInferred: (form) => elimination.isInferred(form) };
 }
 
 function isGentle(constraint: Constraint): boolean {
