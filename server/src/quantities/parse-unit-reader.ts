@@ -199,9 +199,11 @@ class Reader {
     const raised = this.power(true);
     if (!raised) return undefined;
     const last = found.parts.length - 1;
-    const factors = found.parts.map((part, i): Factor => ({
-      ...part, ...(gauge && i === last ? { unit: gauge, sure: 'sure' as const } : {}), power: i === last ? raised.mul(given ?? Rational.one) : Rational.one, start: given ? start : from, end: found.end, below,
-    }));
+    const whole = given ? raised.mul(given) : raised;
+    const factors = found.parts.map((part, i): Factor => {
+      const marked = gauge && i === last;
+      return { unit: marked ? gauge : part.unit, text: part.text, sure: marked ? 'sure' : part.sure, power: i === last ? whole : Rational.one, start: given ? start : from, end: found.end, below, open: part.open, hint: part.hint };
+    });
     this.labels(factors[last] as Factor, below);
     return factors;
   }

@@ -115,6 +115,7 @@ function compound(text: string, at: number, plain: string): SymbolFound | undefi
     const typed = text.slice(at, end);
     if (typed !== each.text && !(each.named && typed.toLowerCase() === each.text)) continue;
     const next = text.slice(end, end + 2);
+    if (each.text.includes(' per ') && /^\s+(?:squared|cubed)/i.test(text.slice(end))) continue;
     if (/^[\p{L}_]/u.test(next) || (each.text.includes('-') && /^(?:[\^²³\d]|[-+]\d)/.test(next))) continue;
     const { unit, weak } = compoundUnit(each);
     const phrase = each.named && !/ (?:per|of) | (?:gauge|gage|absolute)$/.test(each.text) && !each.text.endsWith('s');

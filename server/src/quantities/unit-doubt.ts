@@ -34,7 +34,7 @@ function numbersFit(text: string, factors: readonly Factor[]): boolean {
 
 function worthOfOne(text: string, factor: Factor, marks: Marks, scaled: boolean): Worth {
   const plain = factor.power.isOne;
-  if (factor.unit.scale === undefined) return 'nothing';
+  if (factor.unit.scale === undefined && factor.sure === 'weak') return 'nothing';
   if (factor.hint === 'case' && plain && !standsAlone(text)) return 'nothing';
   if (factor.sure === 'weak' && letters.has(factor.text) && marks.powers === 0) return 'nothing';
   if (scaled) return /\^|[eE]/.test(text) ? 'beyond doubt' : 'doubtful';
@@ -64,6 +64,7 @@ function hasDigitPower(text: string): boolean {
 
 /** Symbols side by side, without any sign: `N m`, `kW h`, `pascal second`; two units of one kind are no product. */
 function worthOfWords(text: string, symbols: readonly Factor[]): Worth {
+  if (/^(?:in|ft)[ .·-](?:lbf?|ozf?|kips?)$/.test(text)) return 'beyond doubt';
   const kinds = new Set(symbols.map((factor) => factor.unit.dimension));
   if (symbols.length > 3 || kinds.size < symbols.length || symbols.some((factor) => factor.sure === 'weak' || factor.hint === 'case' || factor.unit.scale === undefined)) return 'nothing';
   if (/^(?:[kMm]?N|[mk]?Pa|[kM]?W|lbf|ft)[-. ·]?(?:m|mm|s|ft|h|in)$/.test(text)) return /^[kMm]?N[ms]$|^Pas$/.test(text) ? (text === 'Ns' ? 'doubtful' : 'beyond doubt') : 'beyond doubt';

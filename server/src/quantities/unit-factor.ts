@@ -15,10 +15,10 @@ export interface Factor {
   /** How surely these characters are a unit. */
   readonly sure: Sureness;
   /** A letter that context decides on: C, F or R. */
-  readonly open?: 'C' | 'F' | 'R';
+  readonly open?: 'C' | 'F' | 'R' | undefined;
   /** Below a slash. */
   readonly below: boolean;
-  readonly hint?: UnitHint['kind'];
+  readonly hint?: UnitHint['kind'] | undefined;
 }
 
 /** `number`: a factor in front; `word`: also an English word; `weak`: read only where nothing else fits. */

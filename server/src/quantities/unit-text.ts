@@ -96,7 +96,8 @@ class Rewriter {
     if (name === 'frac' || name === 'dfrac' || name === 'tfrac') return this.fraction(at, next, to);
     if (wrappers.has(name) && this.source[next] === '{') return this.group(next, to, '', '');
     const sign = commands[name];
-    return this.sign(sign ?? '\\', at, next);
+    const swallowed = sign !== undefined && /[\p{L}°]$/u.test(sign) ? /^\s*/.exec(this.source.slice(next, to))?.[0].length ?? 0 : 0;
+    return this.sign(sign ?? '\\', at, next + swallowed);
   }
 
   private fraction(at: number, from: number, to: number): number {
