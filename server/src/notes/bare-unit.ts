@@ -35,7 +35,7 @@ function endsOf(text: string): readonly number[] {
 
 function read(words: string, options: ReadOptions) {
   if (words === '' || words.length > 50 || /^(?:[\d.[(]|in\s)/i.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
-  if (numbersOfNoUnit.has(words.toLowerCase()) || !mayStandAlone(words) || derived.test(words) || (/^[A-Za-z]\d$/.test(words) && !/^(?:m[234]|s2)$/.test(words))) return undefined;
+  if (numbersOfNoUnit.has(words.toLowerCase()) || !mayStandAlone(words) || derived.test(words) || computed.test(words) || (/^[A-Za-z]\d$/.test(words) && !/^(?:m[234]|s2)$/.test(words))) return undefined;
   const result = parseUnit(words, options);
   return result.ok ? result : undefined;
 }
@@ -44,6 +44,8 @@ function read(words: string, options: ReadOptions) {
 const numbersOfNoUnit = new Set(['1', '--', '---', '–', '—', 'none', 'n/a', 'no unit', 'no units', 'decimal', 'fraction', 'fractional', 'ratio']);
 /** `mol fraction`: a number named after a unit. */
 const derived = /\s(?:fractions?|ratios?|numbers?|balance|chart)\b/i;
+/** `bits / 8`, `bits in n**2`, `U+03A7`: sums and codes. */
+const computed = /\/\s*\d|\sin\s|^U\+|^dim\s+[a-z]/;
 /** Words that are units and more often something else. */
 const ordinary = new Set(['min', 'in', 'mil', 'met', 'var', 'point', 'line', 'part', 'parts', 'turn', 'all', 'each', 'cycle', 'link', 'chain', 'count', 'counts', 'item', 'items', 'max', 'era', 'rev', 'drop', 'hand', 'cup', 'are', 'second', 'dash', 'grade', 'stone', 'pole']);
 /** One or two letters that stand for a unit beside any value; common practice. */
@@ -56,11 +58,11 @@ function wholeCounts(words: string, beyondDoubt: boolean, number: boolean): bool
 
 /** A unit in front of a description: behind a comma a symbol is enough, before plain words it needs the look of a unit. */
 function leadingCounts(words: string, behind: string, beyondDoubt: boolean): boolean {
-  if (ordinary.has(words.toLowerCase()) || /\sof\s/.test(words)) return false;
+  if (ordinary.has(words.toLowerCase()) || /\sof\s/.test(words) || /^\s*(?:to|into|->|→|=>)\s/.test(behind)) return false;
   const described = /^\s*[,;(]\s*\(?[\p{L}]{3,}/u.test(behind) || /^\s+[-–—(]+\s*[\p{L}]{3,}/u.test(behind);
   if (described) return beyondDoubt || plain.has(words) || (/^[A-Za-z]{1,2}$/.test(words) && behind.startsWith(','));
   if (/^\s*:/.test(behind)) return beyondDoubt && structured.test(words);
-  if (!beyondDoubt || /^\s*(?:(?:is|are|was|of|for)\b|[=+*/<>])/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;
+  if (!beyondDoubt || /^\s*(?:(?:is|are|was|of|for|and|or|per)\b|[=+*/<>])/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;
   return structured.test(words) || scaled.test(words);
 }
 

@@ -3,7 +3,7 @@ import type { ClassStmt, DocText, Expr, FunctionStmt } from '../program/nodes.ts
 import type { Collector } from './collector.ts';
 import { type DocEntry, type Documentation, plainEntries, readDocumentation } from './doc-entries.ts';
 import { unitOfEntry } from './doc-unit.ts';
-import { choose } from './find-unit.ts';
+import { choose, lookForUnits } from './find-unit.ts';
 import type { Line } from './doc-lines.ts';
 import { returnedRecords } from './returned-records.ts';
 import type { NoteTarget } from './types.ts';
@@ -44,12 +44,15 @@ function mayHoldUnits(doc: DocText): boolean {
 type Targets = (entry: DocEntry, name: string | undefined) => readonly NoteTarget[];
 
 function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn: FunctionStmt | undefined): void {
-  const results = doc.entries.filter((entry) => entry.role === 'result');
+  const all = doc.entries.filter((entry) => entry.role === 'result');
+  // "Tuple of the following results:" above named results is no result.
+  const results = all.some((entry) => entry.names.length > 0) ? all.filter((entry) => entry.names.length > 0) : all;
   const several = results.reduce((sum, entry) => sum + Math.max(entry.names.length, 1), 0) > 1 && !results.every((entry) => entry.names.length === 0 && entry.type === undefined);
   const told = new Set<string>();
   let position = 0;
   for (const entry of doc.entries) {
     if (entry.role === 'result') {
+      if (!results.includes(entry)) continue;
       const names = entry.names.length > 0 ? entry.names : [undefined];
       const owners: NoteTarget[] = fn ? names.map((name, at) => ({ kind: 'result', owner: fn, ...(several ? { position: position + at } : {}), ...(name === undefined ? {} : { name }) })) : [];
       position += names.length;
@@ -64,10 +67,17 @@ function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn:
 
 function readEntry(out: Collector, doc: Documentation, entry: DocEntry, targets: readonly NoteTarget[]): boolean {
   const unit = unitOfEntry(out, entry, doc.citations, targets.length > 0);
-  if (!unit) return false;
+  if (!unit || (entry.role === 'result' && entry.names.length < 2 && severalUnits(out, entry, doc.citations))) return false;
   if (targets.length === 0) out.leave(unit.piece, [unit.found]);
   for (const target of targets) out.note(target, unit.piece, unit.found, 'documentation');
   return true;
+}
+
+/** `currents [A], voltages [V], power [W]`: one entry that describes a tuple says nothing of the whole. */
+function severalUnits(out: Collector, entry: DocEntry, citations: boolean): boolean {
+  if (!entry.body || (entry.body.text.match(/\[/g)?.length ?? 0) < 2) return false;
+  const { brackets } = lookForUnits(entry.body, { place: 'documentation', language: out.language, citations }, false, out.options('', entry.body.text));
+  return new Set(brackets.filter((each) => !each.unit.dimension.isOne).map((each) => each.unit.dimension)).size > 2;
 }
 
 function isRecord(type: string): boolean {

@@ -34,7 +34,8 @@ export function unitOfEntry(out: Collector, entry: DocEntry, citations: boolean,
 function withoutBracket(taken: (name: string) => boolean, looked: readonly { readonly piece: Piece; readonly looked: Looked }[], type: Piece | undefined, body: Piece | undefined, options: ReadOptions): EntryUnit | undefined {
   const typed = type && unitOfType(type, taken, options);
   if (type && typed) return { piece: type, found: typed };
-  for (const { piece, looked: each } of looked) {
+  // `declination (radians) : numeric` says more than a parenthesis somewhere in the description.
+  for (const { piece, looked: each } of [...looked].reverse()) {
     const found = parenthesisOf(piece.text, each.parentheses);
     if (found) return { piece, found };
   }

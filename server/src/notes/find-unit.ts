@@ -141,7 +141,7 @@ const value = /(?:^|[=<>≤≥~±,(]|\b(?:at|of|to|than|by|from|above|below|over
 
 /** A value with its unit; a plain number carries none. */
 export function isValue(text: string, found: Found): boolean {
-  return !found.unit.dimension.isOne && followsNumber(text, found.outer.start);
+  return (!found.unit.dimension.isOne || found.unit.scale?.isOne === false) && followsNumber(text, found.outer.start);
 }
 
 /** `at 25 [degC]`: a value and its unit, in prose; `stream 1 [K]` is none. */
