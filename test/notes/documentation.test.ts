@@ -54,6 +54,7 @@ describe('numpydoc parameters', () => {
     ['a name that is a unit', ['V : float', '    Voltage of the cell']],
     ['a citation', ['V : float', '    Velocity after [1]_ and [2]']],
     ['a citation in words', ['V : float', '    Velocity, see [1]']],
+    ['a footnote', ['V : float', '    Velocity given several times. [1]']],
     ['a shape', ['V : array', '    Speeds [n x 3]']],
     ['a range', ['V : float', '    Fraction in [0, 1]']],
     ['options', ['method : str', "    One of ['a', 'b'] [optional]"]],
@@ -101,6 +102,8 @@ describe('numpydoc results', () => {
     ['several, one silent', ['n : int', '    Number of steps', 'V : float', '    Velocity [m/s]'], 'f -> 1 V m/s'],
     ['names in one line', ['a, b : float', '    Lengths [m]'], 'f -> 0 a m; f -> 1 b m'],
     ['type with unit', ['dp : array-like, 1/K', '    expansion'], 'f -> dp 1/K'],
+    ['an introduction in front', ['Tuple of the following results:', '', 'dp : float', '    Pressure drop [Pa]', 'V : float', '    Velocity [m/s]'], 'f -> 0 dp Pa; f -> 1 V m/s'],
+    ['one entry for a whole tuple', ['tuple', '    currents [A], voltages [V], power [W]'], 'none'],
     ['values in words', ['numeric, values in degrees C.'], 'f -> degrees C'],
     ['a record', ['out : dict', '    * a : length, [m]'], 'none'],
   ])('%s', (_what, lines, expected) => {

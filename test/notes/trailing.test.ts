@@ -64,7 +64,7 @@ describe('a bare comment', () => {
     'n = 3  # number of tubes', 'i = 0  # min index', 'i = 0  # min', 'x = 2.0  # in total', 'y = x  # as in the first run', 'k = 0.4  # assumed', 'w = x  # W is computed below',
     'z = 1  # A, B and C are in the table', 'z = 1  # s', 'u = w  # mol fraction of water', 'u = w  # in mol fraction', 'x = y  # none', 'x = 2  # 1', 'x = 2  # ----', 'q = 5  # m: number of rows',
     'mode = "x"  # bar', 'ok = a > b  # m', 'dt = step  # round to 24 h', 'c = 0  # C6, capacity of node 6', 'r = rows(C)  # rows of non-zero elements in C', 'x = 3  # h = 2*q', 'x = 3  # return kg/m3 [m]',
-    'd = damp(x)  # damp', 'x = blob  # blob of data', 'i = 1  # rev 2 of the table', 'n = 4  # in parts', 'n = 4  # in line with the code', 'w = 2  # kg of water per run is the limit',
+    'd = damp(x)  # damp', 'x = blob  # blob of data', 'i = 1  # rev 2 of the table', 'n = 4  # in parts', 'n = 4  # bits / 8 and rounded up', 'n = 4  # bits in n**2', 'c = 4  # capital chi, U+03A7', 'd = t  # year, month, day, hour, min, sec', 'u = None  # set to [] by the runner', 'n = 4  # in line with the code', 'w = 2  # kg of water per run is the limit',
   ].filter((text) => text !== 'z = 1  # s'))('%s is left alone', (text) => {
     expect(unitsOf(text)).toBe('none');
   });

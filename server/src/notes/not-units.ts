@@ -47,7 +47,7 @@ function followsCode(text: string, at: number): boolean {
 
 function isEmptyList(text: string, bracket: Bracketed): boolean {
   const before = text.slice(0, bracket.start).trimEnd();
-  return before !== '' && !/[\p{L}),]$/u.test(before);
+  return before !== '' && (!/[\p{L}),]$/u.test(before) || /\b(?:means|is|are|to|or|as|an?|of|default|returns?)$/i.test(before) || !/^\s*(?:[.,;]|$)/.test(text.slice(bracket.end)));
 }
 
 const cites = /(?:\b(?:see|from|by|in|of|ref|refs|reference|eq|eqn|equation|after|and|table|fig|figure|al|per|source|model|method|paper|also)\.?|[,;&]|\d\))\s*$/i;
@@ -57,7 +57,7 @@ function isCitation(text: string, bracket: Bracketed, around: Surroundings): boo
   const before = text.slice(0, bracket.start);
   if (around.citations || /\.\.\s*$/.test(before)) return true;
   if (around.place === 'comment') return cites.test(before);
-  return cites.test(before) && !/,\s*$/.test(before);
+  return /[.:]\s*$/.test(before) || (cites.test(before) && !/,\s*$/.test(before));
 }
 
 /** `[in]` is a direction where declarations carry directions, and in front of a description; behind one it is the inch. */

@@ -39,7 +39,7 @@ function leadingWords(text: string, start: number, options: ReadOptions): { read
   const ends = [...segment.matchAll(/\S+/g)].slice(0, mostWords).map((word) => word.index + word[0].length);
   for (let at = ends.length - 1; at >= 0; at--) {
     const words = segment.slice(0, ends[at]);
-    if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?|of|per|and|in|at|the)$/i.test(words) || /^\d/.test(words) || !mayStandAlone(words)) continue;
+    if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?|of|per|and|in|at|the)$/i.test(words) || /^\d|^(?![msK])[A-Za-z]\*\*\d/.test(words) || !mayStandAlone(words)) continue;
     const result = parseUnit(words.replace(/\s+/g, ' '), options);
     if (!result.ok || isPureNumber(words)) continue;
     const whole = ends[at] === segment.trimEnd().length;
@@ -98,7 +98,7 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
   const tail = text.slice(comma + 1, end);
   const start = comma + 1 + tail.length - tail.trimStart().length;
   const words = tail.trim();
-  if (words === '' || /^\d/.test(words) || /^\w+\s+\/\s/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
+  if (words === '' || /^\d/.test(words) || /^\w+\s+\/\s|^U\+[\dA-F]{4}/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
   const result = parseUnit(words, options);
   if (!result.ok || /^(?:1|-+|none|n\/a|ratio|decimal|fraction)$/i.test(words)) return undefined;
   const sure = result.beyondDoubt || fullNames.test(words) || (whole && /^[A-Za-zµΩ]{1,3}$/.test(words) && !notUnits.has(words.toLowerCase()) && /[A-Za-z]{4}/.test(text.slice(0, comma)));
@@ -106,9 +106,9 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
   return { unit: result.unit, hints: result.hints, span: { start, end: start + words.length }, outer: { start: comma, end }, by: 'words' };
 }
 
-/** A list of letters: `coefficients a, b, m`. */
+/** A list of letters or of single words: `coefficients a, b, m`, `hour, min, sec`. */
 function isListed(before: string): boolean {
-  return /(?:^|[\s,])[A-Za-z]\s*$/.test(before) || /,\s*[A-Za-z]\w?\s*$/.test(before);
+  return /(?:^|,)\s*\w+\s*,\s*\w+\s*$/.test(before) || /(?:^|[\s,])[A-Za-z]\s*$/.test(before) || /,\s*[A-Za-z]\w?\s*$/.test(before);
 }
 
 const mark = '[[(](?:IP|SI|US|imperial|metric)[\\])]';
