@@ -51,7 +51,7 @@ export function findSymbol(symbol: string): Found | undefined {
 export function findName(word: string): Found | undefined {
   const key = `~${word}`;
   if (found.has(key)) return found.get(key);
-  const known = word.length > 40 ? undefined : lookName(word.toLowerCase());
+  const known = word.length > 60 ? undefined : lookName(word.toLowerCase());
   remember(key, known);
   return known;
 }

@@ -6,7 +6,7 @@ import { type Reading, readProduct } from './parse-unit-reader.ts';
 import { pureNumber, type Unit } from './unit.ts';
 import { worthOf } from './unit-doubt.ts';
 import { type Factor, productOf } from './unit-factor.ts';
-import { hintsOf } from './unit-hints.ts';
+import { describesMinimum, hintsOf } from './unit-hints.ts';
 import { describesTemperature, isBareR, settleLetters } from './unit-letters.ts';
 import type { ReadOptions, UnitFault, UnitRead, UnitResult, UnitUnread } from './unit-result.ts';
 import { originalSpan, type PlainText, plainText } from './unit-text.ts';
@@ -22,7 +22,7 @@ const cache = new Map<string, UnitResult>();
 
 /** Reads a unit expression; spans are relative to `text`. */
 export function parseUnit(text: string, options: ReadOptions = {}): UnitResult {
-  const key = `${options.vocabulary?.fingerprint ?? ''}|${describesTemperature(options.describes) ? 't' : ''}|${text}`;
+  const key = `${options.vocabulary?.fingerprint ?? ''}|${describesTemperature(options.describes) ? 't' : ''}${describesMinimum(options.describes) ? 'm' : ''}|${text}`;
   const known = cache.get(key);
   if (known) return known;
   const result = readAny(text, options, true);

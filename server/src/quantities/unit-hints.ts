@@ -11,7 +11,7 @@ type Place = (start: number, end: number) => { readonly start: number; readonly 
 export function hintsOf(text: string, plain: string, factors: readonly Factor[], marks: Marks, place: Place, describes: string | undefined): readonly UnitHint[] {
   const marked = factors.filter((factor) => factor.hint !== undefined);
   const pound = poundIn(factors);
-  const minute = describes !== undefined && factors.length === 1 && factors[0]?.text === 'min' && /minim|(?:^|[\s_])min(?:_|\d)|_min\b/i.test(describes);
+  const minute = factors.length === 1 && factors[0]?.text === 'min' && describesMinimum(describes);
   if (marked.length === 0 && !marks.unclear && !pound && !minute) return [];
   const respelled = marks.unclear || marked.some((factor) => factor.hint === 'prefix-or-product');
   const readAs = respelled ? spelledOut(factors) : replaced(text, marked, place);
@@ -24,6 +24,11 @@ export function hintsOf(text: string, plain: string, factors: readonly Factor[],
   if (pound) hints.push({ span: place(pound.start, pound.end), kind: 'pound-mass-or-force', readAs: spelledOut(factors.map((factor) => (factor === pound ? { ...factor, text: 'lbm' } : factor))) });
   if (minute) hints.push({ span: place(0, plain.length), kind: 'minute-or-minimum', readAs: 'minute' });
   return hints;
+}
+
+/** Whether a description speaks of a minimum. */
+export function describesMinimum(describes: string | undefined): boolean {
+  return describes !== undefined && /minim|(?:^|[\s_])min(?:_|\d)|_min\b/i.test(describes);
 }
 
 /** The author's text with the doubtful symbols replaced. */
