@@ -170,7 +170,8 @@ export function constantOf(value: Value): Literal | undefined {
 
 function scaled(expr: Expr, value: Value, literal: Literal): Value {
   if (!value.form) return unknown(expr, [value]);
-  const result: Value = { expr, form: value.form, measure: scaleMeasure(value.measure, literal), from: [value], ...kept(value, value.misuse) };
+  const numbered = value.numbered || literal.pi !== 0 || !literal.value.abs().isOne;
+  const result: Value = { expr, form: value.form, measure: scaleMeasure(value.measure, literal), from: [value], ...kept(value, value.misuse), ...(numbered ? { numbered } : {}) };
   return literal.pure && !value.tainted ? result : { ...result, tainted: true };
 }
 
@@ -181,6 +182,7 @@ function productValue(expr: Expr, left: Value, right: Value, form: Value['form']
   return {
     expr, form, measure: found ? undefined : measure, from: [left, right],
     ...(found ? { misuse: found } : {}),
+    ...(left.numbered || right.numbered ? { numbered: true } : {}),
     ...(gauge ? { gaugeFactor: true } : {}), ...(hot ? { temperatureFactor: true } : {}),
     ...(left.tainted || right.tainted ? { tainted: true } : {}),
   };
@@ -244,7 +246,7 @@ function sumValue(expr: Expr, left: Value, right: Value, sign: 1 | -1): Value {
   const measure = sumMeasure(left, right, sign);
   const misuse = left.misuse ?? right.misuse;
   return {
-    expr, form: lead.form, measure, from: [left, right],
+    expr, form: lead.form, measure, from: [left, right], ...(left.numbered || right.numbered ? { numbered: true } : {}),
     ...(left.tainted && right.tainted || ((left.tainted || right.tainted) && lead.form?.dimension.isOne) ? { tainted: true } : {}), ...(misuse ? { misuse } : {}),
   };
 }

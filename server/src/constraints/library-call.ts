@@ -31,7 +31,8 @@ export function callLibrary(context: Context, expr: CallExpr, signature: Signatu
     if (param.claim.kind === 'unit') argument(context, signature, at, param, param.claim, given, binding);
   }
   for (const { param, given } of pairs) if (param.claim.kind === 'function') functionArgument(param.claim, given.value, binding);
-  const doubtful = pairs.some(({ param, given }) => isPureClaim(param.claim) && mayHide(given.value));
+  const log = logarithms.test(signature.name);
+  const doubtful = pairs.some(({ param, given }) => isPureClaim(param.claim) && (mayHide(given.value) || (log && !isPlainNumber(given.value))));
   const results = signature.results.map((claim) => resultOf(context, expr, claim, binding)).map((value) => (doubtful && value.form ? { ...value, tainted: true } : value));
   const values = pairs.map((pair) => pair.given.value);
   if (results.length === 0) return unknown(expr, values);
@@ -41,6 +42,11 @@ export function callLibrary(context: Context, expr: CallExpr, signature: Signatu
 /** A function of a pure number: exp, log, sin. */
 function isPureClaim(claim: UnitClaim): boolean {
   return claim.kind === 'unit' && claim.powers.length === 0 && claim.unit.dimension.isOne;
+}
+
+/** The logarithm of anything else may be one of a number counted in some unit, which an exponential brings back. */
+function isPlainNumber(value: Value): boolean {
+  return value.literal !== undefined || (value.form !== undefined && isConstant(value.form) && value.form.dimension.isOne);
 }
 
 /** `exp(a + b/T)`: a sum in an exponent may hold the logarithm of a reference value, and so a unit. */

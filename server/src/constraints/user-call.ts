@@ -18,7 +18,14 @@ export function callScheme(context: Context, expr: CallExpr, scheme: Scheme, pas
   const pairs = pairUp(scheme.params, passed, bound);
   for (const { param, given } of pairs) open(param, given, instance);
   for (const { param, given } of pairs) check(context, scheme, param, given, instance);
-  return scheme.result ? resultValue(context, expr, scheme.result, instance, pairs.map((pair) => pair.given.value)) : unknown(expr);
+  if (!scheme.result) return unknown(expr);
+  const result = resultValue(context, expr, scheme.result, instance, pairs.map((pair) => pair.given.value));
+  return pairs.some(isUnitValue) && result.form ? { ...result, tainted: true } : result;
+}
+
+/** A bare 1 for a quantity: the result is meant per unit of it, and the 1 carries that unit. */
+function isUnitValue({ param, given }: { readonly param: SchemeParam; readonly given: Passed }): boolean {
+  return given.value.literal?.value.isOne === true && given.value.literal.pi === 0 && param.note !== undefined && !param.note.unit.dimension.isOne;
 }
 
 /** An object: its fields are those of the class; arguments are checked against the constructor. */

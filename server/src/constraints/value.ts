@@ -27,6 +27,8 @@ export interface Value {
   readonly fractional?: boolean;
   /** Left in two dimensions by the ways through an if; reported where arithmetic uses it. */
   readonly split?: readonly [Value, Value];
+  /** A literal other than 1 multiplies it, even if a pure one. */
+  readonly numbered?: boolean;
   /** A tuple's positions. */
   readonly items?: readonly Value[];
   /** What a member is, for what is only run over: `zip`, `enumerate`. */

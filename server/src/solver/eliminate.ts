@@ -40,7 +40,7 @@ export class Elimination {
     let result = form;
     const sure = (unknown: Unknown): Form | undefined => {
       const row = this.rows.get(unknown.id);
-      return row && !row.soft ? row.form : undefined;
+      return row && !row.soft && !isNumbered(row.by) ? row.form : undefined;
     };
     while (result.terms.some((term) => sure(term.unknown))) result = substitute(result, sure);
     return result;
@@ -83,6 +83,11 @@ export class Elimination {
     const rows = [...seen.values()];
     return { involved: rows.map((row) => ({ unknown: row.unknown, by: row.by })), soft: rows.some((row) => row.soft) };
   }
+}
+
+/** An equation in which literals scale a side: `a + b/4` may hold a conversion that only its author knows. */
+function isNumbered(constraint: Constraint): boolean {
+  return constraint.kind === 'same' && (constraint.left.numbered === true || constraint.right.numbered === true);
 }
 
 const rank: Record<Unknown['origin'], number> = { open: 0, constant: 1, parameter: 2 };

@@ -10,7 +10,7 @@ import { classInfo } from './classes.ts';
 import { type Definition, definitionsOf, namesOf, type Piece } from './definitions.ts';
 import { fingerprintOf } from './fingerprint.ts';
 import type { Library } from './library.ts';
-import { type Solved, solvePiece, solveTopLevel } from './pieces.ts';
+import { type Sightings, sightingsOf, type Solved, solvePiece, solveTopLevel, topSightings } from './pieces.ts';
 
 /** What a file's solver needs from outside. */
 export interface FileInputs {
@@ -63,6 +63,13 @@ export class FileSolver {
     return this.once(first, (reads) => solveTopLevel(running, (chunk) => this.surroundings(chunk, undefined, reads)), running);
   }
 
+  /** What is known at every expression of a function, or of the top level; computed at each call. */
+  sightings(piece: Piece | undefined): Sightings {
+    const around = (chunk: Chunk): Surroundings => this.surroundings(chunk, piece?.owner, new Set());
+    if (piece) return sightingsOf(piece, piece.owner && this.classOf(piece.owner, piece.chunk), around(piece.chunk));
+    return topSightings(this.inputs.program.chunks.filter((chunk) => definitionsOf(chunk).runs), around);
+  }
+
   scheme(fn: FunctionStmt, owner: ClassStmt | undefined, chunk: Chunk): Scheme | undefined {
     return this.piece({ fn, owner, chunk })?.scheme;
   }
@@ -83,6 +90,11 @@ export class FileSolver {
     const value = this.define(name) ?? this.starred(name) ?? this.inputs.library.find(name);
     this.globals.set(name, value);
     return value;
+  }
+
+  /** The names that the file's top level assigns. */
+  variables(): readonly string[] {
+    return [...this.names].flatMap(([name, definitions]) => (definitions.some((each) => each.kind === 'variable') ? [name] : []));
   }
 
   notesIn(chunk: Chunk, owner: ClassStmt | undefined): NoteLookup {

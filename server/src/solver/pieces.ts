@@ -48,11 +48,31 @@ export function solveTopLevel(chunks: readonly Chunk[], surroundingsOf: (chunk: 
   return { faults: rootCause(run(), run), scheme: undefined, fields: noFields };
 }
 
-/** Values at every expression and definition of a function, for hover. */
-export function sightingsOf(piece: Piece, owner: ClassInfo | undefined, surroundings: Surroundings): { readonly values: ReadonlyMap<Span, Value>; readonly reduce: (form: Form) => Form } {
+/** Values at every expression and definition of a piece of program, and what was solved of the unknowns in them. */
+export interface Sightings {
+  readonly values: ReadonlyMap<Span, Value>;
+  readonly reduce: (form: Form) => Form;
+}
+
+/** The sightings of a function, for hover and repairs. */
+export function sightingsOf(piece: Piece, owner: ClassInfo | undefined, surroundings: Surroundings): Sightings {
   const values = new Map<Span, Value>();
   const context = new Context(piece.chunk.anchor, surroundings, piece.fn, values);
   readBody(context, piece.fn, selfOf(piece, owner));
+  return { values, reduce: solve(context.constraints).reduce };
+}
+
+/** The sightings of a file's top level. */
+export function topSightings(chunks: readonly Chunk[], surroundingsOf: (chunk: Chunk) => Surroundings): Sightings {
+  const values = new Map<Span, Value>();
+  const first = chunks[0];
+  if (!first) return { values, reduce: (form) => form };
+  const context = new Context(first.anchor, surroundingsOf(first), undefined, values);
+  for (const chunk of chunks) {
+    context.anchor = chunk.anchor;
+    context.surroundings = surroundingsOf(chunk);
+    walk(context, chunk.statements);
+  }
   return { values, reduce: solve(context.constraints).reduce };
 }
 
