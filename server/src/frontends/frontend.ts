@@ -34,6 +34,10 @@ export interface HostStyle {
   readonly comment: string;
   readonly power: string;
   readonly pi: string;
+  /** Dotted names of library functions between angles and of π, the usual one first: used where the script imports them. */
+  readonly toRadians: readonly string[];
+  readonly toDegrees: readonly string[];
+  readonly piNames: readonly string[];
   /** Prints an expression in the host's syntax. */
   print(expr: Expr): string;
 }

@@ -2,6 +2,8 @@
 import type { FindingCode, Severity } from '../findings/finding.ts';
 import type { NoteSettings } from '../notes/types.ts';
 import type { LanguageId } from '../program/nodes.ts';
+import type { TextEdit } from '../frontends/frontend.ts';
+import type { Confidence, FixKind } from '../repairs/fix.ts';
 import type { Span } from '../text/span.ts';
 
 /** The only way the service learns of files it was not given. Synchronous; answers from memory in an editor. */
@@ -51,10 +53,31 @@ export interface Statistics {
   readonly unread: readonly string[];
 }
 
+/** A change that would settle a finding, ready to show and to apply. */
+export interface OfferedFix {
+  readonly kind: FixKind;
+  /** The finding it settles; undefined where it is offered for the place alone. */
+  readonly finding: { readonly code: FindingCode; readonly span: Span } | undefined;
+  readonly title: string;
+  /** Only `proven` fixes may be applied without being asked for. */
+  readonly confidence: Confidence;
+  /** In offsets of the checked text; do not overlap. Empty where there is only something to say: show it as not available. */
+  readonly edits: readonly TextEdit[];
+  /** Part of the new text that the author has to fill in, to be selected. */
+  readonly fill?: Span;
+  /** How many other findings go with it. */
+  readonly alsoSettles: number;
+}
+
 /** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
 export interface Workspace {
   /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
   check(file: string, text: string, language?: LanguageId): CheckResult;
+  /**
+   * The fixes for the findings that a span touches, and for what stands there, best first; without a span for the whole file.
+   * For a file that was checked last with the text it has now; empty for any other. Each was checked: applied, its finding is gone and none is new.
+   */
+  fixes(file: string, span?: Span): readonly OfferedFix[];
   /** Frees what is kept for a file. */
   forget(file: string): void;
   /** Tells that a file changed on disk (an import or a nomenclature file). */

@@ -12,8 +12,9 @@ import { loadSignatures } from '../signatures/load.ts';
 import type { FileSolver } from '../solver/file-solver.ts';
 import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
 import type { Solved } from '../solver/pieces.ts';
-import { absolute } from '../text/span.ts';
-import type { Assets, CheckResult, FileSource, PlacedFinding, Settings, Workspace } from './contract.ts';
+import { absolute, type Span } from '../text/span.ts';
+import type { Assets, CheckResult, FileSource, OfferedFix, PlacedFinding, Settings, Workspace } from './contract.ts';
+import { fixesOf, type Look } from './fixes.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
 import { resolveImport } from './imports.ts';
 import { voiceOver } from './voice-over.ts';
@@ -65,6 +66,19 @@ class Files implements Workspace {
       related: finding.related.map((each) => ({ file: each.place.anchor.file, span: absolute(each.place), message: each.message })),
     }));
     return { file, language: frontEnd.language, text, findings, statistics: statisticsOf(understood) };
+  }
+
+  fixes(file: string, span?: Span): readonly OfferedFix[] {
+    const kept = this.open.get(file);
+    const language = kept?.understood.parsed.program.language;
+    const frontEnd = this.frontEnds.find((each) => each.language === language);
+    if (!kept || !frontEnd) return [];
+    const { text } = kept.understood.parsed;
+    const look = (changed: string): Look => {
+      const understood = this.understand(file, changed, frontEnd);
+      return { understood, detected: this.severe(detect(understood)) };
+    };
+    return fixesOf(look(text), frontEnd.style, span, look);
   }
 
   forget(file: string): void {

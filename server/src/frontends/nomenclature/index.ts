@@ -10,7 +10,7 @@ import { printFormula } from './print.ts';
 export const nomenclatureFrontEnd: FrontEnd = {
   language: 'nomenclature',
   endings: ['.nomen'],
-  style: { comment: '#', power: '^', pi: 'pi', print: printFormula },
+  style: { comment: '#', power: '^', pi: 'pi', print: printFormula, toRadians: [], toDegrees: [], piNames: [] },
   parse,
 };
 

@@ -19,7 +19,10 @@ export async function createPythonFrontEnd(runtime: Uint8Array, grammar: Uint8Ar
   return {
     language: 'python',
     endings: ['.py', '.pyw'],
-    style: { comment: '#', power: '**', pi: 'math.pi', print: printPython },
+    style: {
+      comment: '#', power: '**', pi: 'math.pi', print: printPython,
+      toRadians: ['math.radians', 'numpy.radians', 'numpy.deg2rad'], toDegrees: ['math.degrees', 'numpy.degrees', 'numpy.rad2deg'], piNames: ['math.pi', 'numpy.pi', 'scipy.constants.pi'],
+    },
     parse: (text, file, previous, edits) => {
       const old = previous instanceof PythonParse ? previous.take() : null;
       if (old && previous) tellEdits(old, newlines(previous.text), trueEdits(previous.text, text, edits));

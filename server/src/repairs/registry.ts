@@ -1,0 +1,7 @@
+import type { Fixer } from './fix.ts';
+import { allow } from './fixes/allow.ts';
+import { convert } from './fixes/convert.ts';
+import { offset } from './fixes/offset.ts';
+
+/** Every fix, in the order in which they are tried. */
+export const fixers: readonly Fixer[] = [convert, offset, allow];
