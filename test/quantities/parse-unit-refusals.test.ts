@@ -7,11 +7,11 @@ directions and options: out · in, out · in/out · i/o · optional · OPTION ·
 citations, years, numbers: 12 · 2 · 0 · 10 · 2017 · 1, 2 · 3-5 · Eq 5 · eq. 12 · Fig. 3 · table 2 · p. 12 · sec 3.2
 ranges, shapes, lists: 0, 1 · 0-1 · 0..1 · -90 .. 90 · n x 3 · 3 x n · 13x36 double · 1:10 · u, v, w · array1, array2 · T1, T2
 strings and scale names: 'linear' · "cubic" · 'a', 'b' · ITS-90 · GPS-84 · True · None · False · nan
-identifiers: x · k · j · i · n · T_in · m_dot · T1 · V2 · h2 · K1 · A4 · N2 · m1 · m10 · c_p · kt_bin · self.T · df.A · x.T · a.m · u
+identifiers: pH · x · k · j · i · n · T_in · m_dot · T1 · V2 · h2 · K1 · A4 · N2 · m1 · m10 · c_p · kt_bin · self.T · df.A · x.T · a.m · u
 index arithmetic: n-1 · N-1 · k+1 · i,j · i+1, j · 2*n · m-n
 letters side by side: t h · a b · m n · h d · A B · x y · T s · N S
 ratios of names: x/y · h/D · L/D · t/T · m/M · dy/dx · dP/dt · du/dy · r/R · a/b
-prose: see below · not used · in situ · as is · number of cells · degrees of freedom · days and hours · and/or · yes/no · on/off · z in m · m to mm · m -> mm · see m/s · per unit · h or m
+prose: mm of water · m above the sea · see below · not used · in situ · as is · number of cells · degrees of freedom · days and hours · and/or · yes/no · on/off · z in m · m to mm · m -> mm · see m/s · per unit · h or m
 functions and formulas: f(x) · rho(S,T,p) · -x(1 - y) · 1 - exp(-NTU) · 1 + R_1^2 · A^2 + B^2 · a[k+1] · -NTU(1-C_r) · \\frac{S}{h}\\right · 1 - \\frac{K}{4} · T^n
 values in prose: 20 cm · 5 min · 0.1 mm · 25 degC · 3 kPa · 10 m
 dates and times: hh:mm · HH:MM:SS · YYYY-MM-DD · dd/mm/yyyy · 30-Jan-2024

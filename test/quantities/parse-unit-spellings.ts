@@ -139,6 +139,10 @@ kilowatt-hours | 1 | kWh
 joules per kilogram kelvin | 1 | J/(kg K)
 pounds per square inch | 1 | psi
 inches of water | 1 | inH2O
+cubic feet per second | 1 | ft^3/s
+in. w.g. | 1 | inH2O
+mm of mercury | 1 | mmHg
+per mil | 0.001 | 1
 nautical miles | 1 | nmi
 parts per million | 1e-6 | 1
 percent | 0.01 | 1
@@ -174,6 +178,10 @@ ft lbf | 1 | ft lbf
 lb-ft^2 | 1 | lb ft^2
 rpm | 1 | rpm
 rev/min | 1 | rpm
+l/s | 1 | L/s
+MPa√m | 1e6 | Pa m^(1/2)
+kWh/(m2 a) | 1 | kWh/(m^2 yr)
+#/cm3 | 1e6 | 1/m^3
 kWh | 3.6e6 | J
 cP | 0.001 | Pa s
 cSt | 1e-6 | m^2/s

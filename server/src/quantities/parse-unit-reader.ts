@@ -276,7 +276,7 @@ class Reader {
   }
 
   private isLabel(word: string, factor: Factor, below: boolean): boolean {
-    if (!isLabel(word)) return false;
+    if (!isLabel(word) || (word === 'water' && factor.unit.dimension === base('L') && factor.power.isOne)) return false;
     if (!/^(?:[CNPSHO]|dm|da|DA|std|cat|Fe|ac|AC|dc|DC|th|eq|wb|TN|TP)$/.test(word)) return true;
     const powerNext = /^(?:\s*\^|-\d)/.test(this.text.slice(this.at));
     if (/^[A-Za-z]$/.test(word)) return isSubstance(factor.unit) && !powerNext && !(below && word === 'C');

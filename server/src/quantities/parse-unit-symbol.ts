@@ -42,6 +42,7 @@ export function symbolAt(text: string, at: number, context: SymbolContext): Symb
     own(whole, plain, at, context.vocabulary) ??
     degree(text, at) ??
     compound(text, at, plain) ??
+    column(text, at) ??
     numbered(whole, plain, at) ??
     dotted(text, at, plain) ??
     letter(text, at, plain) ??
@@ -115,13 +116,28 @@ function compound(text: string, at: number, plain: string): SymbolFound | undefi
     const typed = text.slice(at, end);
     if (typed !== each.text && !(each.named && typed.toLowerCase() === each.text)) continue;
     const next = text.slice(end, end + 2);
-    if (each.text.includes(' per ') && /^\s+(?:squared|cubed)/i.test(text.slice(end))) continue;
+    if (each.text.includes(' per ') && (/^\s+(?:squared|cubed)/i.test(text.slice(end)) || /(?:square|cubic|sq\.?|cu\.?)\s+$/i.test(text.slice(0, at)))) continue;
     if (/^[\p{L}_]/u.test(next) || (each.text.includes('-') && /^(?:[\^²³\d]|[-+]\d)/.test(next))) continue;
     const { unit, weak } = compoundUnit(each);
     const phrase = each.named && !/ (?:per|of) | (?:gauge|gage|absolute)$/.test(each.text) && !each.text.endsWith('s');
     return one(end, unit, each.entry.symbols[0] as string, weak && each.text.length < 5 ? 'weak' : phrase ? 'word' : 'sure');
   }
   return undefined;
+}
+
+const columns = /(in|inch|inches|ft|feet|mm|cm)\.?\s+(?:of\s+)?(water|mercury|hg|h2o|w\.?g\.?|w\.?c\.?)(?![\p{L}\d])/iuy;
+
+/** `in. w.g.`, `ft of water`, `mm of mercury`. Millimetres of water may be a depth of rain, and are left unread. */
+function column(text: string, at: number): SymbolFound | undefined {
+  columns.lastIndex = at;
+  const match = columns.exec(text);
+  if (!match) return undefined;
+  const [whole, length = '', liquid = ''] = match;
+  const mercury = /^(?:mercury|hg)$/i.test(liquid);
+  if (!mercury && /^[mc]m$/i.test(length)) return undefined;
+  const symbol = `${length.toLowerCase().replace(/^inch(?:es)?$/, 'in').replace('feet', 'ft')}${mercury ? 'Hg' : 'H2O'}`;
+  const unit = findSymbol(symbol)?.unit;
+  return unit && one(at + whole.length, unit, symbol, 'sure');
 }
 
 /** `inH2O`, `Nm3`: a digit inside a symbol of the catalogue. */

@@ -70,7 +70,7 @@ function readAny(text: string, options: ReadOptions, nearest: boolean): UnitResu
   if (trimmed.length > longest) return refusal(text, { kind: 'unexpected', found: trimmed.slice(0, 10) });
   if (/^dim(?:ension)?\s/.test(trimmed)) return readDimension(text) ?? refusal(text, { kind: 'unexpected', found: trimmed.slice(0, 10) });
   if (/\\(?:left|right)(?![a-z])/.test(trimmed) && !/\\(?:text|mathrm|rm|unit|si)(?![a-z])/.test(trimmed)) return refusal(text, { kind: 'unexpected', found: '\\' });
-  const body = trimmed.replace(preposition, '');
+  const body = trimmed.replace(preposition, '').replace(/^per\s?mill?e?$/i, '‰');
   const plain = plainText(body);
   const alternatives = readAlternatives(trimmed, options, parseUnit);
   if (alternatives) return alternatives;
