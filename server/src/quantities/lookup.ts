@@ -31,6 +31,8 @@ interface Tables {
   readonly compounds: Map<string, Compound[]>;
 }
 
+/** What parts a spelling into words; a stop at the very end does not. */
+const separator = /[\s.-](?=.)/;
 let tables: Tables | undefined;
 const units = new Map<UnitEntry, Unit>();
 /** Grows with the distinct spellings met. */
@@ -109,9 +111,9 @@ function add({ compounds }: Tables, map: Map<string, UnitEntry>, key: string, en
   const held = map.get(key);
   if (held && !(held.weak && !entry.weak)) return;
   map.set(key, entry);
-  const first = /^[^\s.\-%]*[\s.\-%]+(?=.)/.exec(key);
-  if (!first) return;
-  const word = (/^[^\s.-]+/.exec(key)?.[0] ?? key).toLowerCase();
+  const cut = key.search(separator);
+  if (cut < 0) return;
+  const word = key.slice(0, cut).toLowerCase();
   const list = compounds.get(word);
   if (list) list.push({ text: key, entry, named });
   else compounds.set(word, [{ text: key, entry, named }]);

@@ -4,29 +4,25 @@ const irregular: Readonly<Record<string, string>> = { foot: 'feet', inch: 'inche
 
 /** A name with its plural, in British and American spelling: `metre`, `metres`, `meter`, `meters`. */
 export function spellingsOf(name: string): readonly string[] {
-  const spellings = new Set<string>();
-  for (const each of [name, name.replace(/(met|lit)re/g, '$1er')]) {
-    spellings.add(each);
-    spellings.add(plural(each));
-  }
-  return [...spellings];
+  const many = plural(name);
+  if (!name.includes('re')) return many === name ? [name] : [name, many];
+  const american = name.replace(/(met|lit)re/g, '$1er');
+  return american === name ? [name, many] : [name, many, american, plural(american)];
 }
 
 /** The plural falls on the word before `per` or `of`, else on the last: `feet per second`, `inches of water`. */
 function plural(name: string): string {
-  const words = name.split(' ');
-  const joint = words.findIndex((_, at) => words[at + 1] === 'per' || words[at + 1] === 'of');
-  const at = joint >= 0 ? joint : words.length - 1;
-  words[at] = pluralWord(words[at] as string);
-  return words.join(' ');
+  const [per, of] = [name.indexOf(' per '), name.indexOf(' of ')];
+  const end = per >= 0 && (of < 0 || per < of) ? per : of >= 0 ? of : name.length;
+  const start = Math.max(name.lastIndexOf(' ', end - 1), name.lastIndexOf('-', end - 1)) + 1;
+  return name.slice(0, start) + pluralWord(name.slice(start, end)) + name.slice(end);
 }
 
 function pluralWord(word: string): string {
-  const cut = word.lastIndexOf('-') + 1;
-  const last = word.slice(cut);
-  const known = irregular[last];
-  if (known !== undefined) return word.slice(0, cut) + known;
-  if (/(?:s|x|z|feet|inches)$/.test(last)) return word;
-  if (/(?:ch|sh)$/.test(last)) return `${word}es`;
-  return /[^aeiou]y$/.test(last) ? `${word.slice(0, -1)}ies` : `${word}s`;
+  const known = irregular[word];
+  if (known !== undefined) return known;
+  const last = word.at(-1);
+  if (last === 's' || last === 'x' || last === 'z' || word === 'feet') return word;
+  if (word.endsWith('ch') || word.endsWith('sh')) return `${word}es`;
+  return last === 'y' && !/[aeiou]y$/.test(word) ? `${word.slice(0, -1)}ies` : `${word}s`;
 }
