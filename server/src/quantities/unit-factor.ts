@@ -1,6 +1,5 @@
 /** A unit expression as a flat product: what the reader makes, before it becomes one unit. */
 import type { Rational } from './rational.ts';
-import { Rational as Ratio } from './rational.ts';
 import type { UnitHint } from './unit-result.ts';
 import { multiply, pureNumber, raise, scaledBy, type Unit } from './unit.ts';
 
@@ -66,5 +65,5 @@ export function invert(factors: readonly Factor[]): readonly Factor[] {
 }
 
 export function raiseAll(factors: readonly Factor[], power: Rational): readonly Factor[] {
-  return power.equals(Ratio.one) ? factors : factors.map((factor) => ({ ...factor, power: factor.power.mul(power) }));
+  return power.isOne ? factors : factors.map((factor) => ({ ...factor, power: factor.power.mul(power) }));
 }
