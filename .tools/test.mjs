@@ -25,7 +25,8 @@ for (const [name, args] of steps) {
   process.stdout.write(`${ok ? 'ok' : 'FAILED'}: ${name}\n`);
 }
 add(runTests());
-process.stdout.write(`\n${counts.passed} passed, ${counts.failed} failed${counts.skipped > 0 ? `, ${counts.skipped} skipped` : ''}\n`);
+if (counts.skipped > 0) process.stdout.write(`\n${counts.skipped} skipped\n`);
+process.stdout.write(`\n${counts.passed} passed, ${counts.failed} failed\n`);
 process.exitCode = counts.failed > 0 ? 1 : 0;
 
 /** Counts of the tests; a run that did not come to its end is a failure. */

@@ -26,7 +26,16 @@ export function missingFactor(a: Measure, b: Measure): { readonly ratio: number;
   const [left, right] = [a.readings[0], b.readings[0]];
   if (!left || !right) return undefined;
   const turns = turnFactors(a, b)[0] as number;
-  return { ratio: (left.scale.toNumber() * turns) / right.scale.toNumber(), turns };
+  const ratio = (left.scale.toNumber() * turns) / right.scale.toNumber();
+  return { ratio: simplest(ratio, turns, products(a.factors, b.factors)), turns };
+}
+
+/** What is still missing once the conversions that are there have been taken for such: 2π alone, or a power of ten, where one is left. */
+function simplest(ratio: number, turns: number, made: readonly Product[]): number {
+  const left = made.map((product) => ratio / product.size);
+  const plain = left.find((each) => Math.abs(each / turns - 1) < close && turns !== 1);
+  const tens = left.filter((each) => Math.abs(Math.log10(each) - Math.round(Math.log10(each))) < 1e-9 && Math.abs(Math.log10(each)) > 0.5);
+  return plain ?? tens.sort((p, q) => Math.abs(Math.log10(p)) - Math.abs(Math.log10(q)))[0] ?? ratio;
 }
 
 /**
@@ -111,5 +120,5 @@ function partsOf(literal: Literal): readonly number[] {
 function isSmall(value: number): boolean {
   const size = Math.abs(value);
   const whole = size >= 1 ? size : 1 / size;
-  return whole > 1 && whole <= 12 && Math.abs(whole - Math.round(whole)) < close;
+  return whole > 1 && whole <= 12 && whole !== 10 && Math.abs(whole - Math.round(whole)) < close;
 }

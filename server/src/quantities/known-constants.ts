@@ -20,7 +20,7 @@ export function knownConstant(size: number, dimension: Dimension): KnownConstant
       const value = sizeOf(form.value);
       if (!(Math.abs(size - value) <= tolerance(form.value))) continue;
       const unit = parseUnit(form.unit);
-      if (unit.ok && unit.unit.dimension === dimension) return { name: constant.name, value: form.value, unit: form.unit };
+      if (unit.ok && unit.unit.dimension === dimension) return { name: constant.name, value: constant.value, unit: constant.unit };
     }
   }
   return undefined;

@@ -27,8 +27,12 @@ export function hiddenNumbers(constraint: Constraint, involved: readonly Involve
   for (const each of involved) {
     if (each.unknown.origin === 'constant' && each.unknown.name !== '') found.push({ text: each.unknown.name, size: Number.NaN, below: false, side: 'left' });
   }
-  return found.sort((a, b) => Number(Number.isNaN(a.size)) - Number(Number.isNaN(b.size)));
+  const telling = found.filter((each) => !conversions.has(each.size));
+  return (telling.length > 0 ? telling : found).sort((a, b) => Number(Number.isNaN(a.size)) - Number(Number.isNaN(b.size)));
 }
+
+/** Numbers that engineers convert with; where another number stands beside them, that one is the suspect. */
+const conversions = new Set([10, 100, 1000, 1e4, 1e5, 1e6, 60, 3600, 24, 86400, 0.1, 0.01, 1e-3, 1e-4, 1e-5, 1e-6]);
 
 /** The dimension that the first hidden number would have to carry. */
 export function neededDimension(fault: Contradiction, found: readonly HiddenNumber[]): Dimension | undefined {

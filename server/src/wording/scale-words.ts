@@ -15,12 +15,23 @@ export function scaleWords(voice: Voice, fault: ScaleFault): Words {
   const dimension = constraint.right.form?.dimension ?? Dimension.one;
   const [a, b] = [unitOf(constraint.left, dimension), unitOf(constraint.right, dimension)];
   const left = nameOf(voice, constraint.anchor, constraint.left);
-  const advice = fault.zeros ? zeroAdvice(left, constraint.left, constraint.right, a, b) : `Multiply ${left} by ${factorWords(fault.ratio)}${fault.turns !== 1 ? ' (revolutions and radians differ by 2π)' : ''}${correctable(constraint.reason)}.`;
+  const advice = fault.zeros ? zeroAdvice(left, constraint.left, constraint.right, a, b) : `Multiply ${left} by ${factorWords(fault.ratio)}${fault.turns !== 1 ? ' (a revolution is 2π radians)' : ''}${correctable(constraint.reason)}.`;
   const sides = capital(sideWords(voice, constraint.anchor, constraint.left, dimension));
-  return { message: `${openingOf(constraint.reason, a, b)} ${sides}. ${advice}`, related: chainOf(voice, constraint, []) };
+  return { message: `${openingOf(constraint.reason, a, b, turnsOf(fault))} ${sides}. ${advice}`, related: chainOf(voice, constraint, []) };
 }
 
-function openingOf(reason: Reason, a: string, b: string): string {
+/** A conversion that does not fit leaves both sides with one unit's name. */
+function inUnit(a: string, b: string): string {
+  return a === b ? 'otherwise' : `in ${a}`;
+}
+
+/** Rotation that is counted otherwise than the other side counts it. */
+function turnsOf(fault: ScaleFault): string | undefined {
+  if (fault.turns === 1) return undefined;
+  return (fault.constraint.left.measure?.cycle ?? 0) !== 0 ? 'counts revolutions' : 'counts radians';
+}
+
+function openingOf(reason: Reason, a: string, b: string, turns: string | undefined): string {
   switch (reason.kind) {
     case 'sum':
       return `The terms are counted in different units: ${a} and ${b}.`;
@@ -31,11 +42,14 @@ function openingOf(reason: Reason, a: string, b: string): string {
     case 'alike':
       return `\`${short(reason.function)}\` needs its arguments ${reason.positions[0] + 1} and ${reason.positions[1] + 1} in one unit; here they are ${a} and ${b}.`;
     case 'target':
-      return `\`${reason.path}\` is noted ${bracket(reason.note.unit.text)}, but this value is counted in ${a}.`;
+      if (turns) return `\`${reason.path}\` is noted ${bracket(reason.note.unit.text)}, but this value ${turns}.`;
+      return `\`${reason.path}\` is noted ${bracket(reason.note.unit.text)}, but this value is counted ${inUnit(a, b)}.`;
     case 'result':
-      return `\`${reason.function}\` is noted to return ${bracket(reason.note.unit.text)}, but this value is counted in ${a}.`;
+      if (turns) return `\`${reason.function}\` is noted to return ${bracket(reason.note.unit.text)}, but this value ${turns}.`;
+      return `\`${reason.function}\` is noted to return ${bracket(reason.note.unit.text)}, but this value is counted ${inUnit(a, b)}.`;
     case 'parameter':
-      return `\`${reason.function}\` takes \`${reason.name}\` in ${bracket(reason.note.unit.text)}, but this argument is counted in ${a}.`;
+      if (turns) return `\`${reason.function}\` takes \`${reason.name}\` in ${bracket(reason.note.unit.text)}, but this argument ${turns}.`;
+      return `\`${reason.function}\` takes \`${reason.name}\` in ${bracket(reason.note.unit.text)}, but this argument is counted ${inUnit(a, b)}.`;
     case 'argument':
       return `\`${short(reason.function)}\` takes ${reason.claim === 'rad' ? 'radians' : b}, but this is counted in ${a}.`;
     case 'conversion-edge':

@@ -43,7 +43,8 @@ export function unitOf(value: Value, dimension: Dimension): string {
   const note = value.version?.note;
   if (note && note.unit.dimension === dimension && note.unit.text !== '') return unitWords(note.unit.text, dimension);
   const reading = value.measure?.readings.length === 1 && value.measure.factors.length === 0 ? value.measure.readings[0] : undefined;
-  if (reading && value.form?.terms.length === 0) return unitWords(turned(printUnit({ dimension, scale: reading.scale, text: '' }), value.measure), dimension);
+  const printed = reading && value.form?.terms.length === 0 ? printUnit({ dimension, scale: reading.scale, text: '' }) : undefined;
+  if (printed !== undefined && !/^[\d.]+ /.test(printed)) return unitWords(turned(printed, value.measure), dimension);
   return unitWords(coherentUnit(dimension), dimension);
 }
 
