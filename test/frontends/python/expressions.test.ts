@@ -38,6 +38,8 @@ describe('operators', () => {
     ['a is  not None', '(cmp a is not None)'],
     ['a <> b', '(cmp a != b)'],
     ['a and b and not c or d', '(or (and a b (not c)) d)'],
+    ['a \\\n in b', '(cmp a in b)'],
+    ['[a, \\\n b]', '(list a b)'],
     ['a and (b and c)', '(and a (and b c))'],
     ['a if b else c if d else e', '(choose b a (choose d c e))'],
     ['(n := f(x)) + 1', '(+ (:= n (f x)) 1)'],

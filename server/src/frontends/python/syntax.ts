@@ -33,6 +33,8 @@ const fieldless = new Set([
   'argument_list', 'block', 'comment', 'concatenated_string', 'conditional_expression', 'decorator', 'dictionary', 'dotted_name', 'ERROR', 'expression_list', 'expression_statement',
   'list', 'module', 'parameters', 'lambda_parameters', 'parenthesized_expression', 'pattern_list', 'return_statement', 'set', 'slice', 'string', 'tuple', 'tuple_pattern', 'type', 'with_clause',
 ]);
+/** Nodes that may stand anywhere and are part of nothing. */
+const extras = new Set(['comment', 'line_continuation']);
 /** Tokens that lowering looks at; all others are punctuation. */
 const kept = /^(?::|[+\-*/%@&|^~]|\*\*|\/\/|<<|>>|[+\-*/%@&|^]=|(?:\*\*|\/\/|<<|>>)=|[<>]=?|==|!=|<>|and|or|not|in|is|not in|is not)$/;
 
@@ -90,7 +92,7 @@ export class TreeCopier {
     if (known) return known;
     const type = cursor.nodeType;
     const named = cursor.nodeIsNamed;
-    const kind = { type, named, leaf: !named || leaves.has(type), kept: named ? type !== 'comment' : kept.test(type), fieldless: fieldless.has(type) };
+    const kind = { type, named, leaf: !named || leaves.has(type), kept: named ? !extras.has(type) : kept.test(type), fieldless: fieldless.has(type) };
     if (type !== 'ERROR') this.kinds[id] = kind;
     return kind;
   }
