@@ -41,6 +41,7 @@ describe('numpydoc parameters', () => {
     ['in words over a line break', ['D : float', '    Angle between the planes in', '    degrees.'], 'f(D): degrees (documentation) "Angle between the planes"'],
     ['in units of', ['D : float', '    Gap in units of eV.'], 'f(D): eV (documentation) "Gap"'],
     ['units:', ['D : float', '    Gap. Units: m/s.'], 'f(D): m/s (documentation) "Gap"'],
+    ['a sentence of its own, then a remark', ['D : array', '    Squared frequency, 1/s^2. (Frequency N is in radians per second.)'], 'f(D): 1/s^2 (documentation) "Squared frequency. (Frequency N is in radians per second.)"'],
     ['two systems', ['T : float', '    Dry bulb temperature in °F [IP] or °C [SI]'], 'f(T): °F or °C (scale unknown) (documentation) "Dry bulb temperature in"'],
     ['two systems, unclosed', ['T : float', '    Enthalpy in Btu/lb [IP] or J/kg'], 'f(T): Btu/lb or J/kg (scale unknown) (documentation) "Enthalpy in"'],
     ['a value in prose beside it', ['T : float', '    Temperature [K], above 273.15 [K]'], 'f(T): K (documentation) "Temperature, above 273.15 [K]"'],
@@ -173,6 +174,10 @@ describe('classes', () => {
 test('spans cover the characters of the unit, whatever stands before', () => {
   const text = `x = 1\n\n\n${parameters('V : float', '    Wörter — velocity [ m/s ]', 'D : array-like, kg/s', '    flow', 'T : float', '    Temperature in degrees', '    C, measured')}`;
   expect(spansOf(text)).toEqual(['m/s', 'kg/s', 'degrees\n        C']);
+});
+
+test('words that introduce a unit are outside of its span', () => {
+  expect(spansOf(parameters('V : float', '    Zenith angle of the sun, in degrees.', 'D : float', '    Bore (in mm).'))).toEqual(['degrees', 'mm']);
 });
 
 test('line breaks of other systems', () => {

@@ -9,7 +9,9 @@ import { mayStandAlone } from './plain-words.ts';
 /** Any of the forms, the most explicit first. `last`: words behind the last comma count. `taken`: a word is a name of the code around. */
 export function unitInWords(piece: Piece, last: boolean, taken: (name: string) => boolean, options: ReadOptions): Found | undefined {
   if (isDual(piece.text)) return dualUnit(piece, options);
-  const found = introducedUnit(piece, options) ?? (last ? unitBehindComma(piece, options) : undefined);
+  const introduced = introducedUnit(piece, options);
+  const behind = last ? unitBehindComma(piece, options) : undefined;
+  const found = introduced && behind && behind.span.start < introduced.span.start ? behind : (introduced ?? behind);
   const words = found && piece.text.slice(found.span.start, found.span.end);
   return words !== undefined && isLetter(words) && taken(words) ? undefined : found;
 }
@@ -38,13 +40,13 @@ function leadingWords(text: string, start: number, options: ReadOptions): { read
   const segment = bracketAware(rest, stop < 0 ? rest.length : stop);
   const ends = [...segment.matchAll(/\S+/g)].slice(0, mostWords).map((word) => word.index + word[0].length);
   for (let at = ends.length - 1; at >= 0; at--) {
-    const words = segment.slice(0, ends[at]);
+    const words = segment.slice(0, ends[at]).replace(/[.,;:]+$/, '');
     if (notUnits.has(words.toLowerCase()) || /\s(?:fractions?|ratios?|numbers?|of|per|and|in|at|the)$/i.test(words) || /^\d|^(?![msK])[A-Za-z]\*\*\d/.test(words) || !mayStandAlone(words)) continue;
     const result = parseUnit(words.replace(/\s+/g, ' '), options);
     if (!result.ok || isPureNumber(words)) continue;
     const whole = ends[at] === segment.trimEnd().length;
     const sure = result.beyondDoubt || fullNames.test(words);
-    if (whole ? sure || symbolAlone(words, rest.slice(ends[at])) : sure && !continues(segment.slice(ends[at]))) return { result, end: start + (ends[at] as number) };
+    if (whole ? sure || symbolAlone(words, rest.slice(ends[at])) : sure && !continues(segment.slice(ends[at]))) return { result, end: start + words.length };
   }
   return undefined;
 }
@@ -98,7 +100,7 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
   const tail = text.slice(comma + 1, end);
   const start = comma + 1 + tail.length - tail.trimStart().length;
   const words = tail.trim();
-  if (words === '' || /^\d/.test(words) || /^\w+\s+\/\s|^U\+[\dA-F]{4}/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
+  if (words === '' || /^\d(?!\/)|^in\s/i.test(words) || /^\w+\s+\/\s|^U\+[\dA-F]{4}/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
   const result = parseUnit(words, options);
   if (!result.ok || /^(?:1|-+|none|n\/a|ratio|decimal|fraction)$/i.test(words)) return undefined;
   const sure = result.beyondDoubt || fullNames.test(words) || (whole && /^[A-Za-zµΩ]{1,3}$/.test(words) && !notUnits.has(words.toLowerCase()) && /[A-Za-z]{4}/.test(text.slice(0, comma)));
