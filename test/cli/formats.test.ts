@@ -110,7 +110,10 @@ describe('text', () => {
   test('says so where there was nothing to check', async () => {
     expect((await box.run('check sound.py')).out).toBe('Nothing found in 1 file.\n');
     expect((await box.run('check plain.py')).out).toContain('No unit note was found');
-    expect((await box.run('check nowhere.py')).out).toBe('Nothing found in no files.\n');
+    expect((await box.run('check nowhere.py')).out).toBe('No file was checked.\n');
+    const empty = new Sandbox();
+    expect(await empty.run('check .')).toMatchObject({ status: 0, out: 'No file was checked. Folders are searched for *.py, *.pyw, *.nomen.\n' });
+    empty.remove();
   });
 
   test('has colours on a terminal that takes them, unless they are not wanted', async () => {

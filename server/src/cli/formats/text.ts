@@ -1,6 +1,7 @@
 /** The form that people read. */
 import type { FindingCode } from '../../findings/finding.ts';
 import { findingCodes } from '../../findings/finding.ts';
+import { languageEndings } from '../languages.ts';
 import type { Format, Region, Reported, ReportedPlace, Summary } from '../report.ts';
 import { painter, type Paint, showLine, type Style, wrap } from '../terminal.ts';
 
@@ -11,6 +12,8 @@ export interface TextOptions {
   readonly hints: boolean;
   readonly stats: boolean;
 }
+
+const searched = languageEndings.flatMap(([, endings]) => endings.map((ending) => `*${ending}`)).join(', ');
 
 export function textFormat(options: TextOptions): Format {
   const paint = painter(options.color);
@@ -52,13 +55,14 @@ function beyond(place: Region): string {
 }
 
 function summaryText(summary: Summary, options: TextOptions): string {
+  if (summary.files === 0) return `No file was checked.${summary.unreadable.length > 0 ? '' : ` Folders are searched for ${searched}.`}\n`;
   const { error, warning, information, hint } = summary.bySeverity;
   const counts = [plural(error, 'error'), plural(warning, 'warning'), information > 0 ? `${information} for information` : ''].filter((each) => each !== '');
   if (options.hints && hint > 0) counts.push(plural(hint, 'hint'));
-  const files = plural(summary.files, 'file') || 'no files';
+  const files = plural(summary.files, 'file');
   const lines = [counts.length === 0 ? `Nothing found in ${files}.` : `${counts.join(', ')} in ${summary.flagged === summary.files ? '' : `${summary.flagged} of `}${files}.`];
   if (!options.hints && hint > 0) lines.push(`${plural(hint, 'hint')} not shown; --hints shows ${hint === 1 ? 'it' : 'them'}.`);
-  if (summary.files > 0 && summary.notes === 0) lines.push('No unit note was found, so there was nothing to check against: write units in comments (D = 0.05  # [m]), documentation, or a .nomen file.');
+  if (summary.notes === 0) lines.push('No unit note was found, so there was nothing to check against: write units in comments (D = 0.05  # [m]), documentation, or a .nomen file.');
   return `${lines.flatMap((line) => wrap(line, options.width)).join('\n')}\n`;
 }
 
