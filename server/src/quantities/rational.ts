@@ -104,8 +104,11 @@ export class Rational {
   }
 
   private static whole(n: bigint): Rational {
-    if (n >= -16n && n <= 16n) return (small[Number(n) + 16] ??= new Rational(n, 1n));
-    return new Rational(n, 1n);
+    if (n < -16n || n > 16n) return new Rational(n, 1n);
+    const at = Number(n) + 16;
+    const known = small[at] ?? new Rational(n, 1n);
+    small[at] = known;
+    return known;
   }
 }
 
