@@ -41,6 +41,7 @@ export interface RecordExpr extends Span { readonly kind: 'record'; readonly ent
 export interface RecordEntry extends Span { readonly key: string; readonly keySpan: Span; readonly value: Expr; readonly comment?: Comment }
 export interface LambdaExpr extends Span { readonly kind: 'lambda'; readonly params: readonly Param[]; readonly body: Expr }
 export interface ComprehensionExpr extends Span { readonly kind: 'comprehension'; readonly element: Expr; readonly key?: Expr; readonly clauses: readonly { readonly target: Expr; readonly iterable: Expr }[]; readonly conditions: readonly Expr[] }
+/** Start, end and step by position; what is left out is nothing, without extent. */
 export interface SliceExpr extends Span { readonly kind: 'slice'; readonly parts: readonly Expr[] }
 /** An assignment inside an expression (`:=`). */
 export interface BindExpr extends Span { readonly kind: 'bind'; readonly target: Expr; readonly value: Expr }
@@ -110,7 +111,7 @@ export interface Chunk {
   readonly problems: readonly SyntaxProblem[];
   /** Every comment of the chunk, in order: for directives that no statement owns. */
   readonly comments: readonly Comment[];
-  /** The module's documentation, on the first chunk only. */
+  /** The module's documentation, on the first chunk with a statement only. */
   readonly doc?: DocText;
 }
 

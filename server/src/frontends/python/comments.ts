@@ -41,7 +41,7 @@ export class Comments {
   above(span: Span): readonly Comment[] {
     if (this.all.length === 0) return [];
     const line = this.lines.lineAt(this.base + span.start);
-    const column = this.base + span.start - this.lines.lineStart(line);
+    const column = this.base + span.start - this.lineStart(line);
     const found: Comment[] = [];
     for (let at = line - 1; at >= 0; at--) {
       const placed = this.byLine.get(at);
@@ -60,6 +60,11 @@ export class Comments {
     return found.map((each) => each.comment);
   }
 
+  /** Where a line begins in the chunk: what stands left of the chunk must not count, or its reuse elsewhere would differ. */
+  private lineStart(line: number): number {
+    return Math.max(this.lines.lineStart(line), this.base);
+  }
+
   private place(at: Span): Comment {
     const raw = this.lines.text.slice(at.start, at.end);
     const lead = /^#+:?[^\S\n]*/.exec(raw)?.[0].length ?? 0;
@@ -67,7 +72,7 @@ export class Comments {
     const start = at.start + lead - this.base;
     const comment = { text, start, end: start + text.length };
     const line = this.lines.lineAt(at.start);
-    const lineStart = this.lines.lineStart(line);
+    const lineStart = this.lineStart(line);
     const alone = this.lines.text.slice(lineStart, at.start).trim() === '';
     this.byLine.set(line, { comment, alone, column: at.start - lineStart });
     return comment;
