@@ -1,4 +1,4 @@
-import { chmodSync, mkdirSync, symlinkSync } from 'node:fs';
+import { mkdirSync, symlinkSync } from 'node:fs';
 import { join } from 'node:path';
 import { afterAll, describe, expect, test } from 'vitest';
 import { faulty, plain, Sandbox, sound } from './sandbox.ts';
@@ -134,18 +134,6 @@ describe('links', () => {
     symlinkSync(box.folder, join(shared.folder, 'lib', 'back'));
     expect(files((await box.run('check . --format json')).out)).toEqual(['lib/two.py']);
   });
-});
-
-test.runIf(process.getuid?.() !== 0)('folders and files without permission are named, the rest is checked', async () => {
-  const box = sandbox({ 'open.py': faulty, 'shut/in.py': faulty, 'shut.py': faulty });
-  chmodSync(join(box.folder, 'shut'), 0);
-  chmodSync(join(box.folder, 'shut.py'), 0);
-  const { out, complaints, status } = await box.run('check . --format json');
-  chmodSync(join(box.folder, 'shut'), 0o755);
-  expect(status).toBe(2);
-  expect(files(out)).toEqual(['open.py']);
-  expect(complaints).toContain('shut: no permission to read it');
-  expect(complaints).toContain('shut.py: no permission to read it');
 });
 
 describe('configuration', () => {

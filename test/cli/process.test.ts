@@ -1,6 +1,6 @@
 /** The built command as a process: start, pipes, the shipped assets. */
 import { spawn, spawnSync } from 'node:child_process';
-import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
+import { chmodSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
@@ -44,6 +44,22 @@ test('explains a code', () => {
 test('bad usage goes to standard error with status 2', () => {
   expect(termwise(['check', '--formt', 'json'])).toEqual(expect.objectContaining({ status: 2, stdout: '', stderr: 'termwise: Unknown option --formt. Did you mean --format?\nSee termwise --help.\n' }));
   expect(termwise([])).toMatchObject({ status: 2, stdout: '' });
+});
+
+test('folders and files without permission are named, the rest is checked', () => {
+  const shut = ['shut', 'shut.py'].map((name) => join(box.folder, 'mixed', name));
+  box.write('mixed/shut/in.py', faulty);
+  box.write('mixed/shut.py', faulty);
+  box.write('mixed/open.py', faulty);
+  for (const path of [dist, box.folder]) chmodSync(path, 0o755);
+  for (const path of shut) chmodSync(path, 0);
+  // The administrator may read everything, so that somebody else has to run it.
+  const nobody = process.getuid?.() === 0 ? { uid: 65534, gid: 65534 } : {};
+  const { status, stdout, stderr } = spawnSync(process.execPath, [command, 'check', 'mixed', '--format', 'json'], { cwd: box.folder, encoding: 'utf8', ...nobody });
+  for (const path of shut) chmodSync(path, 0o755);
+  expect(stderr.split('\n')).toEqual(['termwise: mixed/shut: no permission to read it', 'termwise: mixed/shut.py: no permission to read it', '']);
+  expect(status).toBe(2);
+  expect(JSON.parse(stdout)).toMatchObject({ summary: { files: 1, findings: { 'unlike-terms': 1 } } });
 });
 
 describe('ends quietly', () => {
