@@ -1,6 +1,7 @@
 import type { ClassStmt, FunctionStmt, ImportStmt, LambdaExpr, Param, RecordEntry, Stmt } from '../program/nodes.ts';
 import type { Signature } from '../program/signature.ts';
 import type { Anchor, Span } from '../text/span.ts';
+import { Bindings } from './bindings.ts';
 import { type Form, type Unknown, unknownForm } from './form.ts';
 import type { Constraint } from './problem.ts';
 import type { NoteInForce, Value } from './value.ts';
@@ -43,15 +44,12 @@ export interface LocalFunction {
   readonly result: Value;
 }
 
-/** The current versions of symbols, by path. */
-export type Bindings = Map<string, Value>;
-
 let unknowns = 0;
 
 /** The state of one generation: a function's body, or a file's top level. */
 export class Context {
   readonly constraints: Constraint[] = [];
-  bindings: Bindings = new Map();
+  bindings = new Bindings();
   /** Names that assignments reach outside for. */
   readonly outer = new Set<string>();
   returns: Value[] = [];

@@ -197,7 +197,7 @@ function checkedNote(context: Context, path: string, expr: Expr, value: Value, n
 
 function lambda(context: Context, expr: LambdaExpr): Value {
   const outside = context.bindings;
-  context.bindings = new Map(outside);
+  context.bindings = outside.branch();
   const params = expr.params.map((param) => {
     const open = context.fresh(param.name, param.nameSpan, 'parameter');
     context.bindings.set(param.name, {
@@ -213,7 +213,7 @@ function lambda(context: Context, expr: LambdaExpr): Value {
 
 function comprehension(context: Context, expr: ComprehensionExpr): Value {
   const outside = context.bindings;
-  context.bindings = new Map(outside);
+  context.bindings = outside.branch();
   for (const clause of expr.clauses) {
     const iterable = evaluate(context, clause.iterable);
     bindElement(context, clause.target, iterable);

@@ -1,6 +1,5 @@
 /** A function's body as a problem of its own: parameters in, constraints and returned values out. */
 import type { FunctionStmt, Param } from '../program/nodes.ts';
-import { assignedPaths } from './assigned.ts';
 import type { Context } from './context.ts';
 import { type Unknown, unknownForm } from './form.ts';
 import { walk } from './statements.ts';
@@ -16,7 +15,6 @@ export interface ReadParam {
 /** Binds the parameters and walks the body; `self` is the object of a method. Returned values are left in the context. */
 export function readBody(context: Context, fn: FunctionStmt, self: Value | undefined): readonly ReadParam[] {
   const params = readParams(context, fn, self);
-  for (const name of assignedPaths(fn.body)) if (context.outer.has(name)) context.bindings.delete(name);
   walk(context, fn.body);
   return params;
 }

@@ -3,7 +3,8 @@ import { pathOf } from '../program/path.ts';
 import type { AssignStmt, Expr, FunctionStmt, Stmt } from '../program/nodes.ts';
 import { agree, product, quotient, sum, power } from './arithmetic.ts';
 import { assignedPaths } from './assigned.ts';
-import type { Bindings, Context } from './context.ts';
+import type { Bindings } from './bindings.ts';
+import type { Context } from './context.ts';
 import { bindElement, evaluate } from './expressions.ts';
 import { isConstant, oneForm, sameForm, unknownForm } from './form.ts';
 import { assign, notedValue, reportDisagreement, reportMisuse } from './targets.ts';
@@ -140,15 +141,16 @@ function branches(context: Context, statement: Extract<Stmt, { kind: 'if' }>): b
   const before = context.bindings;
   const ends: Bindings[] = [];
   for (const arm of statement.arms) {
-    context.bindings = before;
     evaluate(context, arm.condition);
-    context.bindings = new Map(before);
+    context.bindings = before.branch();
     if (walk(context, arm.body)) ends.push(context.bindings);
+    context.bindings = before;
   }
-  context.bindings = new Map(before);
+  context.bindings = before.branch();
   if (walk(context, statement.otherwise)) ends.push(context.bindings);
-  context.bindings = ends.length === 0 ? before : joined(ends, true);
+  context.bindings = before;
   if (ends.length > 1) for (const arm of statement.arms) for (const inner of arm.body) correction(context, inner, before);
+  join(before, ends, false, true);
   return ends.length > 0;
 }
 
@@ -167,57 +169,63 @@ function correction(context: Context, statement: Stmt, before: Bindings): void {
 function cases(context: Context, statement: Extract<Stmt, { kind: 'match' }>): boolean {
   evaluate(context, statement.subject);
   const before = context.bindings;
-  const ends: Bindings[] = [before];
+  const ends: Bindings[] = [];
   for (const each of statement.cases) {
-    context.bindings = new Map(before);
+    context.bindings = before.branch();
     for (const binding of each.bindings) context.bindings.set(binding.name, unknown(binding));
     if (each.guard) evaluate(context, each.guard);
     if (walk(context, each.body)) ends.push(context.bindings);
   }
-  context.bindings = joined(ends);
+  context.bindings = before;
+  join(before, ends, true);
   return true;
 }
 
 /** The body is read once: what it assigns before it reads it keeps its version from before the loop, bare numbers become open. */
 function loop(context: Context, statement: Extract<Stmt, { kind: 'loop' }>): void {
   const iterable = statement.iterable ? evaluate(context, statement.iterable) : undefined;
-  const before = new Map(context.bindings);
+  const before = context.bindings;
+  context.bindings = before.branch();
   for (const path of assignedPaths(statement.body)) {
-    const value = context.bindings.get(path);
+    const value = before.get(path);
     if (value?.version?.origin === 'constant') context.bindings.set(path, { expr: undefined, form: undefined, from: [] });
   }
   if (statement.condition) evaluate(context, statement.condition);
   if (statement.target) bindElement(context, statement.target, iterable ?? unknown(statement.target));
   walk(context, statement.body);
-  context.bindings = joined([before, context.bindings]);
+  join(before, [context.bindings], true);
+  context.bindings = before;
   walk(context, statement.otherwise);
 }
 
 function attempt(context: Context, statement: Extract<Stmt, { kind: 'attempt' }>): boolean {
-  const before = new Map(context.bindings);
+  const before = context.bindings;
+  const body = before.branch();
+  context.bindings = body;
   const through = walk(context, statement.body) && walk(context, statement.otherwise);
-  const ends = through ? [context.bindings] : [];
-  const after = context.bindings;
+  const ends = through ? [body] : [];
   for (const handler of statement.handlers) {
-    context.bindings = joined([before, new Map(after)]);
+    context.bindings = before.branch();
+    for (const path of body.changed()) context.bindings.set(path, joinedValue([before.get(path), body.get(path)].filter((value) => value !== undefined), false));
     if (walk(context, handler)) ends.push(context.bindings);
   }
-  context.bindings = ends.length > 0 ? joined(ends) : before;
+  context.bindings = before;
+  join(before, ends);
   return walk(context, statement.finally) && ends.length > 0;
 }
 
-/** Versions after several ways: the same everywhere, or alike, or unknown. A bare number gives way to a quantity. */
-function joined(ends: readonly Bindings[], chosen = false): Bindings {
-  const first = ends[0] as Bindings;
-  if (ends.length === 1) return first;
-  const result: Bindings = new Map(first);
-  const paths = new Set(ends.flatMap((end) => [...end.keys()]));
+/**
+ * Versions after several ways: the same everywhere, or alike, or unknown. A bare number gives way to a quantity. Written into
+ * what was known before; `passing`: the way that changes nothing is one of them.
+ */
+function join(before: Bindings, ends: readonly Bindings[], passing = false, chosen = false): void {
+  const paths = new Set(ends.flatMap((end) => [...end.changed()]));
+  const ways = ends.length + (passing ? 1 : 0);
   for (const path of paths) {
-    const values = ends.flatMap((end) => end.get(path) ?? []);
-    if (values.every((value) => value === values[0])) result.set(path, values[0] as Value);
-    else result.set(path, joinedValue(values, chosen && values.length === ends.length));
+    const values = (passing ? [before, ...ends] : ends).flatMap((end) => end.get(path) ?? []);
+    const first = values[0] as Value;
+    before.set(path, values.every((value) => value === first) ? first : joinedValue(values, chosen && values.length === ways));
   }
-  return result;
 }
 
 function joinedValue(values: readonly Value[], chosen: boolean): Value {
@@ -246,7 +254,7 @@ function splitOf(values: readonly Value[]): readonly [Value, Value] | undefined 
 function localFunction(context: Context, statement: FunctionStmt): Value {
   const outside = { bindings: context.bindings, returns: context.returns, owner: context.owner };
   context.owner = statement;
-  context.bindings = new Map(outside.bindings);
+  context.bindings = outside.bindings.branch();
   context.returns = [];
   const params = statement.params.map((param) => {
     const note = context.surroundings.notes.parameter(statement, param)[0];

@@ -37,7 +37,7 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
 
 /** A new version of a symbol without a note. A bare number becomes a constant whose unit its uses decide. */
 export function bind(context: Context, path: string, target: Span, value: Value): void {
-  dropParts(context, path);
+  context.bindings.dropParts(path);
   const version = { path, anchor: context.anchor, span: target, assigned: value };
   const bound: Value = value.literal && !value.fits ? constantValue(context, path, target, value.literal, version) : { ...value, version: { ...version, origin: 'assigned' } };
   context.bindings.set(path, bound);
@@ -118,13 +118,6 @@ function assignMember(context: Context, path: string, target: Expr, value: Value
     return;
   }
   if (value.form && !value.literal && !value.fits && current.form !== value.form) context.bindings.set(path, { expr: target, form: undefined, from: [] });
-}
-
-/** A new version of `a` ends what was known of `a.x` and `a["x"]`. */
-function dropParts(context: Context, path: string): void {
-  for (const key of context.bindings.keys()) {
-    if (key.startsWith(path) && (key[path.length] === '.' || key[path.length] === '[')) context.bindings.delete(key);
-  }
 }
 
 function isDifference(value: Value): boolean {

@@ -176,7 +176,7 @@ function empiricalScheme(fn: FunctionStmt, chunk: Chunk, surroundings: Surroundi
 
 function fieldsOf(context: Context, reduce: (form: Form) => Form): ReadonlyMap<string, Value> {
   const fields = new Map<string, Value>();
-  for (const [path, value] of context.bindings) {
+  for (const [path, value] of context.bindings.all()) {
     if (!path.startsWith('self.')) continue;
     const form = value.form && reduce(value.form);
     if (value.fields) fields.set(path.slice(5), value);
