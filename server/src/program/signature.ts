@@ -25,8 +25,11 @@ export interface SignatureParam {
 export type UnitClaim =
   /** No bracket: nothing is claimed and nothing follows. */
   | { readonly kind: 'any' }
-  /** `[?a^2 m]`: a constant unit times powers of unit variables. */
-  | { readonly kind: 'unit'; readonly unit: Unit; readonly powers: readonly { readonly variable: string; readonly power: Rational }[]; readonly difference: boolean }
+  /**
+   * `[?a^2 m]`: a constant unit times powers of unit variables. `difference`: of two points on a scale, without a zero of its own.
+   * `sum`: of as many members as there are, so that points on a scale leave it open which zero the result counts from.
+   */
+  | { readonly kind: 'unit'; readonly unit: Unit; readonly powers: readonly { readonly variable: string; readonly power: Rational }[]; readonly difference: boolean; readonly sum?: true }
   /** An argument that is itself a function: `f(x [?a]) [?b]`. */
   | { readonly kind: 'function'; readonly params: readonly UnitClaim[]; readonly results: readonly UnitClaim[] };
 

@@ -1,4 +1,4 @@
-/** What stands in the brackets of a signature: `?a^2 m`, `difference ?a`, `rad`. */
+/** What stands in the brackets of a signature: `?a^2 m`, `difference ?a`, `sum ?a`, `rad`. */
 import type { UnitClaim } from '../program/signature.ts';
 import { parseUnit } from '../quantities/parse-unit.ts';
 import { Rational } from '../quantities/rational.ts';
@@ -16,24 +16,27 @@ interface Operand {
 
 type Power = { readonly variable: string; readonly power: Rational };
 
+type Kind = { readonly difference: boolean; readonly sum?: true };
+
 /** Reads the text between brackets that begins at `start`; what cannot be read goes to `problems` and claims nothing. */
 export function readClaim(inner: string, start: number, vocabulary: Vocabulary | undefined, problems: NotationProblem[]): UnitClaim {
-  const head = /^\s*(difference(?=\s|$))?\s*/.exec(inner) as RegExpExecArray;
-  const body = inner.slice(head[0].length).trimEnd();
-  const at = start + head[0].length;
-  const difference = head[1] !== undefined;
+  const word = /^\s*(difference|sum)(?=[\s?]|$)\s*/.exec(inner);
+  const blank = word?.[0].length ?? inner.length - inner.trimStart().length;
+  const body = inner.slice(blank).trimEnd();
+  const at = start + blank;
   if (body === '') {
-    if (difference) problems.push(notationProblem('empty-claim', start, start + inner.length));
+    if (word) problems.push(notationProblem('empty-claim', start, start + inner.length, word[1]));
     return anyClaim;
   }
+  const kind: Kind = { difference: word?.[1] === 'difference', ...(word?.[1] === 'sum' ? { sum: true } : {}) };
   if (!body.includes('?')) {
     const unit = unitOf(body, at, vocabulary, problems);
-    return unit ? { kind: 'unit', unit, powers: [], difference } : anyClaim;
+    return unit ? { kind: 'unit', unit, powers: [], ...kind } : anyClaim;
   }
-  return product(body, at, difference, vocabulary, problems) ?? anyClaim;
+  return product(body, at, kind, vocabulary, problems) ?? anyClaim;
 }
 
-function product(body: string, start: number, difference: boolean, vocabulary: Vocabulary | undefined, problems: NotationProblem[]): UnitClaim | undefined {
+function product(body: string, start: number, kind: Kind, vocabulary: Vocabulary | undefined, problems: NotationProblem[]): UnitClaim | undefined {
   const operands = operandsOf(body, start);
   const slash = operands.findIndex((each) => each.divides);
   if (slash >= 0 && operands.slice(slash + 1).some((each) => !each.divides)) {
@@ -42,6 +45,7 @@ function product(body: string, start: number, difference: boolean, vocabulary: V
     return undefined;
   }
   const powers: Power[] = [];
+  const texts: string[] = [];
   let unit: Unit = pureNumber;
   for (const operand of operands) {
     const sign = operand.divides ? Rational.minusOne : Rational.one;
@@ -52,10 +56,11 @@ function product(body: string, start: number, difference: boolean, vocabulary: V
     } else if (operand.text !== '1') {
       const factor = unitOf(operand.text, operand.start, vocabulary, problems);
       if (!factor) return undefined;
-      unit = multiply(unit, raise(factor, sign, factor.text), body.replace(/\?\w+(?:\^\S+)?/g, '').trim());
+      texts.push(operand.divides ? `1/${operand.text}` : operand.text);
+      unit = multiply(unit, raise(factor, sign, factor.text), texts.join(' '));
     }
   }
-  return { kind: 'unit', unit, powers: gathered(powers), difference };
+  return { kind: 'unit', unit, powers: gathered(powers), ...kind };
 }
 
 /** Operands with blanks, `*`, `·` or `/` between them; round brackets keep theirs together. */

@@ -48,6 +48,8 @@ const deepest = 8;
 class SignatureReader {
   readonly problems: NotationProblem[] = [];
   private at = 0;
+  /** Where the parameters being read end. */
+  private limit = Infinity;
 
   constructor(
     private readonly line: string,
@@ -87,6 +89,8 @@ class SignatureReader {
       return undefined;
     }
     const params: SignatureParam[] = [];
+    const outer = this.limit;
+    this.limit = close;
     this.at = open + 1;
     while (this.at < close) {
       const param = this.param(close, depth);
@@ -95,6 +99,7 @@ class SignatureReader {
         params.push(param.value);
       }
     }
+    this.limit = outer;
     this.at = close + 1;
     return params;
   }
@@ -155,9 +160,10 @@ class SignatureReader {
   private claim(): UnitClaim {
     const open = this.at;
     const close = this.line.indexOf(']', open);
-    if (close < 0) {
-      this.report('bracket-not-closed', open, this.line.trimEnd().length);
-      this.at = this.line.length;
+    if (close < 0 || close > this.limit || this.line.slice(open + 1, close).includes('[')) {
+      const end = Math.min(this.limit, this.line.length);
+      this.report('bracket-not-closed', open, end);
+      this.at = end;
       return anyClaim;
     }
     this.at = close + 1;

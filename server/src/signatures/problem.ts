@@ -24,7 +24,7 @@ const sentences: Record<NotationFault, (found: string) => string> = {
   'unknown-unit': (found) => `\`${found}\` is not a unit known here.`,
   'bad-power': (found) => `\`${found}\` is no power; write \`?a^2\`, \`?a^-1\` or \`?a^(1/2)\`.`,
   'slash-before-two': () => 'It is not clear how far this slash reaches; write negative powers: `?a m^-1 s^-1`.',
-  'empty-claim': () => 'A difference of what? `[difference ?a]` is one of two values in ?a.',
+  'empty-claim': (found) => `A ${found} of what? \`[${found} ?a]\` is one of values in ?a.`,
   'text-behind': (found) => `\`${found}\` cannot stand here.`,
   'not-a-line': () => 'This line is neither a signature nor a constant.',
 };

@@ -10,10 +10,14 @@ export function readExpression(line: string, from: number): { readonly expr: Exp
 }
 
 const deepest = 60;
+/** Operators of one formula; longer ones are read so far and reported. */
+const mostOperators = 300;
 const numberForm = /(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/y;
 const nameForm = /[\p{L}_][\p{L}\p{N}_]*(?:\.[\p{L}_][\p{L}\p{N}_]*)*/uy;
 
 class Reader {
+  private operators = 0;
+
   constructor(private readonly line: string, public at: number) {}
 
   sum(depth: number): Expr | undefined {
@@ -26,6 +30,8 @@ class Reader {
 
   private chain(depth: number, ops: readonly string[], next: () => Expr | undefined): Expr | undefined {
     if (depth > deepest) return undefined;
+    this.skip();
+    const first = this.at;
     let left = next();
     while (left) {
       const start = this.at;
@@ -36,6 +42,10 @@ class Reader {
         this.at = start;
         break;
       }
+      if (++this.operators > mostOperators) {
+        this.at = start;
+        break;
+      }
       const opSpan = { start: this.at, end: this.at + 1 };
       this.at++;
       const right = next();
@@ -43,7 +53,7 @@ class Reader {
         this.at = start;
         break;
       }
-      left = { kind: 'binary', op: (op === '·' ? '*' : op) as BinaryExpr['op'], opSpan, left, right, start: left.start, end: right.end };
+      left = { kind: 'binary', op: (op === '·' ? '*' : op) as BinaryExpr['op'], opSpan, left, right, start: first, end: this.at };
     }
     return left;
   }
@@ -56,12 +66,14 @@ class Reader {
       this.at++;
       const operand = depth > deepest ? undefined : this.unary(depth + 1);
       if (!operand) this.at = start;
-      return operand && { kind: 'unary', op, operand, start, end: operand.end };
+      return operand && { kind: 'unary', op, operand, start, end: this.at };
     }
     return this.powered(depth);
   }
 
   private powered(depth: number): Expr | undefined {
+    this.skip();
+    const first = this.at;
     const base = this.atom(depth);
     if (!base) return undefined;
     const start = this.at;
@@ -78,7 +90,7 @@ class Reader {
       this.at = start;
       return base;
     }
-    return { kind: 'binary', op: '**', opSpan, left: base, right: exponent, start: base.start, end: exponent.end };
+    return { kind: 'binary', op: '**', opSpan, left: base, right: exponent, start: first, end: this.at };
   }
 
   private atom(depth: number): Expr | undefined {

@@ -66,7 +66,9 @@ function withValue(text: string, from: number, head: Head): Line {
   if (!expr) return { ...valued, description: '', problems: [problemAt(at >= text.length ? 'no-value' : 'formula-breaks-off', Math.min(at, text.length), text.length)] };
   if (/^[-+*/^()[\]=·.]/.test(behind.trimStart()) || !/^(?:\s|,|;|$)/.test(behind)) return { ...valued, value: undefined, description: '', problems: [problemAt('formula-breaks-off', at, text.length)] };
   const description = behind.replace(/^[\s,;]+/, '').trim();
-  if (isNumber(expr) && otherUnit(description, head.unitText)) return { ...valued, description: '', problems: [problemAt('unit-behind-value', at, text.length, description)] };
+  const again = isNumber(expr) ? unitBehind(description, head.unitText) : undefined;
+  if (again === 'same') return { ...valued, description: '', problems: [] };
+  if (again === 'other') return { ...valued, description: '', problems: [problemAt('unit-behind-value', at, text.length, description)] };
   if (setOff(behind) || (isNumber(expr) && !likeFactor.test(description))) return { ...valued, description, problems: [] };
   return { ...valued, value: undefined, description: '', problems: [problemAt('two-symbols', at, text.length, behind.trim())] };
 }
@@ -79,11 +81,13 @@ function setOff(behind: string): boolean {
 /** `2 r`, `0.5 rho*v^2`: a product without its sign rather than a description. */
 const likeFactor = /^(?:[\p{L}_][\p{L}\p{N}_]?$|[\p{L}_][\p{L}\p{N}_.]*\s*[*^])/u;
 
-/** `p [Pa] = 5 bar`: one word behind the value that is a unit beyond doubt, and another one than the symbol's. */
-function otherUnit(description: string, unitText: string | undefined): boolean {
-  if (unitText === undefined || description === '' || /\s/.test(description)) return false;
+/** `p [Pa] = 5 bar`: one word behind the value that is a unit, the symbol's own or another one. */
+function unitBehind(description: string, unitText: string | undefined): 'same' | 'other' | undefined {
+  if (unitText === undefined || description === '' || /\s/.test(description)) return undefined;
   const [other, own] = [parseUnit(description), parseUnit(unitText)];
-  return other.ok && own.ok && (other.beyondDoubt || other.unit.dimension === own.unit.dimension) && !other.unit.dimension.isOne && !sameUnit(other.unit, own.unit);
+  if (!other.ok || !own.ok || other.unit.dimension.isOne) return undefined;
+  if (sameUnit(other.unit, own.unit)) return 'same';
+  return other.beyondDoubt || other.unit.dimension === own.unit.dimension ? 'other' : undefined;
 }
 
 /** A plain number, with its sign. */
