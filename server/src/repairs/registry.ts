@@ -2,6 +2,7 @@ import type { Fixer } from './fix.ts';
 import { allow } from './fixes/allow.ts';
 import { convert } from './fixes/convert.ts';
 import { offset } from './fixes/offset.ts';
+import { repair } from './fixes/repair.ts';
 
 /** Every fix, in the order in which they are tried. */
-export const fixers: readonly Fixer[] = [convert, offset, allow];
+export const fixers: readonly Fixer[] = [convert, offset, repair, allow];

@@ -52,6 +52,18 @@ export class Scene {
     return this.inputs.program.chunks.find((chunk) => chunk.anchor === anchor);
   }
 
+  /** The innermost statement around a place. */
+  statementAt(anchor: Anchor, span: Span): Stmt | undefined {
+    let found: Stmt | undefined;
+    let block: readonly Stmt[] = this.chunkOf(anchor)?.statements ?? [];
+    for (;;) {
+      const inner = block.find((each) => each.start <= span.start && span.end <= each.end);
+      if (!inner) return found;
+      found = inner;
+      block = blocksOf(inner);
+    }
+  }
+
   /** The characters of a span of a chunk. */
   code(anchor: Anchor, span: Span): string {
     return this.text.slice(anchor.start + span.start, anchor.start + span.end);
@@ -84,4 +96,24 @@ export function dimensionOf(value: Value | undefined, sightings: Sightings): Dim
   if (value?.literal) return Dimension.one;
   const form = value?.form && sightings.reduce(value.form);
   return form && form.terms.length === 0 ? form.dimension : undefined;
+}
+
+/** The statements inside a statement. */
+export function blocksOf(statement: Stmt): readonly Stmt[] {
+  switch (statement.kind) {
+    case 'if':
+      return [...statement.arms.flatMap((arm) => arm.body), ...statement.otherwise];
+    case 'loop':
+      return [...statement.body, ...statement.otherwise];
+    case 'attempt':
+      return [...statement.body, ...statement.handlers.flat(), ...statement.otherwise, ...statement.finally];
+    case 'match':
+      return statement.cases.flatMap((each) => each.body);
+    case 'scope':
+    case 'function':
+    case 'class':
+      return statement.body;
+    default:
+      return [];
+  }
 }

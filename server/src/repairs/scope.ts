@@ -11,6 +11,8 @@ export interface ScopeSymbol {
   readonly dimension: Dimension;
   readonly note: NoteInForce | undefined;
   readonly isParameter: boolean;
+  /** Of the file's top level, seen from a function. */
+  readonly isOutside: boolean;
   /** How often the code around reads it. */
   readonly uses: number;
   readonly value: Value;
@@ -22,32 +24,44 @@ export function symbolsAt(scene: Scene, anchor: Anchor, place: Span): readonly S
   const sightings = scene.sightings(piece);
   const found = new Map<string, ScopeSymbol>();
   const uses = new Map<string, number>();
+  const limit = limitAt(scene, anchor, place);
   const parameters = new Set(piece?.fn.params.map((param) => param.nameSpan as Span) ?? []);
   for (const [span, value] of sightings.values) {
     const own = value.version?.anchor === anchor || !piece;
     const read = isExpr(span) ? pathOf(span) : undefined;
     if (read !== undefined && value.version?.span !== span) uses.set(read, (uses.get(read) ?? 0) + 1);
     const path = value.version?.path;
-    if (!path || !own || (span.end > place.start && value.version?.anchor === anchor && !parameters.has(span)) || value.version?.span !== span) continue;
-    note(path, value, parameters.has(span));
+    if (!path || !own || value.version?.span !== span) continue;
+    note(path, value, parameters.has(span), false);
   }
   if (piece) {
     for (const [span, value] of sightings.values) {
       const path = isExpr(span) && span.kind === 'name' ? span.name : undefined;
-      if (path && value.version?.anchor !== anchor && value.version?.note) note(path, value, false);
+      if (path && value.version?.anchor !== anchor && value.version?.note) note(path, value, false, true);
     }
     for (const name of scene.inputs.solver.variables()) {
       const value = found.has(name) ? undefined : scene.inputs.solver.global(name);
-      if (value?.form) note(name, value, false);
+      if (value?.form) note(name, value, false, true);
     }
   }
   return [...found.values()].map((symbol) => ({ ...symbol, uses: uses.get(symbol.path) ?? 0 }));
 
-  function note(path: string, value: Value, isParameter: boolean): void {
+  function note(path: string, value: Value, isParameter: boolean, isOutside: boolean): void {
+    if (!isBefore({ value, isParameter, isOutside }, limit)) return;
     const dimension = value.fits ? undefined : dimensionOf(value, sightings);
-    if (dimension) found.set(path, { path, dimension, note: value.version?.note, isParameter, uses: 0, value });
+    if (dimension) found.set(path, { path, dimension, note: value.version?.note, isParameter, isOutside, uses: 0, value });
     else found.delete(path);
   }
+}
+
+/** Where the statement at a place begins, in the file: what is assigned before it has its value there. */
+export function limitAt(scene: Scene, anchor: Anchor, place: Span): number {
+  return anchor.start + (scene.statementAt(anchor, place)?.start ?? place.start);
+}
+
+/** Whether a symbol has its value before the statement that begins at the limit is run. */
+export function isBefore({ value, isParameter, isOutside }: Pick<ScopeSymbol, 'value' | 'isParameter' | 'isOutside'>, limit: number): boolean {
+  return isParameter || isOutside || !value.version || value.version.anchor.start + value.version.span.end <= limit;
 }
 
 function isExpr(span: Span): span is Expr {
