@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { coherentUnit, printFactor } from '../../server/src/quantities/print-unit.ts';
 import { parseUnit } from '../../server/src/quantities/parse-unit.ts';
-import { Rational } from '../../server/src/quantities/rational.ts';
+import type { Rational } from '../../server/src/quantities/rational.ts';
 import type { ReadOptions } from '../../server/src/quantities/unit-result.ts';
 import type { Unit } from '../../server/src/quantities/unit.ts';
 import { readFactor, readStrict } from './catalogue-reader.ts';

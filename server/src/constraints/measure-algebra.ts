@@ -83,16 +83,16 @@ export function shiftMeasure(a: Measure | undefined, literal: Literal, sign: 1 |
 
 /** Whether every reading is a temperature counted from a zero of its own. */
 export function isPoint(a: Measure | undefined): boolean {
-  return a !== undefined && a.readings.every((reading) => reading.nature === 'point' && reading.weight !== 0);
+  return a?.readings.every((reading) => reading.nature === 'point' && reading.weight !== 0) === true;
 }
 
 export function isGauge(a: Measure | undefined): boolean {
-  return a !== undefined && a.readings.every((reading) => reading.nature === 'gauge' && reading.weight !== 0);
+  return a?.readings.every((reading) => reading.nature === 'gauge' && reading.weight !== 0) === true;
 }
 
 /** Whether a point's weight still hangs in a product, in every reading. */
 export function isPending(a: Measure | undefined): boolean {
-  return a !== undefined && a.readings.every((reading) => reading.pending === true && reading.weight !== 0);
+  return a?.readings.every((reading) => reading.pending === true && reading.weight !== 0) === true;
 }
 
 function productReading(a: Reading, b: Reading, degreesA: number, degreesB: number): Reading {

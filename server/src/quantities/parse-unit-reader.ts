@@ -53,7 +53,6 @@ export function readProduct(text: string, vocabulary: Vocabulary | undefined): R
 class Reader {
   private at = 0;
   private count = 0;
-  private slashes = 0;
   private fault: Reading['fault'];
   private readonly marks: Marks = { operators: 0, powers: 0, unclear: false, labels: 0, words: 0 };
 

@@ -93,7 +93,7 @@ describe('chunks', () => {
     ['one of two equal lines removed', (text) => text.replace('print(', 'x = 1\nprint('), 1],
     ['an import above the documentation', (text) => `import os\n\n${text}`, 2],
     ['a comment block above the documentation', (text) => `# free for all\n\n${text}`, 1],
-    ['the module documentation removed', (text) => text.replace(/"""S[^]*?"""\n/, ''), 1],
+    ['the module documentation removed', (text) => text.replace(/"""S[\s\S]*?"""\n/, ''), 1],
   ])('lowers only what changed: %s', (_name, change, lowered) => {
     const previous = python.parse(script, file);
     const { chunks } = previous.program;

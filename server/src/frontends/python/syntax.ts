@@ -99,7 +99,9 @@ export class TreeCopier {
 
   private fieldOf(id: number): string | undefined {
     if (id === 0) return undefined;
-    return (this.fields[id] ??= this.language.fieldNameForId(id) ?? undefined);
+    const name = this.fields[id] ?? this.language.fieldNameForId(id) ?? undefined;
+    this.fields[id] = name;
+    return name;
   }
 }
 
