@@ -16,6 +16,8 @@ export interface CheckOptions {
   readonly hints: boolean;
   readonly stats: boolean;
   readonly color: boolean;
+  /** Writes the proven fixes into the files; `show` prints them as a diff and writes nothing. */
+  readonly fix?: 'write' | 'show';
   readonly language?: LanguageId;
   /** The name under which standard input is checked. */
   readonly stdinFile?: string;
@@ -41,6 +43,8 @@ const optionTypes = {
   'stdin-file': { type: 'string' },
   config: { type: 'string' },
   'no-color': { type: 'boolean' },
+  fix: { type: 'boolean' },
+  'dry-run': { type: 'boolean' },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean', short: 'V' },
 } as const;
@@ -108,6 +112,10 @@ function checkRequest(paths: readonly string[], given: ReadonlyMap<OptionName, r
   if (!isOneOf(formatNames, format)) return misuse(`Unknown format ${format}: it is one of ${formatNames.join(', ')}.${didYouMean(format, formatNames)}`);
   const language = last('language');
   if (language !== undefined && !isOneOf(languageNames, language)) return misuse(`Unknown language ${language}: it is one of ${languageNames.join(', ')}.${didYouMean(language, languageNames)}`);
+  const fix = given.has('fix') ? (given.has('dry-run') ? 'show' : 'write') : undefined;
+  if (!fix && given.has('dry-run')) return misuse('--dry-run shows what --fix would change; say --fix --dry-run.');
+  if (fix && paths.includes('-')) return misuse('--fix writes files; standard input has none.');
+  if (fix === 'show' && format !== 'text') return misuse(`--fix --dry-run prints a diff, which has no ${format} form.`);
   const severities: Partial<Record<FindingCode, Level>> = {};
   for (const setting of given.get('severity') ?? []) {
     const read = severitySetting(setting);
@@ -117,7 +125,7 @@ function checkRequest(paths: readonly string[], given: ReadonlyMap<OptionName, r
   const [stdinFile, config] = [last('stdin-file'), last('config')];
   const options: CheckOptions = {
     paths, format, severities, hints: given.has('hints'), stats: given.has('stats'), color: !given.has('no-color'),
-    ...(language !== undefined && { language }), ...(stdinFile !== undefined && { stdinFile }), ...(config !== undefined && { config }),
+    ...(language !== undefined && { language }), ...(stdinFile !== undefined && { stdinFile }), ...(config !== undefined && { config }), ...(fix && { fix }),
   };
   return { kind: 'check', options };
 }

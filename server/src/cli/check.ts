@@ -1,6 +1,7 @@
 /** `termwise check`: walks the paths, checks one file after the other, and shows what was found. */
 import { readFileSync } from 'node:fs';
 import { dirname, resolve } from 'node:path';
+import { decode } from '../platform/decode.ts';
 import { diskFiles } from '../platform/disk.ts';
 import type { CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
 import type { CheckOptions } from './arguments.ts';
@@ -72,7 +73,8 @@ class Run {
   }
 
   async all(): Promise<0 | 1 | 2> {
-    let reading = this.around.out(this.format.begin());
+    const isDiff = this.options.fix === 'show';
+    let reading = this.around.out(isDiff ? '' : this.format.begin());
     for (const path of this.options.paths) {
       if (path === '-') reading &&= await this.standardInput();
     }
@@ -84,7 +86,7 @@ class Run {
     }
     const summary = this.tally.summary((performance.now() - this.start) / 1000);
     this.progress.clear();
-    this.around.out(this.format.end(summary));
+    if (!isDiff) this.around.out(this.format.end(summary));
     if (this.options.stats && this.options.format !== 'text') this.around.complain(statisticsText(summary));
     return this.failed ? 2 : summary.bySeverity.error > 0 ? 1 : 0;
   }
@@ -106,7 +108,37 @@ class Run {
       this.unreadable(path, read.problem);
       return true;
     }
-    return this.checkText(slashed(path), read.text, language);
+    const text = this.options.fix ? await this.fixedText(path, read.text, language) : read.text;
+    return this.options.fix !== 'show' ? this.checkText(slashed(path), text, language) : this.shown(path, read.text, text);
+  }
+
+  /** The text after its proven fixes, written or only shown; the text as it is where that fails. */
+  private async fixedText(path: string, text: string, language: CheckResult['language']): Promise<string> {
+    const { applyProven, fixedSentence } = await import('./fix.ts');
+    const { replaceFile } = await import('./write-file.ts');
+    const workspace = await this.workspaceFor(dirname(slashed(path)));
+    try {
+      const bytes = readFileSync(path);
+      const decoded = decode(bytes);
+      if (!decoded.ok || decoded.text !== text) throw new Error('it changed while it was read');
+      const repaired = applyProven(workspace, slashed(path), text, language);
+      if (repaired.text === text) return text;
+      const written = this.options.fix === 'show' ? { ok: true as const } : replaceFile(path, bytes, text, repaired.text);
+      if (written.ok) this.complain(fixedSentence(this.nameOf(path), repaired, this.options.fix === 'show' ? 'to be fixed' : 'fixed'));
+      else this.unreadable(path, written.problem);
+      return written.ok ? repaired.text : text;
+    } catch (error) {
+      this.unreadable(path, `it could not be fixed (${error instanceof Error ? error.message : String(error)})`);
+      return text;
+    } finally {
+      workspace.forget(slashed(path));
+    }
+  }
+
+  private async shown(path: string, before: string, after: string): Promise<boolean> {
+    const { unifiedDiff } = await import('./fix.ts');
+    this.progress.clear();
+    return this.around.out(unifiedDiff(this.nameOf(path), before, after));
   }
 
   private async standardInput(): Promise<boolean> {

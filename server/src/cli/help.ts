@@ -28,6 +28,9 @@ Options
   --language name             language of standard input and of the files named: python, nomenclature
   --stdin-file name           name under which standard input is checked: decides its folder and language
   --config file               configuration file, instead of the nearest termwise.json at or above each file
+  --fix                       writes the fixes that are proven into the files, and shows what is left; a file keeps its
+                              encoding and line ends, and is not written if it changes meanwhile
+  --fix --dry-run             prints them as a unified diff and writes nothing
   --no-color                  no colours (also: the environment variable NO_COLOR)
   -h, --help                  this text
 
