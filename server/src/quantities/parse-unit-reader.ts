@@ -90,7 +90,6 @@ class Reader {
         if (next) all.push(...next);
       } else if (this.take('/') || this.takePer()) {
         this.marks.operators++;
-        this.slashes++;
         slashed = divided = true;
         const sign = this.text[from] === '/';
         const bracket = /^\s*\(/.test(this.text.slice(this.at));
