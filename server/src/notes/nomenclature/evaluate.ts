@@ -8,12 +8,13 @@ import { coherentUnit } from '../../quantities/print-unit.ts';
 import { pureNumber, type Unit } from '../../quantities/unit.ts';
 import type { Span } from '../../text/span.ts';
 import type { Elementary } from './elementary.ts';
-import { type Box, enclose } from './enclosure.ts';
+import { enclose } from './enclosure.ts';
 import { FormulaLowering } from './formula-lowering.ts';
 import { zeroFor } from './formula-result.ts';
 import type { Term } from './formula-term.ts';
 import { IntervalArithmetic, pointAt } from './interval.ts';
 import type { Nomenclature, NomenclatureFormula } from './model.ts';
+import type { Box } from './natural.ts';
 import { type NoValue, Refusal, refuse } from './no-value.ts';
 
 export type { NoValue } from './no-value.ts';

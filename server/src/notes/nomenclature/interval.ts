@@ -4,7 +4,7 @@
  * the last place, so that rounding keeps the promise. Undefined: some of the operands' values have no result.
  */
 import type { Elementary, ElementaryName } from './elementary.ts';
-import { Rational } from '../../quantities/rational.ts';
+import type { Rational } from '../../quantities/rational.ts';
 
 export interface Interval {
   readonly low: number;

@@ -1,7 +1,7 @@
 import type { Expr } from '../../program/nodes.ts';
 import { moveExpression } from './move.ts';
 import { parseUnit } from '../../quantities/parse-unit.ts';
-import { Rational } from '../../quantities/rational.ts';
+import type { Rational } from '../../quantities/rational.ts';
 import { sameUnit } from '../../quantities/unit.ts';
 import { emptyVocabulary, type Vocabulary } from '../../quantities/unit-result.ts';
 import { loadSignatures } from '../../signatures/load.ts';

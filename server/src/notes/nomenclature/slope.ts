@@ -1,9 +1,9 @@
 import { Rational } from '../../quantities/rational.ts';
 import type { Span } from '../../text/span.ts';
 import type { ElementaryName } from './elementary.ts';
-import { type Box, valueOf } from './enclosure.ts';
 import type { Node } from './formula-node.ts';
 import type { Interval, IntervalArithmetic } from './interval.ts';
+import { type Box, valueOf } from './natural.ts';
 
 const zero: Interval = { low: 0, high: 0 };
 const one: Interval = { low: 1, high: 1 };
