@@ -81,7 +81,7 @@ test('a parameter that is read nowhere is what was forgotten', () => {
 });
 
 test('where nothing in scope fits, what is lacking is said and nothing is offered', () => {
-  const fixes = offers('I = 2.0  # [A]\nF = 3*I  # [N]');
+  const fixes = offers('I = 2.0  # [A]\nF = 3*I  # [N]', ['repair', 'missing']);
   expect(fixes.map((fix) => [fix.kind, fix.edits.length])).toEqual([['missing', 0]]);
   expect(fixes[0]?.title).toMatch(/^Nothing here is in /);
 });

@@ -54,10 +54,11 @@ interface Asked {
   readonly made: readonly Fix[];
 }
 
-/** A text after edits that do not overlap. */
+/** A text after edits that do not overlap; insertions at one place stand in the order they are given. */
 export function applyEdits(text: string, edits: readonly TextEdit[]): string {
   let out = text;
-  for (const edit of [...edits].sort((a, b) => b.start - a.start || b.end - a.end)) out = out.slice(0, edit.start) + edit.text + out.slice(edit.end);
+  const ordered = edits.map((edit, at) => ({ edit, at })).sort((a, b) => b.edit.start - a.edit.start || b.edit.end - a.edit.end || b.at - a.at);
+  for (const { edit } of ordered) out = out.slice(0, edit.start) + edit.text + out.slice(edit.end);
   return out;
 }
 
