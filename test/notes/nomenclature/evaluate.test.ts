@@ -1,6 +1,8 @@
+import fc from 'fast-check';
 import { evaluate as mathEvaluate, type Unit } from 'mathjs';
 import { describe, expect, test } from 'vitest';
-import { valueOf } from './helpers.ts';
+import { evaluateFormulas } from '../../../server/src/notes/nomenclature/evaluate.ts';
+import { read, valueOf } from './helpers.ts';
 
 /** A paint mixer; the numbers of this file are worked by hand beside each case. */
 const bench = `
@@ -167,4 +169,22 @@ describe('against mathjs and its units', () => {
     const expected = (mathEvaluate(expression) as Unit).toNumber(unit);
     expect(Number.parseFloat(await valueOf(text))).toBeCloseTo(expected, 4 - Math.floor(Math.log10(expected)));
   });
+});
+
+test('never throws: every formula has a finite value, a range in order, or a reason', async () => {
+  const piece = fc.constantFrom('D', 'T1', 'p_g', 'n', 'eta', 'y', 'z', 'pi', '2', '0.5', '64', '1e300', '0', '273.15', '+', '-', '*', '/', '^', '^', '(', ')', 'sqrt(', 'ln(', 'max(', 'atan2(', ', ');
+  const unit = fc.constantFrom('[m]', '[1]', '[degC]', '[K]', '[barg]', '[rad/s]', '[dB]', '');
+  const line = fc.tuple(unit, fc.array(piece, { minLength: 1, maxLength: 12 })).map(([own, pieces]) => `${own} = ${pieces.join('')}`);
+  await fc.assert(fc.asyncProperty(line, line, fc.boolean(), async (y, z, ranged) => {
+    const text = `${ranged ? bench.replace('= 0.085', '0.05 .. 0.1') : bench}y ${y}\nz ${z}`;
+    for (const result of (await evaluateFormulas(read(text))).values()) {
+      if (result.kind === 'value') expect(Number.isFinite(result.value)).toBe(true);
+      if (result.kind === 'range') expect(result.low <= result.high && Number.isFinite(result.low) && Number.isFinite(result.high)).toBe(true);
+      if (result.kind === 'none') expect(result.reason.span.end <= text.length).toBe(true);
+    }
+  }), { numRuns: 600 });
+});
+
+test('a tower of powers is refused or evaluated at once', async () => {
+  expect(await check('[1] = ((2^64)^64)^64')).toBe('none: undefined at (2^64)^64');
 });

@@ -132,12 +132,17 @@ export function quotient(a: Term, b: Term, span: Span): Term {
 }
 
 export function power(a: Term, exponent: Rational, span: Span): Term {
-  if (a.literal && exponent.isInteger && exponent.abs().toNumber() <= 64) {
+  if (a.literal && exponent.isInteger && isSmall(a.literal, exponent)) {
     return a.literal.isZero && exponent.sign < 0 ? refuse({ kind: 'undefined', span }) : literalTerm(a.literal.pow(Number(exponent.num)));
   }
   if (exponent.isOne) return a;
   const rotation = { radian: a.rotation.radian.mul(exponent), cycle: a.rotation.cycle.mul(exponent) };
   return { ...termOf({ kind: 'power', base: a.node, exponent, span }, countable(a, span).dimension.pow(exponent), rotation), pi: a.pi };
+}
+
+/** Whether the exact power stays short. */
+function isSmall(base: Rational, exponent: Rational): boolean {
+  return exponent.abs().toNumber() * (base.num.toString(16).length + base.den.toString(16).length) <= 1000;
 }
 
 export function negative(a: Term): Term {
