@@ -62,7 +62,7 @@ export function agree(context: Context, _expr: Expr, left: Value, right: Value, 
 }
 
 /** A constant without a note is counted in whatever unit its neighbour is, even where that is a mere per cent. */
-function withoutOwnScale(value: Value): Value {
+export function withoutOwnScale(value: Value): Value {
   return value.version?.origin === 'constant' && value.measure ? { ...value, measure: undefined } : value;
 }
 

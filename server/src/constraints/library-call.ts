@@ -2,7 +2,7 @@
 import type { CallExpr } from '../program/nodes.ts';
 import type { Signature, SignatureParam, UnitClaim } from '../program/signature.ts';
 import { Rational } from '../quantities/rational.ts';
-import { agree } from './arithmetic.ts';
+import { agree, withoutOwnScale } from './arithmetic.ts';
 import type { Passed } from './calls.ts';
 import type { Context } from './context.ts';
 import { constantForm, type Form, isConstant, multiplyForms, oneForm, raiseForm, substitute, unknownForm } from './form.ts';
@@ -93,7 +93,7 @@ function claimed(context: Context, signature: Signature, at: number, param: Sign
   const simple = claim.powers.length === 1 && only.power.isOne && claim.unit.dimension.isOne;
   if (simple) {
     const bound = binding.values.get(only.variable);
-    if (!bound) binding.values.set(only.variable, { value, position: at });
+    if (!bound) binding.values.set(only.variable, { value: withoutOwnScale(value), position: at });
     else if (value.expr) agree(context, value.expr, bound.value, value, { kind: 'alike', function: signature.name, positions: [bound.position, at] }, span);
     return;
   }
@@ -200,7 +200,13 @@ function claimValue(context: Context, claim: UnitOnly, binding: Binding): Value 
     measure = alone ? bound.measure : multiplyMeasures(measure, raiseMeasure(bound.measure, each.power));
     tainted ||= bound.tainted === true;
   }
-  return { expr: undefined, form, measure: claim.difference ? asDifference(measure) : measure, from: [], ...(tainted ? { tainted } : {}) };
+  const result = claim.difference ? asDifference(measure) : claim.sum && hasPoints(measure) ? undefined : measure;
+  return { expr: undefined, form, measure: result, from: [], ...(tainted ? { tainted } : {}) };
+}
+
+/** A sum of points counts as many points as there are members, which nobody knows. */
+function hasPoints(measure: Measure | undefined): boolean {
+  return measure?.readings.some((reading) => reading.weight !== 0) === true;
 }
 
 function boundValue(context: Context, variable: string, binding: Binding): Value {
