@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { applyPatch } from 'diff';
 import { afterEach, expect, test } from 'vitest';
 import { replaceFile } from '../../server/src/cli/write-file.ts';
-import { together } from '../../server/src/cli/fix.ts';
+import { together } from '../../server/src/service/fix-all.ts';
 import type { OfferedFix } from '../../server/src/service/contract.ts';
 import { Sandbox } from './sandbox.ts';
 

@@ -114,7 +114,8 @@ class Run {
 
   /** The text after its proven fixes, written or only shown; the text as it is where that fails. */
   private async fixedText(path: string, text: string, language: CheckResult['language']): Promise<string> {
-    const { applyProven, fixedSentence } = await import('./fix.ts');
+    const { applyProven } = await import('../service/fix-all.ts');
+    const { fixedSentence } = await import('./fix.ts');
     const { replaceFile } = await import('./write-file.ts');
     const workspace = await this.workspaceFor(dirname(slashed(path)));
     try {
