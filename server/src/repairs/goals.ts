@@ -12,13 +12,19 @@ import type { Anchor } from '../text/span.ts';
 
 export interface Goal {
   readonly anchor: Anchor;
-  readonly expr: Expr;
-  /** The expression has to be multiplied by something of this dimension. */
+  /** The sides of a contradiction: what multiplies the first divides the second. */
+  readonly roots: readonly Root[];
+  /** A side with power 1 has to be multiplied by something of this dimension. */
   readonly ratio: Dimension;
-  /** The unit it then has, for the reader. */
-  readonly unit: string;
   /** How far from the place that was reported. */
   readonly distance: number;
+}
+
+export interface Root {
+  readonly expr: Expr;
+  readonly power: Rational;
+  /** The unit it has once that is done, for the reader. */
+  readonly unit: string;
 }
 
 export type Contradiction = Extract<Fault, { kind: 'dimension' | 'pure' | 'varying-power' }>;
@@ -30,14 +36,18 @@ export function contradictionsOf(detected: Detected): readonly Contradiction[] {
   return [...(fault.kind === 'note' ? fault.faults : [fault]), ...alike].filter((each): each is Contradiction => each.kind === 'dimension' || each.kind === 'pure' || each.kind === 'varying-power');
 }
 
-/** Every expression whose change could settle a contradiction: its sides, and the uses that decided an unknown unit in them. */
+/** What could settle a contradiction: a change of its sides, or of the uses that decided an unknown unit in them. */
 export function goalsOf(fault: Contradiction): readonly Goal[] {
   const ratio = ratioOfSides(fault);
-  const own = sides(fault.constraint).flatMap(({ value, sign }, at) => {
-    const unit = fault.kind === 'dimension' ? unitOfSide(fault, at) : '1';
-    return value.expr && !isElsewhere(fault.constraint, at) ? [{ anchor: fault.constraint.anchor, expr: value.expr, ratio: sign > 0 ? ratio : inverse(ratio), unit, distance: 0 }] : [];
-  });
-  return [...own, ...fault.involved.flatMap((each) => goalsOfRow(fault, each, ratio))];
+  const unitAt = (at: number): string => (fault.kind === 'dimension' ? unitOfSide(fault, at) : '1');
+  return [goalOf(fault.constraint, ratio, unitAt, 0), ...fault.involved.flatMap((each) => goalOfRow(fault, each, ratio))].filter((goal) => goal.roots.length > 0);
+}
+
+function goalOf(constraint: Constraint, ratio: Dimension, unitAt: (at: number) => string, distance: number): Goal {
+  const roots = sides(constraint).flatMap(({ value, sign }, at) =>
+    value.expr && !isElsewhere(constraint, at) ? [{ expr: value.expr, power: sign > 0 ? Rational.one : Rational.minusOne, unit: unitAt(at) }] : [],
+  );
+  return { anchor: constraint.anchor, roots, ratio, distance };
 }
 
 /** What the left side, or the only one, lacks. */
@@ -86,15 +96,11 @@ function unitOfSide(fault: Extract<Contradiction, { kind: 'dimension' }>, at: nu
 }
 
 /** A use that solved an unknown: changing it changes the unknown, and with it the contradiction. */
-function goalsOfRow(fault: Contradiction, { unknown, by }: Involved, ratio: Dimension): readonly Goal[] {
+function goalOfRow(fault: Contradiction, { unknown, by }: Involved, ratio: Dimension): readonly Goal[] {
   if (by.anchor !== fault.constraint.anchor) return [];
   const here = exponentIn(fault.constraint, unknown) ?? Rational.one;
   const there = exponentIn(by, unknown);
-  if (!there || here.isZero || there.isZero) return [];
-  const needed = ratio.pow(there.div(here).neg());
-  return sides(by).flatMap(({ value, sign }, at) =>
-    value.expr && !isElsewhere(by, at) ? [{ anchor: by.anchor, expr: value.expr, ratio: sign > 0 ? needed : inverse(needed), unit: '', distance: 1 }] : [],
-  );
+  return there ? [goalOf(by, ratio.pow(there.div(here).neg()), () => '', 1)] : [];
 }
 
 function exponentIn(constraint: Constraint, unknown: Unknown): Rational | undefined {

@@ -20,18 +20,25 @@ export interface Position {
   readonly isRoot: boolean;
   /** Assignments between here and the contradiction, and whether it was reported elsewhere. */
   readonly distance: number;
+  /** The unit that the side it stands in then has; empty behind an assignment. */
+  readonly unit: string;
 }
 
 const deepest = 40;
 
-/** Every position of a goal's expression, through the symbols without notes that it was computed from. */
+/** Every position of a goal's sides, through the symbols without notes that it was computed from. */
 export function positionsOf(goal: Goal, sightings: Sightings): readonly Position[] {
   const found: Position[] = [];
   const seen = new Set<Expr>();
   // A symbol that stands twice in a product changes it twice: the powers of its places add up before its definition is looked at.
   const behind = new Map<Expr, { power: Rational; readonly distance: number; readonly anchor: Anchor }>();
   let { anchor } = goal;
-  visit(goal.expr, Rational.one, undefined, goal.distance, true, 0);
+  let unit = '';
+  for (const root of goal.roots) {
+    ({ unit } = root);
+    visit(root.expr, root.power, undefined, goal.distance, true, 0);
+  }
+  unit = '';
   for (let round = 0; round < deepest && behind.size > 0; round++) {
     const [definition, next] = [...behind][0] as [Expr, { power: Rational; distance: number; anchor: Anchor }];
     behind.delete(definition);
@@ -44,7 +51,7 @@ export function positionsOf(goal: Goal, sightings: Sightings): readonly Position
     if (depth > deepest || power.isZero || seen.has(expr)) return;
     seen.add(expr);
     const dimension = dimensionOf(sightings.values.get(expr), sightings);
-    found.push({ anchor, expr, dimension, ratio: goal.ratio.pow(power.inv()), parent, isRoot, distance });
+    found.push({ anchor, expr, dimension, ratio: goal.ratio.pow(power.inv()), parent, isRoot, distance, unit });
     const into = (inner: Expr, by: Rational): void => visit(inner, power.mul(by), expr, distance, false, depth + 1);
     switch (expr.kind) {
       case 'unary':
@@ -91,16 +98,17 @@ export function positionsOf(goal: Goal, sightings: Sightings): readonly Position
   }
 
   function visitCall(expr: Extract<Expr, { kind: 'call' }>, dimension: Dimension | undefined, into: (inner: Expr, by: Rational) => void): void {
-    const [first] = expr.args;
-    if (expr.args.length !== 1 || !first || !dimension) return;
-    const inner = dimensionOf(sightings.values.get(first.value), sightings);
-    const exponent = inner && exponentBetween(dimension, inner);
-    if (exponent) into(first.value, exponent);
+    if (!dimension) return;
+    for (const { value } of expr.args) {
+      const inner = dimensionOf(sightings.values.get(value), sightings);
+      const exponent = inner && exponentBetween(dimension, inner);
+      if (exponent && expr.args.every((other) => other.value === value || isOpen(other.value))) into(value, exponent);
+    }
   }
 
   function isOpen(expr: Expr): boolean {
     const value = sightings.values.get(expr);
-    return !value?.form || value.literal !== undefined || value.fits === true;
+    return !value?.form || value.literal !== undefined || value.fits === true || value.version?.origin === 'constant';
   }
 }
 

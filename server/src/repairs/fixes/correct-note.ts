@@ -87,7 +87,7 @@ function targetNote(fault: Contradiction, scene: Scene): readonly Fix[] {
 /** What a contradiction needs the symbol of a note to be, at each of its places. */
 function neededBy(fault: Contradiction, held: NoteInForce, scene: Scene): readonly Dimension[] {
   return goalsOf(fault).filter((goal) => goal.distance === 0).flatMap((goal) => {
-    const sightings = scene.sightings(scene.pieceAt(goal.anchor, goal.expr));
+    const sightings = scene.sightings(scene.pieceAt(goal.anchor, goal.roots[0]?.expr ?? fault.constraint.span));
     return positionsOf(goal, sightings).flatMap(({ expr, dimension, ratio }) => {
       const note = sightings.values.get(expr)?.version?.note;
       return dimension && note && note.note === held.note ? [dimension.mul(ratio)] : [];

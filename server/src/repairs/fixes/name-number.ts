@@ -40,7 +40,7 @@ interface Bare {
 /** The impure numbers that multiply into a contradiction, each with the dimension that it would have to carry alone. */
 function numbersOf(fault: Contradiction, scene: Scene): readonly Bare[] {
   return goalsOf(fault).filter((goal) => goal.distance === 0).flatMap((goal) => {
-    const sightings = scene.sightings(scene.pieceAt(goal.anchor, goal.expr));
+    const sightings = scene.sightings(scene.pieceAt(goal.anchor, goal.roots[0]?.expr ?? fault.constraint.span));
     return positionsOf(goal, sightings).flatMap(({ anchor, expr, ratio }): readonly Bare[] => {
       if (expr.kind !== 'number' || !expr.value || readLiteral(expr.value, expr.text).pure) return [];
       return [{ expr, start: anchor.start + expr.start, dimension: ratio }];

@@ -25,11 +25,10 @@ function repairs(detected: Detected, scene: Scene): readonly Fix[] {
 }
 
 function reaching(goal: Goal, scene: Scene): readonly Fix[] {
-  const sightings = scene.sightings(scene.pieceAt(goal.anchor, goal.expr));
-  const workshop = { scene, sightings, symbols: symbolsAt(scene, goal.anchor, goal.expr) };
-  return positionsOf(goal, sightings).flatMap((position) =>
-    editsAt(position, workshop).map((edit) => fixOf(edit, scene, position.distance === 0 ? goal.unit : '')),
-  );
+  const place = (goal.roots[0] as Goal['roots'][number]).expr;
+  const sightings = scene.sightings(scene.pieceAt(goal.anchor, place));
+  const workshop = { scene, sightings, symbols: symbolsAt(scene, goal.anchor, place) };
+  return positionsOf(goal, sightings).flatMap((position) => editsAt(position, workshop).map((edit) => fixOf(edit, scene, position.unit)));
 }
 
 function bracketed(fault: Contradiction, scene: Scene): readonly Fix[] {
