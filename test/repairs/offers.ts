@@ -1,5 +1,5 @@
 /** Fixes as text: what is offered for a script, and what a script becomes. */
-import { applyEdits } from '../../server/src/service/fixes.ts';
+import { applyEdits } from '../../server/src/repairs/apply.ts';
 import type { OfferedFix, Workspace } from '../../server/src/service/contract.ts';
 import type { FindingCode } from '../../server/src/findings/finding.ts';
 import { engine } from '../harness/engine.ts';

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { applyProven } from '../../server/src/service/fix-all.ts';
-import { applyEdits } from '../../server/src/service/fixes.ts';
+import { applyEdits } from '../../server/src/repairs/apply.ts';
 import { engine } from '../harness/engine.ts';
 
 const file = '/scripts/a.py';
@@ -70,4 +70,83 @@ test('a nomenclature file is answered too', async () => {
   const workspace = await engine();
   workspace.check('/scripts/n.nomen', 'k [W/m K] = 0.6\n');
   expect(() => workspace.fixes('/scripts/n.nomen')).not.toThrow();
+});
+
+const module_ = `import math
+
+
+def area(d):
+    """Cross section.
+
+    Parameters
+    ----------
+    d : float
+        Diameter [m]
+    """
+    return math.pi*d/4
+
+
+def flow(d, V, rho, length):
+    """Mass flow.
+
+    Parameters
+    ----------
+    d : float
+        Diameter [m]
+    V : float
+        Speed [m/s]
+    rho : float
+        Density [kg/m^3]
+    length : float
+        Length [m]
+
+    Returns
+    -------
+    m : float
+        Mass flow [kg/s]
+    """
+    return rho*V*area(d)
+
+
+def power(d, V, rho, dp):
+    # d [m], V [m/s], rho [kg/m^3], dp [Pa]
+    P = dp*flow(d, V, rho, 1.0)  # [W]
+    return P
+`;
+
+test('inside functions too, where only what the change reaches is checked again', async () => {
+  const workspace = await engine();
+  const before = workspace.check(file, module_).findings.filter((each) => each.severity !== 'hint');
+  expect(before.length).toBe(2);
+  const offered = workspace.fixes(file);
+  expect(offered.filter((fix) => fix.kind === 'repair').length).toBeGreaterThan(0);
+  for (const fix of offered.filter((each) => each.edits.length > 0)) {
+    const after = workspace.check(file, applyEdits(module_, fix.edits)).findings.filter((each) => each.severity !== 'hint');
+    expect([fix.title, after.length]).toEqual([fix.title, before.length - 1 - fix.alsoSettles]);
+  }
+});
+
+test('a change that would break a caller is not offered', async () => {
+  const workspace = await engine();
+  const text = `def speed(d, t):
+    # d [m], t [s]
+    v = d*t
+    return v
+
+
+def drop(d, t, rho):
+    # d [m], t [s], rho [kg/m^3]
+    x = rho*speed(d, t)  # [kg/(m^2 s)]
+    return x
+
+
+def other(d, t):
+    # d [m], t [s]
+    y = speed(d, t)  # [m s]
+    return y
+`;
+  workspace.check(file, text);
+  for (const fix of workspace.fixes(file).filter((each) => each.kind === 'repair')) {
+    expect(applyEdits(text, fix.edits)).toContain('v = d*t\n');
+  }
 });

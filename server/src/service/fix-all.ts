@@ -2,7 +2,7 @@
 import type { FindingCode } from '../program/codes.ts';
 import type { LanguageId } from '../program/nodes.ts';
 import type { OfferedFix, Workspace } from './contract.ts';
-import { applyEdits } from './fixes.ts';
+import { applyEdits } from '../repairs/apply.ts';
 
 export interface Repaired {
   readonly text: string;

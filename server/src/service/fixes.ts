@@ -2,12 +2,14 @@
 import type { Understood } from '../analyze.ts';
 import type { Detected } from '../findings/collect.ts';
 import type { HostStyle, TextEdit } from '../frontends/frontend.ts';
+import { applyEdits, bareChange } from '../repairs/apply.ts';
 import type { Fix } from '../repairs/fix.ts';
 import { fixers } from '../repairs/registry.ts';
 import { Scene } from '../repairs/scene.ts';
-import { absolute, type Span } from '../text/span.ts';
+import { absolute, type Anchor, type Span } from '../text/span.ts';
 import { fixTitle } from '../wording/fix-words.ts';
 import type { OfferedFix } from './contract.ts';
+import type { Trial } from './trial.ts';
 
 /** A text and what was found in it. */
 export interface Look {
@@ -20,11 +22,14 @@ const mostOfAKind = 5;
 /** Tries that one finding is worth: each is a check of the file, of which little has changed. */
 const mostTries = 24;
 
-/** `look` checks a changed text; the last one it is asked for is the text itself again. */
-export function fixesOf(now: Look, style: HostStyle, span: Span | undefined, look: (text: string) => Look): readonly OfferedFix[] {
+/**
+ * `trial` checks a change inside one function by itself; where it cannot, `look` checks the changed text, and then the text itself
+ * again: it moves the anchors that everything here counts from.
+ */
+export function fixesOf(now: Look, style: HostStyle, span: Span | undefined, trial: (edits: readonly TextEdit[]) => Trial | undefined, look: (text: string) => Look): readonly OfferedFix[] {
   const { parsed, lines, notes, solver } = now.understood;
   const scene = new Scene({ file: parsed.program.file, program: parsed.program, lines, notes, solver, style });
-  const before = findingsOf(now);
+  const before = keysOf(now.detected);
   const problems = problemsOf(now);
   // Everything is made before anything is tried: a try moves the anchors that offsets count from.
   const asked = now.detected.filter((each) => !span || touches(absolute(each.place), span)).map((detected): Asked => ({
@@ -34,15 +39,15 @@ export function fixesOf(now: Look, style: HostStyle, span: Span | undefined, loo
     made: fixers.flatMap((fixer) => [...(fixer.forFinding?.(detected, scene) ?? [])].sort((a, b) => a.cost - b.cost)),
   }));
   if (span) asked.push({ key: undefined, finding: undefined, eitherSide: false, made: fixers.flatMap((fixer) => fixer.forPlace?.(span, scene) ?? []) });
-  let tried = false;
   const attempt = (fix: Fix, key: Key | undefined): Tried | undefined => {
-    tried = true;
+    const alone = trial(fix.edits);
+    if (alone) return alone.problemsAfter > alone.problemsBefore ? undefined : compare(keysOf(alone.before, alone.anchors), keysOf(alone.after, alone.anchors), fix.edits, key);
     const after = look(applyEdits(parsed.text, fix.edits));
-    return problemsOf(after) > problems ? undefined : compare(before, findingsOf(after), fix.edits, key);
+    const found = problemsOf(after) > problems ? undefined : compare(before, keysOf(after.detected), fix.edits, key);
+    look(parsed.text);
+    return found;
   };
-  const offered = asked.flatMap((each) => choose(each, parsed.text, attempt));
-  if (tried) look(parsed.text);
-  return offered;
+  return asked.flatMap((each) => choose(each, parsed.text, attempt));
 }
 
 /** The fixes made for one finding, or for a place. */
@@ -52,14 +57,6 @@ interface Asked {
   /** Of two ways that are both right either will do. */
   readonly eitherSide: boolean;
   readonly made: readonly Fix[];
-}
-
-/** A text after edits that do not overlap; insertions at one place stand in the order they are given. */
-export function applyEdits(text: string, edits: readonly TextEdit[]): string {
-  let out = text;
-  const ordered = edits.map((edit, at) => ({ edit, at })).sort((a, b) => b.edit.start - a.edit.start || b.edit.end - a.edit.end || b.at - a.at);
-  for (const { edit } of ordered) out = out.slice(0, edit.start) + edit.text + out.slice(edit.end);
-  return out;
 }
 
 interface Tried {
@@ -75,10 +72,10 @@ function choose({ key, finding, eitherSide, made }: Asked, before: string, attem
   let tries = 0;
   for (const fix of made) {
     const count = counts.get(fix.kind) ?? 0;
-    const text = applyEdits(before, fix.edits);
+    const change = bareChange(before, fix.edits);
     const plain = fix.unchecked || fix.edits.length === 0;
-    if (count >= mostOfAKind || (fix.edits.length > 0 && seen.has(text)) || (!plain && tries >= mostTries)) continue;
-    seen.add(text);
+    if (count >= mostOfAKind || (fix.edits.length > 0 && seen.has(change)) || (!plain && tries >= mostTries)) continue;
+    seen.add(change);
     if (!plain) tries++;
     const result = plain ? { others: 0 } : attempt(fix, key);
     if (!result) continue;
@@ -106,14 +103,17 @@ interface Key {
   readonly code: string;
   readonly start: number;
   readonly grave: boolean;
+  /** Its place does not move with the edits. */
+  readonly still: boolean;
 }
 
 function keyOf({ code, severity, place }: Detected): Key {
-  return { code, start: absolute(place).start, grave: severity !== 'hint' };
+  return { code, start: absolute(place).start, grave: severity !== 'hint', still: false };
 }
 
-function findingsOf({ detected }: Look): readonly Key[] {
-  return detected.map(keyOf);
+/** With the anchors of the part that was tried by itself, everything else stands still. */
+function keysOf(detected: readonly Detected[], anchors?: ReadonlySet<Anchor>): readonly Key[] {
+  return detected.map((each) => ({ ...keyOf(each), still: anchors !== undefined && !anchors.has(each.place.anchor) }));
 }
 
 /** What an edit did: undefined where the finding is still there or another one came. */
@@ -121,7 +121,7 @@ function compare(before: readonly Key[], after: readonly Key[], edits: readonly 
   const left = [...after];
   let gone = 0;
   for (const each of before) {
-    const at = left.findIndex((other) => other.code === each.code && isAt(each.start, other.start, edits));
+    const at = left.findIndex((other) => other.code === each.code && other.still === each.still && (each.still ? other.start === each.start : isAt(each.start, other.start, edits)));
     if (at >= 0) {
       if (settled && each.code === settled.code && each.start === settled.start) return undefined;
       left.splice(at, 1);

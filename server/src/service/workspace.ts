@@ -1,7 +1,7 @@
 /** The facade over one set of files: keeps what is parsed and solved, and answers checks. */
 import { detect, type Engine, say, type Understood, understand } from '../analyze.ts';
 import type { Detected } from '../findings/collect.ts';
-import type { FrontEnd } from '../frontends/frontend.ts';
+import type { FrontEnd, TextEdit } from '../frontends/frontend.ts';
 import { nomenclatureFrontEnd } from '../frontends/nomenclature/index.ts';
 import { createPythonFrontEnd } from '../frontends/python/index.ts';
 import { nomenclatureNotes } from '../notes/nomenclature/chunk-notes.ts';
@@ -13,9 +13,11 @@ import type { FileSolver } from '../solver/file-solver.ts';
 import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
 import type { Solved } from '../solver/pieces.ts';
 import { absolute, type Span } from '../text/span.ts';
-import type { Assets, CheckResult, FileSource, OfferedFix, PlacedFinding, Settings, Workspace } from './contract.ts';
+import type { Assets, CheckResult, FileSource, HoverInfo, OfferedFix, PlacedFinding, Settings, Workspace } from './contract.ts';
 import { fixesOf, type Look } from './fixes.ts';
+import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
+import { hoverAt } from './hover.ts';
 import { resolveImport } from './imports.ts';
 import { voiceOver } from './voice-over.ts';
 
@@ -73,12 +75,23 @@ class Files implements Workspace {
     const language = kept?.understood.parsed.program.language;
     const frontEnd = this.frontEnds.find((each) => each.language === language);
     if (!kept || !frontEnd) return [];
-    const { text } = kept.understood.parsed;
-    const look = (changed: string): Look => {
-      const understood = this.understand(file, changed, frontEnd);
-      return { understood, detected: this.severe(detect(understood)) };
+    const { understood } = kept;
+    const look = (text: string): Look => {
+      const again = this.understand(file, text, frontEnd);
+      return { understood: again, detected: this.severe(detect(again)) };
     };
-    return fixesOf(look(text), frontEnd.style, span, look);
+    const reach = this.folders.reachOf(file);
+    const trial = (edits: readonly TextEdit[]): Trial | undefined => {
+      const found = tryInChunk(understood, edits, frontEnd, (chunk) => this.notesOf(chunk, frontEnd, reach));
+      return found && { ...found, before: this.severe(found.before), after: this.severe(found.after) };
+    };
+    return fixesOf({ understood, detected: this.severe(detect(understood)) }, frontEnd.style, span, trial, look);
+  }
+
+  hover(file: string, offset: number): HoverInfo | undefined {
+    const kept = this.open.get(file);
+    const frontEnd = this.frontEnds.find((each) => each.language === kept?.understood.parsed.program.language);
+    return kept && frontEnd && hoverAt(kept.understood, frontEnd.style, offset, (name) => this.textOf(name));
   }
 
   forget(file: string): void {
