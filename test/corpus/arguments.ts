@@ -4,6 +4,8 @@ export interface CorpusOptions {
   readonly folder: string;
   readonly seedEdits: boolean;
   readonly missed: boolean;
+  /** Tries the repairs of each reported edit. */
+  readonly repairs: boolean;
   readonly list: readonly string[];
   /** How many of the commonest unread spellings are printed. */
   readonly unread: number;
@@ -11,16 +13,16 @@ export interface CorpusOptions {
 
 /** Reads the arguments of the corpus run; an answer of a string says what is wrong with them. */
 export function readCorpusArguments(args: readonly string[]): CorpusOptions | string {
-  const usage = 'usage: npm run corpus -- <folder> [--list code|all] [--unread count] [--seed-edits [--missed]]';
+  const usage = 'usage: npm run corpus -- <folder> [--list code|all] [--unread count] [--seed-edits [--missed] [--repairs]]';
   try {
     const { values, positionals } = parseArgs({
       args: [...args],
       allowPositionals: true,
-      options: { 'seed-edits': { type: 'boolean' }, missed: { type: 'boolean' }, list: { type: 'string', multiple: true }, unread: { type: 'string', default: '40' } },
+      options: { 'seed-edits': { type: 'boolean' }, missed: { type: 'boolean' }, repairs: { type: 'boolean' }, list: { type: 'string', multiple: true }, unread: { type: 'string', default: '40' } },
     });
     const [folder] = positionals;
     if (folder === undefined || positionals.length > 1) return usage;
-    return { folder, seedEdits: values['seed-edits'] ?? false, missed: values.missed ?? false, list: values.list ?? [], unread: Number(values.unread) };
+    return { folder, seedEdits: values['seed-edits'] ?? false, missed: values.missed ?? false, repairs: values.repairs ?? false, list: values.list ?? [], unread: Number(values.unread) };
   } catch (error) {
     return `${error instanceof Error ? error.message : String(error)}\n${usage}`;
   }

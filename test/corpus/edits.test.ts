@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
 import { nodeAssets } from '../../server/src/platform/node-assets.ts';
 import { engine } from '../harness/engine.ts';
+import { restored, restoredLine } from './repairs.ts';
 import { readCorpusArguments } from './arguments.ts';
 import { seedEdits } from './edits.ts';
 import { tryEdits } from './try-edits.ts';
@@ -65,7 +66,17 @@ describe('counting', async () => {
 });
 
 test('arguments', () => {
-  expect(readCorpusArguments(['ht', '--seed-edits', '--list', 'all'])).toEqual({ folder: 'ht', seedEdits: true, missed: false, list: ['all'], unread: 40 });
+  expect(readCorpusArguments(['ht', '--seed-edits', '--list', 'all'])).toEqual({ folder: 'ht', seedEdits: true, missed: false, repairs: false, list: ['all'], unread: 40 });
   expect(readCorpusArguments([])).toContain('usage');
   expect(readCorpusArguments(['a', '--nonsense'])).toContain('usage');
+});
+
+test('a repair that brings the text back is counted with its rank', async () => {
+  const workspace = await engine();
+  const original = 'rho = 1000.0  # [kg/m^3]\nV = 2.0  # [m/s]\np = 0.5*rho*V**2  # [Pa]\n';
+  const edited = original.replace('V**2', 'V');
+  const { findings } = workspace.check('/a.py', edited);
+  expect(restored(workspace, '/a.py', edited, original, findings)).toMatchObject({ offered: true, rank: 1 });
+  expect(restored(workspace, '/a.py', edited, `${original}# another`, findings)).toMatchObject({ offered: true, rank: undefined });
+  expect(restoredLine([{ offered: true, rank: 1, time: 2 }, { offered: true, rank: undefined, time: 4 }])).toContain('in 1 (50.0 %)');
 });

@@ -12,6 +12,7 @@ import { createWorkspace } from '../../server/src/service/workspace.ts';
 import { LineIndex } from '../../server/src/text/line-index.ts';
 import { type CorpusOptions, readCorpusArguments } from './arguments.ts';
 import { type EditKind, seedEdits } from './edits.ts';
+import { restoredLine } from './repairs.ts';
 import { scriptsIn } from './scripts.ts';
 import { type Tried, tryEdits } from './try-edits.ts';
 
@@ -68,20 +69,23 @@ function listFindings(result: CheckResult, folder: string, list: readonly string
   }
 }
 
-function measureEdits(workspace: Workspace, frontEnd: Awaited<ReturnType<typeof createPythonFrontEnd>>, { folder, missed }: CorpusOptions): void {
+function measureEdits(workspace: Workspace, frontEnd: Awaited<ReturnType<typeof createPythonFrontEnd>>, { folder, missed, repairs }: CorpusOptions): void {
   const start = performance.now();
   const tried: Record<EditKind, Tried[]> = { squared: [], dropped: [] };
   for (const script of scriptsIn(folder, () => {})) {
     const edits = seedEdits(frontEnd, script.file, script.text);
     if (edits.length === 0) continue;
-    for (const each of tryEdits(workspace, script, edits)) {
+    for (const each of tryEdits(workspace, script, edits, repairs)) {
       tried[each.edit.kind].push(each);
       if (missed && !each.reported) print(`missed ${each.edit.kind} ${each.edit.parameter} in ${nameOf(script.file, folder)}:${each.line} ${each.edit.functionName}${each.elsewhere ? ' (reported elsewhere)' : ''}\n    ${each.source}`);
     }
     workspace.forget(script.file);
   }
   print(`seeded edits, ${((performance.now() - start) / 1000).toFixed(1)} s`);
-  for (const kind of ['squared', 'dropped'] as const) print(`  ${kind}: ${shares(tried[kind])}`);
+  for (const kind of ['squared', 'dropped'] as const) {
+    print(`  ${kind}: ${shares(tried[kind])}`);
+    if (repairs) print(`    repairs: ${restoredLine(tried[kind].flatMap((each) => each.restored ?? []))}`);
+  }
 }
 
 function shares(tried: readonly Tried[]): string {

@@ -2,6 +2,7 @@ import type { CheckResult, Workspace } from '../../server/src/service/contract.t
 import { LineIndex } from '../../server/src/text/line-index.ts';
 import type { Span } from '../../server/src/text/span.ts';
 import type { SeedEdit } from './edits.ts';
+import { type Restored, restored } from './repairs.ts';
 import type { Script } from './scripts.ts';
 
 export interface Tried {
@@ -15,10 +16,12 @@ export interface Tried {
   /** One-based. */
   readonly line: number;
   readonly source: string;
+  /** Where repairs were asked for and the edit was reported. */
+  readonly restored?: Restored;
 }
 
 /** Makes one edit after the other in a script and checks it again each time. */
-export function tryEdits(workspace: Workspace, { file, text }: Script, edits: readonly SeedEdit[]): readonly Tried[] {
+export function tryEdits(workspace: Workspace, { file, text }: Script, edits: readonly SeedEdit[], repairs = false): readonly Tried[] {
   const before = workspace.check(file, text);
   const lines = new LineIndex(text);
   return edits.map((edit) => {
@@ -28,7 +31,9 @@ export function tryEdits(workspace: Workspace, { file, text }: Script, edits: re
     const inside = { start: edit.functionSpan.start, end: edit.functionSpan.end + grown };
     const reported = hasNew(words(before, edit.functionSpan), words(after, inside));
     const line = lines.lineAt(edit.span.start);
+    const fresh = repairs && reported ? freshIn(before, after, edit.functionSpan, inside) : [];
     return {
+      ...(fresh.length > 0 ? { restored: restored(workspace, file, edited, text, fresh) } : {}),
       edit, reported,
       placed: hasNew(places(before, edit.functionSpan), places(after, inside)),
       elsewhere: !reported && hasNew(words(before), words(after)),
@@ -42,6 +47,16 @@ function hasNew(before: readonly string[], after: readonly string[]): boolean {
   const left = [...before];
   return after.some((each) => {
     const at = left.indexOf(each);
+    if (at >= 0) left.splice(at, 1);
+    return at < 0;
+  });
+}
+
+/** The findings whose words were not there before. */
+function freshIn(before: CheckResult, after: CheckResult, span: Span, inside: Span): CheckResult['findings'] {
+  const left = [...words(before, span)];
+  return within(after, inside).filter((each) => {
+    const at = left.indexOf(`${each.code} ${each.message}`);
     if (at >= 0) left.splice(at, 1);
     return at < 0;
   });

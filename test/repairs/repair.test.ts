@@ -34,6 +34,7 @@ test.each([
   ['brackets around a sum', 'x = rho*g*h + D  # [Pa]', 'x = rho*g*(h + D)  # [Pa]'],
   ['an argument of exp', 'x = exp(h*2)', 'x = exp(h*2/D)'],
   ['behind an assignment', 'area = pi*D/4\nQ = V*area  # [m^3/s]', 'area = pi*D**2/4'],
+  ['through a function that keeps the unit', 'x = max(1.0*h/D, 0)\ny = x*D  # [m^2]', 'x = max(h*h/D, 0)'],
   ['a symbol that stands twice', 'a = D**2\nb = a*a  # [m^2]', 'a = D'],
 ])('%s', (_, line, expected) => {
   expect(repairsOf(line)).toContain(expected);

@@ -1,5 +1,6 @@
 /** The places in an expression whose dimension multiplies into the whole, with the power that each has there. */
 import type { Expr } from '../program/nodes.ts';
+import { pathOf } from '../program/path.ts';
 import { Rational } from '../quantities/rational.ts';
 import type { Dimension } from '../quantities/dimension.ts';
 import type { Sightings } from '../solver/pieces.ts';
@@ -101,7 +102,7 @@ export function positionsOf(goal: Goal, sightings: Sightings): readonly Position
     if (!dimension) return;
     for (const { value } of expr.args) {
       const inner = dimensionOf(sightings.values.get(value), sightings);
-      const exponent = inner && exponentBetween(dimension, inner);
+      const exponent = inner && (inner.isOne && dimension.isOne && keepsUnit(expr.callee) ? Rational.one : exponentBetween(dimension, inner));
       if (exponent && expr.args.every((other) => other.value === value || isOpen(other.value))) into(value, exponent);
     }
   }
@@ -110,6 +111,11 @@ export function positionsOf(goal: Goal, sightings: Sightings): readonly Position
     const value = sightings.values.get(expr);
     return !value?.form || value.literal !== undefined || value.fits === true || value.version?.origin === 'constant';
   }
+}
+
+/** Functions that give a value in the unit of their argument, for where a pure number hides which do. */
+function keepsUnit(callee: Expr): boolean {
+  return /(?:^|\.)(?:max|min|maximum|minimum|fmax|fmin|abs|fabs|absolute|sum|mean|average|median|where|clip|array|asarray|float|round)$/.test(pathOf(callee) ?? '');
 }
 
 /** The constant number of an exponent. */
