@@ -1,4 +1,4 @@
-/** Builds what is shipped into dist/, or into the folder that is named: the command, the grammars, the signatures, the pages. */
+/** Builds what is shipped into dist/, or into the folder that is named: the command, the language server, the editor's client, the grammars, the signatures, the pages. */
 import { chmodSync, cpSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
@@ -12,11 +12,12 @@ const grammars = ['web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tr
 /** An earlier build stays where this one fails; a folder that is named is written into and not emptied. */
 export async function build(folder) {
   const dist = folder ?? join(root, 'dist');
-  const { outputFiles } = await bundleCommand(dist);
+  const bundles = [bundleCommand(dist), bundleLanguageServer(dist), bundleClient(dist)];
+  const outputFiles = (await Promise.all(bundles)).flatMap((each) => each.outputFiles);
   if (!folder) rmSync(dist, { recursive: true, force: true });
   mkdirSync(dist, { recursive: true });
   for (const file of outputFiles) writeFileSync(file.path, file.contents);
-  chmodSync(join(dist, 'termwise.js'), 0o755);
+  for (const command of ['termwise.js', 'language-server.js']) chmodSync(join(dist, command), 0o755);
   copyAssets(dist);
 }
 
@@ -37,6 +38,45 @@ function bundleCommand(dist) {
     keepNames: true,
     legalComments: 'linked',
     chunkNames: '[name]-[hash]',
+    logLevel: 'warning',
+  });
+}
+
+/** One file: an editor starts it once, and then it stays. Parts of the protocol's library ask for Node's modules with `require`. */
+function bundleLanguageServer(dist) {
+  return bundle({
+    absWorkingDir: root,
+    entryPoints: { 'language-server': 'server/src/lsp/main.ts' },
+    outdir: dist,
+    bundle: true,
+    write: false,
+    format: 'esm',
+    platform: 'node',
+    target: 'node20',
+    mainFields: ['module', 'main'],
+    minify: true,
+    keepNames: true,
+    legalComments: 'linked',
+    banner: { js: "#!/usr/bin/env node\nimport { createRequire as termwiseRequire } from 'node:module';\nconst require = termwiseRequire(import.meta.url);" },
+    logLevel: 'warning',
+  });
+}
+
+/** Editors load their extensions with `require`. */
+function bundleClient(dist) {
+  return bundle({
+    absWorkingDir: root,
+    entryPoints: { extension: 'client/src/extension.ts' },
+    outdir: dist,
+    outExtension: { '.js': '.cjs' },
+    bundle: true,
+    write: false,
+    format: 'cjs',
+    platform: 'node',
+    target: 'node20',
+    external: ['vscode'],
+    minify: true,
+    legalComments: 'linked',
     logLevel: 'warning',
   });
 }

@@ -69,6 +69,26 @@ export interface OfferedFix {
   readonly alsoSettles: number;
 }
 
+/** What is known of the symbol or expression at a place. */
+export interface HoverInfo {
+  /** The characters it is about. */
+  readonly span: Span;
+  readonly name: string;
+  /** The unit its number is counted in, as its author wrote it or as it follows; undefined where only the dimension is known. */
+  readonly unit: string | undefined;
+  /** In powers of base quantities: `L·T⁻¹`. */
+  readonly dimension: string;
+  /** Kinds of quantity that have this dimension, by their names in ISO 80000. */
+  readonly kinds: readonly string[];
+  readonly origin: 'declared' | 'inferred' | 'library';
+  /** The words beside the note. */
+  readonly description: string | undefined;
+  /** Notes that this rests on, the symbol's own first; lines from one, `file` where it is another one. */
+  readonly notes: readonly { readonly symbol: string; readonly unit: string; readonly file: string | undefined; readonly line: number }[];
+  /** Values it may take, in its unit. */
+  readonly range: { readonly low: number; readonly high: number } | undefined;
+}
+
 /** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
 export interface Workspace {
   /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
@@ -78,6 +98,8 @@ export interface Workspace {
    * For a file that was checked last with the text it has now; empty for any other. Each was checked: applied, its finding is gone and none is new.
    */
   fixes(file: string, span?: Span): readonly OfferedFix[];
+  /** What stands at an offset; for a file that was checked last with the text it has now, undefined where nothing is known. */
+  hover(file: string, offset: number): HoverInfo | undefined;
   /** Frees what is kept for a file. */
   forget(file: string): void;
   /** Tells that a file changed on disk (an import or a nomenclature file). */

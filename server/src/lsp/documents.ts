@@ -1,0 +1,64 @@
+/** The open documents, kept in step with the editor by the changes it sends. */
+import type { TextDocumentContentChangeEvent, TextDocumentItem } from 'vscode-languageserver/node.js';
+import type { LanguageId } from '../program/nodes.ts';
+import { LineIndex } from '../text/line-index.ts';
+import { fileOf } from './paths.ts';
+import { type Encoding, offsetOf } from './positions.ts';
+
+export interface OpenDocument {
+  readonly uri: string;
+  readonly file: string;
+  /** As the editor names it; undefined where it is none of ours, and the file's ending decides. */
+  readonly language: LanguageId | undefined;
+  readonly version: number;
+  readonly text: string;
+}
+
+const languages: readonly LanguageId[] = ['python', 'nomenclature'];
+
+export class Documents {
+  private readonly byUri = new Map<string, OpenDocument>();
+  private readonly byFile = new Map<string, OpenDocument>();
+
+  open({ uri, languageId, version, text }: TextDocumentItem): OpenDocument {
+    return this.keep({ uri, file: fileOf(uri), language: languages.find((each) => each === languageId), version, text });
+  }
+
+  /** Undefined for a document that is not open: the editor is at fault, and nothing is to be done. */
+  change(uri: string, version: number, changes: readonly TextDocumentContentChangeEvent[], encoding: Encoding): OpenDocument | undefined {
+    const document = this.byUri.get(uri);
+    return document && this.keep({ ...document, version, text: changes.reduce((text, change) => applied(text, change, encoding), document.text) });
+  }
+
+  close(uri: string): OpenDocument | undefined {
+    const document = this.byUri.get(uri);
+    this.byUri.delete(uri);
+    if (document) this.byFile.delete(document.file);
+    return document;
+  }
+
+  get(uri: string): OpenDocument | undefined {
+    return this.byUri.get(uri);
+  }
+
+  at(file: string): OpenDocument | undefined {
+    return this.byFile.get(file);
+  }
+
+  all(): readonly OpenDocument[] {
+    return [...this.byUri.values()];
+  }
+
+  private keep(document: OpenDocument): OpenDocument {
+    this.byUri.set(document.uri, document);
+    this.byFile.set(document.file, document);
+    return document;
+  }
+}
+
+function applied(text: string, change: TextDocumentContentChangeEvent, encoding: Encoding): string {
+  if (!('range' in change)) return change.text;
+  const lines = LineIndex.of(text);
+  const [one, other] = [offsetOf(lines, change.range.start, encoding), offsetOf(lines, change.range.end, encoding)];
+  return text.slice(0, Math.min(one, other)) + change.text + text.slice(Math.max(one, other));
+}
