@@ -21,8 +21,10 @@ import { hoverAt } from './hover.ts';
 import { resolveImport } from './imports.ts';
 import { voiceOver } from './voice-over.ts';
 
-/** Imported files that are kept understood; the least recently used goes first. */
+/** Imported files that are kept understood from one check to the next. Never dropped during a check: modules import each other in circles. */
 const mostImports = 60;
+/** More than this many are not followed: what lies beyond is unknown. */
+const mostAtOnce = 150;
 
 export async function createWorkspace(assets: Assets, source: FileSource, settings: Settings): Promise<Workspace> {
   const grammar = assets.grammar('python');
@@ -57,6 +59,7 @@ class Files implements Workspace {
   check(file: string, text: string, language?: LanguageId): CheckResult {
     const frontEnd = this.frontEndOf(file, language);
     if (!frontEnd) return { file, language: language ?? 'python', text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
+    if (this.imports.size > mostImports) this.imports.clear();
     const understood = this.understand(file, text, frontEnd);
     const detected = this.severe(detect(understood));
     const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)));
@@ -157,14 +160,13 @@ class Files implements Workspace {
     const open = this.open.get(file);
     if (open) return open.understood.solver;
     if (this.imports.has(file)) return this.imports.get(file)?.solver;
+    if (this.imports.size >= mostAtOnce) return undefined;
     this.imports.set(file, undefined);
     const text = this.source.read(file);
     const frontEnd = this.frontEndOf(file, undefined);
     const understood = text === undefined || !frontEnd ? undefined : understand(text, file, this.engineFor(file, frontEnd, this.folders.reachOf(file)));
     understood?.parsed.release();
     this.imports.set(file, understood);
-    const oldest = this.imports.keys().next().value;
-    if (this.imports.size > mostImports && oldest !== undefined) this.imports.delete(oldest);
     return understood?.solver;
   }
 

@@ -194,7 +194,7 @@ export class FileSolver {
   private starred(name: string): Value | undefined {
     for (const chunk of this.inputs.program.chunks) {
       for (const star of definitionsOf(chunk).stars) {
-        const file = this.inputs.importFile(star);
+        const file = this.isLibrary(star) ? undefined : this.inputs.importFile(star);
         const found = file ? file.global(name) : this.inputs.library.find(`${star.module}.${name}`);
         if (found) return found;
       }
@@ -211,7 +211,7 @@ export class FileSolver {
       }
       return names;
     }
-    const file = this.inputs.importFile(statement);
+    const file = this.isLibrary(statement) ? undefined : this.inputs.importFile(statement);
     const bound = statement.alias ?? (statement.module.split('.')[0] as string);
     const library = this.inputs.library.find(statement.alias ? statement.module : bound);
     if (file && (statement.alias || !statement.module.includes('.'))) names.set(bound, moduleValue(statement.module, file));
@@ -219,7 +219,13 @@ export class FileSolver {
     return names;
   }
 
+  /** A library with signatures is taken from them, wherever its sources lie. */
+  private isLibrary(statement: ImportStmt): boolean {
+    return statement.level === 0 && this.inputs.library.find(statement.module.split('.')[0] as string)?.module !== undefined;
+  }
+
   private importedName(statement: ImportStmt, name: string): Value | undefined {
+    if (this.isLibrary(statement)) return this.inputs.library.find(`${statement.module}.${name}`);
     const submodule = this.inputs.importFile(statement, name);
     if (submodule) return moduleValue(name, submodule);
     const file = this.inputs.importFile(statement);
