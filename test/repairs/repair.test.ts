@@ -32,6 +32,7 @@ test.each([
   ['brackets behind a slash', 'head = p/rho*g  # [m]', 'head = p/(rho*g)  # [m]'],
   ['times for over', 'x = p + rho*g/h', 'x = p + rho*g*h'],
   ['brackets around a sum', 'x = rho*g*h + D  # [Pa]', 'x = rho*g*(h + D)  # [Pa]'],
+  ['brackets where a power would tear it apart', 'x = 2**h', 'x = 2**(h/D)'],
   ['an argument of exp', 'x = exp(h*2)', 'x = exp(h*2/D)'],
   ['behind an assignment', 'area = pi*D/4\nQ = V*area  # [m^3/s]', 'area = pi*D**2/4'],
   ['through a function that keeps the unit', 'x = max(1.0*h/D, 0)\ny = x*D  # [m^2]', 'x = max(h*h/D, 0)'],

@@ -34,7 +34,13 @@ export function editsAt(position: Position, workshop: Workshop): readonly SmallE
   const far = position.distance * 0.15;
   const limit = limitAt(workshop.scene, position.anchor, position.expr);
   const symbols = workshop.symbols.filter((symbol) => isBefore(symbol, limit));
-  return editsWith(position, { ...workshop, symbols }).map((edit) => ({ ...edit, cost: edit.cost + far }));
+  return editsWith(position, { ...workshop, symbols }).map((edit) => ({ ...edit, text: beside(edit, workshop.scene), cost: edit.cost + far }));
+}
+
+/** In brackets where a power before or behind it would take a part of it. */
+function beside({ start, end, text }: SmallEdit, { text: file }: Scene): string {
+  const torn = /(?:\*\*|\^)\s*$/.test(file.slice(Math.max(0, start - 8), start)) || /^\s*(?:\*\*|\^)/.test(file.slice(end, end + 8));
+  return torn && !/^[\w.]+$/.test(text) && !isBracketed(text) ? `(${text})` : text;
 }
 
 function editsWith(position: Position, workshop: Workshop): readonly SmallEdit[] {

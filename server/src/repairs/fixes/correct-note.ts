@@ -2,7 +2,7 @@
 import { noteLeaves, sidesOf } from '../../solver/root-cause.ts';
 import type { NoteInForce } from '../../constraints/value.ts';
 import type { Detected } from '../../findings/collect.ts';
-import { Dimension } from '../../quantities/dimension.ts';
+import type { Dimension } from '../../quantities/dimension.ts';
 import { kindsOf } from '../../quantities/kinds.ts';
 import { parseUnit } from '../../quantities/parse-unit.ts';
 import { coherentUnit } from '../../quantities/print-unit.ts';
