@@ -3,7 +3,9 @@ import { becomes, codesOf, fixed, offers, offersAt } from './offers.ts';
 
 test.each([
   ['a misspelt unit', 'V = 2.0  # [metrs/s]', 'likely: V = 2.0  # [metres/s]'],
-  ['a product behind a slash', 'k = 2.0  # [W/m K]', 'proven: k = 2.0  # [W/(m K)]'],
+  ['a product behind a slash', 'k = 2.0  # [W/m K]', 'likely: k = 2.0  # [W/(m K)]'],
+  ['letters of the wrong case', 'k = 2.0  # [w/m/K]', 'proven: k = 2.0  # [W/m/K]'],
+  ['a letter that the description decides', 'T = 2.0  # [C] air temperature', 'proven: T = 2.0  # [degC] air temperature'],
 ])('%s', (_, line, expected) => {
   expect(becomes(line, ['note'])).toEqual([expected]);
   expect(codesOf(fixed(line, offers(line, ['note'])[0] as never))).toEqual([]);

@@ -10,7 +10,7 @@ q = 150.0   # [Pa]
 dp = p - q  # [Pa]
 a = 30.0    # [deg]
 s = math.sin(a)
-k = 0.6     # [W/m K]
+k = 0.6     # [w/m/K]
 x = q + a
 `;
 
@@ -47,10 +47,10 @@ test('every fix that is offered loses its finding and brings none', async () => 
 test('all that is proven at once, or of one code', async () => {
   const workspace = await engine();
   expect(applyProven(workspace, file, script)).toEqual({
-    text: script.replace('p - q', 'p*1000 - q').replace('sin(a)', 'sin(math.radians(a))').replace('W/m K', 'W/(m K)'),
+    text: script.replace('p - q', 'p*1000 - q').replace('sin(a)', 'sin(math.radians(a))').replace('w/m/K', 'W/m/K'),
     fixed: { 'scale-mismatch': 2, 'ambiguous-unit': 1 },
   });
-  expect(applyProven(workspace, file, script, 'python', 'ambiguous-unit').text).toBe(script.replace('W/m K', 'W/(m K)'));
+  expect(applyProven(workspace, file, script, 'python', 'ambiguous-unit').text).toBe(script.replace('w/m/K', 'W/m/K'));
 });
 
 test('what is only likely, or a choice, is never applied to all', async () => {

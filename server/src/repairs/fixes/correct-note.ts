@@ -6,6 +6,7 @@ import type { Dimension } from '../../quantities/dimension.ts';
 import { kindsOf } from '../../quantities/kinds.ts';
 import { parseUnit } from '../../quantities/parse-unit.ts';
 import { coherentUnit } from '../../quantities/print-unit.ts';
+import type { UnitHint } from '../../quantities/unit-result.ts';
 import { sameUnit } from '../../quantities/unit.ts';
 import { absolute, type Anchor, placeAt, type Span } from '../../text/span.ts';
 import type { Confidence, Fix, Fixer } from '../fix.ts';
@@ -18,6 +19,9 @@ export const correctNote: Fixer = { kind: 'note', forFinding: corrections };
 /** Notes of one contradiction that are offered to be corrected. */
 const mostNotes = 4;
 
+/** Readings by convention alone: nothing else in the note tells which was meant. */
+const unsettled: ReadonlySet<UnitHint['kind']> = new Set(['product-after-slash', 'pound-mass-or-force', 'prefix-or-product']);
+
 function corrections(detected: Detected, scene: Scene): readonly Fix[] {
   const { cause, place } = detected;
   switch (cause.kind) {
@@ -27,7 +31,7 @@ function corrections(detected: Detected, scene: Scene): readonly Fix[] {
     }
     case 'ambiguous': {
       const read = parseUnit(cause.hint.readAs);
-      const same = read.ok && read.hints.length === 0 && sameUnit(read.unit, cause.note.unit);
+      const same = read.ok && read.hints.length === 0 && sameUnit(read.unit, cause.note.unit) && !unsettled.has(cause.hint.kind);
       return [correction(scene, place.anchor, cause.note.span, cause.hint.readAs, same ? 'proven' : 'likely', 1)];
     }
     case 'fault':
