@@ -63,6 +63,7 @@ const others = /\b(?:bool|boolean|str|string|dict|OrderedDict|DataFrame|object|c
 const numeric = /\b(?:float|int|array|array[_-]?like|ndarray|numeric|number|scalar|Series)\b/i;
 
 function holdsNoNumber(type: string): boolean {
+  if (/^\s*[{(]?\s*[`‘'"][\w -]+[`’'"]\s*(?:[,|}]|or\b)/.test(type)) return true; // a choice of words
   return others.test(type) && !numeric.test(type.replace(/\([^()]*\)/g, ''));
 }
 
