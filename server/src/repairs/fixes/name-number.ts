@@ -17,7 +17,7 @@ export const nameNumber: Fixer = { kind: 'name-number', forFinding: namings };
 /** Names for constants that formulas carry under one symbol; common practice. */
 const symbols: readonly (readonly [RegExp, string])[] = [
   [/gravit|free fall/i, 'g'], [/Stefan/i, 'sigma_sb'], [/molar gas/i, 'R_univ'], [/gas constant/i, 'R_gas'], [/Boltzmann/i, 'k_B'], [/Planck/i, 'h_planck'],
-  [/speed of light/i, 'c_light'], [/Avogadro/i, 'N_A'], [/Faraday/i, 'F_const'], [/atmosphere|atmospheric/i, 'p_atm'], [/water/i, 'water'],
+  [/speed of light/i, 'c_light'], [/Avogadro/i, 'N_A'], [/Faraday/i, 'F_const'], [/standard atmosphere$|atmospheric pressure/i, 'p_atm'], [/^density of water/i, 'rho_w'], [/^specific weight/i, 'gamma_w'], [/^specific heat of water/i, 'c_w'],
 ];
 
 function namings(detected: Detected, scene: Scene): readonly Fix[] {
@@ -59,7 +59,7 @@ function named({ expr, start, dimension }: Bare, fault: Contradiction, scene: Sc
   const indent = /^[ \t]*/.exec(lines.lineText(first))?.[0] ?? '';
   if (lines.lineStart(first) + indent.length !== fault.constraint.anchor.start + statement.start || line < first) return [];
   const unit = known ? known.unit : coherentUnit(dimension);
-  const name = freeName(known ? (symbols.find(([pattern]) => pattern.test(known.name))?.[1] ?? 'const') : 'coeff', scene.text);
+  const name = freeName(known ? (symbols.find(([pattern]) => pattern.test(known.name))?.[1] ?? 'coeff') : 'coeff', scene.text);
   const breaks = scene.text.includes('\r\n') ? '\r\n' : '\n';
   const above = lines.lineStart(first);
   const definition = `${indent}${name} = ${expr.text}  ${style.comment} [${unit}]${known ? ` ${known.name}` : ''}${breaks}`;
