@@ -5,6 +5,7 @@ import type { LanguageId } from '../program/nodes.ts';
 import type { TextEdit } from '../frontends/frontend.ts';
 import type { Confidence, FixKind } from '../repairs/fix.ts';
 import type { Span } from '../text/span.ts';
+import type { GroupsService } from './groups-service.ts';
 
 /** The only way the service learns of files it was not given. Synchronous; answers from memory in an editor. */
 export interface FileSource {
@@ -100,6 +101,8 @@ export interface Workspace {
   fixes(file: string, span?: Span): readonly OfferedFix[];
   /** What stands at an offset; for a file that was checked last with the text it has now, undefined where nothing is known. */
   hover(file: string, offset: number): HoverInfo | undefined;
+  /** Relations between quantities, and their dimensionless groups. */
+  readonly groups: GroupsService;
   /** Frees what is kept for a file. */
   forget(file: string): void;
   /** Tells that a file changed on disk (an import or a nomenclature file). */

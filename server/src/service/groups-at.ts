@@ -19,18 +19,22 @@ export interface GroupAtPlace {
 
 /** The largest dimensionless product of two symbols or more around an offset; undefined where there is none or a unit is not known. */
 export function groupAt(understood: Understood, offset: number, textOf: TextOf): GroupAtPlace | undefined {
+  return groupsAround(understood, offset, textOf)[0];
+}
+
+/** Every dimensionless product around an offset, from the outermost in. */
+export function groupsAround(understood: Understood, offset: number, textOf: TextOf): readonly GroupAtPlace[] {
   const chunk = chunkAt(understood, offset);
-  if (!chunk) return undefined;
+  if (!chunk) return [];
   const at = { start: offset - chunk.anchor.start, end: offset - chunk.anchor.start };
-  for (const expr of expressionsAt(chunk.statements, at)) {
+  return expressionsAt(chunk.statements, at).flatMap((expr) => {
     const found = dimensionless(expr, (name) => describeSymbol(understood, whereOf(understood, chunk, expr), name, textOf));
-    if (found) return { ...found, span: { start: chunk.anchor.start + expr.start, end: chunk.anchor.start + expr.end } };
-  }
-  return undefined;
+    return found ? [{ ...found, span: { start: chunk.anchor.start + expr.start, end: chunk.anchor.start + expr.end } }] : [];
+  });
 }
 
 /** The product of an expression with its names, where it is dimensionless. */
-export function dimensionless(expr: Expr, describe: (name: string) => RelationSymbol): Omit<GroupAtPlace, 'span'> | undefined {
+function dimensionless(expr: Expr, describe: (name: string) => RelationSymbol): Omit<GroupAtPlace, 'span'> | undefined {
   const exponents = productOf(expr);
   if (!exponents || exponents.size < 2) return undefined;
   const symbols = [...exponents.keys()].map(describe);

@@ -17,6 +17,7 @@ import type { Assets, CheckResult, FileSource, HoverInfo, OfferedFix, PlacedFind
 import { fixesOf, type Look } from './fixes.ts';
 import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
+import { type GroupsService, groupsService } from './groups-service.ts';
 import { hoverAt } from './hover.ts';
 import { resolveImport } from './imports.ts';
 import { voiceOver } from './voice-over.ts';
@@ -39,6 +40,7 @@ interface Kept {
 }
 
 class Files implements Workspace {
+  readonly groups: GroupsService;
   private readonly open = new Map<string, Kept>();
   private readonly imports = new Map<string, Understood | undefined>();
   private readonly folders: NomenclatureFolders;
@@ -54,6 +56,7 @@ class Files implements Workspace {
     private readonly frontEnds: readonly FrontEnd[],
   ) {
     this.folders = new NomenclatureFolders(source);
+    this.groups = groupsService((file) => this.heldOf(file), (file) => this.textOf(file));
   }
 
   check(file: string, text: string, language?: LanguageId): CheckResult {
@@ -107,6 +110,12 @@ class Files implements Workspace {
     this.imports.get(file)?.parsed.release();
     this.imports.clear();
     this.libraries.clear();
+  }
+
+  private heldOf(file: string): { readonly understood: Understood; readonly style: FrontEnd['style'] } | undefined {
+    const kept = this.open.get(file);
+    const frontEnd = this.frontEnds.find((each) => each.language === kept?.understood.parsed.program.language);
+    return kept && frontEnd && { understood: kept.understood, style: frontEnd.style };
   }
 
   private understand(file: string, text: string, frontEnd: FrontEnd): Understood {
