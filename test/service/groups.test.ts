@@ -29,7 +29,7 @@ async function relations(text: string, functions = false, file?: string): Promis
 }
 
 /** The text after the action whose title begins so, at the first `at`. */
-async function after(text: string, title: string, at: string, file?: string): Promise<string | undefined> {
+async function taken(text: string, title: string, at: string, file?: string): Promise<string | undefined> {
   const { workspace, file: name } = await checked(text, file);
   const action = workspace.groups.actions(name, text.indexOf(at)).find((each) => each.title.startsWith(title));
   return action && applyEdits(text, action.edits);
@@ -76,59 +76,59 @@ print(N)
 
 describe('actions', () => {
   test('the groups as a comment', async () => {
-    expect(await after(script, 'Write the dimensionless groups', 'P depends')).toBe(script.replace('rho, mu\n', 'rho, mu\n# Ne = P/(rho*N**3*D**5)   power number\n# Re = rho*N*D**2/mu   Reynolds number\n'));
+    expect(await taken(script, 'Write the dimensionless groups', 'P depends')).toBe(script.replace('rho, mu\n', 'rho, mu\n# Ne = P/(rho*N**3*D**5)   power number\n# Re = rho*N*D**2/mu   Reynolds number\n'));
   });
 
   test('definitions behind the last symbol, without a group that cannot be computed', async () => {
-    const text = await after(script, 'Define', 'P depends');
+    const text = await taken(script, 'Define', 'P depends');
     expect(text).toBe(script.replace('[Pa s]\n', '[Pa s]\nRe = rho*N*D**2/mu  # [1] Reynolds number\n'));
     expect((await checked(text as string)).findings).toEqual([]);
   });
 
   test('definitions in coherent units', async () => {
-    const text = await after(script.replace('D = 0.085  # [m]', 'D = 85.0  # [mm]').replace('rho = 1240.0  # [kg/m^3]', 'rho = 1.24  # [g/cm^3]'), 'Define', 'P depends');
+    const text = await taken(script.replace('D = 0.085  # [m]', 'D = 85.0  # [mm]').replace('rho = 1240.0  # [kg/m^3]', 'rho = 1.24  # [g/cm^3]'), 'Define', 'P depends');
     expect(text).toContain('\nRe = rho*N*D**2/mu/1000  # [1] Reynolds number\n');
     expect((await checked(text as string)).findings).toEqual([]);
   });
 
   test('definitions in a function', async () => {
     const text = 'def power(N, D, rho, mu):\n    """Power.\n\n    P depends on N, D, rho, mu\n    """\n    return 3.0\n';
-    expect(await after(text, 'Define', 'P depends')).toBe(text.replace('    return', '    Re = rho*N*D**2/mu  # [1] Reynolds number\n    return'));
-    expect(await after(text, 'Write the dim', 'P depends')).toContain('rho, mu\n    Ne = P/(rho*N**3*D**5)   power number\n    Re = rho*N*D**2/mu   Reynolds number\n    """');
+    expect(await taken(text, 'Define', 'P depends')).toBe(text.replace('    return', '    Re = rho*N*D**2/mu  # [1] Reynolds number\n    return'));
+    expect(await taken(text, 'Write the dim', 'P depends')).toContain('rho, mu\n    Ne = P/(rho*N**3*D**5)   power number\n    Re = rho*N*D**2/mu   Reynolds number\n    """');
   });
 
   test('definitions in a nomenclature file, once', async () => {
     const text = `${bench}P depends on N, D, rho, mu\n`;
-    const once = await after(text, 'Define', 'P depends', 'bench/bench.nomen');
+    const once = await taken(text, 'Define', 'P depends', 'bench/bench.nomen');
     expect(once).toBe(`${text}Ne [1] = P/(rho*N^3*D^5)   power number\nRe [1] = rho*N*D^2/mu   Reynolds number\n`);
     expect((await checked(once as string, 'bench/bench.nomen')).findings).toEqual([]);
-    expect(await after(once as string, 'Define', 'P depends', 'bench/bench.nomen')).toBeUndefined();
+    expect(await taken(once as string, 'Define', 'P depends', 'bench/bench.nomen')).toBeUndefined();
   });
 
   test('the equation with an unknown function', async () => {
-    expect(await after(script, 'Write P =', 'P depends')).toContain('rho, mu\n# P = rho*N**3*D**5 * phi(Re)\n');
+    expect(await taken(script, 'Write P =', 'P depends')).toContain('rho, mu\n# P = rho*N**3*D**5 * phi(Re)\n');
   });
 
   test('another set of repeating symbols', async () => {
-    expect(await after(script, 'Write the groups with D, rho, mu', 'P depends')).toContain('# Pi_1 = P*D*rho**2/mu**3');
+    expect(await taken(script, 'Write the groups with D, rho, mu', 'P depends')).toContain('# Pi_1 = P*D*rho**2/mu**3');
   });
 
   test('are not there without symbols in the scope, units, or a relation', async () => {
-    expect(await after('# P depends on N, D, rho, mu\n', 'Define', 'P depends')).toBeUndefined();
+    expect(await taken('# P depends on N, D, rho, mu\n', 'Define', 'P depends')).toBeUndefined();
     const { workspace } = await checked('# P depends on N, q8, q9\nx = 1\n');
     expect(workspace.groups.actions('bench/a.py', 3)).toEqual([{ kind: 'missing-units', title: 'Dimensionless groups need the unit of q8, q9', edits: [] }]);
     expect(workspace.groups.actions('bench/a.py', 27)).toEqual([]);
   });
 
   test('line ends are kept', async () => {
-    expect(await after(script.replaceAll('\n', '\r\n'), 'Write P =', 'P depends')).toContain('rho, mu\r\n# P = rho*N**3*D**5 * phi(Re)\r\n');
+    expect(await taken(script.replaceAll('\n', '\r\n'), 'Write P =', 'P depends')).toContain('rho, mu\r\n# P = rho*N**3*D**5 * phi(Re)\r\n');
   });
 });
 
 describe('a product by its name', () => {
   const named = 'def f(N, D, rho, mu):\n    Re = rho*N*D**2/mu\n    return 3.0*(D*D*rho*N/mu)**0.5\n';
   test('with its factors in another order', async () => {
-    expect(await after(named, 'Replace', 'D*D*rho')).toBe(named.replace('(D*D*rho*N/mu)', '(Re)'));
+    expect(await taken(named, 'Replace', 'D*D*rho')).toBe(named.replace('(D*D*rho*N/mu)', '(Re)'));
   });
   test.each([
     ['changed meanwhile', named.replace('    return', '    D = 2*D\n    return')],
@@ -136,7 +136,7 @@ describe('a product by its name', () => {
     ['with a number in it', named.replace('Re = rho', 'Re = 2*rho')],
     ['defined behind it', 'def f(N, D, rho, mu):\n    x = D*D*rho*N/mu\n    Re = rho*N*D**2/mu\n    return Re\n'],
   ])('not %s', async (_what, text) => {
-    expect(await after(text, 'Replace', 'D*D*rho')).toBeUndefined();
+    expect(await taken(text, 'Replace', 'D*D*rho')).toBeUndefined();
   });
 });
 

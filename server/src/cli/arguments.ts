@@ -50,7 +50,7 @@ const optionTypes = {
 } as const;
 type OptionName = keyof typeof optionTypes;
 
-const commands = ['check', 'help', 'version'];
+const commands = ['check', 'groups', 'help', 'version'];
 
 /** Reads the arguments after the program's name. Never throws. */
 export function readArguments(args: readonly string[]): Request {

@@ -4,7 +4,9 @@ them through every expression without running anything, and reports what cannot 
 
 Usage
   termwise check <paths…>     check files and folders
+  termwise groups <files…>    dimensionless groups of the relations in files
   termwise help check         the options of check
+  termwise help groups        the options of groups
   termwise help <code>        what a finding means, with examples: termwise help scale-mismatch
   termwise --version          the version
 

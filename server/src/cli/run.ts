@@ -6,6 +6,10 @@ import { checkHelp, generalHelp } from './help.ts';
 
 /** Runs a command line; the answer is the exit status. Only what is asked for is loaded: the version answers at once. */
 export async function run(args: readonly string[], around: Surroundings): Promise<number> {
+  if (args[0] === 'groups' || (args[0] === 'help' && args[1] === 'groups')) {
+    const { runGroups } = await import('./groups.ts');
+    return runGroups(args[0] === 'help' ? ['--help'] : args.slice(1), around);
+  }
   const request = readArguments(args);
   switch (request.kind) {
     case 'version':

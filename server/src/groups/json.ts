@@ -14,8 +14,6 @@ export interface RelationDocument {
   readonly line: number;
   readonly dependent: string | null;
   readonly symbols: readonly { readonly name: string; readonly dimension: string | null; readonly unit: string | null; readonly description: string | null }[];
-  /** Rows are base dimensions, columns the symbols whose unit is known, in the order of `symbols`. */
-  readonly matrix: { readonly bases: readonly string[]; readonly columns: readonly string[]; readonly exponents: readonly (readonly string[])[] };
   readonly rank: number;
   readonly repeating: readonly string[];
   readonly groups: readonly GroupDocument[];
@@ -24,6 +22,8 @@ export interface RelationDocument {
   readonly alternatives: number;
   /** False where `alternatives` is a lower bound. */
   readonly alternativesExact: boolean;
+  /** Rows are base dimensions, columns the symbols whose unit is known, in the order of `symbols`. */
+  readonly matrix: { readonly bases: readonly string[]; readonly columns: readonly string[]; readonly exponents: readonly (readonly string[])[] };
 }
 
 export interface GroupDocument {
@@ -44,7 +44,6 @@ export function relationDocument(result: GroupsResult, file: string, line: numbe
       unit: unit?.text ?? null,
       description: description ?? null,
     })),
-    matrix: { bases: result.bases, columns: result.columns, exponents: result.matrix.map((row) => row.map(String)) },
     rank: result.rank,
     repeating: result.repeating,
     groups: result.groups.map((group) => ({
@@ -55,6 +54,7 @@ export function relationDocument(result: GroupsResult, file: string, line: numbe
     unmatched: result.unmatched.map((one) => ({ symbol: one.symbol, reason: unmatchedText(one) })),
     alternatives: Math.max(0, result.sets.count - (result.repeating.length > 0 ? 1 : 0)),
     alternativesExact: result.sets.exact,
+    matrix: { bases: result.bases, columns: result.columns, exponents: result.matrix.map((row) => row.map(String)) },
   };
 }
 
