@@ -6,11 +6,19 @@ import { chromium } from 'playwright-core';
 const browsers = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome', '/Applications/Google Chrome.app/Contents/MacOS/Google Chrome'];
 const quiet = ['--no-sandbox', '--disable-gpu', '--disable-quic', '--no-first-run', '--disable-background-networking', '--disable-component-update', '--disable-sync'];
 
+export function hasBrowser() {
+  return findBrowser() !== undefined;
+}
+
 /** The Chromium of this machine. Throws where there is none, and says what to do. */
 export function browserExecutable() {
-  const found = [process.env.TERMWISE_BROWSER, ...browsers].find((each) => each && existsSync(each));
+  const found = findBrowser();
   if (!found) throw new Error('There is neither a desktop VS Code (code) nor a Chromium here. Install chromium, or name one in TERMWISE_BROWSER.');
   return found;
+}
+
+function findBrowser() {
+  return [process.env.TERMWISE_BROWSER, ...browsers].find((each) => each && existsSync(each));
 }
 
 /** Opens a workspace; `payload` is what the workbench takes from its address. `exit` holds the result of a suite. */

@@ -17,5 +17,6 @@ The faults in examples/ are there on purpose: examples/README.md lists them.
 Next:
   node dist/termwise.js check path/to/your/scripts     check your own scripts; nothing is run or changed
   npm install -g .                                     then the command is termwise check ...
+  npm run editor                                       the examples in VS Code, on the desktop or in the browser
   node dist/termwise.js help check                     options, configuration file, exit status
 `);

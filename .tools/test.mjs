@@ -1,5 +1,5 @@
 /**
- * `npm test`: build, lint, types, generated documents, and the tests. Each step counts like a test; all run even where one
+ * `npm test`: build, lint, types, generated documents, the tests, and the extension in a real editor. Each step counts like a test; all run even where one
  * fails. Arguments go to vitest. The last line is `N passed, N failed`.
  */
 import { spawnSync } from 'node:child_process';
@@ -7,6 +7,7 @@ import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { hasBrowser } from './editor-page.mjs';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '..');
 const bin = (name) => join(root, 'node_modules', name);
@@ -25,6 +26,7 @@ for (const [name, args] of steps) {
   process.stdout.write(`${ok ? 'ok' : 'FAILED'}: ${name}\n`);
 }
 add(runTests());
+if (process.argv.length === 2) add(runEditor());
 if (counts.skipped > 0) process.stdout.write(`\n${counts.skipped} skipped\n`);
 process.stdout.write(`\n${counts.passed} passed, ${counts.failed} failed\n`);
 process.exitCode = counts.failed > 0 ? 1 : 0;
@@ -45,8 +47,20 @@ function runTests() {
   }
 }
 
+/** The extension in a real VS Code, where a browser can show one and nothing else was asked for. */
+function runEditor() {
+  if (!hasBrowser()) {
+    process.stdout.write('not run: the tests in a real editor need chromium (npm run test:editor)\n');
+    return {};
+  }
+  const { status, stdout } = spawnSync(process.execPath, ['.tools/editor-test.mjs'], { cwd: root, encoding: 'utf8', stdio: ['ignore', 'pipe', 'inherit'] });
+  process.stdout.write(stdout);
+  const [, passed, failed] = /(\d+) passed, (\d+) failed\s*$/.exec(stdout) ?? [];
+  return failed === undefined || (status !== 0 && failed === '0') ? { failed: 1 } : { passed: Number(passed), failed: Number(failed) };
+}
+
 function add(more) {
-  for (const key of Object.keys(counts)) counts[key] += more[key];
+  for (const key of Object.keys(counts)) counts[key] += more[key] ?? 0;
 }
 
 function node(args, environment = {}) {
