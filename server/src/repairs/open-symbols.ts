@@ -52,7 +52,7 @@ function inferredUnit(value: Value, sightings: Sightings): string | undefined {
   if (!dimension || dimension.isOne) return undefined;
   const { measure } = value;
   if (value.version?.origin === 'parameter' || value.version?.origin === 'constant') return coherentUnit(dimension);
-  if (!measure || measure.readings.length !== 1 || measure.cycle !== 0 || measure.radian !== 0 || !measure.factors.every((factor) => factor.literal.pure)) return undefined;
+  if (measure?.readings.length !== 1 || measure.cycle !== 0 || measure.radian !== 0 || !measure.factors.every((factor) => factor.literal.pure)) return undefined;
   const [reading] = measure.readings;
   if (reading?.weight !== 0) return undefined;
   const text = printUnit({ dimension, scale: reading.scale, text: '' });
