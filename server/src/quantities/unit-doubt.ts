@@ -68,7 +68,7 @@ function worthOfWords(text: string, symbols: readonly Factor[]): Worth {
   const kinds = new Set(symbols.map((factor) => factor.unit.dimension));
   if (symbols.length > 3 || kinds.size < symbols.length || symbols.some((factor) => factor.sure === 'weak' || factor.hint === 'case' || factor.unit.scale === undefined)) return 'nothing';
   if (/^(?:[kMm]?N|[mk]?Pa|[kM]?W|lbf|ft)[-. ·]?(?:m|mm|s|ft|h|in)$/.test(text)) return /^[kMm]?N[ms]$|^Pas$/.test(text) ? (text === 'Ns' ? 'doubtful' : 'beyond doubt') : 'beyond doubt';
-  if (symbols.every((factor) => factor.text.length === 1)) return usualLetters.has(symbols.map((factor) => factor.text).join(' ')) ? (/^[NJVAW][ .·*-]/.test(text) ? 'beyond doubt' : 'doubtful') : 'nothing';
+  if (symbols.every((factor) => factor.text.length === 1)) return usualLetters.has(symbols.map((factor) => factor.text).join(' ')) ? (/^[NJVAW][ .·*-]/.test(text) ? 'beyond doubt' : 'doubtful') : symbols.every((factor) => /^[AKVWJNms]$/.test(factor.text)) ? 'doubtful' : 'nothing';
   if (/^\p{L}(?:\.\p{L}+)+$/u.test(text) && !symbols.some((factor) => factor.sure === 'sure')) return 'nothing';
   return symbols.some((factor) => factor.sure === 'sure') && symbols.filter((factor) => factor.sure === 'word').length <= 1 ? 'beyond doubt' : 'doubtful';
 }
