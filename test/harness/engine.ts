@@ -19,6 +19,6 @@ export function filesOf(texts: Readonly<Record<string, string>>): FileSource {
   const paths = Object.keys(texts);
   return {
     read: (file) => texts[file],
-    list: (folder) => paths.flatMap((path) => (path.startsWith(`${folder}/`) && !path.slice(folder.length + 1).includes('/') ? [path.slice(folder.length + 1)] : [])),
+    list: (folder) => [...new Set(paths.flatMap((path) => (path.startsWith(`${folder}/`) ? [path.slice(folder.length + 1).split('/')[0] as string] : [])))],
   };
 }
