@@ -71,7 +71,8 @@ export function namesDifference(path: string, note: NoteInForce): boolean {
 
 /** Requires of an assigned value what the note on its target says. */
 export function checkTarget(context: Context, path: string, target: Span, value: Value, noted: Value, note: NoteInForce): void {
-  if (value.misuse) return reportMisuse(context, value, value.form === noted.form);
+  const sure = value.form === noted.form;
+  if (value.misuse && (sure || !value.tainted)) return reportMisuse(context, value, sure);
   if (!value.form || value.fits || value.literal) return;
   agreeWithNote(context, value, noted, value.expr ?? target, { kind: 'target', path, note });
 }
