@@ -7,7 +7,9 @@ import { build as bundle } from 'esbuild';
 const root = join(dirname(fileURLToPath(import.meta.url)), '..');
 
 /** WASM files of the packages that ship them. */
-const grammars = ['web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tree-sitter-python.wasm'];
+const grammars = [
+  'web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tree-sitter-python.wasm',
+];
 
 /** An earlier build stays where this one fails; a folder that is named is written into and not emptied. */
 export async function build(folder) {

@@ -25,6 +25,8 @@ export interface Engine {
   readonly library: Library;
   readonly nomenclature: (name: string) => NoteInForce | undefined;
   readonly importFile: (statement: ImportStmt, name?: string) => FileSolver | undefined;
+  /** The file that defines a name which this one reads without an import. */
+  readonly neighbour: (name: string) => FileSolver | undefined;
   readonly cache: WeakMap<object, Solved>;
 }
 
@@ -49,8 +51,8 @@ export function understand(text: string, file: string, engine: Engine, previous?
     }
     return index;
   };
-  const { library, nomenclature, importFile, cache } = engine;
-  const solver = new FileSolver({ program: parsed.program, indexOf, library, nomenclature, importFile, cache });
+  const { library, nomenclature, importFile, neighbour, cache } = engine;
+  const solver = new FileSolver({ program: parsed.program, indexOf, library, nomenclature, importFile, neighbour, cache });
   return { parsed, lines: LineIndex.of(text), notes, solver };
 }
 

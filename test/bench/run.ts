@@ -7,7 +7,6 @@ import { readFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { dirname, join, resolve } from 'node:path';
 import { Language, Parser } from 'web-tree-sitter';
-import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
 import { defaultNoteSettings } from '../../server/src/notes/types.ts';
 import { diskFiles } from '../../server/src/platform/disk.ts';
 import { nodeAssets } from '../../server/src/platform/node-assets.ts';
@@ -15,6 +14,7 @@ import { createWorkspace } from '../../server/src/service/workspace.ts';
 import { scriptsIn } from '../corpus/scripts.ts';
 import { manyLines } from './many-lines.ts';
 import { repeat, type Ran, runNode, runProgram, type Spread, spread } from './measure.ts';
+import { loadFrontEnd } from '../harness/front-ends.ts';
 
 const root = join(import.meta.dirname, '../..');
 const command = join(root, 'dist/termwise.js');
@@ -38,7 +38,7 @@ async function inProcess(file: string, text: string): Promise<void> {
   const assets = nodeAssets();
   const grammar = assets.grammar('python');
   if (!grammar) throw new Error('no Python grammar');
-  const frontEnd = await createPythonFrontEnd(assets.runtime, grammar);
+  const frontEnd = await loadFrontEnd('python');
   const workspace = await createWorkspace(assets, diskFiles(), { severities: {}, notes: defaultNoteSettings });
   const first = repeat(1, () => workspace.check(file, text));
   const tree = await treeAlone(grammar, text);
@@ -90,7 +90,7 @@ function againstPyright(file: string, own: Spread): void {
 }
 
 function hundredThousand(folder: string): void {
-  const scripts = [...scriptsIn(folder, () => {})];
+  const scripts = [...scriptsIn(folder, 'python', () => {})];
   for (const wanted of [25_000, 50_000, 100_000]) {
     const made = manyLines(scripts, wanted);
     const run = runNode([command, 'check', made.folder, '--format', 'json']);

@@ -177,6 +177,7 @@ test('a fault of the engine names the file and leaves the rest to be checked', a
         if (file.endsWith('a.py')) throw new Error('no such unit');
         return { file, text, language: language ?? 'python', findings: [], statistics: { functions: 3, notes: 2, unread: [] } };
       },
+      prepare: async () => {},
       forget: (file) => forgotten.push(file),
       fixes: () => [], hover: () => undefined, groups: { relations: () => [], actions: () => [], at: () => undefined },
       invalidate: () => {},

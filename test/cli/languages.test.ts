@@ -1,13 +1,16 @@
-import { expect, test } from 'vitest';
-import { languageEndings, languageOf } from '../../server/src/cli/languages.ts';
-import { nomenclatureFrontEnd } from '../../server/src/frontends/nomenclature/index.ts';
-import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
-import { nodeAssets } from '../../server/src/platform/node-assets.ts';
+import { describe, expect, test } from 'vitest';
+import { frontEndEntries, languageOf } from '../../server/src/frontends/registry.ts';
+import { loadFrontEnd } from '../harness/front-ends.ts';
 
-test('folders are searched for the endings that the front ends read', async () => {
-  const assets = nodeAssets();
-  const frontEnds = [await createPythonFrontEnd(assets.runtime, assets.grammar('python') as Uint8Array), nomenclatureFrontEnd];
-  expect(languageEndings).toEqual(frontEnds.map((each) => [each.language, each.endings]));
+describe.each(frontEndEntries.map((entry) => [entry.language, entry] as const))('%s', (language, { endings }) => {
+  test('is what its line of the registry says', async () => {
+    const { language: own, endings: read } = await loadFrontEnd(language);
+    expect([own, read]).toEqual([language, endings]);
+  });
+
+  test('has endings that no other language has', () => {
+    expect(endings.map((ending) => languageOf(`a${ending}`))).toEqual(endings.map(() => language));
+  });
 });
 
 test.each([['a.py', 'python'], ['A.PY', 'python'], ['a.nomen', 'nomenclature'], ['a.pyc', undefined], ['py', undefined]])('%s', (file, language) => {

@@ -1,15 +1,13 @@
 /** The seeded edits are what the corpus run says they are, and are counted as they should be. */
 import { describe, expect, test } from 'vitest';
-import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
-import { nodeAssets } from '../../server/src/platform/node-assets.ts';
 import { engine } from '../harness/engine.ts';
+import { loadFrontEnd } from '../harness/front-ends.ts';
 import { restored, restoredLine } from './repairs.ts';
 import { readCorpusArguments } from './arguments.ts';
 import { seedEdits } from './edits.ts';
 import { tryEdits } from './try-edits.ts';
 
-const assets = nodeAssets();
-const frontEnd = await createPythonFrontEnd(assets.runtime, assets.grammar('python') as Uint8Array);
+const frontEnd = await loadFrontEnd('python');
 
 function documented(body: string, params = 'V, D, n'): string {
   return `def f(${params}):\n    '''Something.\n\n    Parameters\n    ----------\n    V : float\n        Velocity [m/s]\n    D : float\n        Diameter [m]\n    n : int\n        Count [-]\n\n    Returns\n    -------\n    q : float\n        Velocity head times something [m^2/s]\n    '''\n${body}`;
@@ -46,7 +44,7 @@ describe('one use of a documented parameter with a dimension', () => {
 
 describe('counting', async () => {
   const workspace = await engine();
-  const count = (text: string): readonly object[] => tryEdits(workspace, { file: 'f.py', text }, seedEdits(frontEnd, 'f.py', text)).map(({ reported, placed, elsewhere, line }) => ({ reported, placed, elsewhere, line }));
+  const count = (text: string): readonly object[] => tryEdits(workspace, { file: 'f.py', text, language: 'python' }, seedEdits(frontEnd, 'f.py', text)).map(({ reported, placed, elsewhere, line }) => ({ reported, placed, elsewhere, line }));
 
   test('an edit that contradicts the documented result', () => {
     const line = documented('').split('\n').length;
@@ -60,14 +58,15 @@ describe('counting', async () => {
   test('a finding that was there before does not count', () => {
     const text = documented('    bad = V + D\n    x = 2*V\n    return unknown(x)\n');
     expect(workspace.check('f.py', text).findings.length).toBeGreaterThan(0);
-    const dropped = tryEdits(workspace, { file: 'f.py', text }, seedEdits(frontEnd, 'f.py', text)).find((each) => each.edit.kind === 'dropped');
+    const dropped = tryEdits(workspace, { file: 'f.py', text, language: 'python' }, seedEdits(frontEnd, 'f.py', text)).find((each) => each.edit.kind === 'dropped');
     expect(dropped).toMatchObject({ reported: false, placed: false });
   });
 });
 
 test('arguments', () => {
-  expect(readCorpusArguments(['ht', '--seed-edits', '--list', 'all'])).toEqual({ folder: 'ht', seedEdits: true, missed: false, repairs: false, list: ['all'], unread: 40 });
+  expect(readCorpusArguments(['ht', '--seed-edits', '--list', 'all'])).toEqual({ folder: 'ht', language: undefined, seedEdits: true, missed: false, repairs: false, list: ['all'], unread: 40 });
   expect(readCorpusArguments([])).toContain('usage');
+  expect(readCorpusArguments(['a', '--language', 'latin'])).toContain('python');
   expect(readCorpusArguments(['a', '--nonsense'])).toContain('usage');
 });
 

@@ -1,5 +1,5 @@
 /** Faults put into real functions: one use of a documented parameter squared, or left out of its product. */
-import type { FrontEnd } from '../../server/src/frontends/frontend.ts';
+import type { FrontEnd, HostStyle } from '../../server/src/frontends/frontend.ts';
 import { readChunkNotes } from '../../server/src/notes/read-chunk.ts';
 import { defaultNoteSettings } from '../../server/src/notes/types.ts';
 import type { Chunk, Expr, FunctionStmt, NameExpr } from '../../server/src/program/nodes.ts';
@@ -34,10 +34,10 @@ function editsIn(chunk: Chunk, frontEnd: FrontEnd): readonly SeedEdit[] {
     if (target.kind !== 'parameter' || unit.dimension === Dimension.one) continue;
     documented.set(target.owner, (documented.get(target.owner) ?? new Set()).add(target.param.name));
   }
-  return [...documented].flatMap(([fn, names]) => editsOf(fn, names, chunk.anchor.start));
+  return [...documented].flatMap(([fn, names]) => editsOf(fn, names, chunk.anchor.start, frontEnd.style));
 }
 
-function editsOf(fn: FunctionStmt, names: ReadonlySet<string>, anchor: number): readonly SeedEdit[] {
+function editsOf(fn: FunctionStmt, names: ReadonlySet<string>, anchor: number, style: HostStyle): readonly SeedEdit[] {
   const uses = usesIn(fn, names);
   return (['squared', 'dropped'] as const).flatMap((kind): SeedEdit[] => {
     const fitting = uses.filter((use) => kind === 'squared' || use.factor);
@@ -50,7 +50,7 @@ function editsOf(fn: FunctionStmt, names: ReadonlySet<string>, anchor: number): 
       kind, parameter, functionName: fn.name,
       functionSpan: { start: anchor + fn.start, end: anchor + fn.end },
       span: { start: anchor + name.start, end: anchor + name.end },
-      replacement: kind === 'squared' ? `(${parameter}**2)` : '1.0',
+      replacement: kind === 'dropped' ? '1.0' : style.power === 'pow' ? `pow(${parameter}, 2)` : `(${parameter}${style.power}2)`,
     }];
   });
 }

@@ -3,12 +3,14 @@
  * time; with --seed-edits, how many of the faults put into its functions are reported. Nothing of the corpus is kept.
  */
 import { relative, resolve } from 'node:path';
-import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
+import type { FrontEnd } from '../../server/src/frontends/frontend.ts';
+import { languages } from '../../server/src/frontends/registry.ts';
 import { defaultNoteSettings } from '../../server/src/notes/types.ts';
 import { diskFiles } from '../../server/src/platform/disk.ts';
 import { nodeAssets } from '../../server/src/platform/node-assets.ts';
 import type { CheckResult, Workspace } from '../../server/src/service/contract.ts';
 import { createWorkspace } from '../../server/src/service/workspace.ts';
+import { loadFrontEnd } from '../harness/front-ends.ts';
 import { LineIndex } from '../../server/src/text/line-index.ts';
 import { type CorpusOptions, readCorpusArguments } from './arguments.ts';
 import { type EditKind, seedEdits } from './edits.ts';
@@ -23,20 +25,19 @@ if (typeof options === 'string') {
 } else await main(options);
 
 async function main(options: CorpusOptions): Promise<void> {
-  const assets = nodeAssets();
-  const workspace = await createWorkspace(assets, diskFiles(), { severities: {}, notes: defaultNoteSettings });
+  const workspace = await createWorkspace(nodeAssets(), diskFiles(), { severities: {}, notes: defaultNoteSettings }, languages);
   survey(workspace, options);
   if (!options.seedEdits) return;
-  const grammar = assets.grammar('python');
-  if (grammar) measureEdits(workspace, await createPythonFrontEnd(assets.runtime, grammar), options);
+  const present = new Set([...scriptsIn(options.folder, options.language, () => {})].map(({ language }) => language));
+  for (const language of present) measureEdits(workspace, await loadFrontEnd(language), options);
 }
 
-function survey(workspace: Workspace, { folder, list, unread }: CorpusOptions): void {
+function survey(workspace: Workspace, { folder, language, list, unread }: CorpusOptions): void {
   const totals = { files: 0, lines: 0, functions: 0, notes: 0, crashes: 0 };
   const codes = new Map<string, number>();
   const spellings = new Map<string, number>();
   const start = performance.now();
-  for (const { file, text } of scriptsIn(folder, tellUnreadable)) {
+  for (const { file, text } of scriptsIn(folder, language, tellUnreadable)) {
     totals.files++;
     totals.lines += text.split('\n').length;
     try {
@@ -69,10 +70,10 @@ function listFindings(result: CheckResult, folder: string, list: readonly string
   }
 }
 
-function measureEdits(workspace: Workspace, frontEnd: Awaited<ReturnType<typeof createPythonFrontEnd>>, { folder, missed, repairs }: CorpusOptions): void {
+function measureEdits(workspace: Workspace, frontEnd: FrontEnd, { folder, missed, repairs }: CorpusOptions): void {
   const start = performance.now();
   const tried: Record<EditKind, Tried[]> = { squared: [], dropped: [] };
-  for (const script of scriptsIn(folder, () => {})) {
+  for (const script of scriptsIn(folder, frontEnd.language, () => {})) {
     const edits = seedEdits(frontEnd, script.file, script.text);
     if (edits.length === 0) continue;
     for (const each of tryEdits(workspace, script, edits, repairs)) {
@@ -81,7 +82,7 @@ function measureEdits(workspace: Workspace, frontEnd: Awaited<ReturnType<typeof 
     }
     workspace.forget(script.file);
   }
-  print(`seeded edits, ${((performance.now() - start) / 1000).toFixed(1)} s`);
+  print(`seeded edits in ${frontEnd.language}, ${((performance.now() - start) / 1000).toFixed(1)} s`);
   for (const kind of ['squared', 'dropped'] as const) {
     print(`  ${kind}: ${shares(tried[kind])}`);
     if (repairs) print(`    repairs: ${restoredLine(tried[kind].flatMap((each) => each.restored ?? []))}`);

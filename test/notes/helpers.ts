@@ -1,16 +1,10 @@
 /** Python text in, notes out as lines. */
-import { readFileSync } from 'node:fs';
-import { createRequire } from 'node:module';
-import type { FrontEnd } from '../../server/src/frontends/frontend.ts';
-import { createPythonFrontEnd } from '../../server/src/frontends/python/index.ts';
 import { readChunkNotes } from '../../server/src/notes/read-chunk.ts';
 import { type ChunkNotes, defaultNoteSettings, type Note, type NoteSettings } from '../../server/src/notes/types.ts';
 import type { Chunk, LanguageId } from '../../server/src/program/nodes.ts';
 import { emptyVocabulary } from '../../server/src/quantities/unit-result.ts';
+import { python } from '../harness/python.ts';
 
-const { resolve } = createRequire(import.meta.url);
-const bytes = (name: string): Uint8Array => readFileSync(resolve(name));
-const python: FrontEnd = await createPythonFrontEnd(bytes('web-tree-sitter/web-tree-sitter.wasm'), bytes('tree-sitter-python/tree-sitter-python.wasm'));
 
 export interface ReadFile {
   readonly text: string;

@@ -1,4 +1,4 @@
-import type { Chunk, Expr, LanguageId, Program } from '../program/nodes.ts';
+import type { Chunk, Expr, ImportStmt, LanguageId, Program } from '../program/nodes.ts';
 
 /** A host language: everything that knows its syntax sits behind this. Stateless; the parse to continue from comes back in. */
 export interface FrontEnd {
@@ -13,6 +13,37 @@ export interface FrontEnd {
   parse(text: string, file: string, previous?: Parsed, edits?: readonly TextEdit[]): Parsed;
   /** How the language writes things, for fixes and write-backs. */
   readonly style: HostStyle;
+  /** The file that an import of `file` means, or undefined for libraries; `name` is one of its names, where that may be a file itself. */
+  resolve?(file: string, statement: ImportStmt, name: string | undefined, source: FileSource): string | undefined;
+  /**
+   * The file that defines a name which `file` reads without an import: a MATLAB function beside it, another part of a Julia module.
+   * Asked only for names that the file itself does not define; undefined where there is none.
+   */
+  neighbour?(file: string, name: string, source: FileSource): string | undefined;
+}
+
+/** The only way anything learns of files it was not given. Synchronous; answers from memory in an editor. */
+export interface FileSource {
+  /** Text of a file; undefined where there is none or it cannot be read. */
+  read(file: string): string | undefined;
+  /** Names (not paths) of the files in a folder; empty where there is none. */
+  list(folder: string): readonly string[];
+}
+
+/** A grammar and the runtime for it, as WASM bytes; empty for a language that is parsed by code of our own. */
+export interface GrammarBytes {
+  readonly runtime: Uint8Array;
+  readonly grammar: Uint8Array;
+}
+
+/** A line of the registry: what is known of a front end before it is loaded. */
+export interface FrontEndEntry {
+  readonly language: LanguageId;
+  /** File endings with the dot, in small letters. */
+  readonly endings: readonly string[];
+  /** The grammar's file within its package; undefined for a parser of our own. */
+  readonly grammar?: string;
+  create(bytes: GrammarBytes): FrontEnd | Promise<FrontEnd>;
 }
 
 export interface Parsed {
@@ -38,6 +69,8 @@ export interface HostStyle {
   readonly toRadians: readonly string[];
   readonly toDegrees: readonly string[];
   readonly piNames: readonly string[];
+  /** A new statement that gives a constant its name, with a comment; undefined where one line cannot do that (declarations stand elsewhere). */
+  define(name: string, value: string, note: string): string | undefined;
   /** Prints an expression in the host's syntax. */
   print(expr: Expr): string;
 }

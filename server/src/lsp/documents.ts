@@ -1,5 +1,6 @@
 /** The open documents, kept in step with the editor by the changes it sends. */
 import type { TextDocumentContentChangeEvent, TextDocumentItem } from 'vscode-languageserver/node.js';
+import { languages } from '../frontends/registry.ts';
 import type { LanguageId } from '../program/nodes.ts';
 import { LineIndex } from '../text/line-index.ts';
 import { fileOf } from './paths.ts';
@@ -13,8 +14,6 @@ export interface OpenDocument {
   readonly version: number;
   readonly text: string;
 }
-
-const languages: readonly LanguageId[] = ['python', 'nomenclature'];
 
 export class Documents {
   private readonly byUri = new Map<string, OpenDocument>();

@@ -1,7 +1,7 @@
 /** Files as the editor sees them: an open document wins over the disk. */
 import { diskFiles } from '../platform/disk.ts';
 import type { FileSource } from '../service/contract.ts';
-import { join, parent } from '../service/imports.ts';
+import { join, parent } from '../text/paths.ts';
 import type { Documents } from './documents.ts';
 import { isPath } from './paths.ts';
 

@@ -1,23 +1,23 @@
 /** What ships with the engine, read from disk: beside the bundle, or from the sources and their packages. */
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
+import { basename, dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
-import type { LanguageId } from '../program/nodes.ts';
+import { frontEndEntries } from '../frontends/registry.ts';
 import type { Assets } from '../service/contract.ts';
 
 const here = dirname(fileURLToPath(import.meta.url));
-const grammars: Partial<Record<LanguageId, string>> = { python: 'tree-sitter-python' };
+const runtime = 'web-tree-sitter/web-tree-sitter.wasm';
 
 /** The assets of this installation. Throws where it is incomplete: that is a fault of the installation, not of any script. */
 export function nodeAssets(): Assets {
   const bundled = existsSync(join(here, 'grammars'));
   const signatures = bundled ? join(here, 'signatures') : join(here, '..', 'signatures');
-  const grammarFile = (name: string): string => (bundled ? join(here, 'grammars', `${name}.wasm`) : fromPackage(`${name}/${name}.wasm`));
+  const grammarFile = (path: string): string => (bundled ? join(here, 'grammars', basename(path)) : fromPackage(path));
   return {
-    runtime: readFileSync(grammarFile('web-tree-sitter')),
+    runtime: readFileSync(grammarFile(runtime)),
     grammar: (language) => {
-      const name = grammars[language];
-      return name === undefined ? undefined : readFileSync(grammarFile(name));
+      const path = frontEndEntries.find((entry) => entry.language === language)?.grammar;
+      return path === undefined ? undefined : readFileSync(grammarFile(path));
     },
     signatures: (language) => {
       const folder = join(signatures, language);

@@ -2,18 +2,12 @@
 import type { FindingCode, Severity } from '../findings/finding.ts';
 import type { NoteSettings } from '../notes/types.ts';
 import type { LanguageId } from '../program/nodes.ts';
-import type { TextEdit } from '../frontends/frontend.ts';
+import type { FileSource, TextEdit } from '../frontends/frontend.ts';
 import type { Confidence, FixKind } from '../repairs/fix.ts';
 import type { Span } from '../text/span.ts';
 import type { GroupsService } from './groups-service.ts';
 
-/** The only way the service learns of files it was not given. Synchronous; answers from memory in an editor. */
-export interface FileSource {
-  /** Text of a file; undefined where there is none or it cannot be read. */
-  read(file: string): string | undefined;
-  /** Names (not paths) of the files in a folder; empty where there is none. */
-  list(folder: string): readonly string[];
-}
+export type { FileSource };
 
 /** What the engine needs from outside besides scripts: bytes and texts that ship with it. */
 export interface Assets {
@@ -92,6 +86,8 @@ export interface HoverInfo {
 
 /** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
 export interface Workspace {
+  /** Loads the front end of each language, where that is not done yet. A file in another language gives no findings. */
+  prepare(...languages: readonly LanguageId[]): Promise<void>;
   /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
   check(file: string, text: string, language?: LanguageId): CheckResult;
   /**

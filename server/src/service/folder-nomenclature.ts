@@ -6,7 +6,7 @@ import { nomenclatureNotesInForce } from '../notes/nomenclature/in-force.ts';
 import { emptyVocabulary, type Vocabulary } from '../quantities/unit-result.ts';
 import type { SignatureTable } from '../solver/library.ts';
 import type { FileSource } from './contract.ts';
-import { join, parent } from './imports.ts';
+import { join, parent } from '../text/paths.ts';
 
 export interface Reach {
   symbol(name: string): NoteInForce | undefined;

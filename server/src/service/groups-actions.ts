@@ -33,7 +33,7 @@ function relationActions(understood: Understood, style: HostStyle, found: FoundR
   if (result.groups.length === 0) return [];
   const syntax = hostSyntax[found.language];
   const actions: GroupAction[] = [{ kind: 'comment', title: 'Write the dimensionless groups here', edits: [wordsEdit(understood, found, style, groupLines(result, found))] }];
-  const defined = definitionsEdit(understood, found, result);
+  const defined = definitionsEdit(understood, found, result, style);
   if (defined) actions.push({ kind: 'define', title: 'Define the dimensionless groups', edits: [defined] });
   const solved = equation(result, syntax);
   if (solved) actions.push({ kind: 'equation', title: `Write ${solved}`, edits: [wordsEdit(understood, found, style, [solved])] });

@@ -26,8 +26,8 @@ export function wordsEdit(understood: Understood, found: FoundRelation, style: H
 }
 
 /** Definitions of the groups in the language of the file; undefined where no group can be computed there. */
-export function definitionsEdit(understood: Understood, found: FoundRelation, result: GroupsResult): TextEdit | undefined {
-  return found.language === 'nomenclature' ? nomenclatureEdit(understood, found, result) : scriptEdit(understood, found, result);
+export function definitionsEdit(understood: Understood, found: FoundRelation, result: GroupsResult, style: HostStyle): TextEdit | undefined {
+  return found.language === 'nomenclature' ? nomenclatureEdit(understood, found, result) : scriptEdit(understood, found, result, style);
 }
 
 function nomenclatureEdit(understood: Understood, found: FoundRelation, result: GroupsResult): TextEdit | undefined {
@@ -36,7 +36,7 @@ function nomenclatureEdit(understood: Understood, found: FoundRelation, result: 
   return lines.length > 0 ? { start: at, end: at, text: lines.map((each) => lineBreak(understood.parsed.text) + each).join('') } : undefined;
 }
 
-function scriptEdit(understood: Understood, found: FoundRelation, result: GroupsResult): TextEdit | undefined {
+function scriptEdit(understood: Understood, found: FoundRelation, result: GroupsResult, style: HostStyle): TextEdit | undefined {
   const fn = found.where.piece?.fn;
   const body = (fn ? fn.body : topLevel(understood)).filter((statement) => !(statement.kind === 'evaluate' && statement.value.kind === 'text'));
   const chunkOf = (statement: Stmt) => understood.parsed.program.chunks.find(({ statements }) => statements.includes(statement)) ?? found.where.chunk;
@@ -53,7 +53,9 @@ function scriptEdit(understood: Understood, found: FoundRelation, result: Groups
   const indent = /^[ \t]*/.exec(index.lineText(index.lineAt(anchor.start + beside.start)))?.[0] ?? '';
   // A body on the line of its `def` has no place for another statement.
   if (index.position(anchor.start + beside.start).column !== indent.length) return undefined;
-  const written = usable.map(({ name, expression, words }) => `${indent}${name} = ${expression}  # [1]${words && ` ${words}`}`);
+  const definitions = usable.map(({ name, expression, words }) => style.define(name, expression, `[1]${words && ` ${words}`}`));
+  if (definitions.some((each) => each === undefined)) return undefined;
+  const written = definitions.map((each) => `${indent}${each}`);
   const end = lineBreak(understood.parsed.text);
   const at = after ? index.lineEnd(line) : index.lineStart(line);
   return { start: at, end: at, text: written.map((each) => (after ? end + each : each + end)).join('') };

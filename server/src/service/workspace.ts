@@ -2,8 +2,7 @@
 import { detect, type Engine, say, type Understood, understand } from '../analyze.ts';
 import type { Detected } from '../findings/collect.ts';
 import type { FrontEnd, TextEdit } from '../frontends/frontend.ts';
-import { nomenclatureFrontEnd } from '../frontends/nomenclature/index.ts';
-import { createPythonFrontEnd } from '../frontends/python/index.ts';
+import { frontEndEntries } from '../frontends/registry.ts';
 import { nomenclatureNotes } from '../notes/nomenclature/chunk-notes.ts';
 import { readChunkNotes } from '../notes/read-chunk.ts';
 import type { ChunkNotes } from '../notes/types.ts';
@@ -19,7 +18,6 @@ import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
 import { type GroupsService, groupsService } from './groups-service.ts';
 import { hoverAt } from './hover.ts';
-import { resolveImport } from './imports.ts';
 import { voiceOver } from './voice-over.ts';
 
 /** Imported files that are kept understood from one check to the next. Never dropped during a check: modules import each other in circles. */
@@ -27,11 +25,11 @@ const mostImports = 60;
 /** More than this many are not followed: what lies beyond is unknown. */
 const mostAtOnce = 150;
 
-export async function createWorkspace(assets: Assets, source: FileSource, settings: Settings): Promise<Workspace> {
-  const grammar = assets.grammar('python');
-  const python = grammar && (await createPythonFrontEnd(assets.runtime, grammar));
-  const frontEnds = [python, nomenclatureFrontEnd].filter((each) => each !== undefined);
-  return new Files(assets, source, settings, frontEnds);
+/** A workspace with the front ends of some languages; `prepare` adds others. Rejects where the installation is incomplete. */
+export async function createWorkspace(assets: Assets, source: FileSource, settings: Settings, languages: readonly LanguageId[] = ['python', 'nomenclature']): Promise<Workspace> {
+  const files = new Files(assets, source, settings);
+  await files.prepare(...languages);
+  return files;
 }
 
 interface Kept {
@@ -49,14 +47,20 @@ class Files implements Workspace {
   private notes = new WeakMap<Chunk, { readonly reach: string; readonly notes: ChunkNotes }>();
   private cache = new WeakMap<object, Solved>();
 
-  constructor(
-    private readonly assets: Assets,
-    private readonly source: FileSource,
-    private readonly settings: Settings,
-    private readonly frontEnds: readonly FrontEnd[],
-  ) {
+  private readonly frontEnds: FrontEnd[] = [];
+  private readonly loading = new Map<LanguageId, Promise<void>>();
+
+  constructor(private readonly assets: Assets, private readonly source: FileSource, private readonly settings: Settings) {
     this.folders = new NomenclatureFolders(source);
     this.groups = groupsService((file) => this.heldOf(file), (file) => this.textOf(file));
+  }
+
+  async prepare(...languages: readonly LanguageId[]): Promise<void> {
+    await Promise.all(languages.map((language) => {
+      const loading = this.loading.get(language) ?? this.load(language);
+      this.loading.set(language, loading);
+      return loading;
+    }));
   }
 
   check(file: string, text: string, language?: LanguageId): CheckResult {
@@ -112,6 +116,11 @@ class Files implements Workspace {
     this.libraries.clear();
   }
 
+  private async load(language: LanguageId): Promise<void> {
+    const entry = frontEndEntries.find((each) => each.language === language);
+    if (entry) this.frontEnds.push(await entry.create({ runtime: this.assets.runtime, grammar: this.assets.grammar(language) ?? new Uint8Array() }));
+  }
+
   private heldOf(file: string): { readonly understood: Understood; readonly style: FrontEnd['style'] } | undefined {
     const kept = this.open.get(file);
     const frontEnd = this.frontEnds.find((each) => each.language === kept?.understood.parsed.program.language);
@@ -132,7 +141,8 @@ class Files implements Workspace {
       readNotes: (chunk) => this.notesOf(chunk, frontEnd, reach),
       library: this.libraryFor(frontEnd.language, reach),
       nomenclature: (name) => reach.symbol(name),
-      importFile: (statement, name) => this.imported(resolveImport(file, statement, name, this.source)),
+      importFile: (statement, name) => this.imported(frontEnd.resolve?.(file, statement, name, this.source), frontEnd),
+      neighbour: (name) => this.imported(frontEnd.neighbour?.(file, name, this.source), frontEnd),
       cache: this.cache,
     };
   }
@@ -164,7 +174,7 @@ class Files implements Workspace {
     return table;
   }
 
-  private imported(file: string | undefined): FileSolver | undefined {
+  private imported(file: string | undefined, from: FrontEnd): FileSolver | undefined {
     if (file === undefined) return undefined;
     const open = this.open.get(file);
     if (open) return open.understood.solver;
@@ -172,7 +182,7 @@ class Files implements Workspace {
     if (this.imports.size >= mostAtOnce) return undefined;
     this.imports.set(file, undefined);
     const text = this.source.read(file);
-    const frontEnd = this.frontEndOf(file, undefined);
+    const frontEnd = reads(from, file) ? from : this.frontEndOf(file, undefined);
     const understood = text === undefined || !frontEnd ? undefined : understand(text, file, this.engineFor(file, frontEnd, this.folders.reachOf(file)));
     understood?.parsed.release();
     this.imports.set(file, understood);
@@ -185,7 +195,7 @@ class Files implements Workspace {
 
   private frontEndOf(file: string, language: LanguageId | undefined): FrontEnd | undefined {
     if (language) return this.frontEnds.find((each) => each.language === language);
-    return this.frontEnds.find((each) => each.endings.some((ending) => file.endsWith(ending)));
+    return this.frontEnds.find((each) => reads(each, file));
   }
 
   private severe(detected: readonly Detected[]): readonly Detected[] {
@@ -194,6 +204,12 @@ class Files implements Workspace {
       return severity === 'off' ? [] : [{ ...each, severity }];
     });
   }
+}
+
+/** Whether a file has one of a language's endings. */
+function reads({ endings }: FrontEnd, file: string): boolean {
+  const lower = file.toLowerCase();
+  return endings.some((ending) => lower.endsWith(ending));
 }
 
 function statisticsOf(understood: Understood): CheckResult['statistics'] {

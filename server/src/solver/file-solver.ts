@@ -21,6 +21,8 @@ export interface FileInputs {
   readonly nomenclature: (name: string) => NoteInForce | undefined;
   /** Another file of the workspace, for an import of this one; undefined for libraries. */
   readonly importFile: (statement: ImportStmt, name?: string) => FileSolver | undefined;
+  /** The file that defines a name which this one reads without an import. */
+  readonly neighbour: (name: string) => FileSolver | undefined;
   /** Results of earlier versions, by function; checked by what they read. */
   readonly cache: WeakMap<object, Solved>;
 }
@@ -87,9 +89,14 @@ export class FileSolver {
   global(name: string): Value | undefined {
     if (this.globals.has(name)) return this.globals.get(name);
     this.globals.set(name, undefined);
-    const value = this.define(name) ?? this.starred(name) ?? this.inputs.library.find(name);
+    const value = this.define(name) ?? this.starred(name) ?? this.inputs.neighbour(name)?.own(name) ?? this.inputs.library.find(name);
     this.globals.set(name, value);
     return value;
+  }
+
+  /** What the file itself defines under a name. */
+  own(name: string): Value | undefined {
+    return this.names.has(name) ? this.global(name) : undefined;
   }
 
   /** The names that the file's top level assigns. */

@@ -1,7 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { nomenclatureFrontEnd } from '../../../server/src/frontends/nomenclature/index.ts';
+import { loadFrontEnd } from '../../harness/front-ends.ts';
 import { problemsOf, read, symbolsOf } from './helpers.ts';
+
+const nomenclature = await loadFrontEnd('nomenclature');
 
 describe('symbols', () => {
   test.each([
@@ -147,17 +149,17 @@ describe('relations and constants', () => {
 
 describe('as a program', () => {
   test('unchanged lines keep their chunks when lines are added above', () => {
-    const first = nomenclatureFrontEnd.parse('D [m]\nRe [1] = D*2', 'a.nomen');
-    const again = nomenclatureFrontEnd.parse('# new\nD [m]\nRe [1] = D*2', 'a.nomen', first);
+    const first = nomenclature.parse('D [m]\nRe [1] = D*2', 'a.nomen');
+    const again = nomenclature.parse('# new\nD [m]\nRe [1] = D*2', 'a.nomen', first);
     expect(again.program.chunks.slice(1)).toEqual(first.program.chunks);
     expect(again.program.chunks[2]).toBe(first.program.chunks[1]);
     expect(again.program.chunks.map((chunk) => chunk.anchor.start)).toEqual([0, 6, 12]);
   });
 
   test.each(['a*(b + c)/d', 'a/b/c', 'a/(b/c)', 'a^(1/2)', '-a^2', '(-a)^2', 'a - (b - c)', 'max(a, 2*b)', 'a^-b', '2^3^2'])('%s is printed as it was read', (formula) => {
-    const { program } = nomenclatureFrontEnd.parse(`y = ${formula}`, 'a.nomen');
+    const { program } = nomenclature.parse(`y = ${formula}`, 'a.nomen');
     const statement = program.chunks[0]?.statements[0];
-    expect(statement?.kind === 'assign' && nomenclatureFrontEnd.style.print(statement.value)).toBe(formula);
+    expect(statement?.kind === 'assign' && nomenclature.style.print(statement.value)).toBe(formula);
   });
 });
 
@@ -165,6 +167,6 @@ test('never throws, and every span lies in the text', () => {
   const piece = fc.constantFrom('D', 'rho', '[m]', '[', ']', '=', '2', '0.5', '..', '*', '^', '/', '(', ')', ',', ' ', '\n', '#', 'unit ', 'depends on', '?a', '-', '.', 'sin(', '[?a^', '\r', 'é', '…');
   fc.assert(fc.property(fc.array(piece, { maxLength: 40 }).map((pieces) => pieces.join('')), (text) => {
     for (const { span } of read(text).problems) expect(span.start >= 0 && span.start <= span.end && span.end <= text.length).toBe(true);
-    nomenclatureFrontEnd.parse(text, 'a.nomen');
+    nomenclature.parse(text, 'a.nomen');
   }), { numRuns: 400 });
 });

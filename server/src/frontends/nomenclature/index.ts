@@ -4,27 +4,24 @@ import type { Line } from '../../notes/nomenclature/model.ts';
 import { splitLines } from '../../notes/nomenclature/read.ts';
 import type { Chunk, NameExpr, Stmt } from '../../program/nodes.ts';
 import { withoutComment } from '../../signatures/notation.ts';
-import type { FrontEnd, Parsed } from '../frontend.ts';
+import type { FrontEnd, FrontEndEntry, Parsed } from '../frontend.ts';
+import { reuseChunks } from '../reuse.ts';
 import { printFormula } from './print.ts';
 
-export const nomenclatureFrontEnd: FrontEnd = {
+const nomenclatureFrontEnd: FrontEnd = {
   language: 'nomenclature',
   endings: ['.nomen'],
-  style: { comment: '#', power: '^', pi: 'pi', print: printFormula, toRadians: [], toDegrees: [], piNames: [] },
+  style: { comment: '#', power: '^', pi: 'pi', print: printFormula, toRadians: [], toDegrees: [], piNames: [], define: (name, value, note) => `${name} = ${value}  # ${note}` },
   parse,
 };
 
+export const nomenclatureEntry: FrontEndEntry = { language: 'nomenclature', endings: nomenclatureFrontEnd.endings, create: () => nomenclatureFrontEnd };
+
 /** One chunk per line; a line that did not change keeps its chunk, wherever it stands now. */
 function parse(text: string, file: string, previous?: Parsed): Parsed {
-  const pool = new Map<string, Chunk[]>();
-  for (const chunk of previous?.program.chunks ?? []) pool.set(chunk.text, [...(pool.get(chunk.text) ?? []), chunk]);
-  const chunks: Chunk[] = [];
-  for (const line of splitLines(text)) {
-    if (line.text.trim() === '') continue;
-    const kept = pool.get(line.text)?.shift();
-    if (kept) kept.anchor.start = line.start;
-    chunks.push(kept ?? chunkOf(line.text, line.start, file));
-  }
+  const lines = splitLines(text).filter((line) => line.text.trim() !== '');
+  const kept = reuseChunks(previous?.program.chunks ?? [], text, lines.map(({ start, text: { length } }) => ({ start, end: start + length })), () => true);
+  const chunks = lines.map((line, at) => kept[at] ?? chunkOf(line.text, line.start, file));
   return { text, program: { language: 'nomenclature', file, chunks }, tree: undefined, release: () => undefined };
 }
 

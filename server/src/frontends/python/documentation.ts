@@ -1,7 +1,7 @@
 /** Docstrings: of functions, classes and modules, and those behind a field. */
 import type { DocText, Stmt } from '../../program/nodes.ts';
-import { type Lowering, textOf } from './lowering.ts';
-import type { Syntax } from './syntax.ts';
+import { type Lowering, textOf } from '../tree-sitter/lowering.ts';
+import type { Syntax } from '../tree-sitter/syntax.ts';
 
 /** The text between the quotes of a single plain or raw string; undefined for joined and formatted texts, bytes, and unfinished ones. */
 export function docText(low: Lowering, node: Syntax): DocText | undefined {

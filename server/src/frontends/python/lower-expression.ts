@@ -2,8 +2,8 @@
 import type { Argument, BinaryExpr, CompareOp, Expr, Param, RecordEntry } from '../../program/nodes.ts';
 import { Rational } from '../../quantities/rational.ts';
 import type { Span } from '../../text/span.ts';
-import { type Lowering, spanOf, textOf } from './lowering.ts';
-import { fieldOf, fieldsOf, partsOf, type Syntax } from './syntax.ts';
+import { type Lowering, spanOf, textOf } from '../tree-sitter/lowering.ts';
+import { fieldOf, fieldsOf, partsOf, type Syntax } from '../tree-sitter/syntax.ts';
 
 const deepest = 400;
 

@@ -1,6 +1,6 @@
 import type { ImportStmt } from '../../program/nodes.ts';
-import { type Lowering, textOf } from './lowering.ts';
-import { fieldOf, fieldsOf, type Syntax } from './syntax.ts';
+import { type Lowering, textOf } from '../tree-sitter/lowering.ts';
+import { fieldOf, fieldsOf, type Syntax } from '../tree-sitter/syntax.ts';
 
 type Imported = Pick<ImportStmt, 'kind' | 'module' | 'level' | 'names' | 'alias'>;
 

@@ -1,7 +1,7 @@
 import type { MatchStmt, NameExpr, Stmt } from '../../program/nodes.ts';
 import { lowerExpression } from './lower-expression.ts';
-import { type Lowering, spanOf, textOf } from './lowering.ts';
-import { fieldOf, fieldsOf, type Syntax } from './syntax.ts';
+import { type Lowering, spanOf, textOf } from '../tree-sitter/lowering.ts';
+import { fieldOf, fieldsOf, type Syntax } from '../tree-sitter/syntax.ts';
 
 /** What a `match` statement holds besides its place; `block` lowers the statements of a case. */
 export function matchParts(low: Lowering, node: Syntax, block: (node: Syntax | undefined) => readonly Stmt[]): Pick<MatchStmt, 'kind' | 'subject' | 'cases'> {

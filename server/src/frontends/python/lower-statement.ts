@@ -4,9 +4,9 @@ import type { Span } from '../../text/span.ts';
 import { docOf, withFieldDocs } from './documentation.ts';
 import { importedModules, importedNames } from './lower-import.ts';
 import { child, lowerArguments, lowerExpression, lowerParams } from './lower-expression.ts';
-import { type Lowering, spanOf, textOf } from './lowering.ts';
+import { type Lowering, spanOf, textOf } from '../tree-sitter/lowering.ts';
 import { matchParts } from './lower-match.ts';
-import { fieldOf, partsOf, type Syntax } from './syntax.ts';
+import { fieldOf, partsOf, type Syntax } from '../tree-sitter/syntax.ts';
 
 export function lowerBlock(low: Lowering, node: Syntax | undefined): readonly Stmt[] {
   return node ? lowerStatements(low, partsOf(node)) : [];

@@ -62,7 +62,9 @@ function named({ expr, start, dimension }: Bare, fault: Contradiction, scene: Sc
   const name = freeName(known ? (symbols.find(([pattern]) => pattern.test(known.name))?.[1] ?? 'coeff') : 'coeff', scene.text);
   const breaks = scene.text.includes('\r\n') ? '\r\n' : '\n';
   const above = lines.lineStart(first);
-  const definition = `${indent}${name} = ${expr.text}  ${style.comment} [${unit}]${known ? ` ${known.name}` : ''}${breaks}`;
+  const written = style.define(name, expr.text, `[${unit}]${known ? ` ${known.name}` : ''}`);
+  if (written === undefined) return [];
+  const definition = `${indent}${written}${breaks}`;
   return [{
     kind: 'name-number', confidence: known ? 'likely' : 'choice', cost: known ? 0.5 : 3,
     edits: [{ start: above, end: above, text: definition }, { start, end: start + expr.end - expr.start, text: name }],

@@ -26,17 +26,19 @@ export interface Found {
 
 const deepest = 900;
 const none: readonly Syntax[] = [];
-/** Node types without children worth a look. */
-const leaves = new Set(['identifier', 'integer', 'float', 'true', 'false', 'none', 'comment', 'string_start', 'string_content', 'string_end', 'ellipsis', 'pass_statement', 'break_statement', 'continue_statement']);
-/** Node types whose children carry no field that lowering asks for. */
-const fieldless = new Set([
-  'argument_list', 'block', 'comment', 'concatenated_string', 'conditional_expression', 'decorator', 'dictionary', 'dotted_name', 'ERROR', 'expression_list', 'expression_statement',
-  'list', 'module', 'parameters', 'lambda_parameters', 'parenthesized_expression', 'pattern_list', 'return_statement', 'set', 'slice', 'string', 'tuple', 'tuple_pattern', 'type', 'with_clause',
-]);
-/** Nodes that may stand anywhere and are part of nothing. */
-const extras = new Set(['comment', 'line_continuation']);
-/** Tokens that lowering looks at; all others are punctuation. */
-const kept = /^(?::|[+\-*/%@&|^~]|\*\*|\/\/|<<|>>|[+\-*/%@&|^]=|(?:\*\*|\/\/|<<|>>)=|[<>]=?|==|!=|<>|and|or|not|in|is|not in|is not)$/;
+/** Which nodes of a grammar are copied, and how. */
+export interface TreeShape {
+  /** Node types of comments. */
+  readonly comments: ReadonlySet<string>;
+  /** Node types without children worth a look. */
+  readonly leaves: ReadonlySet<string>;
+  /** Node types whose children carry no field that lowering asks for. */
+  readonly fieldless: ReadonlySet<string>;
+  /** Named nodes that may stand anywhere and are part of nothing, comments among them. */
+  readonly extras: ReadonlySet<string>;
+  /** Tokens that lowering looks at; all others are punctuation. */
+  readonly tokens: RegExp;
+}
 
 interface Kind {
   readonly type: string;
@@ -44,6 +46,7 @@ interface Kind {
   readonly leaf: boolean;
   readonly kept: boolean;
   readonly fieldless: boolean;
+  readonly comment: boolean;
 }
 
 /** Copies trees of one grammar. */
@@ -51,7 +54,7 @@ export class TreeCopier {
   private readonly kinds: (Kind | undefined)[] = [];
   private readonly fields: (string | undefined)[] = [];
 
-  constructor(private readonly language: Language) {}
+  constructor(private readonly language: Language, private readonly shape: TreeShape) {}
 
   /** A node and everything below it; `broken` where it holds a syntax error, so that missing tokens are looked for. */
   copy(node: TreeNode, broken: boolean, found: Found): Syntax {
@@ -74,7 +77,7 @@ export class TreeCopier {
     do {
       const below = this.kindOf(cursor);
       if (broken && note(cursor, below, found)) faulty = true;
-      if (below.type === 'comment') found.comments.push({ start: cursor.startIndex, end: cursor.endIndex });
+      if (below.comment) found.comments.push({ start: cursor.startIndex, end: cursor.endIndex });
       if (!below.kept) continue;
       if (!below.named) tokens++;
       const child = this.copyAt(cursor, below, !kind.fieldless, depth + 1, broken, found);
@@ -92,7 +95,8 @@ export class TreeCopier {
     if (known) return known;
     const type = cursor.nodeType;
     const named = cursor.nodeIsNamed;
-    const kind = { type, named, leaf: !named || leaves.has(type), kept: named ? !extras.has(type) : kept.test(type), fieldless: fieldless.has(type) };
+    const { comments, leaves, fieldless, extras, tokens } = this.shape;
+    const kind = { type, named, leaf: !named || leaves.has(type), kept: named ? !extras.has(type) : tokens.test(type), fieldless: fieldless.has(type), comment: comments.has(type) };
     if (type !== 'ERROR') this.kinds[id] = kind;
     return kind;
   }

@@ -1,5 +1,6 @@
-import type { ImportStmt } from '../program/nodes.ts';
-import type { FileSource } from './contract.ts';
+import type { ImportStmt } from '../../program/nodes.ts';
+import { join, parent } from '../../text/paths.ts';
+import type { FileSource } from '../frontend.ts';
 
 /** How far above a script its packages are looked for. */
 const levelsUp = 4;
@@ -38,13 +39,4 @@ function moduleFile(folder: string, parts: readonly string[], source: FileSource
   if (!names.includes(last)) return undefined;
   const inside = join(at, last);
   return source.list(inside).includes('__init__.py') ? join(inside, '__init__.py') : undefined;
-}
-
-export function parent(path: string): string {
-  const at = Math.max(path.lastIndexOf('/'), path.lastIndexOf('\\'));
-  return at <= 0 ? (at === 0 ? path.slice(0, 1) : '.') : path.slice(0, at);
-}
-
-export function join(folder: string, name: string): string {
-  return folder === '.' ? name : folder.endsWith('/') ? folder + name : `${folder}/${name}`;
 }

@@ -9,14 +9,20 @@ interface Placed {
   readonly column: number;
 }
 
+/** What opens and closes a comment, with the blanks inside: anchored patterns. */
+export interface CommentMarkers {
+  readonly lead: RegExp;
+  readonly tail?: RegExp;
+}
+
 /** The comments of one chunk by line, with offsets relative to the chunk. */
 export class Comments {
   private readonly byLine = new Map<number, Placed>();
   private readonly owned = new Set<Comment>();
   readonly all: readonly Comment[];
 
-  /** `found`: where comments stand in the file, markers included, in order. */
-  constructor(found: readonly Span[], private readonly lines: LineIndex, private readonly base: number) {
+  /** `found`: where comments stand in the file, in order, markers included; `markers` takes those off. */
+  constructor(found: readonly Span[], private readonly lines: LineIndex, private readonly base: number, private readonly markers: CommentMarkers) {
     this.all = found.map((each) => this.place(each));
   }
 
@@ -67,8 +73,9 @@ export class Comments {
 
   private place(at: Span): Comment {
     const raw = this.lines.text.slice(at.start, at.end);
-    const lead = /^#+:?[^\S\n]*/.exec(raw)?.[0].length ?? 0;
-    const text = raw.slice(lead).trimEnd();
+    const lead = this.markers.lead.exec(raw)?.[0].length ?? 0;
+    const tail = this.markers.tail?.exec(raw.slice(lead))?.[0].length ?? 0;
+    const text = raw.slice(lead, raw.length - tail).trimEnd();
     const start = at.start + lead - this.base;
     const comment = { text, start, end: start + text.length };
     const line = this.lines.lineAt(at.start);

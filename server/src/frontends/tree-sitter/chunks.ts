@@ -1,13 +1,24 @@
 /** One chunk per top-level statement: with the comments directly above it and what stands on its lines. */
 import type { Node as TreeNode } from 'web-tree-sitter';
-import type { Chunk, DocText } from '../../program/nodes.ts';
+import type { Chunk, DocText, Stmt } from '../../program/nodes.ts';
 import type { LineIndex } from '../../text/line-index.ts';
 import { reuseChunks } from '../reuse.ts';
-import { Comments } from './comments.ts';
-import { docText } from './documentation.ts';
+import { type CommentMarkers, Comments } from './comments.ts';
 import type { Lowering } from './lowering.ts';
-import { isStatement, lowerStatements } from './lower-statement.ts';
-import type { Found, Syntax, TreeCopier } from './syntax.ts';
+import type { Found, Syntax, TreeCopier, TreeShape } from './syntax.ts';
+
+/** What a host language adds to the walk over its tree. */
+export interface TreeHost {
+  readonly shape: TreeShape;
+  readonly markers: CommentMarkers;
+  /** Whether a top-level node of this type is whole: a statement, a comment, or what stands between statements. */
+  isStatement(type: string): boolean;
+  lowerStatements(low: Lowering, nodes: readonly Syntax[]): readonly Stmt[];
+  /** The file's documentation, from the nodes of its first chunk with a statement; left out where the language has none. */
+  fileDoc?(low: Lowering, nodes: readonly Syntax[]): DocText | undefined;
+  /** Whether a chunk would give the file's documentation if it stood first. */
+  mayDocument?(chunk: Chunk): boolean;
+}
 
 interface Piece {
   start: number;
@@ -19,26 +30,26 @@ interface Piece {
 }
 
 /** The chunks of a syntax tree; those of `previous` that did not change come back without being lowered again. */
-export function chunksOf(root: TreeNode, copier: TreeCopier, lines: LineIndex, file: string, previous: readonly Chunk[]): readonly Chunk[] {
-  const pieces = piecesOf(root, lines);
+export function chunksOf(root: TreeNode, host: TreeHost, copier: TreeCopier, lines: LineIndex, file: string, previous: readonly Chunk[]): readonly Chunk[] {
+  const pieces = piecesOf(root, lines, host);
   const first = pieces.findIndex((piece) => !piece.commentsOnly);
   const fits = (chunk: Chunk, at: number): boolean => {
     if (pieces[at]?.broken || chunk.problems.length > 0) return false;
-    return at === first ? chunk.doc !== undefined || !mayDocument(chunk) : chunk.doc === undefined;
+    return at === first ? chunk.doc !== undefined || !host.mayDocument?.(chunk) : chunk.doc === undefined;
   };
   const kept = reuseChunks(previous, lines.text, pieces, fits);
-  return pieces.map((piece, at) => kept[at] ?? lower(piece, copier, lines, file, at === first));
+  return pieces.map((piece, at) => kept[at] ?? lower(piece, host, copier, lines, file, at === first));
 }
 
-function piecesOf(root: TreeNode, lines: LineIndex): readonly Piece[] {
+function piecesOf(root: TreeNode, lines: LineIndex, host: TreeHost): readonly Piece[] {
   const pieces: Piece[] = [];
   let lastLine = -1;
   for (const node of root.children) {
     if (!node) continue;
     const { type, startIndex, endIndex } = node;
     const line = lines.lineAt(startIndex);
-    const comment = type === 'comment';
-    const broken = !isStatement(type) || (!comment && node.hasError);
+    const comment = host.shape.comments.has(type);
+    const broken = !host.isStatement(type) || (!comment && node.hasError);
     const piece = pieces.at(-1);
     if (piece && (line === lastLine || (piece.commentsOnly && line === lastLine + 1))) {
       piece.nodes.push(node);
@@ -53,33 +64,22 @@ function piecesOf(root: TreeNode, lines: LineIndex): readonly Piece[] {
   return pieces;
 }
 
-/** Whether a chunk would be the file's documentation if it stood first. */
-function mayDocument(chunk: Chunk): boolean {
-  const [statement] = chunk.statements;
-  return statement?.kind === 'evaluate' && statement.value.kind === 'text';
-}
-
-function lower(piece: Piece, copier: TreeCopier, lines: LineIndex, file: string, first: boolean): Chunk {
+function lower(piece: Piece, host: TreeHost, copier: TreeCopier, lines: LineIndex, file: string, first: boolean): Chunk {
   const found: Found = { comments: [], problems: [] };
   const nodes: Syntax[] = [];
   for (const node of piece.nodes) {
-    if (node.type === 'comment') found.comments.push({ start: node.startIndex, end: node.endIndex });
+    if (host.shape.comments.has(node.type)) found.comments.push({ start: node.startIndex, end: node.endIndex });
     else nodes.push(copier.copy(node, piece.broken, found));
   }
-  const comments = new Comments(found.comments, lines, piece.start);
+  const comments = new Comments(found.comments, lines, piece.start, host.markers);
   const low: Lowering = { text: lines.text, base: piece.start, comments, depth: 0 };
-  const doc = first ? docOf(low, nodes[0]) : undefined;
+  const doc = first ? host.fileDoc?.(low, nodes) : undefined;
   if (piece.broken && found.problems.length === 0) found.problems.push({ start: piece.start, end: piece.end, message: 'cannot be parsed' });
   return {
     anchor: { file, start: piece.start },
     text: lines.text.slice(piece.start, piece.end),
-    statements: lowerStatements(low, nodes),
+    statements: host.lowerStatements(low, nodes),
     problems: found.problems.map((each) => ({ start: each.start - piece.start, end: each.end - piece.start, message: each.message })),
     comments: comments.all, ...(doc ? { doc } : {}),
   };
-}
-
-function docOf(low: Lowering, node: Syntax | undefined): DocText | undefined {
-  const text = node?.type === 'expression_statement' ? node.parts[0] : undefined;
-  return text && docText(low, text);
 }

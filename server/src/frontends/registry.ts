@@ -1,0 +1,19 @@
+/** The host languages: one line each. */
+import type { LanguageId } from '../program/nodes.ts';
+import type { FrontEndEntry } from './frontend.ts';
+import { nomenclatureEntry } from './nomenclature/index.ts';
+import { pythonEntry } from './python/index.ts';
+
+export const frontEndEntries: readonly FrontEndEntry[] = [
+  pythonEntry,
+  nomenclatureEntry,
+];
+
+/** Every language served. */
+export const languages: readonly LanguageId[] = frontEndEntries.map(({ language }) => language);
+
+/** The language of a file by its ending. */
+export function languageOf(file: string): LanguageId | undefined {
+  const lower = file.toLowerCase();
+  return frontEndEntries.find(({ endings }) => endings.some((ending) => lower.endsWith(ending)))?.language;
+}
