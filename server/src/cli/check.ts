@@ -122,6 +122,7 @@ class Run {
       const bytes = readFileSync(path);
       const decoded = decode(bytes);
       if (!decoded.ok || decoded.text !== text) throw new Error('it changed while it was read');
+      await workspace.prepare(language);
       const repaired = applyProven(workspace, slashed(path), text, language);
       if (repaired.text === text) return text;
       const written = this.options.fix === 'show' ? { ok: true as const } : replaceFile(path, bytes, text, repaired.text);
@@ -163,6 +164,7 @@ class Run {
     const workspace = await this.workspaceFor(dirname(file));
     let findings: ReturnType<typeof reportedOf>;
     try {
+      await workspace.prepare(language);
       const result = workspace.check(file, text, language);
       this.tally.count(result);
       findings = reportedOf(result, (other) => this.source.read(other), (other) => this.nameOf(other));

@@ -48,6 +48,7 @@ export class Session {
   async check(document: OpenDocument): Promise<CheckResult> {
     for (;;) {
       const workspace = await this.engine;
+      if (document.language) await workspace.prepare(document.language);
       const known = this.checked.get(document.uri);
       if (known?.document === document && known.epoch === this.epoch) return known.result;
       const result = workspace.check(document.file, document.text, document.language);
