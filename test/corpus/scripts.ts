@@ -1,10 +1,10 @@
 /** The scripts of a corpus, as the command would find and read them. */
 import { resolve } from 'node:path';
-import { defaultConfiguration } from '../../server/src/cli/configuration.ts';
+import { defaultConfiguration } from '../../server/src/service/configuration.ts';
 import { readText } from '../../server/src/cli/input.ts';
 import { languageOf } from '../../server/src/cli/languages.ts';
 import type { LanguageId } from '../../server/src/program/nodes.ts';
-import { walk } from '../../server/src/cli/walk.ts';
+import { walk } from '../../server/src/platform/walk.ts';
 
 export interface Script {
   readonly file: string;

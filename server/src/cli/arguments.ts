@@ -1,13 +1,11 @@
 /** The command line, read into plain options. */
 import { parseArgs } from 'node:util';
-import { type FindingCode, findingCodes, type Severity } from '../findings/finding.ts';
+import { type FindingCode, findingCodes, type Level, levels } from '../findings/finding.ts';
 import type { LanguageId } from '../program/nodes.ts';
 import { languageNames } from './languages.ts';
-import { didYouMean } from './suggest.ts';
+import { didYouMean } from '../service/suggest.ts';
 
 export type FormatName = 'text' | 'json' | 'sarif';
-export type Level = Severity | 'off';
-
 export interface CheckOptions {
   /** Files and folders as given; `-` is standard input. */
   readonly paths: readonly string[];
@@ -32,8 +30,6 @@ export type Request =
   | { readonly kind: 'misuse'; readonly problem: string };
 
 export const formatNames: readonly FormatName[] = ['text', 'json', 'sarif'];
-export const levels: readonly Level[] = ['error', 'warning', 'information', 'hint', 'off'];
-
 const optionTypes = {
   format: { type: 'string' },
   severity: { type: 'string', multiple: true },

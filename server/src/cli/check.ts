@@ -5,7 +5,8 @@ import { decode } from '../platform/decode.ts';
 import { diskFiles } from '../platform/disk.ts';
 import type { CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
 import type { CheckOptions } from './arguments.ts';
-import { type Configuration, type ConfigurationProblem, Configurations, readConfiguration } from './configuration.ts';
+import { Configurations } from '../platform/configurations.ts';
+import { type Configuration, type ConfigurationProblem, readConfiguration } from '../service/configuration.ts';
 import { jsonFormat } from './formats/json.ts';
 import { sarifFormat } from './formats/sarif.ts';
 import { statisticsText, textFormat } from './formats/text.ts';
@@ -15,7 +16,7 @@ import { displayName, folderUri, slashed } from './names.ts';
 import { progressLine } from './progress.ts';
 import { type Format, reportedOf } from './report.ts';
 import { Tally } from './tally.ts';
-import { walk, whyUnreadable } from './walk.ts';
+import { walk, whyUnreadable } from '../platform/walk.ts';
 
 /** What the command needs of its surroundings. */
 export interface Surroundings {

@@ -1,6 +1,6 @@
 /** The command line of `groups`, read into plain options. */
 import { parseArgs } from 'node:util';
-import { didYouMean } from './suggest.ts';
+import { didYouMean } from '../service/suggest.ts';
 
 export type GroupsForm = 'text' | 'json' | 'latex' | 'markdown';
 

@@ -1,7 +1,7 @@
 /** Reading what is to be checked. */
 import { readFileSync, statSync } from 'node:fs';
 import { decode, type Decoded, mostBytes, tooLong } from '../platform/decode.ts';
-import { whyUnreadable } from './walk.ts';
+import { whyUnreadable } from '../platform/walk.ts';
 
 /** The text of a file, or why there is none. */
 export function readText(path: string): Decoded {

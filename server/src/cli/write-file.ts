@@ -2,7 +2,7 @@
 import { closeSync, fsyncSync, openSync, readFileSync, realpathSync, renameSync, rmSync, statSync, writeSync, chmodSync } from 'node:fs';
 import { basename, dirname, join } from 'node:path';
 import { encodeLike, equalBytes } from '../platform/encode.ts';
-import { whyUnreadable } from './walk.ts';
+import { whyUnreadable } from '../platform/walk.ts';
 
 /** What came of it; the problem is the end of a sentence that begins with the file's name. */
 export type Written = { readonly ok: true } | { readonly ok: false; readonly problem: string };

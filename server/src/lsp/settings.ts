@@ -1,5 +1,5 @@
 /** Settings as an editor sends them; what is not understood is left at its default. */
-import { findingCodes, type Severity } from '../findings/finding.ts';
+import { findingCodes, levels } from '../findings/finding.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
 import type { Settings } from '../service/contract.ts';
 
@@ -7,8 +7,6 @@ import type { Settings } from '../service/contract.ts';
 export const section = 'termwise';
 
 export const defaultSettings: Settings = { severities: {}, notes: defaultNoteSettings };
-
-const levels: readonly (Severity | 'off')[] = ['error', 'warning', 'information', 'hint', 'off'];
 
 /** Reads `{ severities: { … }, notes: { … } }`. */
 export function readSettings(sent: unknown): Settings {

@@ -1,9 +1,9 @@
 /** The files that the paths of a command line stand for, one after the other, without holding them all. */
 import { type Dirent, readdirSync, realpathSync, statSync } from 'node:fs';
 import { dirname, join, resolve, sep } from 'node:path';
-import type { Configuration } from './configuration.ts';
+import type { Configuration } from '../service/configuration.ts';
 import { chainAt, extend, type IgnoreChain, isIgnored, isToolFolder, matches } from './ignored.ts';
-import { languageOf } from './languages.ts';
+import { languageOf } from '../frontends/registry.ts';
 
 export type Walked =
   /** `named`: given on the command line and not found in a folder. Paths are absolute. */

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { readConfiguration } from '../../server/src/cli/configuration.ts';
+import { readConfiguration } from '../../server/src/service/configuration.ts';
 
 const problems = (text: string): readonly string[] => readConfiguration(text, '/w/termwise.json').problems.map((each) => `${each.line}:${each.column} ${each.message}`);
 
