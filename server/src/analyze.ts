@@ -58,13 +58,26 @@ export function understand(text: string, file: string, engine: Engine, previous?
 
 /** Solver to findings: solve every function, classify, drop what is allowed. */
 export function detect(understood: Understood): readonly Detected[] {
+  const steps = detectInSteps(understood);
+  for (;;) {
+    const step = steps.next();
+    if (step.done) return step.value;
+  }
+}
+
+/** The same with a pause after every function, for those who have other things to look after. */
+export function* detectInSteps(understood: Understood): Generator<void, readonly Detected[]> {
   const { parsed, solver, notes, lines } = understood;
   const detected: Detected[] = [];
+  yield;
   const formulas = parsed.program.language === 'nomenclature';
   const top = solver.topLevel()?.faults ?? [];
   // Formulas of a nomenclature file are evaluated in units: what differs by a factor is converted there.
   detected.push(...detectFaults(formulas ? top.filter((fault) => fault.kind !== 'scale') : top, false));
-  for (const piece of solver.pieces()) detected.push(...detectFaults(solver.piece(piece)?.faults ?? []));
+  for (const piece of solver.pieces()) {
+    detected.push(...detectFaults(solver.piece(piece)?.faults ?? []));
+    yield;
+  }
   for (const [chunk, read] of notes) {
     detected.push(...detectUnreadable(read.problems, chunk.anchor), ...detectAmbiguous(read.notes, chunk.anchor), ...detectDirectives(read.directives, chunk.anchor));
   }

@@ -5,7 +5,7 @@ import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import {
-  type ClientCapabilities, ConfigurationRequest, createProtocolConnection, type Diagnostic, DiagnosticRefreshRequest, DidChangeTextDocumentNotification,
+  type ClientCapabilities, type CodeAction, CodeActionRequest, ConfigurationRequest, createProtocolConnection, type Diagnostic, DiagnosticRefreshRequest, DidChangeTextDocumentNotification,
   DidChangeWatchedFilesNotification, DidCloseTextDocumentNotification, DidOpenTextDocumentNotification, DocumentDiagnosticRequest,
   ExitNotification, FileChangeType, type Hover, HoverRequest, InitializedNotification, InitializeRequest, type InitializeResult, type Position, type ProtocolConnection,
   PublishDiagnosticsNotification, type PublishDiagnosticsParams, RegistrationRequest, ShutdownRequest, StreamMessageReader, StreamMessageWriter, type TextDocumentContentChangeEvent,
@@ -32,6 +32,8 @@ export interface StartOptions {
   readonly pull?: boolean;
   readonly encodings?: readonly string[];
   readonly settings?: unknown;
+  /** Initialization options. */
+  readonly options?: unknown;
 }
 
 export class Client {
@@ -53,7 +55,7 @@ export class Client {
     const client = new Client(folder, child, connection);
     client.settings = options.settings ?? {};
     client.listen();
-    client.initialized = await connection.sendRequest(InitializeRequest.type, { processId: process.pid, rootUri: null, workspaceFolders: [{ uri: pathToFileURL(folder).href, name: 'test' }], capabilities: capabilities(options) });
+    client.initialized = await connection.sendRequest(InitializeRequest.type, { processId: process.pid, rootUri: null, workspaceFolders: [{ uri: pathToFileURL(folder).href, name: 'test' }], capabilities: capabilities(options), ...(options.options === undefined ? {} : { initializationOptions: options.options }) });
     await connection.sendNotification(InitializedNotification.type, {});
     return client;
   }
@@ -65,6 +67,11 @@ export class Client {
   async open(name: string, text: string, languageId = name.endsWith('.nomen') ? 'nomenclature' : 'python'): Promise<void> {
     this.versions.set(name, 1);
     await this.connection.sendNotification(DidOpenTextDocumentNotification.type, { textDocument: { uri: this.uri(name), languageId, version: 1, text } });
+  }
+
+  actions(name: string, start: Position, end: Position = start, only?: readonly string[]): Promise<readonly CodeAction[]> {
+    const diagnostics = (this.latest(name) ?? []).filter(({ range }) => range.start.line <= end.line && range.end.line >= start.line);
+    return this.connection.sendRequest(CodeActionRequest.type, { textDocument: { uri: this.uri(name) }, range: { start, end }, context: { diagnostics: [...diagnostics], ...(only ? { only: [...only] } : {}) } }) as Promise<readonly CodeAction[]>;
   }
 
   async change(name: string, ...contentChanges: TextDocumentContentChangeEvent[]): Promise<void> {
@@ -163,6 +170,7 @@ function capabilities({ pull, encodings }: StartOptions): ClientCapabilities {
     textDocument: {
       publishDiagnostics: { relatedInformation: true, codeDescriptionSupport: true },
       hover: { contentFormat: ['markdown'] },
+      codeAction: { codeActionLiteralSupport: { codeActionKind: { valueSet: [] } }, disabledSupport: true, isPreferredSupport: true },
       ...(pull ? { diagnostic: {} } : {}),
     },
   };

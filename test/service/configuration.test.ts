@@ -8,7 +8,7 @@ test('everything that can be set', () => {
     '{\n  // comment\n  "$schema": "x",\n  "severities": { "hidden-unit": "error", "bare-addend": "off" },\n  "notes": { "bare": false },\n  "exclude": ["old/"],\n}', '/w/termwise.json',
   );
   expect(problems).toEqual([]);
-  expect(configuration).toMatchObject({ file: '/w/termwise.json', severities: { 'hidden-unit': 'error', 'bare-addend': 'off' }, notes: { parentheses: true, bare: false } });
+  expect(configuration).toMatchObject({ file: '/w/termwise.json', severities: { 'hidden-unit': 'error', 'bare-addend': 'off' }, notes: { bare: false } });
   expect([configuration.exclude.ignores('old/a.py'), configuration.exclude.ignores('new/a.py')]).toEqual([true, false]);
 });
 
@@ -32,6 +32,6 @@ describe('problems have a place, and the rest holds', () => {
 
   test('a wrong value leaves the others in force', () => {
     const { configuration } = readConfiguration('{ "severities": { "unlike-terms": 7, "hidden-unit": "hint" }, "notes": { "bare": "no", "parentheses": false } }', '/w/termwise.json');
-    expect(configuration).toMatchObject({ severities: { 'hidden-unit': 'hint' }, notes: { parentheses: false, bare: true } });
+    expect(configuration).toMatchObject({ severities: { 'hidden-unit': 'hint' }, notes: { parentheses: false } });
   });
 });

@@ -1,11 +1,12 @@
 /** `termwise check`: walks the paths, checks one file after the other, and shows what was found. */
 import { readFileSync } from 'node:fs';
 import { dirname, resolve } from 'node:path';
+import { defaultNoteSettings } from '../notes/types.ts';
 import { decode } from '../platform/decode.ts';
 import { diskFiles } from '../platform/disk.ts';
 import type { CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
 import type { CheckOptions } from './arguments.ts';
-import { Configurations } from '../platform/configurations.ts';
+import { Configurations } from '../service/configurations.ts';
 import { type Configuration, type ConfigurationProblem, readConfiguration } from '../service/configuration.ts';
 import { jsonFormat } from './formats/json.ts';
 import { sarifFormat } from './formats/sarif.ts';
@@ -70,7 +71,9 @@ class Run {
   constructor(private readonly options: CheckOptions, private readonly around: Surroundings, only: Configuration | undefined) {
     this.format = formatOf(options, around);
     this.progress = progressLine(around.progress, around.width, () => performance.now());
-    this.configurations = new Configurations((file, problem) => this.configurationProblem(file, problem), only);
+    this.configurations = new Configurations(this.source, (file, problems) => {
+      for (const problem of problems) this.configurationProblem(file, problem);
+    }, only);
   }
 
   async all(): Promise<0 | 1 | 2> {
@@ -185,7 +188,7 @@ class Run {
     let workspace = this.workspaces.get(configuration);
     if (!workspace) {
       const severities = { ...configuration.severities, ...this.options.severities };
-      workspace = await this.around.createWorkspace(this.source, { severities, notes: configuration.notes });
+      workspace = await this.around.createWorkspace(this.source, { severities, notes: { ...defaultNoteSettings, ...configuration.notes } });
       this.workspaces.set(configuration, workspace);
     }
     return workspace;

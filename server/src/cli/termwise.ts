@@ -29,7 +29,7 @@ const surroundings: Surroundings = {
   input: process.stdin,
   async createWorkspace(source, settings) {
     const [{ createWorkspace }, { nodeAssets }] = await Promise.all([import('../service/workspace.ts'), import('../platform/node-assets.ts')]);
-    return createWorkspace(nodeAssets(), source, settings);
+    return createWorkspace(nodeAssets(), source, settings, ['nomenclature']);
   },
 };
 

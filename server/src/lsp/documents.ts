@@ -1,6 +1,6 @@
 /** The open documents, kept in step with the editor by the changes it sends. */
 import type { TextDocumentContentChangeEvent, TextDocumentItem } from 'vscode-languageserver/node.js';
-import { languages } from '../frontends/registry.ts';
+import { languageOf, languages } from '../frontends/registry.ts';
 import type { LanguageId } from '../program/nodes.ts';
 import { LineIndex } from '../text/line-index.ts';
 import { fileOf } from './paths.ts';
@@ -9,7 +9,7 @@ import { type Encoding, offsetOf } from './positions.ts';
 export interface OpenDocument {
   readonly uri: string;
   readonly file: string;
-  /** As the editor names it; undefined where it is none of ours, and the file's ending decides. */
+  /** By the editor's name for it, else by the file's ending; undefined where it is none of ours. */
   readonly language: LanguageId | undefined;
   readonly version: number;
   readonly text: string;
@@ -20,7 +20,7 @@ export class Documents {
   private readonly byFile = new Map<string, OpenDocument>();
 
   open({ uri, languageId, version, text }: TextDocumentItem): OpenDocument {
-    return this.keep({ uri, file: fileOf(uri), language: languages.find((each) => each === languageId), version, text });
+    return this.keep({ uri, file: fileOf(uri), language: languageNamed(languageId, fileOf(uri), text), version, text });
   }
 
   /** Undefined for a document that is not open: the editor is at fault, and nothing is to be done. */
@@ -53,6 +53,19 @@ export class Documents {
     this.byFile.set(document.file, document);
     return document;
   }
+}
+
+/** Names that editors and their extensions have for languages besides our own. */
+const otherNames: Readonly<Record<string, LanguageId>> = {
+  octave: 'matlab', javascriptreact: 'javascript', typescriptreact: 'typescript', 'cuda-cpp': 'cpp', fortranfreeform: 'fortran', 'fortran-modern': 'fortran', 'fortran_free-form': 'fortran', 'fortran_fixed-form': 'fortran',
+};
+
+function languageNamed(languageId: string, file: string, text: string): LanguageId | undefined {
+  const named = languages.find((each) => each === languageId) ?? otherNames[languageId.toLowerCase()];
+  if (named) return named;
+  // `.m` is taken for Objective-C where no extension says otherwise; what is Objective-C shows it.
+  if (languageId === 'objective-c' && /^\s*(?:#import|#include|@interface|@implementation|@class|@protocol)\b/m.test(text)) return undefined;
+  return languageOf(file);
 }
 
 function applied(text: string, change: TextDocumentContentChangeEvent, encoding: Encoding): string {

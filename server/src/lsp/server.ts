@@ -3,6 +3,8 @@ import { type Connection, ErrorCodes, type InitializeParams, type InitializeResu
 import type { Assets } from '../service/contract.ts';
 import { fileOf } from './paths.ts';
 import { Diagnostics } from './requests/diagnostics.ts';
+import { codeActionKinds, codeActions } from './requests/code-actions.ts';
+import { configurationProblems } from './requests/configuration.ts';
 import { hover } from './requests/hover.ts';
 import { askForSettings, settingsChanged } from './requests/settings.ts';
 import { changedFiles, watchFiles } from './requests/watched-files.ts';
@@ -17,7 +19,7 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   };
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
-    const session = new Session(connection, assets, params);
+    const session = new Session(connection, assets, params, configurationProblems(connection));
     running = { session, diagnostics: new Diagnostics(session) };
     return { capabilities: capabilitiesFor(session), serverInfo: { name: 'termwise-language-server', version } };
   });
@@ -67,6 +69,7 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   });
 
   connection.onHover((params, token) => hover(now().session, params, token));
+  connection.onCodeAction((params, token) => codeActions(now().session, params, token));
   connection.languages.diagnostics.on((params, token) => now().diagnostics.pull(params, token));
 }
 
@@ -75,6 +78,7 @@ function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
     positionEncoding: session.target.encoding,
     textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
     hoverProvider: true,
+    codeActionProvider: { codeActionKinds: [...codeActionKinds] },
     workspace: { workspaceFolders: { supported: true, changeNotifications: true } },
     ...(session.pulls ? { diagnosticProvider: { identifier: 'termwise', interFileDependencies: true, workspaceDiagnostics: false } } : {}),
   };

@@ -1,38 +1,50 @@
-/** One client's session: its documents, its settings, and the engine that answers for them. */
-import type { ClientCapabilities, Connection, InitializeParams } from 'vscode-languageserver/node.js';
+/** One client's session: its documents, its settings, and the engines that answer for them. */
+import { type CancellationToken, type ClientCapabilities, type Connection, type InitializeParams, LSPErrorCodes, ResponseError } from 'vscode-languageserver/node.js';
 import { pageFile } from '../platform/pages.ts';
-import type { Assets, CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
+import type { FindingCode } from '../program/codes.ts';
+import { Configurations } from '../service/configurations.ts';
+import type { ConfigurationProblem } from '../service/configuration.ts';
+import type { Assets, CheckResult, FileSource, Workspace } from '../service/contract.ts';
 import { createWorkspace } from '../service/workspace.ts';
-import type { FindingCode } from '../findings/finding.ts';
+import { parent } from '../text/paths.ts';
 import { Documents, type OpenDocument } from './documents.ts';
 import { overlay } from './overlay.ts';
 import { fileOf, uriOf } from './paths.ts';
 import { agreeOn } from './positions.ts';
-import { defaultSettings, readSettings } from './settings.ts';
+import { defaultSettings, readSettings, type SessionSettings, settingsWith } from './settings.ts';
 import type { Target } from './to-protocol.ts';
+import { turn } from './turn.ts';
+
+/** A check goes on for so long, in milliseconds, before messages that came meanwhile are read. */
+const slice = 8;
 
 export class Session {
   readonly documents = new Documents();
   readonly source: FileSource & { forget(): void } = overlay(this.documents);
   readonly capabilities: ClientCapabilities;
   readonly target: Target;
+  readonly configurations: Configurations;
   /** Folders of the workspace, as paths. */
   folders: readonly string[];
-  private settings: Settings;
-  private engine: Promise<Workspace>;
+  settings: SessionSettings;
+  /** What the client can do beyond the protocol; it says so in its initialization options. */
+  readonly client: { readonly select: boolean };
+  /** One engine for each set of settings: a folder may have a `termwise.json` of its own. */
+  private readonly engines = new Map<string, Promise<Workspace>>();
   /** Grows whenever results of an unchanged text may have changed. */
   private epoch = 0;
   private readonly checked = new Map<string, { readonly document: OpenDocument; readonly epoch: number; readonly result: CheckResult }>();
+  /** Ends when the engines are free: checks with pauses in them must not meet. */
+  private busy: Promise<unknown> = Promise.resolve();
 
-  constructor(readonly connection: Connection, private readonly assets: Assets, params: InitializeParams) {
+  constructor(readonly connection: Connection, private readonly assets: Assets, params: InitializeParams, tellProblems: (file: string, problems: readonly ConfigurationProblem[]) => void) {
     const { capabilities, initializationOptions, workspaceFolders, rootUri } = params;
     this.capabilities = capabilities;
     this.folders = (workspaceFolders ?? (rootUri ? [{ uri: rootUri }] : [])).map(({ uri }) => fileOf(uri));
     this.target = targetOf(capabilities, (file) => this.source.read(file) ?? '');
     this.settings = initializationOptions === undefined ? defaultSettings : readSettings(initializationOptions);
-    this.engine = this.start();
-    // Answered where it is used: a request that waits for the engine tells of it.
-    this.engine.catch(() => undefined);
+    this.client = { select: typeof initializationOptions === 'object' && initializationOptions !== null && (initializationOptions as Record<string, unknown>).select === true };
+    this.configurations = new Configurations(this.source, tellProblems);
   }
 
   /** Whether the client asks for diagnostics itself. */
@@ -40,49 +52,108 @@ export class Session {
     return this.capabilities.textDocument?.diagnostic !== undefined;
   }
 
-  get workspace(): Promise<Workspace> {
-    return this.engine;
+  /** The engine for a file, with the settings of its folder. */
+  engineOf(file: string): Promise<Workspace> {
+    const settings = settingsWith(this.settings, this.configurations.at(parent(file)));
+    const key = JSON.stringify(settings);
+    let engine = this.engines.get(key);
+    if (!engine) {
+      engine = createWorkspace(this.assets, this.source, settings, ['nomenclature']);
+      this.engines.set(key, engine);
+    }
+    return engine;
   }
 
-  /** The findings of a document as it is now; made once for each of its texts. */
-  async check(document: OpenDocument): Promise<CheckResult> {
-    for (;;) {
-      const workspace = await this.engine;
-      if (document.language) await workspace.prepare(document.language);
-      const known = this.checked.get(document.uri);
-      if (known?.document === document && known.epoch === this.epoch) return known.result;
-      const result = workspace.check(document.file, document.text, document.language);
-      this.checked.set(document.uri, { document, epoch: this.epoch, result });
-      if (workspace === (await this.engine)) return result;
-    }
+  /** The findings of a document as it is now; made once for each of its texts. Rejects as cancelled where it changes meanwhile. */
+  async check(document: OpenDocument, token?: CancellationToken): Promise<CheckResult> {
+    return this.alone(() => this.checkNow(document, token));
+  }
+
+  /** Runs something while nothing else uses the engines, on a document that was checked as it is now; undefined where it changed meanwhile. */
+  async ask<T>(uri: string, token: CancellationToken, question: (document: OpenDocument, workspace: Workspace, result: CheckResult) => T): Promise<T | undefined> {
+    await turn(token);
+    const document = this.documents.get(uri);
+    if (!document?.language) return undefined;
+    return this.alone(async () => {
+      const result = await this.checkNow(document, token);
+      const workspace = await this.engineOf(document.file);
+      await turn(token);
+      return this.documents.get(uri) === document ? question(document, workspace, result) : undefined;
+    });
+  }
+
+  /** Runs something while nothing else uses the engines. */
+  async alone<T>(work: () => Promise<T>): Promise<T> {
+    const before = this.busy;
+    const mine = before.catch(() => undefined).then(work);
+    this.busy = mine.catch(() => undefined);
+    return mine;
   }
 
   /** A file changed, on disk or in the editor: what rests on it is to be checked again. */
   async touch(files: readonly string[]): Promise<void> {
-    const workspace = await this.engine;
-    this.source.forget();
-    for (const file of files) workspace.invalidate(file);
-    this.epoch++;
+    await this.alone(async () => {
+      this.source.forget();
+      this.configurations.forget();
+      for (const engine of this.engines.values()) for (const file of files) (await engine).invalidate(file);
+      this.epoch++;
+    });
   }
 
   async forget(document: OpenDocument): Promise<void> {
     this.checked.delete(document.uri);
-    (await this.engine).forget(document.file);
+    await this.alone(async () => {
+      for (const engine of this.engines.values()) (await engine).forget(document.file);
+    });
   }
 
-  /** Whether anything changed. Settings hold for everything that is kept, so the engine starts afresh. */
+  /** What was found last in a document; undefined where that was another text. */
+  known(document: OpenDocument): CheckResult | undefined {
+    const known = this.checked.get(document.uri);
+    return known?.document === document && known.epoch === this.epoch ? known.result : undefined;
+  }
+
+  /** Makes what is known of a document void: an engine holds another text of it. */
+  void(document: OpenDocument): void {
+    this.checked.delete(document.uri);
+  }
+
+  /** Whether anything changed. Settings hold for everything that is kept, so the engines start afresh. */
   configure(sent: unknown): boolean {
     const settings = readSettings(sent);
     if (JSON.stringify(settings) === JSON.stringify(this.settings)) return false;
     this.settings = settings;
     this.epoch++;
-    this.engine = this.start();
-    this.engine.catch(() => undefined);
+    this.engines.clear();
     return true;
   }
 
-  private start(): Promise<Workspace> {
-    return createWorkspace(this.assets, this.source, this.settings);
+  private async checkNow(document: OpenDocument, token?: CancellationToken): Promise<CheckResult> {
+    for (;;) {
+      const { epoch } = this;
+      const workspace = await this.engineOf(document.file);
+      const { language } = document;
+      if (!language) return { file: document.file, language: 'python', text: document.text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
+      await workspace.prepare(language);
+      const known = this.known(document);
+      if (known) return known;
+      const result = await this.inSlices(document, workspace.steps(document.file, document.text, language), token);
+      if (epoch !== this.epoch) continue;
+      this.checked.set(document.uri, { document, epoch, result });
+      return result;
+    }
+  }
+
+  private async inSlices(document: OpenDocument, steps: Generator<void, CheckResult>, token: CancellationToken | undefined): Promise<CheckResult> {
+    for (;;) {
+      const start = performance.now();
+      do {
+        const step = steps.next();
+        if (step.done) return step.value;
+      } while (performance.now() - start < slice);
+      await turn(token);
+      if (this.documents.get(document.uri) !== document) throw new ResponseError(LSPErrorCodes.ContentModified, 'the document changed');
+    }
   }
 }
 

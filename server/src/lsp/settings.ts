@@ -1,15 +1,22 @@
 /** Settings as an editor sends them; what is not understood is left at its default. */
 import { findingCodes, levels } from '../findings/finding.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
+import type { Configuration } from '../service/configuration.ts';
 import type { Settings } from '../service/contract.ts';
 
 /** The name of the section that holds all settings. */
 export const section = 'termwise';
 
-export const defaultSettings: Settings = { severities: {}, notes: defaultNoteSettings };
+/** What the editor's user has set. */
+export interface SessionSettings extends Settings {
+  /** Whether the scripts of the workspace that are not open are checked and listed too. */
+  readonly wholeWorkspace: boolean;
+}
 
-/** Reads `{ severities: { … }, notes: { … } }`. */
-export function readSettings(sent: unknown): Settings {
+export const defaultSettings: SessionSettings = { severities: {}, notes: defaultNoteSettings, wholeWorkspace: false };
+
+/** Reads `{ severities: { … }, notes: { … }, wholeWorkspace }`. */
+export function readSettings(sent: unknown): SessionSettings {
   const severities = objectIn(sent, 'severities');
   const notes = objectIn(sent, 'notes');
   const flag = (name: keyof typeof defaultNoteSettings): boolean => (typeof notes[name] === 'boolean' ? notes[name] : defaultNoteSettings[name]);
@@ -17,10 +24,20 @@ export function readSettings(sent: unknown): Settings {
     const level = levels.find((each) => each === severities[code]);
     return level ? [[code, level] as const] : [];
   });
-  return { severities: Object.fromEntries(chosen), notes: { parentheses: flag('parentheses'), bare: flag('bare') } };
+  const wholeWorkspace = isObject(sent) && sent.wholeWorkspace === true;
+  return { severities: Object.fromEntries(chosen), notes: { parentheses: flag('parentheses'), bare: flag('bare') }, wholeWorkspace };
+}
+
+/** A project's own file goes before the editor's settings: it says what the team agreed on. */
+export function settingsWith({ severities, notes }: Settings, configuration: Configuration): Settings {
+  return { severities: { ...severities, ...configuration.severities }, notes: { ...notes, ...configuration.notes } };
 }
 
 function objectIn(sent: unknown, name: string): Readonly<Record<string, unknown>> {
-  const found = typeof sent === 'object' && sent !== null ? (sent as Record<string, unknown>)[name] : undefined;
-  return typeof found === 'object' && found !== null ? (found as Record<string, unknown>) : {};
+  const found = isObject(sent) ? sent[name] : undefined;
+  return isObject(found) ? found : {};
+}
+
+function isObject(value: unknown): value is Readonly<Record<string, unknown>> {
+  return typeof value === 'object' && value !== null;
 }

@@ -36,7 +36,7 @@ function endsOf(text: string): readonly number[] {
 function read(words: string, options: ReadOptions) {
   if (words === '' || words.length > 50 || /^(?:[\d.[(]|in\s)/i.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
   if (numbersOfNoUnit.has(words.toLowerCase()) || !mayStandAlone(words) || derived.test(words) || computed.test(words) || (/^[A-Za-z]\d$/.test(words) && !/^(?:m[234]|s2)$/.test(words))) return undefined;
-  const result = parseUnit(words, options);
+  const result = parseUnit(words.replace(/\s+/g, ' '), options);
   return result.ok ? result : undefined;
 }
 

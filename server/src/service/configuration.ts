@@ -2,7 +2,7 @@
 import ignore, { type Ignore } from 'ignore';
 import { type Node, type ParseError, parseTree, printParseErrorCode } from 'jsonc-parser';
 import { type FindingCode, findingCodes, type Level, levels } from '../findings/finding.ts';
-import { defaultNoteSettings, type NoteSettings } from '../notes/types.ts';
+import type { NoteSettings } from '../notes/types.ts';
 import { LineIndex } from '../text/line-index.ts';
 import { didYouMean } from './suggest.ts';
 
@@ -12,7 +12,8 @@ export interface Configuration {
   /** The file it was read from; undefined for the defaults. */
   readonly file: string | undefined;
   readonly severities: Readonly<Partial<Record<FindingCode, Level>>>;
-  readonly notes: NoteSettings;
+  /** What it says of them; the rest is left as it is elsewhere. */
+  readonly notes: Partial<NoteSettings>;
   /** Patterns in the notation of .gitignore, relative to the file's folder. */
   readonly exclude: Ignore;
 }
@@ -24,7 +25,7 @@ export interface ConfigurationProblem {
   readonly message: string;
 }
 
-export const defaultConfiguration: Configuration = { file: undefined, severities: {}, notes: defaultNoteSettings, exclude: ignore() };
+export const defaultConfiguration: Configuration = { file: undefined, severities: {}, notes: {}, exclude: ignore() };
 
 /** What a configuration says. Problems do not stop it: what can be read holds. */
 export function readConfiguration(text: string, file: string): { readonly configuration: Configuration; readonly problems: readonly ConfigurationProblem[] } {
@@ -49,7 +50,7 @@ class Reader {
     const root = parseTree(this.text, errors, { allowTrailingComma: true });
     for (const error of errors.slice(0, 1)) this.problem(error.offset, `this is not JSON: ${words(printParseErrorCode(error.error))}.`);
     const severities: Partial<Record<FindingCode, Level>> = {};
-    let notes = defaultNoteSettings;
+    let notes: Partial<NoteSettings> = {};
     const exclude = ignore();
     if (root && root.type !== 'object') this.problem(root.offset, 'a configuration is an object: { … }.');
     for (const { key, name, value } of this.entries(root)) {
@@ -72,9 +73,9 @@ class Reader {
     }
   }
 
-  private notes(node: Node): NoteSettings {
+  private notes(node: Node): Partial<NoteSettings> {
     this.object(node, 'notes');
-    const read: { parentheses: boolean; bare: boolean } = { ...defaultNoteSettings };
+    const read: { parentheses?: boolean; bare?: boolean } = {};
     for (const { key, name, value } of this.entries(node)) {
       if (name !== 'parentheses' && name !== 'bare') this.unknown(key, name, noteKeys);
       else if (typeof value.value !== 'boolean') this.problem(value.offset, `notes.${name} is true or false.`);

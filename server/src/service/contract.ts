@@ -90,6 +90,8 @@ export interface Workspace {
   prepare(...languages: readonly LanguageId[]): Promise<void>;
   /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
   check(file: string, text: string, language?: LanguageId): CheckResult;
+  /** The same check with pauses in it, during which no other method may be called; what is given up half-way leaves nothing wrong behind. */
+  steps(file: string, text: string, language?: LanguageId): Generator<void, CheckResult>;
   /**
    * The fixes for the findings that a span touches, and for what stands there, best first; without a span for the whole file.
    * For a file that was checked last with the text it has now; empty for any other. Each was checked: applied, its finding is gone and none is new.

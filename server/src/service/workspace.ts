@@ -1,5 +1,5 @@
 /** The facade over one set of files: keeps what is parsed and solved, and answers checks. */
-import { detect, type Engine, say, type Understood, understand } from '../analyze.ts';
+import { detect, detectInSteps, type Engine, say, type Understood, understand } from '../analyze.ts';
 import type { Detected } from '../findings/collect.ts';
 import type { FrontEnd, TextEdit } from '../frontends/frontend.ts';
 import { frontEndEntries } from '../frontends/registry.ts';
@@ -64,11 +64,19 @@ class Files implements Workspace {
   }
 
   check(file: string, text: string, language?: LanguageId): CheckResult {
+    const steps = this.steps(file, text, language);
+    for (;;) {
+      const step = steps.next();
+      if (step.done) return step.value;
+    }
+  }
+
+  *steps(file: string, text: string, language?: LanguageId): Generator<void, CheckResult> {
     const frontEnd = this.frontEndOf(file, language);
     if (!frontEnd) return { file, language: language ?? 'python', text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
     if (this.imports.size > mostImports) this.imports.clear();
     const understood = this.understand(file, text, frontEnd);
-    const detected = this.severe(detect(understood));
+    const detected = this.severe(yield* detectInSteps(understood));
     const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)));
     const findings = say(detected, voice).map((finding): PlacedFinding => ({
       code: finding.code,

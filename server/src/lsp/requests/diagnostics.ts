@@ -1,9 +1,11 @@
 /** Diagnostics: pulled where the client can, else pushed. */
-import { type CancellationToken, type Diagnostic, type DocumentDiagnosticParams, type DocumentDiagnosticReport, DocumentDiagnosticReportKind } from 'vscode-languageserver/node.js';
+import { type CancellationToken, type Diagnostic, type DocumentDiagnosticParams, type DocumentDiagnosticReport, DocumentDiagnosticReportKind, LSPErrorCodes, ResponseError } from 'vscode-languageserver/node.js';
+import { configurationName } from '../../service/configuration.ts';
 import type { OpenDocument } from '../documents.ts';
 import type { Session } from '../session.ts';
 import { toDiagnostics } from '../to-protocol.ts';
 import { turn } from '../turn.ts';
+import { isLeftOut } from '../left-out.ts';
 
 /** Other documents follow a change after this pause in typing, in milliseconds. */
 const pause = 200;
@@ -13,6 +15,8 @@ export class Diagnostics {
   private readonly waiting = new Set<string>();
   private readonly changed = new Set<string>();
   private timer: NodeJS.Timeout | undefined;
+  /** Names of results are unlike those of an earlier server: a client may still ask with one of them. */
+  private readonly era = `${process.pid}.${Date.now().toString(36)}`;
   private count = 0;
 
   constructor(private readonly session: Session) {}
@@ -38,7 +42,7 @@ export class Diagnostics {
     await turn(token);
     const document = this.session.documents.get(textDocument.uri);
     if (!document) return { kind: DocumentDiagnosticReportKind.Full, items: [] };
-    const items = await this.of(document);
+    const items = await this.of(document, token);
     await turn(token);
     const { id } = this.remember(document, items);
     return id === previousResultId ? { kind: DocumentDiagnosticReportKind.Unchanged, resultId: id } : { kind: DocumentDiagnosticReportKind.Full, resultId: id, items };
@@ -72,30 +76,37 @@ export class Diagnostics {
     const files = [...this.changed];
     this.changed.clear();
     const others = this.session.documents.all().filter(({ file }) => files.length > 1 || file !== files[0]);
-    if (others.length > 0 || files.some((file) => file.endsWith('.nomen'))) await this.everything(files);
+    if (others.length > 0 || files.some((file) => file.endsWith('.nomen') || file.endsWith(configurationName))) await this.everything(files);
   }
 
   private async push(uri: string): Promise<void> {
     const document = this.session.documents.get(uri);
     if (!document) return;
-    const diagnostics = await this.of(document);
-    if (this.session.documents.get(uri) !== document) return;
+    const diagnostics = await this.of(document).catch(givenUp);
+    if (!diagnostics || this.session.documents.get(uri) !== document) return;
     const before = this.sent.get(uri);
     const now = this.remember(document, diagnostics);
     if (before?.id === now.id && before.version === now.version) return;
     await this.session.connection.sendDiagnostics({ uri, version: document.version, diagnostics });
   }
 
-  private async of(document: OpenDocument): Promise<Diagnostic[]> {
-    return toDiagnostics(await this.session.check(document), this.session.target);
+  private async of(document: OpenDocument, token?: CancellationToken): Promise<Diagnostic[]> {
+    if (isLeftOut(this.session, document.file)) return [];
+    return toDiagnostics(await this.session.check(document, token), this.session.target);
   }
 
   /** Equal diagnostics keep their name, so that a client that has them is spared them. */
   private remember({ uri, version }: OpenDocument, diagnostics: readonly Diagnostic[]): { readonly id: string; readonly version: number } {
     const text = JSON.stringify(diagnostics);
     const before = this.sent.get(uri);
-    const now = { id: before?.text === text ? before.id : `${++this.count}`, text, version };
+    const now = { id: before?.text === text ? before.id : `${this.era}.${++this.count}`, text, version };
     this.sent.set(uri, now);
     return now;
   }
+}
+
+/** A text that changed while it was checked is checked again because of that change. */
+function givenUp(error: unknown): undefined {
+  if (error instanceof ResponseError && error.code === LSPErrorCodes.ContentModified) return undefined;
+  throw error;
 }

@@ -1,9 +1,11 @@
 /** Files that scripts rest on: modules they import, and nomenclature files. */
 import { DidChangeWatchedFilesNotification, type DidChangeWatchedFilesParams } from 'vscode-languageserver/node.js';
+import { frontEndEntries } from '../../frontends/registry.ts';
+import { configurationName } from '../../service/configuration.ts';
 import { fileOf } from '../paths.ts';
 import type { Session } from '../session.ts';
 
-const patterns = ['**/*.nomen', '**/*.py'];
+const patterns = [...frontEndEntries.map(({ endings }) => `**/*{${endings.join(',')}}`), `**/${configurationName}`];
 
 export async function watchFiles({ connection, capabilities }: Session): Promise<void> {
   if (!capabilities.workspace?.didChangeWatchedFiles?.dynamicRegistration) return;
