@@ -8,9 +8,11 @@ const mostKinds = 4;
 export function hoverText(info: HoverInfo, markdown: boolean): string {
   const code = (text: string): string => (markdown ? `\`${text.replaceAll('`', "'")}\`` : text);
   const strong = (text: string): string => (markdown ? `**${text}**` : text);
+  if (info.conversion) return `${code(info.name)}: taken as the conversion from ${info.conversion.from} to ${info.conversion.to}.`;
   const lines = [
     `${code(info.name)}: ${strong(unitWords(info))}${info.description ? `, ${plain(info.description, markdown)}` : ''}`,
     dimensionWords(info),
+    ...(info.group ? [`${info.group.code === info.name ? 'This' : `In ${code(info.group.code)}`}: ${info.group.text}.`] : []),
     ...(info.range ? [rangeWords(info.range, info.unit)] : []),
     ...originWords(info, code),
   ];
@@ -18,7 +20,7 @@ export function hoverText(info: HoverInfo, markdown: boolean): string {
 }
 
 function unitWords({ unit, dimension }: HoverInfo): string {
-  if (dimension === '1' && (unit === undefined || /^(?:1|-+)?$/.test(unit.trim()))) return 'dimensionless';
+  if (dimension === '1' && (unit === undefined || /^(?:1|-+|dimensionless)?$/.test(unit.trim()))) return 'dimensionless';
   return unit === undefined || unit === '' ? 'unit left open' : `[${unit}]`;
 }
 

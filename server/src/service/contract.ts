@@ -80,18 +80,25 @@ export interface HoverInfo {
   readonly description: string | undefined;
   /** Notes that this rests on, the symbol's own first; lines from one, `file` where it is another one. */
   readonly notes: readonly { readonly symbol: string; readonly unit: string; readonly file: string | undefined; readonly line: number }[];
-  /** Values it may take, in its unit. */
+  /** Values it may take, in its unit; equal where it is one value. */
   readonly range: { readonly low: number; readonly high: number } | undefined;
+  /** What a literal number was taken for. */
+  readonly conversion?: { readonly from: string; readonly to: string };
+  /** The dimensionless product around the place: `Reynolds number, 5894 to 70728`. */
+  readonly group?: { readonly code: string; readonly text: string };
 }
 
 /** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
 export interface Workspace {
   /** Loads the front end of each language, where that is not done yet. A file in another language gives no findings. */
   prepare(...languages: readonly LanguageId[]): Promise<void>;
-  /** Checks a text as the content of `file`; the language follows the file's ending unless given. Never throws for any text. */
-  check(file: string, text: string, language?: LanguageId): CheckResult;
+  /**
+   * Checks a text as the content of `file`; the language follows the file's ending unless given. `lineName`: what messages call the line
+   * of an offset, where the text's own numbers mean nothing (a notebook's cells). Never throws for any text.
+   */
+  check(file: string, text: string, language?: LanguageId, lineName?: (offset: number) => string): CheckResult;
   /** The same check with pauses in it, during which no other method may be called; what is given up half-way leaves nothing wrong behind. */
-  steps(file: string, text: string, language?: LanguageId): Generator<void, CheckResult>;
+  steps(file: string, text: string, language?: LanguageId, lineName?: (offset: number) => string): Generator<void, CheckResult>;
   /**
    * The fixes for the findings that a span touches, and for what stands there, best first; without a span for the whole file.
    * For a file that was checked last with the text it has now; empty for any other. Each was checked: applied, its finding is gone and none is new.

@@ -3,7 +3,7 @@ import type { Understood } from '../analyze.ts';
 import type { NoteInForce, Value } from '../constraints/value.ts';
 import type { HostStyle } from '../frontends/frontend.ts';
 import type { Note } from '../notes/types.ts';
-import type { Chunk } from '../program/nodes.ts';
+import type { Chunk, NumberExpr } from '../program/nodes.ts';
 import { pathOf } from '../program/path.ts';
 import type { Dimension } from '../quantities/dimension.ts';
 import { kindsOf } from '../quantities/kinds.ts';
@@ -16,6 +16,7 @@ import { LineIndex } from '../text/line-index.ts';
 import type { Span } from '../text/span.ts';
 import { unitOf } from '../wording/voice.ts';
 import type { HoverInfo } from './contract.ts';
+import { conversionOf } from './conversion-at.ts';
 
 const longestName = 60;
 /** What was seen of a file's functions, as long as its text holds. */
@@ -72,11 +73,19 @@ function ofSymbol(at: number, page: Page): HoverInfo | undefined {
   if (param) return ofValue(param.name, param.nameSpan, sightings.values.get(param.nameSpan), sightings, page);
   // What begins at the place counts before what ends there.
   const expr = expressionsAt(chunk.statements, { start: at, end: at + 1 }).at(-1) ?? expressionsAt(chunk.statements, { start: at, end: at }).at(-1);
+  if (expr?.kind === 'number') return ofLiteral(expr, sightings, page);
   const value = expr && sightings.values.get(expr);
   if (!expr || !value) return undefined;
   const name = pathOf(expr) ?? shortened(scene.code(chunk.anchor, expr));
   if (value.callable?.kind === 'function') return ofFunction(name, expr, value.callable.scheme()?.result?.note, page);
   return ofValue(name, expr, value, sightings, page);
+}
+
+/** A number that converts says between which units; any other needs no words. */
+function ofLiteral(expr: NumberExpr, sightings: Sightings, page: Page): HoverInfo | undefined {
+  const conversion = conversionOf(expr, sightings);
+  if (!conversion) return undefined;
+  return { span: absoluteIn(page.chunk, expr), name: expr.text, unit: '', dimension: '1', kinds: [], origin: 'inferred', description: undefined, notes: [], range: undefined, conversion };
 }
 
 function ofFunction(name: string, span: Span, note: NoteInForce | undefined, page: Page): HoverInfo | undefined {

@@ -18,6 +18,7 @@ import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
 import { type GroupsService, groupsService } from './groups-service.ts';
 import { hoverAt } from './hover.ts';
+import { withGroup } from './hover-group.ts';
 import { voiceOver } from './voice-over.ts';
 
 /** Imported files that are kept understood from one check to the next. Never dropped during a check: modules import each other in circles. */
@@ -63,21 +64,21 @@ class Files implements Workspace {
     }));
   }
 
-  check(file: string, text: string, language?: LanguageId): CheckResult {
-    const steps = this.steps(file, text, language);
+  check(file: string, text: string, language?: LanguageId, lineName?: (offset: number) => string): CheckResult {
+    const steps = this.steps(file, text, language, lineName);
     for (;;) {
       const step = steps.next();
       if (step.done) return step.value;
     }
   }
 
-  *steps(file: string, text: string, language?: LanguageId): Generator<void, CheckResult> {
+  *steps(file: string, text: string, language?: LanguageId, lineName?: (offset: number) => string): Generator<void, CheckResult> {
     const frontEnd = this.frontEndOf(file, language);
     if (!frontEnd) return { file, language: language ?? 'python', text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
     if (this.imports.size > mostImports) this.imports.clear();
     const understood = this.understand(file, text, frontEnd);
     const detected = this.severe(yield* detectInSteps(understood));
-    const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)));
+    const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)), lineName);
     const findings = say(detected, voice).map((finding): PlacedFinding => ({
       code: finding.code,
       severity: finding.severity,
@@ -109,7 +110,8 @@ class Files implements Workspace {
   hover(file: string, offset: number): HoverInfo | undefined {
     const kept = this.open.get(file);
     const frontEnd = this.frontEnds.find((each) => each.language === kept?.understood.parsed.program.language);
-    return kept && frontEnd && hoverAt(kept.understood, frontEnd.style, offset, (name) => this.textOf(name));
+    const textOf = (name: string): string => this.textOf(name);
+    return kept && frontEnd && withGroup(hoverAt(kept.understood, frontEnd.style, offset, textOf), kept.understood, offset, textOf);
   }
 
   forget(file: string): void {

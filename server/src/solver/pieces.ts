@@ -1,6 +1,7 @@
 /** One function, or a file's top level: generated, solved, and summed up as a scheme. */
 import { Context, type EmpiricalUnit, type Surroundings } from '../constraints/context.ts';
 import { type Form, sameForm, unknownForm } from '../constraints/form.ts';
+import type { Constraint } from '../constraints/problem.ts';
 import { readBody, type ReadParam, readParams } from '../constraints/function-body.ts';
 import type { ClassInfo, Scheme, SchemeParam, SchemeResult } from '../constraints/scheme.ts';
 import { walk } from '../constraints/statements.ts';
@@ -52,6 +53,8 @@ export function solveTopLevel(chunks: readonly Chunk[], surroundingsOf: (chunk: 
 export interface Sightings {
   readonly values: ReadonlyMap<Span, Value>;
   readonly reduce: (form: Form) => Form;
+  /** What had to hold. */
+  readonly constraints: readonly Constraint[];
 }
 
 /** The sightings of a function, for hover and repairs. */
@@ -59,21 +62,21 @@ export function sightingsOf(piece: Piece, owner: ClassInfo | undefined, surround
   const values = new Map<Span, Value>();
   const context = new Context(piece.chunk.anchor, surroundings, piece.fn, values);
   readBody(context, piece.fn, selfOf(piece, owner));
-  return { values, reduce: solve(context.constraints).reduce };
+  return { values, reduce: solve(context.constraints).reduce, constraints: context.constraints };
 }
 
 /** The sightings of a file's top level. */
 export function topSightings(chunks: readonly Chunk[], surroundingsOf: (chunk: Chunk) => Surroundings): Sightings {
   const values = new Map<Span, Value>();
   const first = chunks[0];
-  if (!first) return { values, reduce: (form) => form };
+  if (!first) return { values, reduce: (form) => form, constraints: [] };
   const context = new Context(first.anchor, surroundingsOf(first), undefined, values);
   for (const chunk of chunks) {
     context.anchor = chunk.anchor;
     context.surroundings = surroundingsOf(chunk);
     walk(context, chunk.statements);
   }
-  return { values, reduce: solve(context.constraints).reduce };
+  return { values, reduce: solve(context.constraints).reduce, constraints: context.constraints };
 }
 
 function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surroundings, ignored: NoteInForce | undefined): Solved {
