@@ -47,7 +47,7 @@ function said(path: string, value: Value, sightings: Sightings): Pick<OpenSymbol
 }
 
 /** The unit of a value, in the scale it is counted in; undefined where that is open, or a pure number. */
-function inferredUnit(value: Value, sightings: Sightings): string | undefined {
+export function inferredUnit(value: Value, sightings: Sightings): string | undefined {
   const dimension = value.fits || value.callable || value.items ? undefined : dimensionOf(value, sightings);
   if (!dimension || dimension.isOne) return undefined;
   const { measure } = value;
