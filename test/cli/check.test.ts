@@ -178,6 +178,8 @@ test('a fault of the engine names the file and leaves the rest to be checked', a
         return { file, text, language: language ?? 'python', findings: [], statistics: { functions: 3, notes: 2, unread: [] } };
       },
       prepare: async () => {},
+      prepareValues: async () => {},
+      symbols: () => [], hints: () => [],
       steps: () => { throw new Error('not asked for'); },
       forget: (file) => forgotten.push(file),
       fixes: () => [], hover: () => undefined, groups: { relations: () => [], actions: () => [], at: () => undefined },

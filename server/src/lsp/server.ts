@@ -5,7 +5,10 @@ import { fileOf } from './paths.ts';
 import { Diagnostics } from './requests/diagnostics.ts';
 import { codeActionKinds, codeActions } from './requests/code-actions.ts';
 import { configurationProblems } from './requests/configuration.ts';
+import { codeLenses } from './requests/code-lens.ts';
+import { documentSymbols } from './requests/document-symbols.ts';
 import { hover } from './requests/hover.ts';
+import { inlayHints } from './requests/inlay-hints.ts';
 import { askForSettings, settingsChanged } from './requests/settings.ts';
 import { changedFiles, watchFiles } from './requests/watched-files.ts';
 import { Session } from './session.ts';
@@ -69,6 +72,9 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   });
 
   connection.onHover((params, token) => hover(now().session, params, token));
+  connection.onDocumentSymbol((params, token) => documentSymbols(now().session, params, token));
+  connection.onCodeLens((params, token) => codeLenses(now().session, params, token));
+  connection.languages.inlayHint.on((params, token) => inlayHints(now().session, params, token));
   connection.onCodeAction((params, token) => codeActions(now().session, params, token));
   connection.languages.diagnostics.on((params, token) => now().diagnostics.pull(params, token));
 }
@@ -78,6 +84,9 @@ function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
     positionEncoding: session.target.encoding,
     textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
     hoverProvider: true,
+    inlayHintProvider: true,
+    documentSymbolProvider: true,
+    codeLensProvider: {},
     codeActionProvider: { codeActionKinds: [...codeActionKinds] },
     workspace: { workspaceFolders: { supported: true, changeNotifications: true } },
     ...(session.pulls ? { diagnosticProvider: { identifier: 'termwise', interFileDependencies: true, workspaceDiagnostics: false } } : {}),

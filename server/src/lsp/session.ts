@@ -135,6 +135,7 @@ export class Session {
       const { language } = document;
       if (!language) return { file: document.file, language: 'python', text: document.text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
       await workspace.prepare(language);
+      if (language === 'nomenclature') await workspace.prepareValues();
       const known = this.known(document);
       if (known) return known;
       const result = await this.inSlices(document, workspace.steps(document.file, document.text, language), token);

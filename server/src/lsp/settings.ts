@@ -2,7 +2,7 @@
 import { findingCodes, levels } from '../findings/finding.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
 import type { Configuration } from '../service/configuration.ts';
-import type { Settings } from '../service/contract.ts';
+import { defaultHints, type HintSettings, type Settings } from '../service/contract.ts';
 
 /** The name of the section that holds all settings. */
 export const section = 'termwise';
@@ -11,9 +11,12 @@ export const section = 'termwise';
 export interface SessionSettings extends Settings {
   /** Whether the scripts of the workspace that are not open are checked and listed too. */
   readonly wholeWorkspace: boolean;
+  readonly hints: HintSettings;
+  /** Whether counts stand above functions and relations. */
+  readonly lenses: boolean;
 }
 
-export const defaultSettings: SessionSettings = { severities: {}, notes: defaultNoteSettings, wholeWorkspace: false };
+export const defaultSettings: SessionSettings = { severities: {}, notes: defaultNoteSettings, wholeWorkspace: false, hints: defaultHints, lenses: true };
 
 /** Reads `{ severities: { … }, notes: { … }, wholeWorkspace }`. */
 export function readSettings(sent: unknown): SessionSettings {
@@ -25,7 +28,13 @@ export function readSettings(sent: unknown): SessionSettings {
     return level ? [[code, level] as const] : [];
   });
   const wholeWorkspace = isObject(sent) && sent.wholeWorkspace === true;
-  return { severities: Object.fromEntries(chosen), notes: { parentheses: flag('parentheses'), bare: flag('bare') }, wholeWorkspace };
+  const hints = objectIn(sent, 'hints');
+  const chosenArguments = (['numbers', 'all', 'off'] as const).find((each) => each === hints.arguments) ?? defaultHints.arguments;
+  const lenses = !isObject(sent) || sent.lenses !== false;
+  return {
+    severities: Object.fromEntries(chosen), notes: { parentheses: flag('parentheses'), bare: flag('bare') }, wholeWorkspace, lenses,
+    hints: { inferred: hints.inferred !== false, arguments: chosenArguments, values: hints.values !== false },
+  };
 }
 
 /** A project's own file goes before the editor's settings: it says what the team agreed on. */

@@ -88,10 +88,56 @@ export interface HoverInfo {
   readonly group?: { readonly code: string; readonly text: string };
 }
 
+/** The symbols of one function, or of the file's top level. */
+export interface SymbolGroup {
+  /** The function's name; undefined for the top level. */
+  readonly owner: string | undefined;
+  /** Its name and its whole, in the file; of the top level, the file. */
+  readonly nameSpan: Span;
+  readonly span: Span;
+  readonly symbols: readonly SymbolInfo[];
+}
+
+export interface SymbolInfo {
+  readonly name: string;
+  readonly kind: 'parameter' | 'variable';
+  readonly span: Span;
+  readonly origin: 'declared' | 'inferred' | 'unknown';
+  /** Empty for a pure number; undefined where it is not known, or only its dimension. */
+  readonly unit: string | undefined;
+  /** In powers of base quantities; undefined where it is not known. */
+  readonly dimension: string | undefined;
+  readonly description: string | undefined;
+  readonly uses: number;
+}
+
+export interface HintSettings {
+  /** The unit that follows, behind a symbol without a note. */
+  readonly inferred: boolean;
+  /** The unit that a parameter has, at calls: for numbers, for everything, or never. */
+  readonly arguments: 'numbers' | 'all' | 'off';
+  /** The value of a formula of a nomenclature file. */
+  readonly values: boolean;
+}
+
+export const defaultHints: HintSettings = { inferred: true, arguments: 'numbers', values: true };
+
+/** A few characters shown in the text that are not in it. */
+export interface TextHint {
+  readonly at: number;
+  readonly text: string;
+  readonly kind: 'inferred' | 'argument' | 'value';
+  readonly tip: string | undefined;
+  /** Writes it as a note. */
+  readonly edits: readonly TextEdit[];
+}
+
 /** The facade that terminal, editor and tests use: `createWorkspace(assets, source, settings)` in workspace.ts. */
 export interface Workspace {
   /** Loads the front end of each language, where that is not done yet. A file in another language gives no findings. */
   prepare(...languages: readonly LanguageId[]): Promise<void>;
+  /** Loads what evaluates the formulas of nomenclature files; until then they have no values. */
+  prepareValues(): Promise<void>;
   /**
    * Checks a text as the content of `file`; the language follows the file's ending unless given. `lineName`: what messages call the line
    * of an offset, where the text's own numbers mean nothing (a notebook's cells). Never throws for any text.
@@ -108,6 +154,10 @@ export interface Workspace {
   hover(file: string, offset: number): HoverInfo | undefined;
   /** Relations between quantities, and their dimensionless groups. */
   readonly groups: GroupsService;
+  /** The symbols of a file that take part in arithmetic, function by function; for a file that was checked last with the text it has now. */
+  symbols(file: string): readonly SymbolGroup[];
+  /** What to show in the text between two offsets beside what its author wrote. */
+  hints(file: string, span: Span, settings: HintSettings): readonly TextHint[];
   /** Frees what is kept for a file. */
   forget(file: string): void;
   /** Tells that a file changed on disk (an import or a nomenclature file). */

@@ -9,6 +9,7 @@ import { dimensionOf } from '../repairs/scene.ts';
 import type { Piece } from '../solver/definitions.ts';
 import type { Sightings, Solved } from '../solver/pieces.ts';
 import type { Span } from '../text/span.ts';
+import type { SymbolGroup } from './contract.ts';
 
 export interface FileSymbol {
   /** As `pathOf` prints it: `rho`, `self.p`, `df["p"]`. */
@@ -49,6 +50,23 @@ export function symbolsOf(understood: Understood, piece: Piece | undefined): Pie
   const made = { piece, symbols: collect(solver.sightings(piece), understood, piece) };
   if (solved) kept.set(solved, made);
   return made;
+}
+
+/** The same as plain data in offsets of the file. */
+export function* symbolGroups(understood: Understood): Generator<SymbolGroup> {
+  for (const { piece, symbols } of symbolsOfFile(understood)) {
+    const base = piece?.chunk.anchor.start ?? 0;
+    const moved = ({ start, end }: Span, by: number): Span => ({ start: start + by, end: end + by });
+    const whole = { start: 0, end: understood.parsed.text.length };
+    yield {
+      owner: piece && (piece.owner ? `${piece.owner.name}.${piece.fn.name}` : piece.fn.name),
+      nameSpan: piece ? moved(piece.fn.nameSpan, base) : { start: 0, end: 0 },
+      span: piece ? moved(piece.fn, base) : whole,
+      symbols: symbols.map(({ path, kind, chunk, span, origin, unit, dimension, description, uses }) => ({
+        name: path, kind, span: moved(span, chunk.anchor.start), origin, unit, dimension: dimension?.toString(), description, uses,
+      })),
+    };
+  }
 }
 
 /** Known and all: a symbol counts where it takes part in arithmetic. */

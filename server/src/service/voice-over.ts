@@ -2,8 +2,8 @@ import { LineIndex } from '../text/line-index.ts';
 import { absolute, type Place } from '../text/span.ts';
 import type { Voice } from '../wording/voice.ts';
 
-/** A voice that speaks about one file and may point into others. */
-export function voiceOver(file: string, textOf: (file: string) => string): Voice {
+/** A voice that speaks about one file and may point into others. `lineName`: how the lines of this one are called, where not by their numbers. */
+export function voiceOver(file: string, textOf: (file: string) => string, lineName?: (offset: number) => string): Voice {
   const indexes = new Map<string, LineIndex>();
   const indexOf = (name: string): LineIndex => {
     let index = indexes.get(name);
@@ -18,7 +18,10 @@ export function voiceOver(file: string, textOf: (file: string) => string): Voice
       const span = absolute(place);
       return indexOf(place.anchor.file).text.slice(span.start, span.end);
     },
-    lineAt: (place) => indexOf(place.anchor.file).lineAt(absolute(place).start) + 1,
+    lineAt(place) {
+      const { start } = absolute(place);
+      return lineName && place.anchor.file === file ? lineName(start) : `line ${indexOf(place.anchor.file).lineAt(start) + 1}`;
+    },
     otherFile: (place) => (place.anchor.file === file ? undefined : place.anchor.file.slice(place.anchor.file.lastIndexOf('/') + 1)),
   };
 }

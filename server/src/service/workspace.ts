@@ -3,6 +3,7 @@ import { detect, detectInSteps, type Engine, say, type Understood, understand } 
 import type { Detected } from '../findings/collect.ts';
 import type { FrontEnd, TextEdit } from '../frontends/frontend.ts';
 import { frontEndEntries } from '../frontends/registry.ts';
+import type { Elementary } from '../notes/nomenclature/elementary.ts';
 import { nomenclatureNotes } from '../notes/nomenclature/chunk-notes.ts';
 import { readChunkNotes } from '../notes/read-chunk.ts';
 import type { ChunkNotes } from '../notes/types.ts';
@@ -12,11 +13,14 @@ import type { FileSolver } from '../solver/file-solver.ts';
 import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
 import type { Solved } from '../solver/pieces.ts';
 import { absolute, type Span } from '../text/span.ts';
-import type { Assets, CheckResult, FileSource, HoverInfo, OfferedFix, PlacedFinding, Settings, Workspace } from './contract.ts';
+import type { Assets, CheckResult, FileSource, HintSettings, HoverInfo, OfferedFix, PlacedFinding, Settings, SymbolGroup, TextHint, Workspace } from './contract.ts';
+import { symbolGroups } from './file-symbols.ts';
+import { hintsIn } from './hints.ts';
 import { fixesOf, type Look } from './fixes.ts';
 import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
 import { type GroupsService, groupsService } from './groups-service.ts';
+import { type FormulaValues, formulaValues } from './formula-values.ts';
 import { hoverAt } from './hover.ts';
 import { withGroup } from './hover-group.ts';
 import { voiceOver } from './voice-over.ts';
@@ -47,6 +51,7 @@ class Files implements Workspace {
   private readonly libraries = new Map<string, Library>();
   private notes = new WeakMap<Chunk, { readonly reach: string; readonly notes: ChunkNotes }>();
   private cache = new WeakMap<object, Solved>();
+  private elementary: Elementary | undefined;
 
   private readonly frontEnds: FrontEnd[] = [];
   private readonly loading = new Map<LanguageId, Promise<void>>();
@@ -62,6 +67,10 @@ class Files implements Workspace {
       this.loading.set(language, loading);
       return loading;
     }));
+  }
+
+  async prepareValues(): Promise<void> {
+    this.elementary ??= (await import('../notes/nomenclature/elementary.ts')).elementary;
   }
 
   check(file: string, text: string, language?: LanguageId, lineName?: (offset: number) => string): CheckResult {
@@ -114,6 +123,16 @@ class Files implements Workspace {
     return kept && frontEnd && withGroup(hoverAt(kept.understood, frontEnd.style, offset, textOf), kept.understood, offset, textOf);
   }
 
+  symbols(file: string): readonly SymbolGroup[] {
+    const held = this.heldOf(file);
+    return held ? [...symbolGroups(held.understood)] : [];
+  }
+
+  hints(file: string, span: Span, settings: HintSettings): readonly TextHint[] {
+    const held = this.heldOf(file);
+    return held ? hintsIn(held.understood, held.style, span, settings, this.valuesOf(held.understood)) : [];
+  }
+
   forget(file: string): void {
     this.open.get(file)?.understood.parsed.release();
     this.open.delete(file);
@@ -129,6 +148,12 @@ class Files implements Workspace {
   private async load(language: LanguageId): Promise<void> {
     const entry = frontEndEntries.find((each) => each.language === language);
     if (entry) this.frontEnds.push(await entry.create({ runtime: this.assets.runtime, grammar: this.assets.grammar(language) ?? new Uint8Array() }));
+  }
+
+  /** Undefined for a script, and where the arithmetic is not loaded. */
+  private valuesOf({ parsed: { program, text } }: Understood): FormulaValues | undefined {
+    if (program.language !== 'nomenclature') return undefined;
+    return this.elementary ? formulaValues(text, program.file, this.folders.reachOf(program.file).vocabulary, this.elementary) : new Map();
   }
 
   private heldOf(file: string): { readonly understood: Understood; readonly style: FrontEnd['style'] } | undefined {

@@ -8,8 +8,8 @@ import type { Anchor, Place, Span } from '../text/span.ts';
 export interface Voice {
   /** The characters at a place. */
   textAt(place: Place): string;
-  /** Line from 1. */
-  lineAt(place: Place): number;
+  /** The line as it is called: `line 6`, in a notebook `cell 2, line 3`. */
+  lineAt(place: Place): string;
   /** The file a place is in, if it is not the one that is checked. */
   otherFile(place: Place): string | undefined;
 }
@@ -69,5 +69,5 @@ export function unitWithKinds(dimension: Dimension): string {
 /** ` (line 6)`, or with the file's name where it is another file. */
 export function where(voice: Voice, place: Place): string {
   const file = voice.otherFile(place);
-  return file ? `${file}, line ${voice.lineAt(place)}` : `line ${voice.lineAt(place)}`;
+  return file ? `${file}, ${voice.lineAt(place)}` : voice.lineAt(place);
 }

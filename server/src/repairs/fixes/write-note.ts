@@ -21,7 +21,7 @@ function notes(span: Span, scene: Scene): readonly Fix[] {
 }
 
 function one(symbol: OpenSymbol, unit: string | undefined, confidence: Fix['confidence'], cost: number, scene: Scene): readonly Fix[] {
-  const edit = unit === undefined ? undefined : editFor(symbol, unit, scene);
+  const edit = unit === undefined ? undefined : noteEdit(symbol, unit, scene);
   return edit && unit !== undefined ? [{ kind: 'note', confidence, edits: [edit], says: { what: 'note', symbol: symbol.path, unit }, cost }] : [];
 }
 
@@ -29,7 +29,7 @@ function one(symbol: OpenSymbol, unit: string | undefined, confidence: Fix['conf
 function together(open: readonly OpenSymbol[], scene: Scene): readonly Fix[] {
   const seen = new Set<string>();
   const edits = open.flatMap((symbol): readonly TextEdit[] => {
-    const edit = symbol.inferred === undefined || seen.has(symbol.path) ? undefined : editFor(symbol, symbol.inferred, scene);
+    const edit = symbol.inferred === undefined || seen.has(symbol.path) ? undefined : noteEdit(symbol, symbol.inferred, scene);
     if (!edit) return [];
     seen.add(symbol.path);
     return [edit];
@@ -37,7 +37,8 @@ function together(open: readonly OpenSymbol[], scene: Scene): readonly Fix[] {
   return edits.length < 2 ? [] : [{ kind: 'note', confidence: 'likely', edits, says: { what: 'notes', count: edits.length }, cost: 2 }];
 }
 
-function editFor(symbol: OpenSymbol, unit: string, scene: Scene): TextEdit | undefined {
+/** Where and how a symbol's unit is written; undefined where the text has no place for it. */
+export function noteEdit(symbol: OpenSymbol, unit: string, scene: Scene): TextEdit | undefined {
   const { at, chunk } = symbol;
   const base = chunk.anchor.start;
   if (at.kind === 'assign') return behind(at.statement.trailing, base, base + at.statement.end, unit, scene);
