@@ -90,7 +90,7 @@ function againstPyright(file: string, own: Spread): void {
 }
 
 function hundredThousand(folder: string): void {
-  const scripts = [...scriptsIn(folder, 'python', () => {})];
+  const scripts = [...scriptsIn(folder, 'python', () => {})].filter(({ lineName }) => !lineName);
   for (const wanted of [25_000, 50_000, 100_000]) {
     const made = manyLines(scripts, wanted);
     const run = runNode([command, 'check', made.folder, '--format', 'json']);

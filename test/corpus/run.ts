@@ -15,7 +15,7 @@ import { LineIndex } from '../../server/src/text/line-index.ts';
 import { type CorpusOptions, readCorpusArguments } from './arguments.ts';
 import { type EditKind, seedEdits } from './edits.ts';
 import { restoredLine } from './repairs.ts';
-import { scriptsIn } from './scripts.ts';
+import { type Script, scriptsIn } from './scripts.ts';
 import { type Tried, tryEdits } from './try-edits.ts';
 
 const options = readCorpusArguments(process.argv.slice(2));
@@ -37,16 +37,16 @@ function survey(workspace: Workspace, { folder, language, list, unread }: Corpus
   const codes = new Map<string, number>();
   const spellings = new Map<string, number>();
   const start = performance.now();
-  for (const { file, text } of scriptsIn(folder, language, tellUnreadable)) {
+  for (const { file, text, language: written, lineName } of scriptsIn(folder, language, tellUnreadable)) {
     totals.files++;
     totals.lines += text.split('\n').length;
     try {
-      const result = workspace.check(file, text);
+      const result = workspace.check(file, text, written, lineName);
       totals.functions += result.statistics.functions;
       totals.notes += result.statistics.notes;
       for (const spelling of result.statistics.unread) count(spellings, spelling);
       for (const finding of result.findings) count(codes, `${finding.code} (${finding.severity})`);
-      listFindings(result, folder, list);
+      listFindings(result, folder, list, lineName);
     } catch (error) {
       totals.crashes++;
       print(`CRASH ${file}: ${error instanceof Error ? error.stack : String(error)}`);
@@ -61,12 +61,12 @@ function survey(workspace: Workspace, { folder, language, list, unread }: Corpus
   if (unread > 0 && spellings.size > 0) print(`commonest not read: ${ranked(spellings).slice(0, unread).map(([text, number]) => `${JSON.stringify(text)} ${number}`).join(', ')}`);
 }
 
-function listFindings(result: CheckResult, folder: string, list: readonly string[]): void {
+function listFindings(result: CheckResult, folder: string, list: readonly string[], lineName: Script['lineName']): void {
   const lines = new LineIndex(result.text);
   for (const { code, severity, span, message } of result.findings) {
     if (!list.includes(code) && !list.includes(severity) && !list.includes('all')) continue;
     const line = lines.lineAt(span.start);
-    print(`${nameOf(result.file, folder)}:${line + 1}: ${severity} ${code}: ${message}\n    ${lines.lineText(line).trim()}`);
+    print(`${nameOf(result.file, folder)}${lineName ? `: ${lineName(span.start)}` : `:${line + 1}`}: ${severity} ${code}: ${message}\n    ${lines.lineText(line).trim()}`);
   }
 }
 

@@ -21,12 +21,12 @@ export interface Tried {
 }
 
 /** Makes one edit after the other in a script and checks it again each time. */
-export function tryEdits(workspace: Workspace, { file, text }: Script, edits: readonly SeedEdit[], repairs = false): readonly Tried[] {
-  const before = workspace.check(file, text);
+export function tryEdits(workspace: Workspace, { file, text, language }: Script, edits: readonly SeedEdit[], repairs = false): readonly Tried[] {
+  const before = workspace.check(file, text, language);
   const lines = new LineIndex(text);
   return edits.map((edit) => {
     const edited = text.slice(0, edit.span.start) + edit.replacement + text.slice(edit.span.end);
-    const after = workspace.check(file, edited);
+    const after = workspace.check(file, edited, language);
     const grown = edited.length - text.length;
     const inside = { start: edit.functionSpan.start, end: edit.functionSpan.end + grown };
     const reported = hasNew(words(before, edit.functionSpan), words(after, inside));

@@ -1,18 +1,21 @@
 /** `termwise check`: walks the paths, checks one file after the other, and shows what was found. */
 import { readFileSync } from 'node:fs';
 import { dirname, resolve } from 'node:path';
+import { isServed } from '../frontends/registry.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
 import { decode } from '../platform/decode.ts';
 import { diskFiles } from '../platform/disk.ts';
-import type { CheckResult, FileSource, Settings, Workspace } from '../service/contract.ts';
+import type { FileSource, Settings, Workspace } from '../service/contract.ts';
 import type { CheckOptions } from './arguments.ts';
 import { Configurations } from '../service/configurations.ts';
 import { type Configuration, type ConfigurationProblem, readConfiguration } from '../service/configuration.ts';
+import { cellRegions } from './cells.ts';
+import { type Document, openDocument } from './document.ts';
 import { jsonFormat } from './formats/json.ts';
 import { sarifFormat } from './formats/sarif.ts';
 import { statisticsText, textFormat } from './formats/text.ts';
 import { readStream, readText } from './input.ts';
-import { languageNames, languageOf } from './languages.ts';
+import { languageNames } from './languages.ts';
 import { displayName, folderUri, slashed } from './names.ts';
 import { progressLine } from './progress.ts';
 import { type Format, reportedOf } from './report.ts';
@@ -102,32 +105,30 @@ class Run {
 
   private async file(path: string, named: boolean): Promise<boolean> {
     this.progress.step(this.tally.files, this.nameOf(path));
-    const language = (named ? this.options.language : undefined) ?? languageOf(path);
-    if (!language) {
-      this.unreadable(path, `its ending names no language; --language says which it is (${languageNames.join(', ')})`);
+    const language = named ? this.options.language : undefined;
+    const read = language || isServed(path) ? readText(path) : { ok: true as const, text: '' };
+    const opened = read.ok ? openDocument(path, read.text, language) : { ...read, otherLanguage: false };
+    if (!read.ok || !opened.ok) {
+      if (!opened.ok && (named || !opened.otherLanguage)) this.unreadable(path, opened.problem);
       return true;
     }
-    const read = readText(path);
-    if (!read.ok) {
-      this.unreadable(path, read.problem);
-      return true;
-    }
-    const text = this.options.fix ? await this.fixedText(path, read.text, language) : read.text;
-    return this.options.fix !== 'show' ? this.checkText(slashed(path), text, language) : this.shown(path, read.text, text);
+    const fixed = this.options.fix ? await this.fixed(path, read.text, opened.document) : read.text;
+    if (this.options.fix === 'show') return this.shown(path, read.text, fixed);
+    const again = fixed === read.text ? opened : openDocument(path, fixed, language);
+    return again.ok ? this.checkDocument(slashed(path), again.document) : true;
   }
 
   /** The text after its proven fixes, written or only shown; the text as it is where that fails. */
-  private async fixedText(path: string, text: string, language: CheckResult['language']): Promise<string> {
-    const { applyProven } = await import('../service/fix-all.ts');
-    const { fixedSentence } = await import('./fix.ts');
+  private async fixed(path: string, text: string, document: Document): Promise<string> {
+    const { fixDocument, fixedSentence } = await import('./fix.ts');
     const { replaceFile } = await import('./write-file.ts');
     const workspace = await this.workspaceFor(dirname(slashed(path)));
     try {
       const bytes = readFileSync(path);
-      const decoded = decode(bytes);
+      const decoded = decode(bytes, document.notebook !== undefined);
       if (!decoded.ok || decoded.text !== text) throw new Error('it changed while it was read');
-      await workspace.prepare(language);
-      const repaired = applyProven(workspace, slashed(path), text, language);
+      await workspace.prepare(document.language);
+      const repaired = fixDocument(workspace, slashed(path), document);
       if (repaired.text === text) return text;
       const written = this.options.fix === 'show' ? { ok: true as const } : replaceFile(path, bytes, text, repaired.text);
       if (written.ok) this.complain(fixedSentence(this.nameOf(path), repaired, this.options.fix === 'show' ? 'to be fixed' : 'fixed'));
@@ -148,9 +149,8 @@ class Run {
   }
 
   private async standardInput(): Promise<boolean> {
-    const { stdinFile, language: given } = this.options;
-    const language = given ?? (stdinFile === undefined ? undefined : languageOf(stdinFile));
-    if (!language) {
+    const { stdinFile, language } = this.options;
+    if (!language && !(stdinFile !== undefined && isServed(stdinFile))) {
       this.complain(`standard input: its language is not known; --language says which it is (${languageNames.join(', ')})`);
       this.failed = true;
       return true;
@@ -161,17 +161,20 @@ class Run {
       this.unreadable(file, read.problem);
       return true;
     }
-    return this.checkText(file, read.text, language);
+    const opened = openDocument(file, read.text, language);
+    if (opened.ok) return this.checkDocument(file, opened.document);
+    this.unreadable(file, opened.problem);
+    return true;
   }
 
-  private async checkText(file: string, text: string, language: CheckResult['language']): Promise<boolean> {
+  private async checkDocument(file: string, { text, language, notebook }: Document): Promise<boolean> {
     const workspace = await this.workspaceFor(dirname(file));
     let findings: ReturnType<typeof reportedOf>;
     try {
       await workspace.prepare(language);
-      const result = workspace.check(file, text, language);
+      const result = workspace.check(file, text, language, notebook?.program.lineName);
       this.tally.count(result);
-      findings = reportedOf(result, (other) => this.source.read(other), (other) => this.nameOf(other));
+      findings = reportedOf(result, { textOf: (other) => this.source.read(other), nameOf: (other) => this.nameOf(other), inCells: notebook && cellRegions(notebook) });
     } catch (error) {
       this.unreadable(file, `it could not be checked because of a fault in termwise (${error instanceof Error ? (error.stack ?? error.message) : String(error)})`);
       return true;

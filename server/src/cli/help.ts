@@ -1,4 +1,7 @@
 /** What `--help` prints. */
+import { languageNames, searchedFor } from './languages.ts';
+import { wrap } from './terminal.ts';
+
 export const generalHelp = `termwise reads the units written in the comments and documentation of scripts, carries
 them through every expression without running anything, and reports what cannot be right.
 
@@ -13,21 +16,24 @@ Usage
 Exit status: 0 nothing found at severity error, 1 findings at error, 2 bad usage or input that cannot be read.
 `;
 
-export const checkHelp = `Checks the units of scripts and nomenclature files.
+export const checkHelp = `Checks the units of scripts, notebooks and nomenclature files.
 
 Usage
   termwise check <paths…> [options]
 
-  A path is a file, a folder (searched for *.py, *.pyw and *.nomen), or - for standard input.
-  Folders are searched without what .gitignore files exclude, folders whose names begin with a dot,
-  node_modules, __pycache__ and virtual environments. A file that is named is always checked.
+  A path is a file, a folder, or - for standard input. Folders are searched for
+${indented(searchedFor.join(', '), 2)}
+  without what .gitignore files exclude, folders whose names begin with a dot, node_modules, __pycache__
+  and virtual environments. A file that is named is always checked. The code cells of a notebook are checked
+  as one program in their order, and findings name cell and line.
 
 Options
   --format text|json|sarif    form of the output (text)
   --severity code=level       severity of one code; level is error, warning, information, hint or off (repeatable)
   --hints                     shows hints in text output; json and sarif always hold them
   --stats                     adds functions, notes read and not read, findings by code, files and time
-  --language name             language of standard input and of the files named: python, nomenclature
+  --language name             language of standard input and of the files named:
+${indented(languageNames.join(', '), 30)}
   --stdin-file name           name under which standard input is checked: decides its folder and language
   --config file               configuration file, instead of the nearest termwise.json at or above each file
   --fix                       writes the fixes that are proven into the files, and shows what is left; a file keeps its
@@ -46,3 +52,7 @@ Configuration: termwise.json, with comments allowed. All keys are optional.
 Exit status: 0 nothing found at severity error, 1 findings at error, 2 bad usage or input that cannot be read
 (the remaining files are still checked).
 `;
+
+function indented(text: string, by: number): string {
+  return wrap(text, 110 - by).map((line) => ' '.repeat(by) + line).join('\n');
+}

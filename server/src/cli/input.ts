@@ -1,5 +1,6 @@
 /** Reading what is to be checked. */
 import { readFileSync, statSync } from 'node:fs';
+import { isNotebook } from '../frontends/notebook/index.ts';
 import { decode, type Decoded, mostBytes, tooLong } from '../platform/decode.ts';
 import { whyUnreadable } from '../platform/walk.ts';
 
@@ -7,7 +8,7 @@ import { whyUnreadable } from '../platform/walk.ts';
 export function readText(path: string): Decoded {
   try {
     const { size } = statSync(path);
-    return size > mostBytes ? tooLong(size) : decode(readFileSync(path));
+    return size > mostBytes ? tooLong(size) : decode(readFileSync(path), isNotebook(path));
   } catch (error) {
     return { ok: false, problem: whyUnreadable(error) };
   }

@@ -1,3 +1,4 @@
+import { notebookEnding } from '../frontends/notebook/index.ts';
 import { frontEndEntries, languages } from '../frontends/registry.ts';
 import type { LanguageId } from '../program/nodes.ts';
 
@@ -6,5 +7,5 @@ export { languageOf } from '../frontends/registry.ts';
 /** Languages that `--language` takes. */
 export const languageNames: readonly LanguageId[] = languages;
 
-/** Endings of the files that a folder is searched for, by language. */
-export const languageEndings: readonly (readonly [LanguageId, readonly string[]])[] = frontEndEntries.map(({ language, endings }) => [language, endings]);
+/** What a folder is searched for, as patterns of names. */
+export const searchedFor: readonly string[] = [...frontEndEntries.flatMap(({ endings }) => endings), notebookEnding].map((ending) => `*${ending}`);

@@ -3,6 +3,7 @@ import type { FindingCode, Severity } from '../findings/finding.ts';
 import type { CheckResult } from '../service/contract.ts';
 import { LineIndex } from '../text/line-index.ts';
 import type { Span } from '../text/span.ts';
+import type { CellRegion } from './cells.ts';
 
 /** Lines and columns from one, columns in UTF-16 units; the end is behind the last character. */
 export interface Region {
@@ -18,6 +19,10 @@ export interface ReportedPlace extends Region {
   readonly message: string;
   /** The first line of the region. */
   readonly source: string;
+  /** In a notebook: the cell, all cells counted from 1. Lines and columns are then those of the cell. */
+  readonly cell?: number;
+  /** In a notebook: the region of the file as it is stored. */
+  readonly stored?: Region;
 }
 
 export interface Reported extends ReportedPlace {
@@ -47,8 +52,17 @@ export interface Format {
   end(summary: Summary): string;
 }
 
-/** Turns the offsets of one result into places. `textOf` gives the texts of other files; `nameOf` shows a path. */
-export function reportedOf(result: CheckResult, textOf: (file: string) => string | undefined, nameOf: (file: string) => string): readonly Reported[] {
+export interface Places {
+  /** The texts of other files. */
+  readonly textOf: (file: string) => string | undefined;
+  /** A path as it is shown. */
+  readonly nameOf: (file: string) => string;
+  /** Where the result is one of a notebook: places in its program as places in its cells. */
+  readonly inCells?: ((span: Span) => CellRegion) | undefined;
+}
+
+/** Turns the offsets of one result into places. */
+export function reportedOf(result: CheckResult, { textOf, nameOf, inCells }: Places): readonly Reported[] {
   const indexes = new Map<string, LineIndex>();
   const indexOf = (file: string): LineIndex => {
     let index = indexes.get(file);
@@ -59,6 +73,7 @@ export function reportedOf(result: CheckResult, textOf: (file: string) => string
     return index;
   };
   const place = (file: string, span: Span, message: string): ReportedPlace => {
+    if (inCells && file === result.file) return { file: nameOf(file), ...inCells(span), message };
     const index = indexOf(file);
     const region = regionOf(index, span);
     return { file: nameOf(file), ...region, message, source: index.lineText(region.line - 1) };
@@ -71,7 +86,8 @@ export function reportedOf(result: CheckResult, textOf: (file: string) => string
   }));
 }
 
-function regionOf(index: LineIndex, span: Span): Region {
+/** A span in lines and columns. */
+export function regionOf(index: LineIndex, span: Span): Region {
   const start = index.position(Math.min(span.start, index.text.length));
   const end = index.position(Math.min(Math.max(span.end, span.start), index.text.length));
   return { line: start.line + 1, column: start.column + 1, endLine: end.line + 1, endColumn: end.column + 1 };

@@ -1,6 +1,7 @@
 /** The host languages: one line each. */
 import type { LanguageId } from '../program/nodes.ts';
 import type { FrontEndEntry } from './frontend.ts';
+import { isNotebook } from './notebook/read.ts';
 import { nomenclatureEntry } from './nomenclature/index.ts';
 import { pythonEntry } from './python/index.ts';
 
@@ -11,6 +12,11 @@ export const frontEndEntries: readonly FrontEndEntry[] = [
 
 /** Every language served. */
 export const languages: readonly LanguageId[] = frontEndEntries.map(({ language }) => language);
+
+/** Whether a folder is searched for a file of this name: a script of a language served, or a notebook, whose language stands in it. */
+export function isServed(file: string): boolean {
+  return languageOf(file) !== undefined || isNotebook(file);
+}
 
 /** The language of a file by its ending. */
 export function languageOf(file: string): LanguageId | undefined {

@@ -7,13 +7,16 @@ export const longestLine = 1024 * 1024;
 
 export type Decoded = { readonly ok: true; readonly text: string } | { readonly ok: false; readonly problem: string };
 
-/** Decodes the whole content of a file; the problem is the end of a sentence that begins with the file's name. */
-export function decode(bytes: Uint8Array): Decoded {
+/**
+ * Decodes the whole content of a file; the problem is the end of a sentence that begins with the file's name. `anyLine`: lines may be
+ * of any length, as those of a notebook are that hold its pictures.
+ */
+export function decode(bytes: Uint8Array, anyLine = false): Decoded {
   if (bytes.length > mostBytes) return tooLong(bytes.length);
   const marked = byOrderMark(bytes);
   const decoded = marked ?? byDeclaration(bytes);
   if (!decoded.ok) return decoded;
-  const long = overlongLine(decoded.text);
+  const long = anyLine ? undefined : overlongLine(decoded.text);
   return long === undefined ? decoded : refuse(`line ${long} is longer than 1 MB: this is data and no script`);
 }
 

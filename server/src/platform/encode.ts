@@ -9,7 +9,7 @@ export function encodeLike(before: Uint8Array, textBefore: string, text: string)
     const same = encoder(textBefore);
     if (!same || !equalBytes(same, before)) continue;
     const encoded = encoder(text);
-    const back = encoded && decode(encoded);
+    const back = encoded && decode(encoded, true);
     return back?.ok && back.text === text ? encoded : undefined;
   }
   return undefined;

@@ -3,7 +3,7 @@ import { type Dirent, readdirSync, realpathSync, statSync } from 'node:fs';
 import { dirname, join, resolve, sep } from 'node:path';
 import type { Configuration } from '../service/configuration.ts';
 import { chainAt, extend, type IgnoreChain, isIgnored, isToolFolder, matches } from './ignored.ts';
-import { languageOf } from '../frontends/registry.ts';
+import { isServed } from '../frontends/registry.ts';
 
 export type Walked =
   /** `named`: given on the command line and not found in a folder. Paths are absolute. */
@@ -78,7 +78,7 @@ class FolderWalk {
     if (kind === 'folder') {
       if (isToolFolder(path, entry.name) || this.leftOut(path, true, folder, chain) || this.before.has(path)) return;
       yield* this.folder(path, extend(path, chain));
-    } else if (kind === 'file' && languageOf(entry.name) && !this.leftOut(path, false, folder, chain) && !this.before.has(path)) {
+    } else if (kind === 'file' && isServed(entry.name) && !this.leftOut(path, false, folder, chain) && !this.before.has(path)) {
       yield { kind: 'file', path, named: false };
     }
   }
@@ -95,7 +95,7 @@ class FolderWalk {
       const real = realpathSync(path);
       if (this.areas.some((area) => inside(real, area) || inside(area, real))) return undefined;
       const isFolder = statSync(real).isDirectory();
-      if (isFolder || languageOf(path)) this.areas.push(real);
+      if (isFolder || isServed(path)) this.areas.push(real);
       return isFolder ? 'folder' : 'file';
     } catch {
       return undefined;

@@ -1,4 +1,4 @@
-import type { Format, Reported } from '../report.ts';
+import type { Format, Reported, ReportedPlace } from '../report.ts';
 
 /** The JSON form; its keys are a contract. One finding a line, so that it can be read and compared line by line. */
 export function jsonFormat(): Format {
@@ -22,7 +22,12 @@ export function jsonFormat(): Format {
 }
 
 function entry(finding: Reported): object {
-  const { file, line, column, endLine, endColumn, code, severity, message } = finding;
-  const related = finding.related.map((each) => ({ file: each.file, line: each.line, column: each.column, message: each.message }));
-  return { file, line, column, endLine, endColumn, code, severity, message, related };
+  const { line, column, endLine, endColumn, code, severity, message } = finding;
+  const related = finding.related.map((each) => ({ ...fileOf(each), line: each.line, column: each.column, message: each.message }));
+  return { ...fileOf(finding), line, column, endLine, endColumn, code, severity, message, related };
+}
+
+/** In a notebook with the number of the cell; lines and columns are those of the cell then. */
+function fileOf({ file, cell }: ReportedPlace): object {
+  return cell === undefined ? { file } : { file, cell };
 }

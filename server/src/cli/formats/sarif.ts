@@ -51,7 +51,8 @@ function resultOf(finding: Reported): Result {
 }
 
 function locationOf(place: ReportedPlace): Location {
-  return { physicalLocation: { artifactLocation: artifactOf(place.file), region: regionOf(place) } };
+  const physicalLocation = { artifactLocation: artifactOf(place.file), region: regionOf(place.stored ?? place) };
+  return place.cell === undefined ? { physicalLocation } : { physicalLocation, logicalLocations: [{ name: `cell ${place.cell}`, fullyQualifiedName: `cell ${place.cell}, line ${place.line}` }] };
 }
 
 function artifactOf(file: string): { uri: string; uriBaseId?: string } {

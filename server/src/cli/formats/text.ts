@@ -1,7 +1,7 @@
 /** The form that people read. */
 import type { FindingCode } from '../../findings/finding.ts';
 import { findingCodes } from '../../findings/finding.ts';
-import { languageEndings } from '../languages.ts';
+import { searchedFor } from '../languages.ts';
 import type { Format, Region, Reported, ReportedPlace, Summary } from '../report.ts';
 import { painter, type Paint, showLine, type Style, wrap } from '../terminal.ts';
 
@@ -13,8 +13,6 @@ export interface TextOptions {
   readonly stats: boolean;
 }
 
-const searched = languageEndings.flatMap(([, endings]) => endings.map((ending) => `*${ending}`)).join(', ');
-
 export function textFormat(options: TextOptions): Format {
   const paint = painter(options.color);
   return {
@@ -25,7 +23,7 @@ export function textFormat(options: TextOptions): Format {
 }
 
 function findingText(finding: Reported, width: number, paint: Paint): string {
-  const place = paint('strong', `${finding.file}:${finding.line}:${finding.column}`);
+  const place = paint('strong', placeText(finding));
   const gutter = Math.max(...[finding, ...finding.related].map((each) => String(each.line).length), 3);
   const lines = [`${place}  ${paint(finding.severity, finding.severity)}  ${finding.code}`, ...sourceLines(finding, gutter, width, paint, finding.severity)];
   lines.push(...wrap(finding.message, width - 2).map((line) => `  ${line}`));
@@ -34,9 +32,13 @@ function findingText(finding: Reported, width: number, paint: Paint): string {
 }
 
 function relatedLines(related: ReportedPlace, file: string, gutter: number, width: number, paint: Paint): readonly string[] {
-  const place = related.file === file ? `line ${related.line}` : `${related.file}:${related.line}:${related.column}`;
+  const place = related.file !== file ? placeText(related) : related.cell === undefined ? `line ${related.line}` : `cell ${related.cell}, line ${related.line}`;
   const said = wrap(`${place}: ${related.message}`, width - 4).map((line, at) => (at === 0 ? `  - ${line}` : `    ${line}`));
   return [...said, ...sourceLines(related, gutter, width, paint).slice(0, 1)];
+}
+
+function placeText({ file, cell, line, column }: ReportedPlace): string {
+  return cell === undefined ? `${file}:${line}:${column}` : `${file}: cell ${cell}, line ${line}`;
 }
 
 function sourceLines(place: ReportedPlace, gutter: number, width: number, paint: Paint, style: Style = 'faint'): readonly string[] {
@@ -55,7 +57,7 @@ function beyond(place: Region): string {
 }
 
 function summaryText(summary: Summary, options: TextOptions): string {
-  if (summary.files === 0) return `No file was checked.${summary.unreadable.length > 0 ? '' : ` Folders are searched for ${searched}.`}\n`;
+  if (summary.files === 0) return `No file was checked.${summary.unreadable.length > 0 ? '' : ` Folders are searched for ${searchedFor.join(', ')}.`}\n`;
   const { error, warning, information, hint } = summary.bySeverity;
   const counts = [plural(error, 'error'), plural(warning, 'warning'), information > 0 ? `${information} for information` : ''].filter((each) => each !== '');
   if (options.hints && hint > 0) counts.push(plural(hint, 'hint'));

@@ -31,6 +31,8 @@ export interface JoinedCells {
   readonly text: string;
   /** The part of a cell that a span of the program stands for: up to the end of the cell in which it starts. Undefined where no cell is in the program. */
   toCell(span: Span): CellSpan | undefined;
+  /** The line of an offset of the program as a person counts it: `cell 3, line 2`, all cells counted. */
+  lineName(offset: number): string;
   /** The offset in the program of a place in a cell; undefined for a cell that is not in it. */
   toProgram(place: CellPlace): number | undefined;
   /** Changes of the program as changes of cells; undefined where one goes beyond a cell or changes a command to the kernel. */
@@ -68,6 +70,10 @@ export function joinCells(cells: readonly CellText[], language: LanguageId): Joi
       if (!part) return undefined;
       const start = Math.min(span.start, part.end) - part.start;
       return { cell: part.cell, start, end: Math.max(Math.min(span.end, part.end) - part.start, start) };
+    },
+    lineName(offset) {
+      const part = partAt(parts, offset);
+      return part ? `cell ${part.cell + 1}, line ${text.slice(part.start, Math.min(offset, part.end)).split(/\r\n|\r|\n/).length}` : 'line 1';
     },
     toProgram({ cell, offset }) {
       const part = byCell.get(cell);
