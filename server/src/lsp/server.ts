@@ -4,6 +4,7 @@ import type { Assets } from '../service/contract.ts';
 import { fileOf } from './paths.ts';
 import { Diagnostics } from './requests/diagnostics.ts';
 import { codeActionKinds, codeActions } from './requests/code-actions.ts';
+import { completion, completionTriggers } from './requests/completion.ts';
 import { configurationProblems } from './requests/configuration.ts';
 import { codeLenses } from './requests/code-lens.ts';
 import { documentSymbols } from './requests/document-symbols.ts';
@@ -72,6 +73,7 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   });
 
   connection.onHover((params, token) => hover(now().session, params, token));
+  connection.onCompletion((params, token) => completion(now().session, params, token));
   connection.onDocumentSymbol((params, token) => documentSymbols(now().session, params, token));
   connection.onCodeLens((params, token) => codeLenses(now().session, params, token));
   connection.languages.inlayHint.on((params, token) => inlayHints(now().session, params, token));
@@ -85,6 +87,7 @@ function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
     textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
     hoverProvider: true,
     inlayHintProvider: true,
+    completionProvider: { triggerCharacters: [...completionTriggers] },
     documentSymbolProvider: true,
     codeLensProvider: {},
     codeActionProvider: { codeActionKinds: [...codeActionKinds] },

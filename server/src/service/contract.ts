@@ -122,6 +122,18 @@ export interface HintSettings {
 
 export const defaultHints: HintSettings = { inferred: true, arguments: 'numbers', values: true };
 
+/** A text that may be written at a place. */
+export interface CompletionChoice {
+  readonly label: string;
+  /** What it takes the place of. */
+  readonly replaces: Span;
+  /** The unit that follows there, one of the kind that is needed, one that the file uses, any other. */
+  readonly rank: 'inferred' | 'kind' | 'used' | 'other';
+  readonly kind: 'unit' | 'symbol' | 'phrase';
+  readonly detail: string;
+  readonly documentation: string | undefined;
+}
+
 /** A few characters shown in the text that are not in it. */
 export interface TextHint {
   readonly at: number;
@@ -158,6 +170,8 @@ export interface Workspace {
   symbols(file: string): readonly SymbolGroup[];
   /** What to show in the text between two offsets beside what its author wrote. */
   hints(file: string, span: Span, settings: HintSettings): readonly TextHint[];
+  /** What may be written at an offset: inside a note, or in a nomenclature file. */
+  completions(file: string, offset: number): readonly CompletionChoice[];
   /** Frees what is kept for a file. */
   forget(file: string): void;
   /** Tells that a file changed on disk (an import or a nomenclature file). */

@@ -13,13 +13,14 @@ import type { FileSolver } from '../solver/file-solver.ts';
 import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
 import type { Solved } from '../solver/pieces.ts';
 import { absolute, type Span } from '../text/span.ts';
-import type { Assets, CheckResult, FileSource, HintSettings, HoverInfo, OfferedFix, PlacedFinding, Settings, SymbolGroup, TextHint, Workspace } from './contract.ts';
+import type { Assets, CheckResult, CompletionChoice, FileSource, HintSettings, HoverInfo, OfferedFix, PlacedFinding, Settings, SymbolGroup, TextHint, Workspace } from './contract.ts';
 import { symbolGroups } from './file-symbols.ts';
 import { hintsIn } from './hints.ts';
 import { fixesOf, type Look } from './fixes.ts';
 import { type Trial, tryInChunk } from './trial.ts';
 import { NomenclatureFolders, type Reach } from './folder-nomenclature.ts';
 import { type GroupsService, groupsService } from './groups-service.ts';
+import { completionsAt } from './completion.ts';
 import { type FormulaValues, formulaValues } from './formula-values.ts';
 import { hoverAt } from './hover.ts';
 import { withGroup } from './hover-group.ts';
@@ -131,6 +132,11 @@ class Files implements Workspace {
   hints(file: string, span: Span, settings: HintSettings): readonly TextHint[] {
     const held = this.heldOf(file);
     return held ? hintsIn(held.understood, held.style, span, settings, this.valuesOf(held.understood)) : [];
+  }
+
+  completions(file: string, offset: number): readonly CompletionChoice[] {
+    const held = this.heldOf(file);
+    return held ? completionsAt(held.understood, offset, this.folders.reachOf(file).vocabulary) : [];
   }
 
   forget(file: string): void {
