@@ -1,0 +1,69 @@
+/** The variables of a function or of the script, as languages with declarations need them. */
+import type { Expr, Stmt } from '../../../server/src/program/nodes.ts';
+import type { Local } from '../hosts/host.ts';
+import { blocksOf, expressionsOf, namesIn, nestedIn, within } from './visit.ts';
+
+interface Assigned {
+  count: number;
+  first: Stmt;
+  atTop: boolean;
+  isCounter: boolean;
+}
+
+/** What the statements assign, in the order of the first assignments; functions inside are scopes of their own. `listOf` finds literal lists. */
+export function localsOf(block: readonly Stmt[], params: readonly string[], listOf: (expr: Expr) => readonly Expr[] | undefined, nameOf: (name: string) => string, lineOf: (stmt: Stmt) => number): readonly Local[] {
+  const found = new Map<string, Assigned>();
+  collect(block, true, found);
+  return [...found].filter(([name]) => !params.includes(name)).map(([name, { count, first, atTop, isCounter }]) => ({
+    name: nameOf(name),
+    note: count === 1 ? first.trailing?.text : undefined,
+    noteLine: lineOf(first),
+    size: first.kind === 'assign' ? listOf(first.value)?.length : undefined,
+    isConstant: count === 1 && atTop && !isCounter,
+    declaredByAssignment: atTop,
+    isCounter,
+  }));
+}
+
+function collect(block: readonly Stmt[], atTop: boolean, found: Map<string, Assigned>): void {
+  for (const stmt of block) {
+    for (const { name, isCounter } of assignedBy(stmt)) {
+      const known = found.get(name);
+      if (known) known.count++;
+      else found.set(name, { count: stmt.kind === 'loop' ? 2 : 1, first: stmt, atTop: atTop && stmt.kind === 'assign', isCounter });
+    }
+    if (stmt.kind !== 'function' && stmt.kind !== 'class') for (const inner of blocksOf(stmt)) collect(inner, false, found);
+  }
+}
+
+function assignedBy(stmt: Stmt): readonly { readonly name: string; readonly isCounter: boolean }[] {
+  const targets = stmt.kind === 'assign' ? stmt.targets : stmt.kind === 'loop' && stmt.target ? [stmt.target] : [];
+  const names = targets.flatMap((target) => (target.kind === 'name' ? [target.name] : target.kind === 'sequence' ? target.items.flatMap((item) => (item.kind === 'name' ? [item.name] : [])) : []));
+  const isCounter = stmt.kind === 'loop' && stmt.iterable?.kind === 'call' && stmt.iterable.callee.kind === 'name' && stmt.iterable.callee.name === 'range';
+  return names.map((name) => ({ name, isCounter }));
+}
+
+/** Names of the script that its functions read. */
+export function readByFunctions(script: readonly Stmt[]): ReadonlySet<string> {
+  const read = new Set<string>();
+  for (const fn of script) {
+    if (fn.kind !== 'function') continue;
+    const own = new Set(fn.params.map((param) => param.name));
+    for (const stmt of fn.body.flatMap((each) => [...nestedIn(each)])) for (const { name } of assignedBy(stmt)) own.add(name);
+    for (const stmt of fn.body.flatMap((each) => [...nestedIn(each)])) for (const expr of expressionsOf(stmt)) for (const name of namesIn(expr)) if (!own.has(name)) read.add(name);
+  }
+  return read;
+}
+
+/** Parameters that a body treats as lists. */
+export function arraysIn(body: readonly Stmt[]): ReadonlySet<string> {
+  const arrays = new Set<string>();
+  for (const stmt of body.flatMap((each) => [...nestedIn(each)])) {
+    if (stmt.kind === 'loop' && stmt.iterable?.kind === 'name') arrays.add(stmt.iterable.name);
+    for (const expr of expressionsOf(stmt).flatMap((each) => [...within(each)])) {
+      if (expr.kind === 'index' && expr.object.kind === 'name') arrays.add(expr.object.name);
+      if (expr.kind === 'call' && expr.callee.kind === 'name' && ['len', 'sum'].includes(expr.callee.name) && expr.args[0]?.value.kind === 'name') arrays.add(expr.args[0].value.name);
+    }
+  }
+  return arrays;
+}
