@@ -179,7 +179,7 @@ test('a fault of the engine names the file and leaves the rest to be checked', a
       },
       prepare: async () => {},
       prepareValues: async () => {},
-      symbols: () => [], hints: () => [], completions: () => [],
+      symbols: () => [], hints: () => [], completions: () => [], uses: () => ({ uses: [], proven: false }),
       steps: () => { throw new Error('not asked for'); },
       forget: (file) => forgotten.push(file),
       fixes: () => [], hover: () => undefined, groups: { relations: () => [], actions: () => [], at: () => undefined },

@@ -8,7 +8,7 @@ import {
   type ClientCapabilities, type CodeAction, CodeActionRequest, ConfigurationRequest, createProtocolConnection, type Diagnostic, DiagnosticRefreshRequest, DidChangeTextDocumentNotification,
   DidChangeWatchedFilesNotification, DidCloseTextDocumentNotification, DidOpenTextDocumentNotification, DocumentDiagnosticRequest,
   ExitNotification, FileChangeType, type Hover, HoverRequest, InitializedNotification, InitializeRequest, type InitializeResult, type Position, type ProtocolConnection,
-  PublishDiagnosticsNotification, type PublishDiagnosticsParams, RegistrationRequest, ShutdownRequest, StreamMessageReader, StreamMessageWriter, type TextDocumentContentChangeEvent,
+  PublishDiagnosticsNotification, type PublishDiagnosticsParams, RegistrationRequest, ShowMessageNotification, ShutdownRequest, StreamMessageReader, StreamMessageWriter, type TextDocumentContentChangeEvent, WorkDoneProgress, WorkDoneProgressCreateRequest,
 } from 'vscode-languageserver/node.js';
 // @ts-expect-error A tool without types.
 import { build } from '../../.tools/build.mjs';
@@ -30,6 +30,10 @@ function bundle(): Promise<string> {
 export interface StartOptions {
   readonly files?: Readonly<Record<string, string>>;
   readonly pull?: boolean;
+  /** Shows progress of work. */
+  readonly progress?: boolean;
+  /** Names of the workspace's folders; its one folder where left out. */
+  readonly folders?: readonly string[];
   readonly encodings?: readonly string[];
   readonly settings?: unknown;
   /** Initialization options. */
@@ -41,6 +45,9 @@ export class Client {
   readonly published: PublishDiagnosticsParams[] = [];
   readonly registered: string[] = [];
   refreshes = 0;
+  /** Kinds of the reports of work, in order. */
+  readonly progress: string[] = [];
+  readonly messages: string[] = [];
   settings: unknown = {};
   private readonly versions = new Map<string, number>();
   private waiting: (() => void)[] = [];
@@ -55,7 +62,7 @@ export class Client {
     const client = new Client(folder, child, connection);
     client.settings = options.settings ?? {};
     client.listen();
-    client.initialized = await connection.sendRequest(InitializeRequest.type, { processId: process.pid, rootUri: null, workspaceFolders: [{ uri: pathToFileURL(folder).href, name: 'test' }], capabilities: capabilities(options), ...(options.options === undefined ? {} : { initializationOptions: options.options }) });
+    client.initialized = await connection.sendRequest(InitializeRequest.type, { processId: process.pid, rootUri: null, workspaceFolders: (options.folders ?? ['']).map((name) => ({ uri: pathToFileURL(join(folder, name)).href, name: name || 'test' })), capabilities: capabilities(options), ...(options.options === undefined ? {} : { initializationOptions: options.options }) });
     await connection.sendNotification(InitializedNotification.type, {});
     return client;
   }
@@ -78,6 +85,11 @@ export class Client {
     const version = (this.versions.get(name) ?? 0) + 1;
     this.versions.set(name, version);
     await this.connection.sendNotification(DidChangeTextDocumentNotification.type, { textDocument: { uri: this.uri(name), version }, contentChanges });
+  }
+
+  /** Any request about a document. */
+  ask<T>(method: string, name: string, params: object = {}): Promise<T> {
+    return this.connection.sendRequest(method, { textDocument: { uri: this.uri(name) }, ...params });
   }
 
   close(name: string): Promise<void> {
@@ -148,6 +160,13 @@ export class Client {
       this.registered.push(...registrations.map(({ method }) => method));
       this.wake();
     });
+    connection.onRequest(WorkDoneProgressCreateRequest.type, ({ token }) => {
+      connection.onProgress(WorkDoneProgress.type, token, (value) => {
+        this.progress.push(value.kind);
+        this.wake();
+      });
+    });
+    connection.onNotification(ShowMessageNotification.type, ({ message }) => this.messages.push(message));
     connection.onRequest(DiagnosticRefreshRequest.type, () => {
       this.refreshes++;
       this.wake();
@@ -160,7 +179,7 @@ export class Client {
   }
 }
 
-function capabilities({ pull, encodings }: StartOptions): ClientCapabilities {
+function capabilities({ pull, encodings, progress }: StartOptions): ClientCapabilities {
   return {
     general: encodings ? { positionEncodings: [...encodings] } : {},
     workspace: {
@@ -172,7 +191,9 @@ function capabilities({ pull, encodings }: StartOptions): ClientCapabilities {
       hover: { contentFormat: ['markdown'] },
       codeAction: { codeActionLiteralSupport: { codeActionKind: { valueSet: [] } }, disabledSupport: true, isPreferredSupport: true },
       ...(pull ? { diagnostic: {} } : {}),
+      formatting: {}, foldingRange: {}, references: {}, rename: {}, semanticTokens: { requests: { full: true }, tokenTypes: [], tokenModifiers: [], formats: [] },
     },
+    ...(progress ? { window: { workDoneProgress: true } } : {}),
   };
 }
 

@@ -19,6 +19,8 @@ else if (args.includes('--version')) process.stdout.write(`${manifest.version}\n
 else {
   if (!args.some((arg) => /^--(?:stdio|node-ipc|socket|pipe)\b/.test(arg))) process.argv.push('--stdio');
   const connection = createConnection(ProposedFeatures.all);
+  // One answer that fails is no reason to leave the editor without the others.
+  process.on('unhandledRejection', (error) => connection.console.error(error instanceof Error ? (error.stack ?? error.message) : String(error)));
   serve(connection, nodeAssets(), manifest.version);
   connection.listen();
 }

@@ -2,49 +2,72 @@
 import { type Connection, ErrorCodes, type InitializeParams, type InitializeResult, ResponseError, TextDocumentSyncKind } from 'vscode-languageserver/node.js';
 import type { Assets } from '../service/contract.ts';
 import { fileOf } from './paths.ts';
-import { Diagnostics } from './requests/diagnostics.ts';
 import { codeActionKinds, codeActions } from './requests/code-actions.ts';
+import { codeLenses } from './requests/code-lens.ts';
 import { completion, completionTriggers } from './requests/completion.ts';
 import { configurationProblems } from './requests/configuration.ts';
-import { codeLenses } from './requests/code-lens.ts';
+import { coverage, coverageRequest } from './requests/coverage.ts';
+import { Diagnostics } from './requests/diagnostics.ts';
 import { documentSymbols } from './requests/document-symbols.ts';
 import { hover } from './requests/hover.ts';
 import { inlayHints } from './requests/inlay-hints.ts';
+import { foldingRanges, formatting, semanticTokens } from './requests/nomenclature.ts';
+import { prepareRename, references, rename } from './requests/nomenclature-symbols.ts';
+import { nomenclatureCapabilities, serveNomenclatureOnly } from './nomenclature-only.ts';
 import { askForSettings, settingsChanged } from './requests/settings.ts';
+import { unitOrigin } from './requests/unit-origin.ts';
 import { changedFiles, watchFiles } from './requests/watched-files.ts';
+import { workspaceSymbols } from './requests/workspace-symbols.ts';
+import { Scan } from './scan.ts';
 import { Session } from './session.ts';
+
+interface Running {
+  readonly session: Session;
+  readonly diagnostics: Diagnostics;
+  readonly scan: Scan;
+}
 
 /** Answers a client until the connection ends. */
 export function serve(connection: Connection, assets: Assets, version: string): void {
-  let running: { readonly session: Session; readonly diagnostics: Diagnostics } | undefined;
-  const now = () => {
+  let running: Running | undefined;
+  const now = (): Running => {
     if (!running) throw new ResponseError(ErrorCodes.ServerNotInitialized, 'not initialized');
     return running;
   };
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
     const session = new Session(connection, assets, params, configurationProblems(connection));
-    running = { session, diagnostics: new Diagnostics(session) };
+    running = { session, diagnostics: new Diagnostics(session), scan: new Scan(session) };
     return { capabilities: capabilitiesFor(session), serverInfo: { name: 'termwise-language-server', version } };
   });
+  connection.onInitialized(() => begin(connection, now()));
+  followDocuments(connection, now);
+  answerRequests(connection, now);
+}
 
-  connection.onInitialized(async () => {
-    const { session, diagnostics } = now();
-    try {
-      await watchFiles(session);
-      if (await askForSettings(session)) await diagnostics.everything();
-      if (session.capabilities.workspace?.workspaceFolders) connection.workspace.onDidChangeWorkspaceFolders(({ added, removed }) => {
-        const gone = new Set(removed.map(({ uri }) => fileOf(uri)));
-        session.folders = [...session.folders.filter((folder) => !gone.has(folder)), ...added.map(({ uri }) => fileOf(uri))];
-      });
-    } catch (error) {
-      diagnostics.fail(error);
-    }
-  });
+/** What can be asked only once the client is ready: watching, settings, folders, and the first look at the workspace. */
+async function begin(connection: Connection, { session, diagnostics, scan }: Running): Promise<void> {
+  try {
+    await watchFiles(session);
+    await serveNomenclatureOnly(session);
+    if (await askForSettings(session)) await diagnostics.everything();
+    if (session.capabilities.workspace?.workspaceFolders) connection.workspace.onDidChangeWorkspaceFolders(({ added, removed }) => {
+      const gone = new Set(removed.map(({ uri }) => fileOf(uri)));
+      session.folders = [...session.folders.filter((folder) => !gone.has(folder)), ...added.map(({ uri }) => fileOf(uri))];
+      scan.start().catch((error) => diagnostics.fail(error));
+    });
+    await scan.start();
+  } catch (error) {
+    diagnostics.fail(error);
+  }
+}
 
+function followDocuments(connection: Connection, now: () => Running): void {
   connection.onDidOpenTextDocument(({ textDocument }) => {
-    const { session, diagnostics } = now();
-    diagnostics.changedIn(session.documents.open(textDocument));
+    const { session, diagnostics, scan } = now();
+    const document = session.documents.open(textDocument);
+    scan.opened(document.file);
+    diagnostics.changedIn(document);
   });
 
   connection.onDidChangeTextDocument(({ textDocument: { uri, version: edited }, contentChanges }) => {
@@ -54,31 +77,47 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   });
 
   connection.onDidCloseTextDocument(async ({ textDocument }) => {
-    const { session, diagnostics } = now();
+    const { session, diagnostics, scan } = now();
     const document = session.documents.close(textDocument.uri);
     if (!document) return;
     diagnostics.closed(document);
     await session.forget(document);
+    await scan.follow([document.file]);
   });
 
   connection.onDidChangeConfiguration(async (params) => {
-    const { session, diagnostics } = now();
-    if (await settingsChanged(session, params)) await diagnostics.everything();
+    const { session, diagnostics, scan } = now();
+    if (!(await settingsChanged(session, params))) return;
+    await diagnostics.everything();
+    await scan.start();
   });
 
   connection.onDidChangeWatchedFiles(async (params) => {
-    const { session, diagnostics } = now();
+    const { session, diagnostics, scan } = now();
     const files = changedFiles(session, params);
-    if (files.length > 0) await diagnostics.everything(files);
+    if (files.length === 0) return;
+    await diagnostics.everything(files);
+    await scan.follow(files);
   });
+}
 
+function answerRequests(connection: Connection, now: () => Running): void {
   connection.onHover((params, token) => hover(now().session, params, token));
   connection.onCompletion((params, token) => completion(now().session, params, token));
+  connection.onTypeDefinition((params, token) => unitOrigin(now().session, params, token));
+  connection.onReferences((params, token) => references(now().session, params, token));
+  connection.onPrepareRename((params, token) => prepareRename(now().session, params, token));
+  connection.onRenameRequest((params, token) => rename(now().session, params, token));
   connection.onDocumentSymbol((params, token) => documentSymbols(now().session, params, token));
+  connection.onWorkspaceSymbol((params, token) => workspaceSymbols(now().session, now().scan, params, token));
   connection.onCodeLens((params, token) => codeLenses(now().session, params, token));
-  connection.languages.inlayHint.on((params, token) => inlayHints(now().session, params, token));
   connection.onCodeAction((params, token) => codeActions(now().session, params, token));
+  connection.onFoldingRanges((params, token) => foldingRanges(now().session, params, token));
+  connection.onDocumentFormatting((params, token) => formatting(now().session, params, token));
+  connection.languages.semanticTokens.on((params, token) => semanticTokens(now().session, params, token));
+  connection.languages.inlayHint.on((params, token) => inlayHints(now().session, params, token));
   connection.languages.diagnostics.on((params, token) => now().diagnostics.pull(params, token));
+  connection.onRequest(coverageRequest, (params, token) => coverage(now().session, now().scan, params ?? {}, token));
 }
 
 function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
@@ -88,9 +127,12 @@ function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
     hoverProvider: true,
     inlayHintProvider: true,
     completionProvider: { triggerCharacters: [...completionTriggers] },
+    typeDefinitionProvider: true,
     documentSymbolProvider: true,
+    workspaceSymbolProvider: true,
     codeLensProvider: {},
     codeActionProvider: { codeActionKinds: [...codeActionKinds] },
+    ...nomenclatureCapabilities(session),
     workspace: { workspaceFolders: { supported: true, changeNotifications: true } },
     ...(session.pulls ? { diagnosticProvider: { identifier: 'termwise', interFileDependencies: true, workspaceDiagnostics: false } } : {}),
   };

@@ -5,6 +5,7 @@ import type { LanguageId } from '../program/nodes.ts';
 import type { FileSource, TextEdit } from '../frontends/frontend.ts';
 import type { Confidence, FixKind } from '../repairs/fix.ts';
 import type { Span } from '../text/span.ts';
+import type { SymbolUses } from './places.ts';
 import type { GroupsService } from './groups-service.ts';
 
 export type { FileSource };
@@ -79,7 +80,7 @@ export interface HoverInfo {
   /** The words beside the note. */
   readonly description: string | undefined;
   /** Notes that this rests on, the symbol's own first; lines from one, `file` where it is another one. */
-  readonly notes: readonly { readonly symbol: string; readonly unit: string; readonly file: string | undefined; readonly line: number }[];
+  readonly notes: readonly { readonly symbol: string; readonly unit: string; readonly file: string | undefined; readonly line: number; readonly span: Span }[];
   /** Values it may take, in its unit; equal where it is one value. */
   readonly range: { readonly low: number; readonly high: number } | undefined;
   /** What a literal number was taken for. */
@@ -170,6 +171,8 @@ export interface Workspace {
   symbols(file: string): readonly SymbolGroup[];
   /** What to show in the text between two offsets beside what its author wrote. */
   hints(file: string, span: Span, settings: HintSettings): readonly TextHint[];
+  /** The uses in a file of a symbol that a nomenclature file declares; for a file that was checked last with the text it has now. */
+  uses(file: string, name: string, declaredIn: string): SymbolUses;
   /** What may be written at an offset: inside a note, or in a nomenclature file. */
   completions(file: string, offset: number): readonly CompletionChoice[];
   /** Frees what is kept for a file. */

@@ -143,7 +143,8 @@ function pointScale(weight: number, zero: number, kelvinSized: boolean): string 
 function noteWhere(symbol: string, { note, unit, anchor }: NoteInForce, { scene, textOf }: Page): HoverInfo['notes'][number] {
   const here = scene.isHere(anchor);
   const lines = here ? scene.inputs.lines : LineIndex.of(textOf(anchor.file));
-  return { symbol, unit: unit.text, file: here ? undefined : anchor.file, line: lines.lineAt(anchor.start + note.span.start) + 1 };
+  const span = { start: anchor.start + note.span.start, end: anchor.start + note.span.end };
+  return { symbol, unit: unit.text, file: here ? undefined : anchor.file, line: lines.lineAt(span.start) + 1, span };
 }
 
 function absoluteIn({ anchor }: Chunk, { start, end }: Span): Span {

@@ -24,6 +24,7 @@ import { completionsAt } from './completion.ts';
 import { type FormulaValues, formulaValues } from './formula-values.ts';
 import { hoverAt } from './hover.ts';
 import { withGroup } from './hover-group.ts';
+import { type SymbolUses, usesOf } from './places.ts';
 import { voiceOver } from './voice-over.ts';
 
 /** Imported files that are kept understood from one check to the next. Never dropped during a check: modules import each other in circles. */
@@ -132,6 +133,11 @@ class Files implements Workspace {
   hints(file: string, span: Span, settings: HintSettings): readonly TextHint[] {
     const held = this.heldOf(file);
     return held ? hintsIn(held.understood, held.style, span, settings, this.valuesOf(held.understood)) : [];
+  }
+
+  uses(file: string, name: string, declaredIn: string): SymbolUses {
+    const held = this.heldOf(file);
+    return held ? usesOf(held.understood, name, declaredIn) : { uses: [], proven: false };
   }
 
   completions(file: string, offset: number): readonly CompletionChoice[] {
