@@ -1,6 +1,6 @@
 /** C and C++ with Doxygen: functions first, the script in `main`, what functions read of it as variables of the file. */
 import { curly, starred } from './curly.ts';
-import { features, type FunctionWords, type Host, type Line, noteText, words } from './host.ts';
+import { features, type Host, type Line, noteText, words } from './host.ts';
 import { alike, byFactor, inPairs, itself, numberOf, taking } from './library.ts';
 
 const keywords = words('auto break case char const continue default do double else enum extern float for goto if inline int long register restrict return short signed sizeof static struct switch typedef union unsigned void volatile while bool catch class constexpr delete explicit export false friend mutable namespace new noexcept nullptr operator private protected public template this throw true try typename using virtual y0 y1 j0 j1');
@@ -19,18 +19,19 @@ function compiled(language: 'c' | 'cpp', fileName: string): Host {
     keywords,
     library: {
       ...alike('', 'hypot', 'round'), ...byFactor('M_PI'),
-      log: taking('log', 1), abs: 'fabs', min: inPairs('fmin'), max: inPairs('fmax'), maximum: inPairs('fmax'), minimum: inPairs('fmin'), pi: 'M_PI', inf: 'INFINITY', nan: 'NAN', float: numberOf('INFINITY'), isnan: 'isnan', array: itself,
+      log: taking('log', 1), abs: 'fabs', min: inPairs('fmin'), max: inPairs('fmax'), maximum: inPairs('fmax'), minimum: inPairs('fmin'), pi: 'M_PI', inf: 'INFINITY', nan: 'NAN', float: numberOf('INFINITY'), isnan: 'isnan', array: itself, mod: 'fmod',
     },
     assign: (target, value, local) => (local ? `${typeOf(local.size, isPlus)} ${target}${isPlus || local.size === undefined ? '' : `[${local.size}]`} = ${value};` : `${target} = ${value};`),
+    initial: (items) => `{${items.join(', ')}}`,
     declare: (local) => `double ${local.name};`,
     show: (values) => (isPlus ? `${std}cout${values.map((value) => ` << ${value}`).join('')} << ${std}endl;` : values.map((value) => (value.startsWith('"') ? `printf(${value});` : `printf("%g\\n", ${value});`)).join(' ')),
     count: (variable, first, end) => `for (int ${variable} = ${first}; ${variable} < ${end}; ${variable}++) {`,
     leave: { break: 'break;', continue: 'continue;', raise: isPlus ? 'throw std::domain_error("not possible");' : 'exit(1);' },
-    frame({ name: own, params, out, result, summary, remarks }, noted) {
+    frame({ name: own, params, results: [result], summary, remarks }, noted) {
       const list = params.map((each) => `${each.isArray ? 'const double *' : 'double '}${each.name}${each.default === undefined ? '' : ` = ${each.default}`}`).join(', ');
       const doc = [{ text: `@brief ${summary}` }, ...remarks.map((text) => ({ text })), ...params.map((each) => ({ text: `@param ${each.name} ${noteText(each, true)}`, covers: noted(each.name) })),
-        ...(out === undefined || result.unit === undefined ? [] : [{ text: `@return ${noteText(result, true)}`, covers: noted(out) }])];
-      return { before: starred(doc), open: `${resultType(out)} ${own}(${list === '' ? (isPlus ? '' : 'void') : list}) {`, after: [], close: '}' };
+        ...(result?.unit === undefined ? [] : [{ text: `@return ${noteText(result, true)}`, covers: noted(result.name) }])];
+      return { before: starred(doc), open: `${result ? 'double' : 'void'} ${own}(${list === '' ? (isPlus ? '' : 'void') : list}) {`, after: [], close: '}' };
     },
     whole: ({ head, globals, functions, script, locals }) => [
       ...head, { text: isPlus ? '#include <cmath>' : '#include <math.h>' }, { text: isPlus ? '#include <iostream>' : '#include <stdio.h>' }, { text: '' }, ...globals.map((line) => ({ ...line, text: line.text.replace(/^double /, 'static const double ') })), { text: '' }, ...functions,
@@ -41,10 +42,6 @@ function compiled(language: 'c' | 'cpp', fileName: string): Host {
 
 function typeOf(size: number | undefined, isPlus: boolean): string {
   return size === undefined ? 'double' : isPlus ? 'std::vector<double>' : 'double';
-}
-
-function resultType(out: FunctionWords['out']): string {
-  return out === undefined ? 'void' : 'double';
 }
 
 function hoisted(locals: Parameters<NonNullable<Host['whole']>>[0]['locals']): readonly Line[] {

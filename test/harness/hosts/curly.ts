@@ -9,7 +9,7 @@ export const curly: Pick<Host, 'comment' | 'evaluate' | 'if' | 'elseIf' | 'else'
   else: '} else {',
   while: (condition) => `while (${condition}) {`,
   end: () => '}',
-  give: (value) => [`return ${value};`],
+  give: ([value]) => [`return ${value};`],
   giveNothing: 'return;',
 };
 

@@ -8,7 +8,7 @@ const kind = 'real(8)';
 export const fortranHost: Host = {
   language: 'fortran',
   fileName: 'spec.f90',
-  says: features('globals', 'list'),
+  says: features('globals', 'list', 'array arithmetic'),
   firstIndex: 1,
   last: (array) => call('size', array),
   ignoresCase: true,
@@ -18,7 +18,7 @@ export const fortranHost: Host = {
   keywords: new Set(['end', 'do', 'if', 'then', 'else', 'program', 'module', 'function', 'contains', 'use', 'real', 'integer', 'result', 'pi', 'spec', 'main']),
   library: {
     ...alike('', 'abs', 'min', 'max', 'sum', 'hypot'), ...byFactor('pi'),
-    log: taking('log', 1), round: 'anint', len: 'size', array: itself, pi: 'pi', maximum: 'max', minimum: 'min', float: numberOf('huge'),
+    log: taking('log', 1), round: 'anint', len: 'size', mod: 'modulo', array: itself, pi: 'pi', maximum: 'max', minimum: 'min', float: numberOf('huge'),
     mean: ([list]) => list && { kind: 'binary', op: '/', opSpan: { start: 0, end: 0 }, left: call('sum', list), right: call('size', list), start: 0, end: 0 },
     choose: ([then, otherwise, condition]) => then && otherwise && condition && call('merge', then, otherwise, condition),
   },
@@ -33,14 +33,14 @@ export const fortranHost: Host = {
   count: (variable, first, _end, last) => `do ${variable} = ${first}, ${last}`,
   end: (block) => (block === 'if' ? 'end if' : 'end do'),
   leave: { break: 'exit', continue: 'cycle', raise: 'error stop' },
-  give: (value, out, isLast) => (isLast ? [`${out} = ${value}`] : [`${out} = ${value}`, 'return']),
+  give: ([value], [result], isLast) => [`${result} = ${value}`, ...(isLast ? [] : ['return'])],
   giveNothing: 'return',
-  frame({ name: own, params, out, result, summary, remarks, locals }, noted) {
+  frame({ name: own, params, results: [result], summary, remarks, locals }, noted) {
     const list = params.map((each) => each.name).join(', ');
     const declared = params.map((each) => ({ text: `${kind}, intent(in) :: ${each.name}${each.isArray ? '(:)' : ''}${trailing(noteText(each))}`, covers: noted(each.name) }));
-    const back = out === undefined ? [] : [{ text: `${kind} :: ${out}${result.unit === undefined ? '' : trailing(noteText(result))}`, covers: noted(out) }];
-    const open = out === undefined ? `subroutine ${own}(${list})` : `function ${own}(${list}) result(${out})`;
-    return { before: [], open, after: [{ text: `! ${summary}` }, ...remarks.map((each) => ({ text: `! ${each}` })), ...declared, ...back, ...locals.map(declaration)], close: out === undefined ? 'end subroutine' : 'end function' };
+    const back = result ? [{ text: `${kind} :: ${result.name}${result.unit === undefined ? '' : trailing(noteText(result))}`, covers: noted(result.name) }] : [];
+    const open = result ? `function ${own}(${list}) result(${result.name})` : `subroutine ${own}(${list})`;
+    return { before: [], open, after: [{ text: `! ${summary}` }, ...remarks.map((each) => ({ text: `! ${each}` })), ...declared, ...back, ...locals.map(declaration)], close: result ? 'end function' : 'end subroutine' };
   },
   whole: ({ head, globals, functions, script, locals }) => [
     ...head, { text: 'module formulas' }, { text: '    implicit none' }, { text: `    ${kind}, parameter :: pi = 3.141592653589793d0` }, ...inside(globals.map((line) => ({ ...line, text: line.text.replace(/^(\w+) = /, `${kind}, parameter :: $1 = `) }))),

@@ -31,9 +31,8 @@ export interface Local {
 export interface FunctionWords {
   readonly name: string;
   readonly params: readonly NotedName[];
-  /** Name of the variable that holds the result, for languages that return by name; undefined where nothing is returned. */
-  readonly out: string | undefined;
-  readonly result: NotedName;
+  /** What is returned: none, one, or several; the names are those of variables that languages which return by name give. */
+  readonly results: readonly NotedName[];
   readonly summary: string;
   /** Directives in the documentation. */
   readonly remarks: readonly string[];
@@ -57,7 +56,7 @@ export interface FunctionFrame {
   readonly close: string;
 }
 
-export type Feature = 'choose' | 'lambda' | 'comprehension' | 'tuple' | 'nothing' | 'list' | 'matrix' | 'defaults' | 'named arguments' | 'chained targets' | 'letters beyond ASCII' | 'globals' | 'updates' | 'fields';
+export type Feature = 'choose' | 'lambda' | 'comprehension' | 'tuple' | 'nothing' | 'list' | 'matrix' | 'defaults' | 'named arguments' | 'chained targets' | 'letters beyond ASCII' | 'globals' | 'updates' | 'fields' | 'several results' | 'array arithmetic';
 
 /** A library function or constant in the host: its name, or how a call of it is said otherwise; the name '' leaves the single argument alone. */
 export type Said = string | ((args: readonly Expr[]) => Expr | undefined);
@@ -86,6 +85,10 @@ export interface Host {
   evaluate(value: string): string;
   show(values: readonly string[]): string;
   append?(list: string, value: string): string;
+  /** Several targets of a call that gives several results, where a tuple cannot say it. */
+  targets?(names: readonly string[]): string;
+  /** A list as the first value of a variable, where expressions have none. */
+  initial?(items: readonly string[]): string;
   if(condition: string): string;
   elseIf(condition: string): string;
   readonly else: string;
@@ -95,7 +98,8 @@ export interface Host {
   each?(name: string, list: string, size: number | undefined): readonly string[];
   readonly end: (block: 'if' | 'loop') => string;
   readonly leave: Readonly<Record<'break' | 'continue' | 'raise', string>>;
-  give(value: string, out: string, isLast: boolean): readonly string[];
+  /** As many values as results. */
+  give(values: readonly string[], results: readonly string[], isLast: boolean): readonly string[];
   readonly giveNothing: string;
   frame(words: FunctionWords, noted: (name: string) => readonly number[]): FunctionFrame;
   /** The file around its parts. */

@@ -29,12 +29,12 @@ function scripted(language: 'javascript' | 'typescript', fileName: string): Host
     count: (variable, first, end) => `for (let ${variable} = ${first}; ${variable} < ${end}; ${variable}++) {`,
     each: (variable, list) => [`for (const ${variable} of ${list}) {`],
     leave: { break: 'break;', continue: 'continue;', raise: "throw new RangeError('not possible');" },
-    frame({ name: own, params, out, result, summary, remarks }, noted) {
+    frame({ name: own, params, results: [result], summary, remarks }, noted) {
       const list = params.map((each) => `${each.name}${isTyped ? `: ${type(each.isArray)}` : ''}${each.default === undefined ? '' : ` = ${each.default}`}`).join(', ');
       const tag = (isArray: boolean): string => (isTyped ? '' : `{${type(isArray)}} `);
       const doc = [{ text: summary }, ...remarks.map((text) => ({ text })), ...params.map((each) => ({ text: `@param ${tag(each.isArray)}${each.name} ${noteText(each, true)}`, covers: noted(each.name) })),
-        ...(out === undefined || result.unit === undefined ? [] : [{ text: `@returns ${tag(false)}${noteText(result, true)}`, covers: noted(out) }])];
-      return { before: starred(doc), open: `function ${own}(${list})${isTyped && out !== undefined ? ': number' : ''} {`, after: [], close: '}' };
+        ...(result?.unit === undefined ? [] : [{ text: `@returns ${tag(false)}${noteText(result, true)}`, covers: noted(result.name) }])];
+      return { before: starred(doc), open: `function ${own}(${list})${isTyped && result ? ': number' : ''} {`, after: [], close: '}' };
     },
   };
 }

@@ -6,7 +6,7 @@ import { alike, itself, numberOf, ordered, taking } from './library.ts';
 export const matlabHost: Host = {
   language: 'matlab',
   fileName: 'spec.m',
-  says: features('list', 'lambda', 'matrix'),
+  says: features('list', 'lambda', 'matrix', 'several results', 'array arithmetic'),
   firstIndex: 1,
   last: () => name('end'),
   order: 'script first',
@@ -15,10 +15,11 @@ export const matlabHost: Host = {
     ...alike('', 'abs', 'min', 'max', 'sum', 'round', 'hypot', 'mean', 'std', 'gradient', 'cumsum', 'linspace', 'isnan', 'polyfit', 'polyval', 'deg2rad', 'rad2deg'),
     radians: 'deg2rad', degrees: 'rad2deg', maximum: 'max', minimum: 'min', array: itself, len: 'numel', pi: 'pi', inf: 'Inf', nan: 'NaN', float: numberOf('Inf'),
     trapezoid: ordered('trapz', 1, 0), interp: ordered('interp1', 1, 2, 0), norm: taking('norm', 1), solve: ([a, b]) => a && b && binary('\\', a, b),
-    zeros: ([n]) => n && call('zeros', n), ones: ([n]) => n && call('ones', n), eye: 'eye',
+    mod: 'mod', zeros: ([n]) => n && call('zeros', n), ones: ([n]) => n && call('ones', n), eye: 'eye',
   },
   comment: (text) => `% ${text}`,
   assign: (target, value) => `${target} = ${value};`,
+  targets: (names) => `[${names.join(', ')}]`,
   evaluate: (value) => `${value};`,
   show: (values) => values.map((value) => `disp(${value});`).join(' '),
   append: (list, value) => `${list}(end + 1) = ${value};`,
@@ -30,12 +31,12 @@ export const matlabHost: Host = {
   each: (variable, list) => [`for ${variable} = ${list}`],
   end: () => 'end',
   leave: { break: 'break;', continue: 'continue;', raise: "error('not possible');" },
-  give: (value, out, isLast) => (isLast ? [`${out} = ${value};`] : [`${out} = ${value};`, 'return;']),
+  give: (values, results, isLast) => [...values.map((value, at) => `${results[at]} = ${value};`), ...(isLast ? [] : ['return;'])],
   giveNothing: 'return;',
-  frame({ name: own, params, out, result, summary, remarks }, noted) {
-    const head = `${out === undefined ? '' : `${out} = `}${own}(${params.map((each) => each.name).join(', ')})`;
+  frame({ name: own, params, results, summary, remarks }, noted) {
+    const head = `${results.length === 0 ? '' : results.length === 1 ? `${results[0]?.name} = ` : `[${results.map((each) => each.name).join(', ')}] = `}${own}(${params.map((each) => each.name).join(', ')})`;
     const input = params.map((each) => ({ text: `%   ${each.name} = ${noteText(each, true)}`, covers: noted(each.name) }));
-    const output = out === undefined || result.unit === undefined ? [] : [{ text: '% OUTPUT:' }, { text: `%   ${out} = ${noteText(result, true)}`, covers: noted(out) }];
+    const output = results.every((each) => each.unit === undefined) ? [] : [{ text: '% OUTPUT:' }, ...results.map((each) => ({ text: `%   ${each.name} = ${noteText(each, true)}`, covers: noted(each.name) }))];
     const help = [{ text: `% ${own.toUpperCase()}  ${summary}` }, ...remarks.map((each) => ({ text: `% ${each}` })), ...(input.length > 0 ? [{ text: '% INPUT:' }, ...input] : []), ...output];
     return { before: [], open: `function ${head}`, after: [...help, { text: '' }], close: 'end' };
   },

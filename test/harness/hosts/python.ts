@@ -9,7 +9,7 @@ function numpydoc(title: string, noted: readonly NotedName[]): readonly string[]
 export const pythonHost: Host = {
   language: 'python',
   fileName: 'spec.py',
-  says: features('choose', 'lambda', 'comprehension', 'tuple', 'nothing', 'list', 'matrix', 'defaults', 'named arguments', 'letters beyond ASCII', 'globals', 'updates'),
+  says: features('choose', 'lambda', 'comprehension', 'tuple', 'nothing', 'list', 'matrix', 'defaults', 'named arguments', 'letters beyond ASCII', 'globals', 'updates', 'several results', 'array arithmetic'),
   firstIndex: 0,
   order: 'as written',
   keywords: words('None True False'),
@@ -31,11 +31,11 @@ export const pythonHost: Host = {
   each: (name, list) => [`for ${name} in ${list}:`],
   end: () => '',
   leave: { break: 'break', continue: 'continue', raise: 'raise ValueError' },
-  give: (value) => [`return ${value}`],
+  give: (values) => [`return ${values.join(', ')}`],
   giveNothing: 'return',
-  frame({ name, params, result, out, summary, remarks }, noted) {
-    const doc = ['"""' + summary, ...remarks.flatMap((each) => ['', each]), ...numpydoc('Parameters', params), ...(out === undefined || result.unit === undefined ? [] : numpydoc('Returns', [result])), '"""'];
-    const all = [...params, result];
+  frame({ name, params, results, summary, remarks }, noted) {
+    const doc = [`"""${summary}`, ...remarks.flatMap((each) => ['', each]), ...numpydoc('Parameters', params), ...(results.every((each) => each.unit === undefined) ? [] : numpydoc('Returns', results)), '"""'];
+    const all = [...params, ...results];
     return {
       before: [],
       open: `def ${name}(${params.map((each) => each.name + (each.default === undefined ? '' : `=${each.default}`)).join(', ')}):`,

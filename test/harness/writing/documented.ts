@@ -6,18 +6,19 @@ import { unsayable } from './unsayable.ts';
 
 export interface Documented {
   readonly params: ReadonlyMap<string, Pick<NotedName, 'unit' | 'words'>>;
-  readonly result: Pick<NotedName, 'unit' | 'words'>;
-  /** Offsets of the notes in the chunk, by name; the result under ''. */
-  readonly places: ReadonlyMap<string, number>;
+  /** By position. */
+  readonly results: ReadonlyMap<number, Pick<NotedName, 'unit' | 'words'>>;
+  /** Offsets of the notes in the chunk, by the parameter's name or the result's position. */
+  readonly places: ReadonlyMap<string | number, number>;
   readonly summary: string;
   readonly remarks: readonly string[];
 }
 
-/** What is said of a function's parameters and of its one result. Throws where it has notes that have no place in that. */
+/** What is said of a function's parameters and of its results. Throws where it has notes that have no place in that. */
 export function documentedBy(fn: FunctionStmt, notes: readonly Note[]): Documented {
   const params = new Map<string, Pick<NotedName, 'unit' | 'words'>>();
-  const places = new Map<string, number>();
-  let result: Pick<NotedName, 'unit' | 'words'> = { unit: undefined, words: '' };
+  const places = new Map<string | number, number>();
+  const results = new Map<number, Pick<NotedName, 'unit' | 'words'>>();
   for (const note of notes) {
     const { target } = note;
     const words = { unit: note.unit.text, words: plain(note.description ?? '') };
@@ -26,14 +27,14 @@ export function documentedBy(fn: FunctionStmt, notes: readonly Note[]): Document
       params.set(target.param.name, words);
       places.set(target.param.name, note.span.start);
     } else if (target.kind === 'result' && target.owner === fn) {
-      if (target.position !== undefined && target.position > 0) unsayable('several results');
-      if (places.has('')) unsayable('several results');
-      result = words;
-      places.set('', note.span.start);
+      const position = target.position ?? 0;
+      if (results.has(position)) unsayable('two notes on a result');
+      results.set(position, words);
+      places.set(position, note.span.start);
     }
   }
   const lines = (fn.doc?.text ?? '').split('\n').map((line) => line.trim());
-  return { params, result, places, summary: plain(lines.find((line) => line !== '') ?? ''), remarks: lines.filter((line) => /^(?:empirical:|termwise:)|\bdepends on\b/.test(line)) };
+  return { params, results, places, summary: plain(lines.find((line) => line !== '') ?? ''), remarks: lines.filter((line) => /^(?:empirical:|termwise:)|\bdepends on\b/.test(line)) };
 }
 
 /** Words that no reader takes for markup or for a unit. */

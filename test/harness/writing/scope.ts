@@ -1,5 +1,5 @@
 /** The variables of a function or of the script, as languages with declarations need them. */
-import type { Expr, Stmt } from '../../../server/src/program/nodes.ts';
+import type { Expr, LoopStmt, Stmt } from '../../../server/src/program/nodes.ts';
 import type { Local } from '../hosts/host.ts';
 import { blocksOf, expressionsOf, namesIn, nestedIn, within } from './visit.ts';
 
@@ -40,7 +40,19 @@ function assignedBy(stmt: Stmt): readonly { readonly name: string; readonly isCo
   const targets = stmt.kind === 'assign' ? stmt.targets : stmt.kind === 'loop' && stmt.target ? [stmt.target] : [];
   const names = targets.flatMap((target) => (target.kind === 'name' ? [target.name] : target.kind === 'sequence' ? target.items.flatMap((item) => (item.kind === 'name' ? [item.name] : [])) : []));
   const isCounter = stmt.kind === 'loop' && stmt.iterable?.kind === 'call' && stmt.iterable.callee.kind === 'name' && stmt.iterable.callee.name === 'range';
-  return names.map((name) => ({ name, isCounter }));
+  const counter = stmt.kind === 'loop' && stmt.target?.kind === 'sequence' && stmt.iterable ? walked(stmt, stmt.target, stmt.iterable).counter : undefined;
+  const found = names.filter((name) => name !== counter).map((name) => ({ name, isCounter }));
+  return counter === undefined ? found : [{ name: counter, isCounter: true }, ...found];
+}
+
+/** A loop over lists: its counter, and each variable with the list that it walks through. */
+export function walked(stmt: LoopStmt, target: Expr, iterable: Expr): { readonly counter: string; readonly pairs: readonly (readonly [name: string, list: Expr])[] } {
+  const names = (target.kind === 'sequence' ? target.items : [target]).flatMap((item) => (item.kind === 'name' ? [item.name] : []));
+  const lists = iterable.kind === 'call' ? iterable.args.map((arg) => arg.value) : [iterable];
+  const callee = iterable.kind === 'call' && iterable.callee.kind === 'name' ? iterable.callee.name : undefined;
+  if (callee === 'enumerate' && names.length === 2 && lists.length === 1) return { counter: names[0] as string, pairs: [[names[1] as string, lists[0] as Expr]] };
+  if (names.length !== lists.length || (callee !== 'zip' && callee !== undefined)) return { counter: `n${stmt.start}`, pairs: [] };
+  return { counter: `n_${names[0]}`, pairs: names.map((name, at) => [name, lists[at] as Expr] as const) };
 }
 
 /** Names of the script that its functions read. */

@@ -3,7 +3,7 @@ import type { FindingCode } from '../../../server/src/findings/finding.ts';
 import type { FrontEnd } from '../../../server/src/frontends/frontend.ts';
 import { readChunkNotes } from '../../../server/src/notes/read-chunk.ts';
 import { defaultNoteSettings, type Note } from '../../../server/src/notes/types.ts';
-import type { Chunk, Stmt } from '../../../server/src/program/nodes.ts';
+import type { Chunk, Expr, Stmt } from '../../../server/src/program/nodes.ts';
 import { emptyVocabulary } from '../../../server/src/quantities/unit-result.ts';
 import { LineIndex } from '../../../server/src/text/line-index.ts';
 import type { Host, Line } from '../hosts/host.ts';
@@ -12,6 +12,7 @@ import { python } from '../python.ts';
 import { Names } from './names.ts';
 import { readByFunctions } from './scope.ts';
 import { Unsayable, unsayable } from './unsayable.ts';
+import { expressionsOf, nestedIn, within } from './visit.ts';
 import { Writer } from './writer.ts';
 
 export type WrittenSection =
@@ -57,6 +58,7 @@ function fileOf(chunks: readonly Chunk[], host: Host, frontEnd: FrontEnd, index:
   const script = statements.filter((stmt) => stmt.kind !== 'function');
   const locals = writer.locals(script);
   if (!host.says.has('globals') && script.some((stmt) => isShared(stmt, shared))) return unsayable('functions that read the script');
+  if (!host.says.has('array arithmetic') && statements.some((stmt) => reckonsWithLists(stmt, names, writer))) return unsayable('arithmetic with lists');
   const asScript = writer.script(locals, new Set());
   const parts = { functions: [] as Line[], globals: [] as Line[], script: [] as Line[], written: [] as Line[] };
   for (const { chunk, stmt } of all) {
@@ -69,6 +71,18 @@ function fileOf(chunks: readonly Chunk[], host: Host, frontEnd: FrontEnd, index:
   if (host.whole) return [...opening, ...host.whole({ ...parts, head: [], locals: own })];
   if (host.order === 'script first') return [...opening, ...parts.script, { text: '' }, ...parts.functions];
   return [...opening, ...parts.written];
+}
+
+/** Operators and library functions on whole lists. */
+function reckonsWithLists(top: Stmt, names: Names, writer: Writer): boolean {
+  const block = top.kind === 'function' ? top.body : [top];
+  const lists = new Set(writer.locals(block).flatMap((each) => (each.size === undefined ? [] : [each.name])));
+  const isList = (expr: Expr): boolean => expr.kind === 'name' && lists.has(names.of(expr.name));
+  return block.flatMap((each) => [...nestedIn(each)]).flatMap((each) => [...expressionsOf(each)]).flatMap((each) => [...within(each)]).some((expr) => {
+    if (expr.kind === 'binary') return isList(expr.left) || isList(expr.right);
+    if (expr.kind === 'call') return names.library(expr.callee) !== undefined && names.library(expr.callee) !== 'len' && expr.args.some((arg) => isList(arg.value));
+    return expr.kind === 'unary' && isList(expr.operand);
+  });
 }
 
 /** An assignment that functions read. */

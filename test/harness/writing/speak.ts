@@ -13,6 +13,21 @@ export class Speaker {
     return this.style.print(this.turn(expr));
   }
 
+  printTurned(expr: Expr): string {
+    return this.style.print(expr);
+  }
+
+  /** How many members a list has; undefined where the host cannot say. */
+  lengthOf(list: Expr): Expr | undefined {
+    const said = this.host.library.len;
+    return typeof said === 'string' ? call(said, this.turn(list)) : said?.([this.turn(list)]);
+  }
+
+  /** A member by a counter that begins where the host does. */
+  itemAt(list: Expr, counter: Expr): Expr {
+    return { kind: 'index', object: this.turn(list), keys: [counter], start: 0, end: 0 };
+  }
+
   /** A literal list, whichever way Python wrote it. */
   list(expr: Expr): readonly Expr[] | undefined {
     const inner = expr.kind === 'call' && this.names.library(expr.callee) === 'array' && expr.args.length === 1 ? (expr.args[0] as Argument).value : expr;
@@ -110,14 +125,18 @@ export class Speaker {
     const params = fn?.params ?? [];
     const given = params.map((param, at) => expr.args.find((arg) => arg.name === param.name) ?? (expr.args[at]?.name === undefined ? expr.args[at] : undefined));
     const count = given.findLastIndex((each) => each !== undefined) + 1;
-    const full = given.slice(0, count);
-    if (count < params.length && !this.host.says.has('defaults')) return unsayable('defaults');
-    if (full.every((each) => each !== undefined)) return full.map(({ name: _name, ...arg }) => arg);
-    return this.host.says.has('named arguments') ? expr.args : unsayable('named arguments');
+    const { says } = this.host;
+    if (says.has('named arguments') && given.slice(0, count).some((each) => each === undefined)) return expr.args;
+    return params.slice(0, says.has('defaults') ? count : params.length).map((param, at): Argument => {
+      const { name: _name, ...arg } = given[at] ?? { value: param.default ?? unsayable('missing arguments'), start: 0, end: 0 };
+      return arg;
+    });
   }
 
   private binary(expr: Extract<Expr, { kind: 'binary' }>): Expr {
-    if (['@', '\\', 'bits', '//', '%'].includes(expr.op)) return unsayable(`operator ${expr.op}`);
+    if (['@', '\\', 'bits', '//'].includes(expr.op) || (expr.op === '%' && expr.left.kind === 'text')) return unsayable(`operator ${expr.op}`);
+    const { mod } = this.host.library;
+    if (expr.op === '%' && typeof mod === 'string') return call(mod, this.turn(expr.left), this.turn(expr.right));
     const [left, right] = [this.turn(expr.left), this.turn(expr.right)];
     const real = this.host.integerDivision && expr.op === '/' && right.kind === 'number' && /^\d+$/.test(right.text);
     return { ...expr, left, right: real ? { ...right, text: `${right.text}.0` } : right };

@@ -4,18 +4,19 @@ import type { Note } from '../../../server/src/notes/types.ts';
 import type { AssignStmt, Chunk, Comment, Expr, FunctionStmt, IfStmt, LoopStmt, ReturnStmt, Stmt } from '../../../server/src/program/nodes.ts';
 import type { LineIndex } from '../../../server/src/text/line-index.ts';
 import type { FunctionWords, Host, Line, Local } from '../hosts/host.ts';
-import { binary, number } from '../hosts/make.ts';
+import { binary, name as named, number } from '../hosts/make.ts';
 import { documentedBy } from './documented.ts';
 import type { Names } from './names.ts';
-import { arraysIn, localsOf } from './scope.ts';
+import { arraysIn, localsOf, walked } from './scope.ts';
 import { Speaker } from './speak.ts';
 import { unsayable } from './unsayable.ts';
+import { namesIn, nestedIn } from './visit.ts';
 
 interface Scope {
   readonly locals: ReadonlyMap<string, Local>;
   readonly declared: Set<string>;
-  /** The variable that holds the result. */
-  readonly out: string;
+  /** The variables that hold what is returned. */
+  readonly results: readonly string[];
   /** The statement that the body ends with. */
   readonly last: Stmt | undefined;
 }
@@ -36,7 +37,7 @@ export class Writer {
 
   /** A block of the script itself. */
   script(locals: readonly Local[], declared: Set<string>): (chunk: Chunk, stmt: Stmt) => readonly Line[] {
-    const scope: Scope = { locals: new Map(locals.map((each) => [each.name, each])), declared, out: '', last: undefined };
+    const scope: Scope = { locals: new Map(locals.map((each) => [each.name, each])), declared, results: [], last: undefined };
     return (chunk, stmt) => {
       this.enter(chunk);
       return this.statement(stmt, scope);
@@ -47,14 +48,17 @@ export class Writer {
   function(chunk: Chunk, fn: FunctionStmt): readonly Line[] {
     this.enter(chunk);
     if (fn.decorators.length > 0 || fn.params.some((param) => param.mode !== 'plain' && param.mode !== 'keyword')) return unsayable('rare kinds of parameters');
-    const { params, result, places, summary, remarks } = documentedBy(fn, this.notesOf(chunk));
+    const { params, results: notedResults, places, summary, remarks } = documentedBy(fn, this.notesOf(chunk));
     const arrays = arraysIn(fn.body);
     const given = fn.params.map((param) => param.name);
     const locals = this.locals(fn.body, given);
-    const gives = hasResult(fn.body);
-    const out = freshName('result', [...given, ...locals.map((each) => each.name)]);
+    const count = resultsOf(fn.body);
+    if (count > 1 && !this.host.says.has('several results')) return unsayable('several results');
+    const taken = [...given, ...locals.map((each) => each.name)];
+    const results = Array.from({ length: count }, (_, at) => ({ name: freshName(count > 1 ? `result${at + 1}` : 'result', taken), isArray: false, ...(notedResults.get(at) ?? { unit: undefined, words: '' }) }));
+    if ([...notedResults.keys()].some((at) => at >= count)) return unsayable('notes on a result that is none');
     const words: FunctionWords = {
-      name: this.names.of(fn.name), locals, summary, remarks, out: gives ? out : undefined, result: { name: out, isArray: false, ...result },
+      name: this.names.of(fn.name), locals, summary, remarks, results,
       params: fn.params.map((param) => ({
         name: this.names.of(param.name), isArray: arrays.has(param.name), ...(params.get(param.name) ?? { unit: undefined, words: '' }),
         default: param.default && this.host.says.has('defaults') ? this.speaker.print(param.default) : undefined,
@@ -62,12 +66,12 @@ export class Writer {
     };
     const noted = (name: string): readonly number[] => {
       const param = fn.params.find((each) => this.names.of(each.name) === name);
-      const place = places.get(param?.name ?? '');
+      const place = places.get(param?.name ?? results.findIndex((each) => each.name === name));
       return place === undefined ? [] : [this.lineAt(place)];
     };
     const above = this.above(fn.start, fn);
     const frame = this.host.frame(words, noted);
-    const scope: Scope = { locals: new Map(locals.map((each) => [each.name, each])), declared: new Set(), out, last: fn.body.at(-1) };
+    const scope: Scope = { locals: new Map(locals.map((each) => [each.name, each])), declared: new Set(), results: results.map((each) => each.name), last: fn.body.at(-1) };
     const body = fn.body.filter((each) => !isText(each));
     const inside = [...frame.after, ...this.hoisted(locals), ...body.flatMap((each) => this.statement(each, scope)), ...this.above(fn.end + (fn.loose?.length ?? 0), undefined)];
     const heading = { text: frame.open, covers: [this.lineAt(fn.nameSpan.start)] };
@@ -148,16 +152,31 @@ export class Writer {
   private assign(stmt: AssignStmt, scope: Scope): readonly Line[] {
     if (stmt.targets.length > 1) return unsayable('chained targets');
     const [target] = stmt.targets as [Expr];
-    if (target.kind === 'sequence' && !this.host.says.has('tuple')) return unsayable('tuple');
+    if (target.kind === 'sequence' && !this.host.says.has('tuple')) {
+      if (stmt.value.kind !== 'call' || !this.host.targets) return this.oneByOne(stmt, target.items, scope);
+      return [this.line(stmt, this.host.assign(this.host.targets(target.items.map((item) => this.speaker.print(item))), this.speaker.print(stmt.value), undefined))];
+    }
     if (target.kind !== 'name' && target.kind !== 'sequence' && target.kind !== 'index') return unsayable(`assignment to ${target.kind}`);
     const left = this.speaker.print(target);
     if (stmt.op && this.host.says.has('updates')) return [this.line(stmt, this.host.evaluate(`${left} ${stmt.op}= ${this.speaker.print(stmt.value)}`))];
-    const value = this.speaker.print(stmt.op ? binary(stmt.op, target, stmt.value) : stmt.value);
     const local = scope.locals.get(left);
     const first = local?.declaredByAssignment && !scope.declared.has(left);
+    const value = first && local.size !== undefined && this.host.initial ? this.host.initial((this.speaker.list(stmt.value) ?? []).map((item) => this.speaker.print(item))) : this.speaker.print(stmt.op ? binary(stmt.op, target, stmt.value) : stmt.value);
     scope.declared.add(left);
     const text = this.host.assign(left, value, first ? local : undefined);
     return [this.host.declaresNotes && local?.note !== undefined ? { text, covers: this.linesOf(stmt.start, stmt.end) } : this.line(stmt, text)];
+  }
+
+  /** `a, b = x, y` as two statements, where y does not read a. */
+  private oneByOne(stmt: AssignStmt, targets: readonly Expr[], scope: Scope): readonly Line[] {
+    const values = stmt.value.kind === 'sequence' ? stmt.value.items : [];
+    if (values.length !== targets.length) return unsayable('tuple');
+    return targets.flatMap((target, at) => {
+      const before = targets.slice(0, at).flatMap((each) => (each.kind === 'name' ? [each.name] : []));
+      const value = values[at] as Expr;
+      if ([...namesIn(value)].some((each) => before.includes(each))) return unsayable('exchange');
+      return this.assign({ ...stmt, targets: [target], value }, scope);
+    });
   }
 
   private evaluated(expr: Expr): string {
@@ -188,7 +207,8 @@ export class Writer {
     const close = { text: this.host.end('loop') };
     if (stmt.condition) return [this.head(stmt, this.host.while(this.speaker.print(stmt.condition)), stmt.condition), ...this.block(stmt.body, scope), close];
     const { target, iterable } = stmt;
-    if (target?.kind !== 'name' || !iterable) return unsayable('loop over several values');
+    if (!target || !iterable) return unsayable('endless loop');
+    if (target.kind !== 'name' || (!this.host.each && iterable.kind !== 'call')) return this.byIndex(stmt, target, iterable, scope);
     const name = this.names.of(target.name);
     if (iterable.kind === 'call' && this.names.library(iterable.callee) === 'range') {
       const [first, end] = iterable.args.length === 1 ? [number(0), iterable.args[0]?.value] : iterable.args.map((arg) => arg.value);
@@ -202,6 +222,21 @@ export class Writer {
     return [this.head(stmt, head, iterable), ...indent(more.map((text) => ({ text, covers: [this.lineAt(stmt.start)] }))), ...this.block(stmt.body, scope), close];
   }
 
+  /** A loop over one list or several by the index. */
+  private byIndex(stmt: LoopStmt, target: Expr, iterable: Expr, scope: Scope): readonly Line[] {
+    const { counter, pairs } = walked(stmt, target, iterable);
+    const lists = pairs.map(([, list]) => (list.kind === 'name' ? list : unsayable('loop over an expression')));
+    const at = this.names.of(counter);
+    const size = scope.locals.get(this.names.of(lists[0]?.name ?? ''))?.size;
+    const { firstIndex } = this.host;
+    const length = size !== undefined ? number(size + firstIndex) : lists[0] && this.speaker.lengthOf(lists[0]);
+    if (!length) return unsayable('loop over an expression');
+    const print = (expr: Expr): string => this.speaker.printTurned(expr);
+    const last = size !== undefined ? number(size + firstIndex - 1) : firstIndex === 1 ? length : binary('-', length, number(1));
+    const taken = pairs.map(([name, list]): Line => ({ text: this.host.assign(this.names.of(name), `${print(this.speaker.itemAt(list, named(at)))}`, undefined), covers: [this.lineAt(stmt.start)] }));
+    return [this.head(stmt, this.host.count(at, String(firstIndex), print(length), print(last)), iterable), ...indent(taken), ...this.block(stmt.body, scope), { text: this.host.end('loop') }];
+  }
+
   private head(stmt: LoopStmt, text: string, last: Expr): Line {
     return { text: stmt.trailing ? `${text}  ${this.host.comment(stmt.trailing.text)}` : text, covers: this.linesOf(stmt.start, last.end) };
   }
@@ -209,7 +244,9 @@ export class Writer {
   private gives(stmt: ReturnStmt, scope: Scope): readonly Line[] {
     if (stmt.yields) return unsayable('yield');
     if (!stmt.value || stmt.value.kind === 'nothing') return [{ text: this.host.giveNothing }];
-    const texts = this.host.give(this.speaker.print(stmt.value), scope.out, stmt === scope.last);
+    const values = scope.results.length > 1 && stmt.value.kind === 'sequence' ? stmt.value.items : [stmt.value];
+    if (values.length !== scope.results.length) return unsayable('a call that gives several results');
+    const texts = this.host.give(values.map((value) => this.speaker.print(value)), scope.results, stmt === scope.last);
     return texts.map((text, at) => (at === 0 ? this.line(stmt, text) : { text }));
   }
 }
@@ -219,8 +256,10 @@ function isText(stmt: Stmt): boolean {
   return stmt.kind === 'evaluate' && (stmt.value.kind === 'text' || stmt.value.kind === 'opaque');
 }
 
-function hasResult(block: readonly Stmt[]): boolean {
-  return block.some((each) => (each.kind === 'return' && each.value !== undefined && each.value.kind !== 'nothing') || (each.kind === 'if' && (each.arms.some((arm) => hasResult(arm.body)) || hasResult(each.otherwise))) || (each.kind === 'loop' && hasResult(each.body)));
+/** How many values a body gives back at the most. */
+function resultsOf(block: readonly Stmt[]): number {
+  const given = block.flatMap((each) => [...nestedIn(each)]).map((each) => (each.kind !== 'return' || !each.value || each.value.kind === 'nothing' ? 0 : each.value.kind === 'sequence' && each.value.form === 'tuple' ? each.value.items.length : 1));
+  return Math.max(0, ...given);
 }
 
 function freshName(wanted: string, taken: readonly string[]): string {
