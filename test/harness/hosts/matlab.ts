@@ -31,7 +31,7 @@ export const matlabHost: Host = {
   each: (variable, list) => [`for ${variable} = ${list}`],
   end: () => 'end',
   leave: { break: 'break;', continue: 'continue;', raise: "error('not possible');" },
-  give: (values, results, isLast) => [...values.map((value, at) => `${results[at]} = ${value};`), ...(isLast ? [] : ['return;'])],
+  give: (values, results, isLast) => [values.map((value, at) => `${results[at]} = ${value};`).join(' '), ...(isLast ? [] : ['return;'])],
   giveNothing: 'return;',
   frame({ name: own, params, results, summary, remarks }, noted) {
     const head = `${results.length === 0 ? '' : results.length === 1 ? `${results[0]?.name} = ` : `[${results.map((each) => each.name).join(', ')}] = `}${own}(${params.map((each) => each.name).join(', ')})`;
