@@ -5,6 +5,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
+import { languageOf, languages } from '../../server/src/frontends/registry.ts';
 import { engine, filesOf } from '../harness/engine.ts';
 import { deviations, readMarks, readSections } from '../harness/markers.ts';
 
@@ -38,11 +39,12 @@ for (const folder of folders) {
 const workspaces = readdirSync(join(import.meta.dirname, 'workspaces')).map((name) => [name, readFileSync(join(import.meta.dirname, 'workspaces', name), 'utf8')] as const);
 
 describe.each(workspaces)('workspaces/%s', (_name, source) => {
-  const files = readSections(source).map((section) => ({ section, marked: readMarks(section.text) }));
+  const files = readSections(source).filter(({ title }) => languageOf(title) !== undefined).map((section) => ({ section, marked: readMarks(section.text) }));
   const texts = Object.fromEntries(files.map(({ section, marked }) => [`work/${section.title}`, marked.text]));
 
   test.each(files.map((file) => [file.section.title, file] as const))('%s', async (title, { section, marked }) => {
     const workspace = await engine(filesOf(texts));
+    await workspace.prepare(...languages);
     expect(deviations(marked, workspace.check(`work/${title}`, marked.text), section.firstLine).join('\n')).toBe('');
   });
 
