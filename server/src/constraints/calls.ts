@@ -16,16 +16,29 @@ export interface Passed {
   readonly value: Value;
 }
 
-const powers = new Set(['pow', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow']);
+const powers = new Set(['pow', 'power', 'mpower', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow']);
 /** Arrays of zeros or of nothing fit any unit. */
-const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan']);
-const ones = new Set(['numpy.ones', 'numpy.ones_like', 'numpy.eye', 'numpy.identity']);
+const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan', 'zeros', 'cell']);
+const ones = new Set(['numpy.ones', 'numpy.ones_like', 'numpy.eye', 'numpy.identity', 'ones', 'eye']);
 
 export function call(context: Context, expr: CallExpr): Value {
+  const value = called(context, expr);
+  return expr.results === undefined ? value : taken(expr, value, expr.results);
+}
+
+/** As many results as the caller takes: one is the first, and of several that are not told apart only the first is known. */
+function taken(expr: CallExpr, value: Value, results: number): Value {
+  if (results < 2) return value.items ? { ...(value.items[0] ?? unknown(expr)), expr } : value;
+  return value.items ? value : { expr, form: undefined, from: value.from, items: [value, ...Array.from({ length: results - 1 }, () => unknown(expr))] };
+}
+
+function called(context: Context, expr: CallExpr): Value {
   const callee = calleeOf(context, expr.callee);
   const passed = expr.args.map((argument) => ({ argument, value: evaluate(context, argument.value) }));
   const target = callee.value.callable;
-  if (!target) return callee.method ? callMethod(context, expr, callee.object as Value, callee.method, passed) : unknown(expr);
+  if (!target && callee.method) return callMethod(context, expr, callee.object as Value, callee.method, passed);
+  // Where an element is written like a call, a symbol with a unit of its own is no function; nor is `NaN(2, 3)` more than an array of NaN.
+  if (!target) return expr.results !== undefined && (callee.value.form || callee.value.fits) && !callee.value.literal ? { ...callee.value, expr, from: [callee.value] } : unknown(expr);
   switch (target.kind) {
     case 'library':
       return special(context, expr, target.name, passed) ?? callLibrary(context, expr, target.signature, passed);

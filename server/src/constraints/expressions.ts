@@ -74,9 +74,10 @@ function dispatch(context: Context, expr: Expr): Value {
     case 'opaque':
       for (const part of expr.parts) evaluate(context, part);
       return unknown(expr);
-    case 'slice':
-      for (const part of expr.parts) evaluate(context, part);
-      return unknown(expr);
+    case 'slice': {
+      const parts = expr.parts.map((part) => evaluate(context, part));
+      return { ...(common(parts) ?? unknown(expr)), expr };
+    }
     case 'text':
       return unknown(expr);
   }
@@ -157,7 +158,8 @@ function isBareNumber(value: Value): boolean {
 }
 
 function sequence(context: Context, expr: SequenceExpr): Value {
-  const items = expr.items.map((item) => evaluate(context, item));
+  const members = expr.form === 'matrix' ? expr.items.flatMap((row) => (row.kind === 'sequence' && row.form === 'list' ? row.items : [row])) : expr.items;
+  const items = members.map((item) => evaluate(context, item));
   if (expr.form === 'tuple') return { expr, form: undefined, items, from: items };
   const merged = common(items);
   if (!merged) return items.length === 0 || items.every((item) => item.fits) ? fitting : listOfNumbers(context, expr, items);

@@ -31,7 +31,9 @@ function isUnitValue({ param, given }: { readonly param: SchemeParam; readonly g
 /** An object: its fields are those of the class; arguments are checked against the constructor. */
 export function newObject(context: Context, expr: CallExpr, info: ClassInfo, passed: readonly Passed[]): Value {
   const constructor = info.method('__init__');
+  const named = info.statement.body.some((each) => each.kind === 'function' && each.name === info.name && each.unbound) ? info.method(info.name) : undefined;
   if (constructor) callScheme(context, expr, constructor, passed, true);
+  else if (named) callScheme(context, expr, named, passed, false);
   else fieldsInOrder(context, info, passed);
   return { expr, form: undefined, fields: info.fields(), from: passed.map((each) => each.value) };
 }

@@ -2,11 +2,13 @@
 import type { LanguageId } from '../program/nodes.ts';
 import type { FrontEndEntry } from './frontend.ts';
 import { isNotebook } from './notebook/read.ts';
+import { matlabEntry } from './matlab/index.ts';
 import { nomenclatureEntry } from './nomenclature/index.ts';
 import { pythonEntry } from './python/index.ts';
 
 export const frontEndEntries: readonly FrontEndEntry[] = [
   pythonEntry,
+  matlabEntry,
   nomenclatureEntry,
 ];
 

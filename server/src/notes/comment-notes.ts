@@ -121,7 +121,7 @@ function targetsOf(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): 
 function belongs(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Comment): boolean {
   const inside = chunk.text.slice(statement.start, statement.end);
   if (!inside.includes('\n')) return true;
-  if (comment.start < statement.end) return /[([{\\=+*/,-]\s*#*\s*$/.test(lineBefore(chunk, comment)) && opensOnly(chunk, statement, comment);
+  if (comment.start < statement.end) return /[([{\\=+*/,-]\s*(?:\.\.\.\s*)?[#%]*\s*$/.test(lineBefore(chunk, comment)) && opensOnly(chunk, statement, comment);
   const value = statement.kind === 'assign' ? statement.value : undefined;
   const several = value?.kind === 'record' || value?.kind === 'sequence' || chunk.comments.some((each) => each.start > statement.start && each.end < statement.end && each.text.includes('['));
   return !several || /^\s*[)\]}]+/.test(lineBefore(chunk, comment));
@@ -129,7 +129,7 @@ function belongs(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Com
 
 /** `x = (  # [m]`: the first line ends with the bracket that opens the value. */
 function opensOnly(chunk: Chunk, statement: AssignStmt | DeclareStmt, comment: Comment): boolean {
-  return /=\s*[\w.]*[([{]?\s*\\?\s*#*\s*$/.test(chunk.text.slice(statement.start, comment.start));
+  return /=\s*[\w.]*[([{]?\s*(?:\\|\.\.\.)?\s*[#%]*\s*$/.test(chunk.text.slice(statement.start, comment.start));
 }
 
 function lineBefore(chunk: Chunk, comment: Comment): string {
@@ -139,6 +139,6 @@ function lineBefore(chunk: Chunk, comment: Comment): string {
 /** Only punctuation stands between a part and its comment, and the part has a line of its own if anything closes there. */
 function standsBehind(chunk: Chunk, ownerStart: number, end: number, comment: Comment): boolean {
   const between = chunk.text.slice(end, comment.start);
-  if (/^\s*,?\s*(?:#+:?|%+|!+<?|\/\/+[!<]*|\/\*+[!<]*)\s*$/.test(between)) return true;
-  return /^[\s,)\]}:]*(?:->[^#]*:)?\s*#+:?\s*$/.test(between) && chunk.text.slice(ownerStart, end).includes('\n');
+  if (/^\s*[,;]?\s*(?:\.\.\.\s*)?(?:#+:?|%+|!+<?|\/\/+[!<]*|\/\*+[!<]*)\s*$/.test(between)) return true;
+  return /^[\s,)\]}:;]*(?:->[^#]*:)?\s*(?:\.\.\.\s*)?(?:#+:?|%+)\s*$/.test(between) && chunk.text.slice(ownerStart, end).includes('\n');
 }

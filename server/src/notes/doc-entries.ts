@@ -26,7 +26,7 @@ export interface Documentation {
 const name = '\\\\?\\*{0,2}[\\p{L}_][\\p{L}\\p{N}_]*';
 const names = `${name}(?:\\s*,\\s*${name})*`;
 const underlinedHead = new RegExp(`^[\`]{0,2}(${names})[\`]{0,2}\\s*(?::(?!:)\\s*(.*))?$`, 'su');
-const colonHead = new RegExp(`^(?:[-*•]\\s+)?[\`]{0,2}(${names})[\`]{0,2}\\s*(?:\\(([^()]*(?:\\([^()]*\\)[^()]*)*)\\)|\\[([^\\]]*)\\])?\\s*(?::(?!:)|\\s[-–—]+\\s)\\s*(.*)$`, 'su');
+const colonHead = new RegExp(`^(?:[-*•]\\s+)?[\`]{0,2}(${names})[\`]{0,2}\\s*(?:\\(([^()]*(?:\\([^()]*\\)[^()]*)*)\\)|\\[([^\\]]*)\\])?\\s*(?::(?!:)|\\s[-–—]+\\s|\\s=\\s)\\s*(.*)$`, 'su');
 const sphinxHead = /^:(param|parameter|arg|argument|key|keyword|ivar|cvar|var|returns?|yields?|type|rtype)\b\s*([^:]*):\s*/;
 const anySphinx = /(?:^|\n)[ \t]*[:@](?:param|arg|key|ivar|cvar|var|return|yield|type|rtype)/;
 const plainHead = new RegExp(`^(?:[-*•+]\\s+|[@\\\\]param\\s+)?[\`]{0,2}(${names})[\`]{0,2}(?:\\s*:\\s*|\\s*=\\s*|\\s+[-–—]+\\s+|\\s+(?=\\[)|\\s{2,}|\\t+)(\\S.*)$`, 'su');

@@ -5,6 +5,7 @@ import { type DocEntry, type Documentation, plainEntries, readDocumentation } fr
 import { unitOfEntry } from './doc-unit.ts';
 import { choose, lookForUnits } from './find-unit.ts';
 import type { Line } from './doc-lines.ts';
+import { isConverted } from './converted.ts';
 import { returnedRecords } from './returned-records.ts';
 import type { NoteTarget } from './types.ts';
 
@@ -15,8 +16,8 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
   const params = new Map(fn.params.map((param) => [param.name, param]));
   readEntries(out, doc, (entry, name) => {
     if (entry.role === 'field') return owner && name !== undefined ? [{ kind: 'field', owner, name }] : [];
-    const param = name === undefined ? undefined : params.get(name);
-    return param ? [{ kind: 'parameter', owner: fn, param }] : [];
+    const param = name === undefined ? undefined : (params.get(name) ?? params.get(inCode(name)));
+    return param ? [{ kind: 'parameter', owner: fn, param }] : outputTargets(fn, name);
   }, fn);
   if (isProperty(fn)) propertyNote(out, fn, doc);
   for (const entry of doc.entries) if (entry.role === 'result' && entry.lines && entry.type && isRecord(entry.type.text)) recordNotes(out, fn, doc, entry.lines);
@@ -54,7 +55,7 @@ function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn:
     if (entry.role === 'result') {
       if (!results.includes(entry)) continue;
       const names = entry.names.length > 0 ? entry.names : [undefined];
-      const owners: NoteTarget[] = fn ? names.map((name, at) => ({ kind: 'result', owner: fn, ...(several ? { position: position + at } : {}), ...(name === undefined ? {} : { name }) })) : [];
+      const owners: readonly NoteTarget[] = fn?.outputs ? namesOfOutputs(fn, entry.names) : fn ? names.map((name, at) => ({ kind: 'result', owner: fn, ...(several ? { position: position + at } : {}), ...(name === undefined ? {} : { name }) })) : [];
       position += names.length;
       readEntry(out, doc, entry, owners);
       continue;
@@ -63,6 +64,28 @@ function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn:
     const targets = fresh.flatMap((name) => targetsOf(entry, name));
     if (readEntry(out, doc, entry, targets)) for (const name of fresh) told.add(`${entry.role}:${name}`);
   }
+}
+
+/** A help text that writes a name in capitals means the one in the code. */
+function inCode(name: string): string {
+  return name === name.toUpperCase() ? name.toLowerCase() : name;
+}
+
+/** A result without a name is the only output. */
+function namesOfOutputs(fn: FunctionStmt, names: readonly string[]): readonly NoteTarget[] {
+  const only = fn.outputs?.length === 1 ? fn.outputs[0]?.name : undefined;
+  return names.length === 0 ? outputTargets(fn, only) : names.flatMap((name) => outputTargets(fn, name));
+}
+
+/** The result that an output variable holds, and the variable itself where every value it takes is of that unit. */
+function outputTargets(fn: FunctionStmt, name: string | undefined): readonly NoteTarget[] {
+  const outputs = fn.outputs ?? [];
+  const exact = outputs.findIndex((each) => each.name === name);
+  const position = exact >= 0 || name === undefined ? exact : outputs.findIndex((each) => each.name === inCode(name));
+  const found = outputs[position]?.name;
+  if (found === undefined) return [];
+  const result: NoteTarget = { kind: 'result', owner: fn, ...(outputs.length > 1 ? { position } : {}), name: found };
+  return isConverted(fn.body, found) || fn.params.some((each) => each.name === found) ? [result] : [result, { kind: 'symbol', owner: fn, name: found }];
 }
 
 function readEntry(out: Collector, doc: Documentation, entry: DocEntry, targets: readonly NoteTarget[]): boolean {

@@ -12,10 +12,10 @@ export interface Section {
 }
 
 const roles: ReadonlyMap<string, Role | 'skip'> = new Map([
-  ...['parameters', 'other parameters', 'args', 'arguments', 'params', 'inputs', 'input', 'keyword arguments', 'keyword args', 'keyword parameters', 'kwargs', 'parameter', 'required parameters', 'optional parameters'].map((name) => [name, 'parameter'] as const),
-  ...['returns', 'return', 'yields', 'yield', 'outputs', 'output', 'receives'].map((name) => [name, 'result'] as const),
+  ...['parameters', 'other parameters', 'args', 'arguments', 'params', 'inputs', 'input', 'keyword arguments', 'keyword args', 'keyword parameters', 'kwargs', 'parameter', 'required parameters', 'optional parameters', 'input arguments', 'input parameters', 'input variables'].map((name) => [name, 'parameter'] as const),
+  ...['returns', 'return', 'yields', 'yield', 'outputs', 'output', 'receives', 'output arguments', 'output parameters', 'output variables'].map((name) => [name, 'result'] as const),
   ...['attributes', 'fields', 'attribute', 'properties'].map((name) => [name, 'field'] as const),
-  ...['notes', 'note', 'examples', 'example', 'references', 'reference', 'raises', 'raise', 'warnings', 'warning', 'warns', 'see also', 'methods', 'todo', 'usage', 'description', 'summary', 'remarks', 'source', 'sources'].map((name) => [name, 'skip'] as const),
+  ...['notes', 'note', 'examples', 'example', 'references', 'reference', 'raises', 'raise', 'warnings', 'warning', 'warns', 'see also', 'methods', 'todo', 'usage', 'description', 'summary', 'remarks', 'source', 'sources', 'author', 'authors', 'syntax', 'calls', 'called by', 'version', 'history', 'copyright'].map((name) => [name, 'skip'] as const),
 ]);
 
 /** All sections in order; what stands before the first belongs to none. */

@@ -20,7 +20,11 @@ export interface NameExpr extends Span { readonly kind: 'name'; readonly name: s
 export interface MemberExpr extends Span { readonly kind: 'member'; readonly object: Expr; readonly name: string; readonly nameSpan: Span }
 /** `a[i]`, `d["key"]`; one key per axis. A constant key is a `text` expression. */
 export interface IndexExpr extends Span { readonly kind: 'index'; readonly object: Expr; readonly keys: readonly Expr[] }
-export interface CallExpr extends Span { readonly kind: 'call'; readonly callee: Expr; readonly args: readonly Argument[] }
+/**
+ * `results`: how many results the caller takes, in languages where a function gives as many as are asked for and `f(x)` may be an element too;
+ * undefined: the value as it is.
+ */
+export interface CallExpr extends Span { readonly kind: 'call'; readonly callee: Expr; readonly args: readonly Argument[]; readonly results?: number }
 /** `spread`: `*args`, `**kwargs`, `...rest`: what it fills is unknown. */
 export interface Argument extends Span { readonly name?: string; readonly value: Expr; readonly spread?: boolean }
 export interface UnaryExpr extends Span { readonly kind: 'unary'; readonly op: '-' | '+' | 'not' | 'transpose' | 'bits'; readonly operand: Expr }
@@ -76,7 +80,12 @@ export interface FunctionStmt extends StmtBase {
   readonly doc?: DocText; readonly decorators: readonly Expr[]; readonly annotation?: string;
   /** Comments inside the body that stand above no statement (at the end of a block). */
   readonly loose?: readonly Comment[];
+  /** The variables that hold the results when the body ends, in languages that name them in the head. */
+  readonly outputs?: readonly OutputName[];
+  /** A function of a class that takes no object: a static one, or a constructor that makes it. */
+  readonly unbound?: true;
 }
+export interface OutputName { readonly name: string; readonly nameSpan: Span }
 export interface ClassStmt extends StmtBase {
   readonly kind: 'class'; readonly name: string; readonly nameSpan: Span; readonly bases: readonly Expr[]; readonly body: readonly Stmt[];
   readonly doc?: DocText; readonly decorators: readonly Expr[];

@@ -89,7 +89,7 @@ export class FileSolver {
   global(name: string): Value | undefined {
     if (this.globals.has(name)) return this.globals.get(name);
     this.globals.set(name, undefined);
-    const value = this.define(name) ?? this.starred(name) ?? this.inputs.neighbour(name)?.own(name) ?? this.inputs.library.find(name);
+    const value = this.define(name) ?? this.starred(name) ?? this.inputs.neighbour(name)?.own(name.slice(name.lastIndexOf('.') + 1)) ?? this.inputs.library.find(name);
     this.globals.set(name, value);
     return value;
   }

@@ -89,7 +89,7 @@ function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surro
 }
 
 function selfOf(piece: Piece, owner: ClassInfo | undefined): Value | undefined {
-  const plain = piece.fn.decorators.every((each) => each.kind !== 'name' || each.name !== 'staticmethod');
+  const plain = !piece.fn.unbound && piece.fn.decorators.every((each) => each.kind !== 'name' || each.name !== 'staticmethod');
   const fields = owner && (piece.fn.name === '__init__' ? owner.declared() : owner.fields());
   return fields && plain ? { expr: undefined, form: undefined, fields, from: [] } : undefined;
 }

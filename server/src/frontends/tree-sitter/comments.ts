@@ -19,6 +19,7 @@ export interface CommentMarkers {
 export class Comments {
   private readonly byLine = new Map<number, Placed>();
   private readonly owned = new Set<Comment>();
+  private readonly alone = new Set<Comment>();
   readonly all: readonly Comment[];
 
   /** `found`: where comments stand in the file, in order, markers included; `markers` takes those off. */
@@ -41,6 +42,11 @@ export class Comments {
     if (this.all.length === 0) return undefined;
     const placed = this.byLine.get(this.lines.lineAt(this.base + offset));
     return placed && !placed.alone && placed.comment.start >= offset ? placed.comment : undefined;
+  }
+
+  /** Whether nothing else stands on the comment's line. */
+  isAlone(comment: Comment): boolean {
+    return this.alone.has(comment);
   }
 
   /** The comment lines directly above, top to bottom, of the same indentation; they belong to what asked. */
@@ -81,6 +87,7 @@ export class Comments {
     const line = this.lines.lineAt(at.start);
     const lineStart = this.lineStart(line);
     const alone = this.lines.text.slice(lineStart, at.start).trim() === '';
+    if (alone) this.alone.add(comment);
     this.byLine.set(line, { comment, alone, column: at.start - lineStart });
     return comment;
   }
