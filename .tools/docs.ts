@@ -2,12 +2,13 @@
  * Writes what is generated from the checks, the settings and the command: the table of codes and the output shown in README.md, the
  * schema of termwise.json, and the `contributes` part of package.json. `--check` writes nothing and fails where a file is stale.
  */
-import { readFileSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
-import { levels } from '../server/src/cli/arguments.ts';
+import { mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { dirname, join } from 'node:path';
 import { run } from '../server/src/cli/run.ts';
+import { levels } from '../server/src/findings/finding.ts';
 import { checks } from '../server/src/findings/registry.ts';
 import { defaultNoteSettings } from '../server/src/notes/types.ts';
+import { defaultSettings } from '../server/src/lsp/settings.ts';
 import { nodeAssets } from '../server/src/platform/node-assets.ts';
 import { createWorkspace } from '../server/src/service/workspace.ts';
 
@@ -21,6 +22,19 @@ const noteTexts: Record<keyof typeof defaultNoteSettings, string> = {
 
 const severityProperties = Object.fromEntries(checks.map((check) => [check.code, { enum: levels, default: check.severity, description: check.summary }]));
 const noteProperties = Object.fromEntries(Object.entries(defaultNoteSettings).map(([name, value]) => [name, { type: 'boolean', default: value, description: noteTexts[name as keyof typeof noteTexts] }]));
+
+const { hints, lenses, wholeWorkspace } = defaultSettings;
+/** What only an editor has. */
+const editorProperties = {
+  'termwise.hints.inferred': { type: 'boolean', default: hints.inferred, description: 'The unit that follows from the others is shown behind a symbol without a note; a double click writes it as a note.' },
+  'termwise.hints.arguments': {
+    type: 'string', enum: ['numbers', 'all', 'off'], default: hints.arguments,
+    enumDescriptions: ['Behind plain numbers.', 'Behind every argument.', 'Never.'], description: "The unit of a function's parameter is shown behind the argument at a call.",
+  },
+  'termwise.hints.values': { type: 'boolean', default: hints.values, description: 'The value of a formula is shown in nomenclature files.' },
+  'termwise.lenses': { type: 'boolean', default: lenses, description: 'Above functions stands how many of their units are known, above relations how many dimensionless groups they have.' },
+  'termwise.wholeWorkspace': { type: 'boolean', default: wholeWorkspace, description: 'Findings of scripts that are not open are listed among the problems too.' },
+};
 
 function schema(): string {
   const object = (description: string, properties: object): object => ({ type: 'object', description, additionalProperties: false, properties });
@@ -42,6 +56,7 @@ function manifest(text: string): string {
   const settings = Object.fromEntries([
     ...checks.map((check) => [`termwise.severities.${check.code}`, { type: 'string', enum: levels, default: check.severity, description: check.summary }]),
     ...Object.entries(noteProperties).map(([name, property]) => [`termwise.notes.${name}`, property]),
+    ...Object.entries(editorProperties),
   ]);
   const read = JSON.parse(text) as Record<string, unknown>;
   const contributes = {
@@ -76,6 +91,13 @@ async function outputOf(command: string): Promise<string> {
   return printed;
 }
 
+/** The sentences of the editor's side, for translators: each is its own key. */
+function words(): string {
+  const folder = join(root, 'client/src');
+  const sentences = readdirSync(folder).sort().flatMap((name) => [...read(join(folder, name)).matchAll(/l10n\.t\('((?:[^'\\]|\\.)*)'/g)].map((match) => (match[1] as string).replaceAll("\\'", "'")));
+  return json(Object.fromEntries([...new Set(sentences)].map((sentence) => [sentence, sentence])));
+}
+
 function json(value: unknown): string {
   return `${JSON.stringify(value, undefined, 2)}\n`;
 }
@@ -84,6 +106,7 @@ const generated: readonly (readonly [string, (text: string) => string | Promise<
   ['README.md', readme],
   [schemaFile, schema],
   ['package.json', manifest],
+  ['client/l10n/bundle.l10n.json', words],
 ];
 
 const checking = process.argv.includes('--check');
@@ -93,7 +116,10 @@ for (const [file, generate] of generated) {
   const fresh = await generate(text);
   if (fresh === text) continue;
   if (checking) process.exitCode = 1;
-  else writeFileSync(path, fresh);
+  else {
+    mkdirSync(dirname(path), { recursive: true });
+    writeFileSync(path, fresh);
+  }
   process.stdout.write(checking ? `${file} is stale: npm run docs\n` : `wrote ${file}\n`);
 }
 

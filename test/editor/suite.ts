@@ -101,6 +101,79 @@ const cases: Readonly<Record<string, () => Promise<void>>> = {
     await untilCodes(uri, ['hidden-unit', 'scale-mismatch']);
   },
 
+  'a fix of the light bulb settles its finding, and undo restores': async () => {
+    const document = await open('dosing.py');
+    const codesBefore = await until(() => codes(document.uri), (now) => now.includes('scale-mismatch'), 'a scale-mismatch in dosing.py');
+    const before = document.getText();
+    const found = vscode.languages.getDiagnostics(document.uri).find(({ code }) => String(typeof code === 'object' ? code.value : code) === 'scale-mismatch');
+    assert.ok(found);
+    const actions = await actionsAt(document.uri, found.range, vscode.CodeActionKind.QuickFix.value);
+    const [first] = actions.filter(({ edit, isPreferred }) => edit && isPreferred);
+    assert.ok(first?.edit, `no preferred fix among ${actions.map(({ title }) => title).join('; ')}`);
+    assert.ok(await vscode.workspace.applyEdit(first.edit));
+    await until(() => codes(document.uri), (now) => now.length === codesBefore.length - 1, 'one finding less');
+    await vscode.commands.executeCommand('undo');
+    await untilCodes(document.uri, codesBefore);
+    assert.equal(document.getText(), before);
+  },
+
+  'all proven fixes are applied by command': async () => {
+    const document = await open('dosing.py');
+    const before = await until(() => codes(document.uri), (now) => now.includes('scale-mismatch'), 'a scale-mismatch in dosing.py');
+    await vscode.commands.executeCommand('termwise.fixProven');
+    await until(() => codes(document.uri), (now) => !now.includes('scale-mismatch'), 'no scale-mismatch in dosing.py');
+    await vscode.commands.executeCommand('undo');
+    await untilCodes(document.uri, before);
+  },
+
+  'a sentence becomes groups': async () => {
+    const document = await vscode.workspace.openTextDocument({ language: 'python', content: 'T = 2.0  # [s] period\nl = 1.0  # [m] length\ng = 9.81  # [m/s^2]\n' });
+    const editor = await vscode.window.showTextDocument(document);
+    await editor.edit((edit) => edit.insert(new vscode.Position(3, 0), '# T depends on l, g\n'));
+    const at = new vscode.Range(3, 5, 3, 5);
+    const actions = await until(() => actionsAt(document.uri, at, 'refactor.rewrite'), (now) => now.some(({ title }) => title.startsWith('Write T =')), 'the groups of a pendulum');
+    const equation = actions.find(({ title }) => title.startsWith('Write T ='));
+    assert.ok(equation?.edit && (await vscode.workspace.applyEdit(equation.edit)));
+    assert.match(document.getText(), /# T = .*sqrt\(l\/g\)|# T = sqrt\(l\/g\)/);
+  },
+
+  'hints, outline and counts are shown': async () => {
+    const document = await vscode.workspace.openTextDocument({ language: 'python', content: 'V = 2.0  # [m/s]\nt = 3.0  # [s]\n\ndef way(v):\n    # v [m/s]\n    x = v*t\n    return x\n' });
+    await vscode.window.showTextDocument(document);
+    const all = new vscode.Range(0, 0, 9, 0);
+    const hints = await until(async () => await vscode.commands.executeCommand<vscode.InlayHint[]>('vscode.executeInlayHintProvider', document.uri, all), (now) => now.length > 0, 'hints');
+    assert.deepEqual(hints.map(({ label }) => label), ['[m]']);
+    const symbols = await vscode.commands.executeCommand<vscode.DocumentSymbol[]>('vscode.executeDocumentSymbolProvider', document.uri);
+    assert.ok(symbols.some(({ name, detail }) => name === 'V' && detail === '[m/s]'), JSON.stringify(symbols.map(({ name, detail }) => [name, detail])));
+    const lenses = await vscode.commands.executeCommand<vscode.CodeLens[]>('vscode.executeCodeLensProvider', document.uri);
+    assert.ok(lenses.some(({ command }) => command?.title === 'units known 2/2'), JSON.stringify(lenses.map(({ command }) => command?.title)));
+  },
+
+  'completion inside a note begins with the unit that follows': async () => {
+    const document = await vscode.workspace.openTextDocument({ language: 'python', content: 'F = 2.0  # [N]\nA = 3.0  # [m^2]\np = F/A  # [\n' });
+    await vscode.window.showTextDocument(document);
+    const list = await until(async () => await vscode.commands.executeCommand<vscode.CompletionList>('vscode.executeCompletionItemProvider', document.uri, new vscode.Position(2, 12)), ({ items }) => items.some(({ label }) => label === 'kPa'), 'units');
+    const sorted = [...list.items].filter(({ sortText }) => /^\d{4}$/.test(sortText ?? '')).sort((a, b) => (a.sortText ?? '').localeCompare(b.sortText ?? ''));
+    assert.equal(sorted[0]?.label, 'Pa');
+  },
+
+  'a nomenclature file is aligned, and its symbol renamed in the scripts': async () => {
+    const document = await open('bench.nomen');
+    const edits = await vscode.commands.executeCommand<vscode.TextEdit[]>('vscode.executeFormatDocumentProvider', document.uri, { tabSize: 2, insertSpaces: true });
+    assert.ok(Array.isArray(edits));
+    const at = document.positionAt(document.getText().indexOf('\nNp ') + 1);
+    const edit = await vscode.commands.executeCommand<vscode.WorkspaceEdit>('vscode.executeDocumentRenameProvider', document.uri, at, 'N_p');
+    assert.ok(edit.entries().some(([uri]) => uri.path.endsWith('bench.nomen')));
+  },
+
+  'the unit leads to its note': async () => {
+    const document = await open('mixer.py');
+    const at = document.positionAt(document.getText().indexOf('rho * N * D**2'));
+    const places = await vscode.commands.executeCommand<readonly (vscode.Location | vscode.LocationLink)[]>('vscode.executeTypeDefinitionProvider', document.uri, at);
+    const uris = places.map((place) => ('targetUri' in place ? place.targetUri : place.uri).path);
+    assert.ok(uris.some((path) => path.endsWith('bench.nomen')), uris.join());
+  },
+
   'the server is started again by command': async () => {
     const { uri } = await open('mixer.py');
     const before = await until(() => serverProcesses(), (now) => now.length === 1, 'one server');
@@ -163,6 +236,11 @@ function codes(uri: vscode.Uri): readonly string[] {
 async function hoverAt(uri: vscode.Uri, at: vscode.Position): Promise<string> {
   const hovers = await vscode.commands.executeCommand<vscode.Hover[]>('vscode.executeHoverProvider', uri, at);
   return hovers.flatMap(({ contents }) => contents.map((each) => (typeof each === 'string' ? each : each.value))).join('\n');
+}
+
+async function actionsAt(uri: vscode.Uri, range: vscode.Range, kind: string): Promise<readonly vscode.CodeAction[]> {
+  const found = await vscode.commands.executeCommand<(vscode.CodeAction | vscode.Command)[]>('vscode.executeCodeActionProvider', uri, range, kind);
+  return found.filter((each): each is vscode.CodeAction => typeof each.command !== 'string');
 }
 
 /** The language servers that this extension host started, by process. */

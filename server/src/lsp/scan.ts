@@ -2,7 +2,7 @@
  * What is known of the scripts of the workspace that are not open: read once in the background after the start, one file at a time, with
  * progress shown. No request waits for it; what it has not seen yet is not there yet.
  */
-import { type CancellationToken, type Diagnostic, type WorkDoneProgressServerReporter } from 'vscode-languageserver/node.js';
+import type { CancellationToken, Diagnostic, WorkDoneProgressServerReporter } from 'vscode-languageserver/node.js';
 import { languageOf } from '../frontends/registry.ts';
 import type { SymbolGroup } from '../service/contract.ts';
 import { isLeftOut } from './left-out.ts';

@@ -45,7 +45,12 @@ function zeroShift(have: Measure['readings'][number], want: Measure['readings'][
   return have.zero * have.weight - want.zero * want.weight;
 }
 
+/** Turns keep their π: 6.2832 is written as 2*pi. */
 function approximate(ratio: number): Scale | undefined {
+  for (const turn of [tau, tau.pow(Rational.minusOne)]) {
+    const rest = Rational.parse((ratio / turn.toNumber()).toPrecision(10));
+    if (rest && rest.sign > 0 && rest.num <= 3600n && rest.den <= 3600n) return turn.mul(Scale.of(rest));
+  }
   const inverse = Rational.parse((1 / ratio).toPrecision(12));
   const value = Rational.parse(ratio.toPrecision(12));
   if (!value || value.sign <= 0) return undefined;

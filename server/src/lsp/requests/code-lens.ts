@@ -1,5 +1,5 @@
 /** Above functions: how many of their units are known. Above relations: their groups. */
-import { type CancellationToken, type CodeLens, type CodeLensParams } from 'vscode-languageserver/node.js';
+import type { CancellationToken, CodeLens, CodeLensParams } from 'vscode-languageserver/node.js';
 import { solveGroups } from '../../groups/index.ts';
 import { LineIndex } from '../../text/line-index.ts';
 import { rangeOf } from '../positions.ts';
