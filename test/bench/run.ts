@@ -13,6 +13,7 @@ import { nodeAssets } from '../../server/src/platform/node-assets.ts';
 import { createWorkspace } from '../../server/src/service/workspace.ts';
 import { scriptsIn } from '../corpus/scripts.ts';
 import { manyLines } from './many-lines.ts';
+import { measureServer } from './server.ts';
 import { repeat, type Ran, runNode, runProgram, type Spread, spread } from './measure.ts';
 import { loadFrontEnd } from '../harness/front-ends.ts';
 
@@ -29,6 +30,7 @@ async function main(file: string, pyright: boolean): Promise<void> {
   print(`${file}: ${text.split('\n').length} lines; node ${process.version}, ${cpus().length} × ${cpus()[0]?.model ?? 'unknown processor'}`);
   await inProcess(file, text);
   spawnSync(process.execPath, [join(root, '.tools/build.mjs')], { stdio: 'inherit' });
+  await measureServer(join(root, 'dist/language-server.js'), file, 'python', show, print);
   const once = commandRuns(file);
   if (pyright) againstPyright(file, once);
   hundredThousand(dirname(file));

@@ -1,5 +1,5 @@
 /** A client of the language server over standard input and output, as an editor is one. */
-import { type ChildProcess, spawn } from 'node:child_process';
+import { type ChildProcess, execFileSync, spawn } from 'node:child_process';
 import { mkdirSync, mkdtempSync, realpathSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
@@ -10,8 +10,6 @@ import {
   ExitNotification, FileChangeType, type Hover, HoverRequest, InitializedNotification, InitializeRequest, type InitializeResult, type Position, type ProtocolConnection,
   PublishDiagnosticsNotification, type PublishDiagnosticsParams, RegistrationRequest, ShowMessageNotification, ShutdownRequest, StreamMessageReader, StreamMessageWriter, type TextDocumentContentChangeEvent, WorkDoneProgress, WorkDoneProgressCreateRequest,
 } from 'vscode-languageserver/node.js';
-// @ts-expect-error A tool without types.
-import { build } from '../../.tools/build.mjs';
 
 const patience = 20_000;
 let built: Promise<string> | undefined;
@@ -19,6 +17,8 @@ let built: Promise<string> | undefined;
 /** The server as it is shipped, built once for each file of tests. */
 function bundle(): Promise<string> {
   built ??= (async () => {
+    // @ts-expect-error A tool without types.
+    const { build } = await import('../../.tools/build.mjs');
     const folder = mkdtempSync(join(tmpdir(), 'termwise-server-'));
     process.on('exit', () => rmSync(folder, { recursive: true, force: true }));
     await build(folder);
@@ -65,6 +65,17 @@ export class Client {
     client.initialized = await connection.sendRequest(InitializeRequest.type, { processId: process.pid, rootUri: null, workspaceFolders: (options.folders ?? ['']).map((name) => ({ uri: pathToFileURL(join(folder, name)).href, name: name || 'test' })), capabilities: capabilities(options), ...(options.options === undefined ? {} : { initializationOptions: options.options }) });
     await connection.sendNotification(InitializedNotification.type, {});
     return client;
+  }
+
+  /** Takes a server that is built already instead of building one. */
+  static use(serverFile: string): void {
+    built = Promise.resolve(serverFile);
+  }
+
+  /** Resident memory of the server in MB. */
+  memory(): number {
+    const kilobytes = execFileSync('ps', ['-o', 'rss=', '-p', String(this.process.pid)], { encoding: 'utf8' });
+    return Number(kilobytes.trim()) / 1024;
   }
 
   uri(name: string): string {
