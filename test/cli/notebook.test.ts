@@ -114,3 +114,24 @@ describe('fixes', () => {
     expect(applyPatch(notebookFile(cells), out)).toBe(notebookFile(right));
   });
 });
+
+describe('groups', () => {
+  // Dimensional analysis of a stirred tank: power number over Reynolds number; common practice, from memory.
+  const mixer = notebookFile(['md:# Power', '# P depends on N, D, rho, mu\nN = 4.0  # [rev/s]\nD = 0.085  # [m]\nrho = 1240.0  # [kg/m^3]', 'mu = 0.38  # [Pa s]\nP = 40.0  # [W]']);
+  const box = sandbox({ 'mixer.ipynb': mixer });
+
+  test('of a relation in a cell', async () => {
+    const { out, status } = await box.run('groups mixer.ipynb');
+    expect(status).toBe(0);
+    expect(out).toMatch(/^mixer\.ipynb: cell 2, line 1 {2}P depends on N, D, rho, mu\n/);
+    expect(out).toContain('Reynolds');
+    expect(JSON.parse((await box.run('groups mixer.ipynb --format json')).out)).toMatchObject({ relations: [{ file: 'mixer.ipynb', cell: 2, line: 1, rank: 3 }] });
+  });
+});
+
+test('Octave kernels: script and functions over several cells', async () => {
+  const cells = ['%plot inline\nfunction h = head(p, rho)\n%   p = pressure [Pa]\n%   rho = density [kg/m^3]\n    g = 9.81;  % [m/s^2]\n    h = p/(rho*g);  % [m]\nend', 'p = 2.1;   % [bar]', 'h = head(p, 998.2);\nt = 4;  % [s]\nx = t + p;'];
+  const box = sandbox({ 'pump.ipynb': notebookFile(cells, 'octave') });
+  const { findings } = json((await box.run('check pump.ipynb --format json')).out);
+  expect(findings.map(({ cell, line, code }) => [cell, line, code])).toEqual([[3, 1, 'scale-mismatch'], [3, 3, 'unlike-terms']]);
+});

@@ -20,6 +20,12 @@ export interface CheckOptions {
   /** The name under which standard input is checked. */
   readonly stdinFile?: string;
   readonly config?: string;
+  /** A file of known findings, which are left out. */
+  readonly baseline?: string;
+  /** Where the findings are written down as known. */
+  readonly writeBaseline?: string;
+  /** Only files that differ from this revision are checked. */
+  readonly since?: string;
 }
 
 export type Request =
@@ -41,6 +47,10 @@ const optionTypes = {
   'no-color': { type: 'boolean' },
   fix: { type: 'boolean' },
   'dry-run': { type: 'boolean' },
+  baseline: { type: 'string' },
+  'write-baseline': { type: 'string' },
+  changed: { type: 'boolean' },
+  since: { type: 'string' },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean', short: 'V' },
 } as const;
@@ -78,6 +88,9 @@ const valueHelp: Record<string, string> = {
   language: languageNames.join(', '),
   'stdin-file': 'a file name',
   config: 'a configuration file',
+  baseline: 'a file that --write-baseline wrote',
+  'write-baseline': 'the file to write',
+  since: 'a revision, as in --since main',
 };
 
 function requestOf(positionals: readonly string[], given: ReadonlyMap<OptionName, readonly string[]>): Request {
@@ -118,10 +131,14 @@ function checkRequest(paths: readonly string[], given: ReadonlyMap<OptionName, r
     if (typeof read === 'string') return misuse(read);
     severities[read.code] = read.level;
   }
-  const [stdinFile, config] = [last('stdin-file'), last('config')];
+  const [stdinFile, config, baseline, writeBaseline] = [last('stdin-file'), last('config'), last('baseline'), last('write-baseline')];
+  const since = last('since') ?? (given.has('changed') ? 'HEAD' : undefined);
+  if (baseline !== undefined && writeBaseline !== undefined) return misuse('--baseline leaves known findings out, --write-baseline writes them down: say one of them.');
+  if (since !== undefined && paths.includes('-')) return misuse('--changed and --since choose among files; standard input is none.');
   const options: CheckOptions = {
     paths, format, severities, hints: given.has('hints'), stats: given.has('stats'), color: !given.has('no-color'),
     ...(language !== undefined && { language }), ...(stdinFile !== undefined && { stdinFile }), ...(config !== undefined && { config }), ...(fix && { fix }),
+    ...(baseline !== undefined && { baseline }), ...(writeBaseline !== undefined && { writeBaseline }), ...(since !== undefined && { since }),
   };
   return { kind: 'check', options };
 }

@@ -1,5 +1,5 @@
 /** `termwise check`: walks the paths, checks one file after the other, and shows what was found. */
-import { readFileSync } from 'node:fs';
+import { readFileSync, realpathSync, writeFileSync } from 'node:fs';
 import { dirname, resolve } from 'node:path';
 import { isServed } from '../frontends/registry.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
@@ -7,6 +7,8 @@ import { decode } from '../platform/decode.ts';
 import { diskFiles } from '../platform/disk.ts';
 import type { FileSource, Settings, Workspace } from '../service/contract.ts';
 import type { CheckOptions } from './arguments.ts';
+import { Baseline, written } from './baseline.ts';
+import { changedSince } from '../platform/changed.ts';
 import { Configurations } from '../service/configurations.ts';
 import { type Configuration, type ConfigurationProblem, readConfiguration } from '../service/configuration.ts';
 import { cellRegions } from './cells.ts';
@@ -18,7 +20,7 @@ import { readStream, readText } from './input.ts';
 import { languageNames } from './languages.ts';
 import { displayName, folderUri, slashed } from './names.ts';
 import { progressLine } from './progress.ts';
-import { type Format, reportedOf } from './report.ts';
+import { type Format, type Reported, reportedOf } from './report.ts';
 import { Tally } from './tally.ts';
 import { walk, whyUnreadable } from '../platform/walk.ts';
 
@@ -70,6 +72,9 @@ class Run {
   private readonly source: FileSource = diskFiles();
   private readonly workspaces = new Map<Configuration, Workspace>();
   private failed = false;
+  private baseline: Baseline | undefined;
+  /** What is to be written down as known. */
+  private readonly found: Reported[] = [];
 
   constructor(private readonly options: CheckOptions, private readonly around: Surroundings, only: Configuration | undefined) {
     this.format = formatOf(options, around);
@@ -80,6 +85,13 @@ class Run {
   }
 
   async all(): Promise<0 | 1 | 2> {
+    const { since } = this.options;
+    const changed = since === undefined ? undefined : changedSince(since, this.around.workingFolder);
+    const problem = typeof changed === 'string' ? `what changed since ${since} is not known: ${changed}` : this.readBaseline();
+    if (problem !== undefined || typeof changed === 'string') {
+      this.complain(problem ?? '');
+      return 2;
+    }
     const isDiff = this.options.fix === 'show';
     let reading = this.around.out(isDiff ? '' : this.format.begin());
     for (const path of this.options.paths) {
@@ -89,13 +101,37 @@ class Run {
     for (const walked of walk(paths, (folder) => this.configurations.at(folder))) {
       if (!reading) break;
       if (walked.kind === 'unreadable') this.unreadable(walked.path, walked.problem);
-      else reading = await this.file(walked.path, walked.named);
+      else if (!changed || changed.has(realpathSync(walked.path))) reading = await this.file(walked.path, walked.named);
     }
     const summary = this.tally.summary((performance.now() - this.start) / 1000);
     this.progress.clear();
     if (!isDiff) this.around.out(this.format.end(summary));
     if (this.options.stats && this.options.format !== 'text') this.around.complain(statisticsText(summary));
-    return this.failed ? 2 : summary.bySeverity.error > 0 ? 1 : 0;
+    if (this.baseline && this.baseline.known > 0) this.complain(`${this.baseline.known} known ${this.baseline.known === 1 ? 'finding' : 'findings'} left out`);
+    const kept = this.options.writeBaseline !== undefined && this.writeBaseline(this.options.writeBaseline);
+    return this.failed ? 2 : summary.bySeverity.error > 0 && !kept ? 1 : 0;
+  }
+
+  /** What is wrong with the file of known findings; undefined where there is none, or nothing. */
+  private readBaseline(): string | undefined {
+    const { baseline } = this.options;
+    if (baseline === undefined) return undefined;
+    const read = readText(resolve(this.around.workingFolder, baseline));
+    const known = read.ok ? Baseline.read(read.text) : read.problem;
+    if (typeof known === 'string') return `${baseline}: ${known}`;
+    this.baseline = known;
+    return undefined;
+  }
+
+  private writeBaseline(file: string): boolean {
+    try {
+      writeFileSync(resolve(this.around.workingFolder, file), written(this.found));
+      this.complain(`${file}: the findings are written down as known; --baseline ${file} leaves them out`);
+      return true;
+    } catch (error) {
+      this.unreadable(file, `it could not be written (${whyUnreadable(error)})`);
+      return false;
+    }
   }
 
   configurationProblem(file: string, { line, column, message }: ConfigurationProblem): void {
@@ -169,12 +205,15 @@ class Run {
 
   private async checkDocument(file: string, { text, language, notebook }: Document): Promise<boolean> {
     const workspace = await this.workspaceFor(dirname(file));
-    let findings: ReturnType<typeof reportedOf>;
+    let findings: readonly Reported[];
     try {
       await workspace.prepare(language);
       const result = workspace.check(file, text, language, notebook?.program.lineName);
-      this.tally.count(result);
-      findings = reportedOf(result, { textOf: (other) => this.source.read(other), nameOf: (other) => this.nameOf(other), inCells: notebook && cellRegions(notebook) });
+      const all = reportedOf(result, { textOf: (other) => this.source.read(other), nameOf: (other) => this.nameOf(other), inCells: notebook && cellRegions(notebook) });
+      if (this.options.writeBaseline !== undefined) this.found.push(...all);
+      findings = all.filter((each) => !this.baseline?.knows(each));
+      this.tally.count({ ...result, findings: result.findings.filter((_, at) => findings.includes(all[at] as Reported)) });
+      if (this.options.stats) this.tally.countUnits(workspace.symbols(file));
     } catch (error) {
       this.unreadable(file, `it could not be checked because of a fault in termwise (${error instanceof Error ? (error.stack ?? error.message) : String(error)})`);
       return true;

@@ -8,10 +8,10 @@ const mostSets = 20;
 
 /** The dimensional matrix, its rank, the groups and what is in none of them. */
 export function groupsText(solved: SolvedRelation, alternatives: boolean): string {
-  const { file, found, result } = solved;
+  const { found, result } = solved;
   const { dependent, symbols } = found.relation;
   const others = symbols.filter(({ name }) => name !== dependent).map(({ name }) => name);
-  const lines = [`${file}:${found.line}  ${dependent} depends on ${others.join(', ')}`, '', ...matrixLines(result), ''];
+  const lines = [`${placeOf(solved)}  ${dependent} depends on ${others.join(', ')}`, '', ...matrixLines(result), ''];
   lines.push(`  rank ${result.rank}${result.repeating.length > 0 ? `, repeating symbols ${result.repeating.join(', ')}` : ''}`);
   lines.push(...groupLines(solved, result));
   const solution = equation(result, hostSyntax[found.language]);
@@ -20,6 +20,11 @@ export function groupsText(solved: SolvedRelation, alternatives: boolean): strin
   lines.push(...result.unmatched.map((one) => `  ${one.symbol} is in no group: ${unmatchedText(one)}`), ...result.problems.map((problem) => `  ${problemText(problem)}`));
   if (alternatives) lines.push(...alternativeLines(solved));
   return `${lines.join('\n')}\n`;
+}
+
+/** `a.py:12`, in a notebook `a.ipynb: cell 3, line 2`. */
+export function placeOf({ file, line, cell }: SolvedRelation): string {
+  return cell === undefined ? `${file}:${line}` : `${file}: cell ${cell}, line ${line}`;
 }
 
 /** One column for each symbol; a point stands for zero. */

@@ -1,14 +1,17 @@
 /** `termwise groups`: the dimensionless groups of the relations in files. */
 import { resolve } from 'node:path';
 import { type GroupsDocument, type GroupsOptions, type GroupsResult, hostSyntax, latexReport, markdownReport, relationDocument, solveGroups } from '../groups/index.ts';
+import { isServed } from '../frontends/registry.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
 import { diskFiles } from '../platform/disk.ts';
 import type { FoundRelation } from '../service/relations.ts';
 import type { Surroundings } from './check.ts';
+import { cellRegions } from './cells.ts';
+import { openDocument } from './document.ts';
 import { type GroupsRequest, groupsHelp, readGroupsArguments } from './groups-options.ts';
-import { groupsText } from './groups-text.ts';
+import { groupsText, placeOf } from './groups-text.ts';
 import { readText } from './input.ts';
-import { languageNames, languageOf } from './languages.ts';
+import { languageNames } from './languages.ts';
 import { displayName, slashed } from './names.ts';
 import { readProduct } from './groups-product.ts';
 
@@ -16,6 +19,10 @@ import { readProduct } from './groups-product.ts';
 export interface SolvedRelation {
   readonly file: string;
   readonly found: FoundRelation;
+  /** The line from one; in a notebook that of the cell. */
+  readonly line: number;
+  /** In a notebook: the cell, all cells counted from 1. */
+  readonly cell?: number | undefined;
   readonly result: GroupsResult;
   /** Solves the relation again, with another request. */
   readonly again: (options: GroupsOptions) => GroupsResult;
@@ -51,18 +58,21 @@ async function solve(request: GroupsRequest, options: GroupsOptions, around: Sur
     const file = slashed(resolve(around.workingFolder, path));
     const shown = displayName(file, around.workingFolder);
     const read = readText(file);
-    const problem = !read.ok ? read.problem : languageOf(file) ? undefined : `its ending names no language (${languageNames.join(', ')})`;
-    if (!read.ok || problem !== undefined) {
-      around.complain(`termwise: ${shown}: ${problem}\n`);
+    const opened = !read.ok ? read : isServed(file) ? openDocument(file, read.text, undefined) : { ok: false as const, problem: `its ending names no language (${languageNames.join(', ')})` };
+    if (!opened.ok) {
+      around.complain(`termwise: ${shown}: ${opened.problem}\n`);
       failed = true;
       continue;
     }
-    workspace.check(file, read.text);
+    const { text, language, notebook } = opened.document;
+    await workspace.prepare(language);
+    workspace.check(file, text, language);
     const relations = workspace.groups.relations(file, { functions: request.functions });
     if (relations.length === 0) around.complain(`termwise: ${shown}: no relation here; say which symbol depends on which, as in \`P depends on N, D, rho, mu\`\n`);
     for (const found of relations) {
       const again = (other: GroupsOptions): GroupsResult => solveGroups(found.relation, other);
-      solved.push({ file: shown, found, result: again(options), again });
+      const place = notebook ? cellRegions(notebook)(found.span) : { line: found.line, cell: undefined };
+      solved.push({ file: shown, found, line: place.line, cell: place.cell, result: again(options), again });
     }
     workspace.forget(file);
   }
@@ -72,11 +82,11 @@ async function solve(request: GroupsRequest, options: GroupsOptions, around: Sur
 function written(solved: readonly SolvedRelation[], request: GroupsRequest): string {
   switch (request.form) {
     case 'json': {
-      const document: GroupsDocument = { version: 1, relations: solved.map(({ file, found, result }) => relationDocument(result, file, found.line, hostSyntax[found.language])) };
+      const document: GroupsDocument = { version: 1, relations: solved.map(({ file, found, line, cell, result }) => ({ ...relationDocument(result, file, line, hostSyntax[found.language]), ...(cell !== undefined && { cell }) })) };
       return `${JSON.stringify(document)}\n`;
     }
     case 'latex':
-      return solved.map(({ file, found, result }) => `% ${file}:${found.line}\n${latexReport(result)}`).join('\n');
+      return solved.map((each) => `% ${placeOf(each)}\n${latexReport(each.result)}`).join('\n');
     case 'markdown':
       return solved.map(({ file, found, result }) => `### ${found.relation.dependent ?? file}\n\n${markdownReport(result)}`).join('\n');
     case 'text':

@@ -31,7 +31,7 @@ Options
   --format text|json|sarif    form of the output (text)
   --severity code=level       severity of one code; level is error, warning, information, hint or off (repeatable)
   --hints                     shows hints in text output; json and sarif always hold them
-  --stats                     adds functions, notes read and not read, findings by code, files and time
+  --stats                     adds functions, notes read and not read, known units, findings by code, files and time
   --language name             language of standard input and of the files named:
 ${indented(languageNames.join(', '), 30)}
   --stdin-file name           name under which standard input is checked: decides its folder and language
@@ -39,6 +39,10 @@ ${indented(languageNames.join(', '), 30)}
   --fix                       writes the fixes that are proven into the files, and shows what is left; a file keeps its
                               encoding and line ends, and is not written if it changes meanwhile
   --fix --dry-run             prints them as a unified diff and writes nothing
+  --changed                   checks only files that differ from the last commit, or are not in one (asks git)
+  --since revision            checks only files that differ from a revision, as in --since main
+  --write-baseline file       writes the findings down as known
+  --baseline file             leaves known findings out: only new ones are shown and count
   --no-color                  no colours (also: the environment variable NO_COLOR)
   -h, --help                  this text
 

@@ -41,6 +41,8 @@ export interface Summary {
   readonly byCode: Readonly<Partial<Record<FindingCode, number>>>;
   readonly bySeverity: Readonly<Record<Severity, number>>;
   readonly seconds: number;
+  /** Symbols that take part in arithmetic, and how many of them have a known unit; counted on request. */
+  readonly units: { readonly known: number; readonly all: number } | undefined;
   /** Files and folders that could not be read, with the reason. */
   readonly unreadable: readonly { readonly file: string; readonly problem: string }[];
 }

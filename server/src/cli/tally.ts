@@ -1,6 +1,6 @@
 import type { FindingCode, Severity } from '../findings/finding.ts';
 import { findingCodes } from '../findings/finding.ts';
-import type { CheckResult } from '../service/contract.ts';
+import type { CheckResult, SymbolGroup } from '../service/contract.ts';
 import type { Summary } from './report.ts';
 
 /** Counts over the files of one run. */
@@ -10,6 +10,7 @@ export class Tally {
   private notes = 0;
   private unread = 0;
   private flagged = 0;
+  private units: { known: number; all: number } | undefined;
   private readonly codes = new Map<FindingCode, number>();
   private readonly severities: Record<Severity, number> = { error: 0, warning: 0, information: 0, hint: 0 };
   private readonly unreadable: { file: string; problem: string }[] = [];
@@ -26,13 +27,21 @@ export class Tally {
     }
   }
 
+  countUnits(groups: readonly SymbolGroup[]): void {
+    this.units ??= { known: 0, all: 0 };
+    for (const { symbols } of groups) {
+      this.units.all += symbols.length;
+      this.units.known += symbols.filter(({ origin }) => origin !== 'unknown').length;
+    }
+  }
+
   countUnreadable(file: string, problem: string): void {
     this.unreadable.push({ file, problem });
   }
 
   summary(seconds: number): Summary {
-    const { files, functions, notes, unread, flagged, unreadable } = this;
+    const { files, functions, notes, unread, flagged, unreadable, units } = this;
     const byCode = Object.fromEntries(findingCodes.flatMap((code) => (this.codes.has(code) ? [[code, this.codes.get(code)]] : [])));
-    return { files, functions, notes, unread, flagged, byCode, bySeverity: { ...this.severities }, seconds, unreadable };
+    return { files, functions, notes, unread, flagged, byCode, bySeverity: { ...this.severities }, seconds, unreadable, units };
   }
 }

@@ -10,8 +10,10 @@ export interface GroupsDocument {
 
 export interface RelationDocument {
   readonly file: string;
-  /** One-based. */
+  /** One-based; in a notebook that of the cell. */
   readonly line: number;
+  /** In a notebook only: the cell, all cells counted from 1. */
+  readonly cell?: number;
   readonly dependent: string | null;
   readonly symbols: readonly { readonly name: string; readonly dimension: string | null; readonly unit: string | null; readonly description: string | null }[];
   readonly rank: number;

@@ -14,8 +14,8 @@ export function jsonFormat(): Format {
       return text;
     },
     end: (summary) => {
-      const { files, functions, notes, byCode, seconds } = summary;
-      const counts = JSON.stringify({ files, functions, notes, findings: byCode, seconds: Math.round(seconds * 1000) / 1000 });
+      const { files, functions, notes, byCode, seconds, units } = summary;
+      const counts = JSON.stringify({ files, functions, notes, ...(units ? { units } : {}), findings: byCode, seconds: Math.round(seconds * 1000) / 1000 });
       return `${first ? '' : '\n'}],"summary":${counts}}\n`;
     },
   };
