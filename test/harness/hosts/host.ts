@@ -87,6 +87,10 @@ export interface Host {
   append?(list: string, value: string): string;
   /** Several targets of a call that gives several results, where a tuple cannot say it. */
   targets?(names: readonly string[]): string;
+  /** A record under constant keys, an entry a line so that each can have its comment. */
+  record?(target: string, local: Local | undefined): { readonly open?: string; readonly entry: (key: string, value: string) => string; readonly close?: string };
+  /** How its entries are read: `r.key` or `r["key"]`. */
+  readonly keyed?: 'member' | 'key';
   /** A list as the first value of a variable, where expressions have none. */
   initial?(items: readonly string[]): string;
   if(condition: string): string;

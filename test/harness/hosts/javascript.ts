@@ -23,6 +23,8 @@ function scripted(language: 'javascript' | 'typescript', fileName: string): Host
       maximum: 'Math.max', minimum: 'Math.min', len: ([list]) => list && member(list, 'length'),
     },
     assign: (target, value, local) => `${local ? (local.isConstant ? 'const ' : 'let ') : ''}${target} = ${value};`,
+    record: (target, local) => ({ open: `${local ? 'const ' : ''}${target} = {`, entry: (key, value) => `    ${key}: ${value},`, close: '};' }),
+    keyed: 'member',
     declare: (local) => `let ${local.name};`,
     show: (values) => `console.log(${values.join(', ')});`,
     append: (list, value) => `${list}.push(${value});`,

@@ -18,6 +18,8 @@ export const juliaHost: Host = {
   },
   comment: (text) => `# ${text}`,
   assign: (target, value) => `${target} = ${value}`,
+  record: (target) => ({ open: `${target} = Dict(`, entry: (key, value) => `    "${key}" => ${value},`, close: ')' }),
+  keyed: 'key',
   evaluate: (value) => value,
   show: (values) => `println(${values.join(', ')})`,
   append: (list, value) => `push!(${list}, ${value})`,

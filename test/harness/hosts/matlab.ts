@@ -20,6 +20,8 @@ export const matlabHost: Host = {
   comment: (text) => `% ${text}`,
   assign: (target, value) => `${target} = ${value};`,
   targets: (names) => `[${names.join(', ')}]`,
+  record: (target) => ({ entry: (key, value) => `${target}.${key} = ${value};` }),
+  keyed: 'member',
   evaluate: (value) => `${value};`,
   show: (values) => values.map((value) => `disp(${value});`).join(' '),
   append: (list, value) => `${list}(end + 1) = ${value};`,

@@ -20,6 +20,8 @@ export const pythonHost: Host = {
   },
   comment: (text) => `# ${text}`,
   assign: (target, value) => `${target} = ${value}`,
+  record: (target) => ({ open: `${target} = {`, entry: (key, value) => `    "${key}": ${value},`, close: '}' }),
+  keyed: 'key',
   evaluate: (value) => value,
   show: (values) => `print(${values.join(', ')})`,
   append: (list, value) => `${list}.append(${value})`,

@@ -2,7 +2,7 @@
 import type { HostStyle } from '../../../server/src/frontends/frontend.ts';
 import type { Argument, CallExpr, CompareExpr, Expr, NumberExpr } from '../../../server/src/program/nodes.ts';
 import type { Feature, Host } from '../hosts/host.ts';
-import { and, call, compare, name, number } from '../hosts/make.ts';
+import { and, call, compare, member, name, number } from '../hosts/make.ts';
 import type { Names } from './names.ts';
 import { unsayable } from './unsayable.ts';
 
@@ -93,6 +93,8 @@ export class Speaker {
 
   private index(expr: Extract<Expr, { kind: 'index' }>): Expr {
     const object = this.turn(expr.object);
+    const [only] = expr.keys;
+    if (only?.kind === 'text' && expr.keys.length === 1 && this.host.keyed) return this.host.keyed === 'member' ? member(object, only.value) : expr;
     const keys = expr.keys.map((key) => {
       if (key.kind === 'unary' && key.op === '-' && key.operand.kind === 'number') return key.operand.text === '1' && this.host.last ? this.host.last(object) : unsayable('counting from the end');
       if (key.kind === 'number') return number(Number(key.text) + this.host.firstIndex);

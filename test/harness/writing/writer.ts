@@ -158,6 +158,7 @@ export class Writer {
     }
     if (target.kind !== 'name' && target.kind !== 'sequence' && target.kind !== 'index') return unsayable(`assignment to ${target.kind}`);
     const left = this.speaker.print(target);
+    if (stmt.value.kind === 'record' && target.kind === 'name') return this.record(stmt, stmt.value, left, scope);
     if (stmt.op && this.host.says.has('updates')) return [this.line(stmt, this.host.evaluate(`${left} ${stmt.op}= ${this.speaker.print(stmt.value)}`))];
     const local = scope.locals.get(left);
     const first = local?.declaredByAssignment && !scope.declared.has(left);
@@ -165,6 +166,17 @@ export class Writer {
     scope.declared.add(left);
     const text = this.host.assign(left, value, first ? local : undefined);
     return [this.host.declaresNotes && local?.note !== undefined ? { text, covers: this.linesOf(stmt.start, stmt.end) } : this.line(stmt, text)];
+  }
+
+  private record(stmt: AssignStmt, value: Extract<Expr, { kind: 'record' }>, target: string, scope: Scope): readonly Line[] {
+    const form = this.host.record?.(target, scope.declared.has(target) ? undefined : scope.locals.get(target)) ?? unsayable('records');
+    if (value.others.length > 0 || value.entries.some((entry) => !/^[A-Za-z]\w*$/.test(entry.key))) return unsayable('records with other keys');
+    scope.declared.add(target);
+    const entries = value.entries.map((entry): Line => {
+      const text = form.entry(entry.key, this.speaker.print(entry.value));
+      return { text: entry.comment ? `${text}  ${this.host.comment(entry.comment.text)}` : text, covers: [this.lineAt(entry.start)] };
+    });
+    return [...(form.open ? [this.line({ ...stmt, end: stmt.start + 1 }, form.open)] : []), ...entries, ...(form.close ? [{ text: form.close }] : [])];
   }
 
   /** `a, b = x, y` as two statements, where y does not read a. */
