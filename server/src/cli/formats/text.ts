@@ -75,6 +75,7 @@ export function statisticsText(summary: Summary): string {
     ['functions', String(summary.functions)],
     ['notes read', String(summary.notes)],
     ['brackets not read', String(summary.unread)],
+    ...(summary.units ? [['units known', unitShare(summary.units)] as const] : []),
     ...findingCodes.filter((code) => summary.byCode[code]).map((code: FindingCode) => [code, String(summary.byCode[code])] as const),
     ['seconds', summary.seconds.toFixed(2)],
   ];
@@ -84,4 +85,9 @@ export function statisticsText(summary: Summary): string {
 
 function plural(count: number, noun: string): string {
   return count === 0 ? '' : `${count} ${noun}${count === 1 ? '' : 's'}`;
+}
+
+/** `11 of 14 (79 %)`. */
+function unitShare({ known, all }: { readonly known: number; readonly all: number }): string {
+  return all === 0 ? '0' : `${known} of ${all} (${Math.round((100 * known) / all)} %)`;
 }
