@@ -132,7 +132,7 @@ export function quotient(expr: Expr, left: Value, right: Value): Value {
 /** `base ** exponent`. */
 export function power(context: Context, expr: Expr, base: Value, exponent: Value, span: Span): Value {
   const constant = exponent.literal ?? constantOf(exponent);
-  if (!exponent.literal) pureExponent(context, exponent);
+  if (!exponent.literal) pureExponent(context, isPerTenKelvin(exponent) ? { ...exponent, tainted: true } : exponent);
   if (base.literal && constant) return literalPower(expr, base.literal, constant);
   if (base.fits) return { expr, form: undefined, fits: true, from: [] };
   if (base.literal) return { expr, form: oneForm, from: [exponent], ...(base.literal.pure && exponent.form && !exponent.tainted && exponent.expr?.kind !== 'binary' ? {} : { tainted: true }) };
@@ -142,6 +142,15 @@ export function power(context: Context, expr: Expr, base: Value, exponent: Value
   context.add({ kind: 'varying-power', anchor: context.anchor, span, base, exponent });
   return unknown(expr, [base]);
 }
+
+/** `Q10^((T - T_ref)/10)`, the temperature coefficient of a rate: its ten is ten kelvins (van 't Hoff's rule; common practice). */
+function isPerTenKelvin({ expr, form }: Value): boolean {
+  if (expr?.kind !== 'binary' || (expr.op !== '*' && expr.op !== '/') || !form || !isConstant(form) || form.dimension !== temperature) return false;
+  return [expr.left, expr.right].some((part) => part.kind === 'number' && part.value !== undefined && part.value.compare(expr.op === '/' ? ten : tenth) === 0);
+}
+
+const ten = Rational.of(10);
+const tenth = Rational.of(1, 10);
 
 /** A root or another constant power that a library function stands for. */
 export function constantPower(expr: Expr, base: Value, exponent: Rational): Value {

@@ -19,6 +19,8 @@ export interface Passed {
 const powers = new Set(['pow', 'power', 'mpower', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow']);
 /** Arrays of zeros or of nothing fit any unit. */
 const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan', 'zeros', 'cell']);
+/** Questions about missing values. */
+const presence = new Set(['isnan', 'isfinite', 'isinf', 'numpy.isnan', 'numpy.isfinite', 'numpy.isinf', 'math.isnan']);
 const ones = new Set(['numpy.ones', 'numpy.ones_like', 'numpy.eye', 'numpy.identity', 'ones', 'eye']);
 
 export function call(context: Context, expr: CallExpr): Value {
@@ -34,8 +36,11 @@ function taken(expr: CallExpr, value: Value, results: number): Value {
 
 function called(context: Context, expr: CallExpr): Value {
   const callee = calleeOf(context, expr.callee);
-  const passed = expr.args.map((argument) => ({ argument, value: evaluate(context, argument.value) }));
   const target = callee.value.callable;
+  const asked = context.constraints.length;
+  const passed = expr.args.map((argument) => ({ argument, value: evaluate(context, argument.value) }));
+  // `isnan(a + b)` asks whether one of them is missing: what is added there need not be alike.
+  if (target?.kind === 'library' && presence.has(target.name)) context.constraints.length = asked;
   if (!target && callee.method) return callMethod(context, expr, callee.object as Value, callee.method, passed);
   // Where an element is written like a call, a symbol with a unit of its own is no function; nor is `NaN(2, 3)` more than an array of NaN.
   if (!target) return expr.results !== undefined && (callee.value.form || callee.value.fits) && !callee.value.literal ? { ...callee.value, expr, from: [callee.value] } : unknown(expr);

@@ -1,6 +1,7 @@
 /** What each kind of statement does to the versions of symbols, and what it asks of values. */
 import { pathOf } from '../program/path.ts';
 import type { AssignStmt, Expr, FunctionStmt, Stmt } from '../program/nodes.ts';
+import type { Span } from '../text/span.ts';
 import { agree, product, quotient, sum, power } from './arithmetic.ts';
 import { assignedPaths } from './assigned.ts';
 import type { Bindings } from './bindings.ts';
@@ -133,8 +134,14 @@ function returned(context: Context, statement: Extract<Stmt, { kind: 'return' }>
     const part = position === undefined ? (value.items && notes.length === 1 ? undefined : value) : value.items?.[position];
     if (!part?.form || part.fits || part.literal || part.misuse) continue;
     const noted = notedValue(owner.name, note, context.anchor, undefined);
-    agree(context, statement.value, part, noted, { kind: 'result', function: owner.name, note }, part.expr ?? statement.value);
+    agree(context, statement.value, part, noted, { kind: 'result', function: owner.name, note }, assignedSpan(context, owner, part) ?? part.expr ?? statement.value);
   }
+}
+
+/** An output is named in the head of its function: a wrong one is told where it got its value. */
+function assignedSpan(context: Context, owner: FunctionStmt, part: Value): Span | undefined {
+  const version = owner.outputs && part.version?.anchor === context.anchor && part.version.origin === 'assigned' ? part.version : undefined;
+  return version?.assigned?.expr ?? version?.span;
 }
 
 function branches(context: Context, statement: Extract<Stmt, { kind: 'if' }>): boolean {

@@ -22,7 +22,7 @@ export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStm
   const options = out.options(named, piece.text);
   const looked = out.look(piece, 'comment', options, true);
   if (positions === 1) {
-    const found = unitOf(out, piece, looked, valueOf(statement), options);
+    const found = unitOf(out, piece, looked, valueOf(statement), options, named);
     if (found) for (const [path] of groups) if (path !== undefined) out.note({ kind: 'statement', statement, path }, piece, found, 'trailing');
     return;
   }
@@ -37,7 +37,7 @@ export function paramNote(out: Collector, chunk: Chunk, owner: FunctionStmt, par
   const piece = noteText(comment);
   if (isCode(piece.text)) return;
   const options = out.options(param.name, piece.text);
-  const found = unitOf(out, piece, out.look(piece, 'comment', options, true), param.default, options);
+  const found = unitOf(out, piece, out.look(piece, 'comment', options, true), param.default, options, param.name);
   if (found) out.note({ kind: 'parameter', owner, param }, piece, found, 'trailing');
 }
 
@@ -49,7 +49,7 @@ export function entryNotes(out: Collector, chunk: Chunk, record: { readonly star
     const piece = noteText(comment);
     if (isCode(piece.text)) continue;
     const options = out.options(entry.key, piece.text);
-    const found = unitOf(out, piece, out.look(piece, 'comment', options, true), entry.value, options);
+    const found = unitOf(out, piece, out.look(piece, 'comment', options, true), entry.value, options, entry.key);
     if (found) out.note({ kind: 'entry', entry }, piece, found, 'trailing');
   }
 }
@@ -83,7 +83,7 @@ export function noteText(comment: Comment): Piece {
 }
 
 /** The one unit of a comment: brackets, then the whole text or its head, then parentheses, then words. */
-function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | undefined, options: ReadOptions): Found | undefined {
+function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | undefined, options: ReadOptions, symbol: string): Found | undefined {
   if (looked.brackets.length > 0) {
     const chosen = choose(piece.text, looked.brackets);
     if (!chosen) out.leave(piece, looked.brackets);
@@ -91,8 +91,11 @@ function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | unde
   }
   if (looked.problems.length > 0 || (value && holdsNoNumber(value))) return undefined;
   const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && isNumber(value), out.names.occurs, options) : undefined;
-  return bare ?? looked.parentheses[0] ?? unitInWords(piece, out.settings.bare, out.names.occurs, options);
+  return bare ?? looked.parentheses[0] ?? (namesUnit.test(symbol) ? undefined : unitInWords(piece, out.settings.bare, out.names.occurs, options));
 }
+
+/** `unit = 1e-3  # all lengths in mm`: the words are about what is counted in that unit, and the number converts. */
+const namesUnit = /(?:^|[._])units?$/i;
 
 function valueOf(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): Expr | undefined {
   return statement.kind === 'assign' ? statement.value : undefined;

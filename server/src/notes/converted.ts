@@ -9,7 +9,7 @@ export function isConverted(block: readonly Stmt[], name: string): boolean {
 function converts(statement: Stmt, name: string): boolean {
   switch (statement.kind) {
     case 'assign':
-      return statement.targets.some((target) => target.kind === 'name' && target.name === name) && (statement.op !== undefined || reads(statement.value, name));
+      return statement.targets.some((target) => target.kind === 'name' && target.name === name) && (statement.op !== undefined || (!keeps(statement.value, name) && reads(statement.value, name)));
     case 'if':
       return statement.arms.some((arm) => isConverted(arm.body, name)) || isConverted(statement.otherwise, name);
     case 'loop':
@@ -20,6 +20,20 @@ function converts(statement: Stmt, name: string): boolean {
       return statement.cases.some((each) => isConverted(each.body, name));
     case 'scope':
       return isConverted(statement.body, name);
+    default:
+      return false;
+  }
+}
+
+/** The same numbers in another shape: `p'`, `p(:)`, `p(ones(1, n), :)`. */
+function keeps(expr: Expr, name: string): boolean {
+  switch (expr.kind) {
+    case 'name':
+      return expr.name === name;
+    case 'unary':
+      return expr.op === 'transpose' && keeps(expr.operand, name);
+    case 'index':
+      return keeps(expr.object, name);
     default:
       return false;
   }

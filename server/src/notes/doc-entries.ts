@@ -123,12 +123,17 @@ function sphinxEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] 
 export function plainEntries(doc: Piece, lines: readonly Line[]): readonly DocEntry[] {
   return lines.flatMap((line, at): DocEntry[] => {
     const match = line.text.length < 400 ? plainHead.exec(line.text) : null;
-    if (!match) return [];
+    if (!match || isUsage(line.text, match[2] as string)) return [];
     let to = at + 1;
     while (to < lines.length && (lines[to] as Line).indent > line.indent && !isBlank(lines[to] as Line)) to++;
     const start = line.start + line.indent + line.text.length - (match[2] as string).length;
     return [{ role: 'parameter', names: namesIn(match[1] as string), type: undefined, body: partOf(doc, start, lastEnd(lines, at, to)) }];
   });
+}
+
+/** `E = photon(lambda)`: how a function is called, and no description. */
+function isUsage(line: string, body: string): boolean {
+  return /^\s*[\p{L}_][\p{L}\p{N}_.]*\(/u.test(body) && /=\s*$/.test(line.slice(0, line.length - body.length));
 }
 
 function namesIn(text: string): readonly string[] {

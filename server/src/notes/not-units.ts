@@ -33,8 +33,14 @@ export function isNoUnit(text: string, bracket: Bracketed, around: Surroundings)
   if (inner === '1') return isCitation(text, bracket, around);
   if (inner === 'in') return isDirection(text, bracket, around);
   if (marks.test(inner) || converts.test(inner) || (numbers.test(inner) && /\d/.test(inner))) return true;
+  if (/^[A-Za-z]\w*\s*\+\s*\d+$/.test(inner)) return true;
   if (textual.test(inner.replace(/<\/?su[pb]>|\\[a-z]+\{|\{[^{}]*\}/gi, '')) || shape.test(inner) || series.test(inner)) return true;
   return followsCode(text, bracket.start);
+}
+
+/** `[nl]` where the code has a count of that name: the length of a vector. */
+export function isCount(inner: string, occurs: (name: string) => boolean): boolean {
+  return /^n[a-z]$/.test(inner) && occurs(inner);
 }
 
 /** True where a bracket stands in a line of code: behind an operator, an opening bracket, a keyword. */

@@ -65,17 +65,17 @@ describe('functions', () => {
   it('what a script assigns below is a variable above', () => expect(shown('y = q(1);\nq = [1 2];')).toBe('(= y (at q 1))\n(= q (matrix 1 2))'));
 
   it.each<[string, string]>([
-    ['function y = f(x)\n% F  the first line\n%  x  width [m]\n\n% inside\ny = x;\nend', '"F  the first line\\n   x  width [m]"'],
-    ['% F  above\n%  x  width [m]\nfunction y = f(x)\ny = x;\nend', '"F  above\\n   x  width [m]"'],
-    ['function y = f(x)\n\n%  x  width [m]\n\n%  y  depth [m]\n\ny = x;\nend', '"x  width [m]\\n\\n   y  depth [m]"'],
-    ['function y = f(x)\n%{\n  x  width [m]\n%}\ny = x;\nend', '"x  width [m]"'],
+    ['function y = f(x)\n% F  the first line\n%  x  width [m]\n\n% inside\ny = x;\nend', '"  F  the first line\\n   x  width [m]"'],
+    ['% F  above\n%  x  width [m]\nfunction y = f(x)\ny = x;\nend', '"  F  above\\n   x  width [m]"'],
+    ['function y = f(x)\n\n%  x  width [m]\n\n%  y  depth [m]\n\ny = x;\nend', '"   x  width [m]\\n\\n   y  depth [m]"'],
+    ['function y = f(x)\n%{\n  x  width [m]\n%}\ny = x;\nend', '"  x  width [m]"'],
   ])('help: %s', (text, doc) => expect(shown(text)).toContain(`doc ${doc}`));
 });
 
 describe('classes', () => {
   it('have fields and methods', () => {
     expect(shown(classFile)).toBe(lines(
-      'class Tank(handle)', '  doc "TANK  a tank"', '  (= width 4 : (1,1) double) # [m] clear width', '  (declare depth) # [m]',
+      'class Tank(handle)', '  doc "    TANK  a tank"', '  (= width 4 : (1,1) double) # [m] clear width', '  (declare depth) # [m]',
       '  def Tank(width)', '    (= (. obj width) width)', '    (return obj)',
       '  def area(obj, depth)', '    (= A (* (. obj width) depth))', '    (return A)',
       '  def double_area(obj)', '    (= p (* 2 ((. obj area) (. obj depth))))', '    (return p)',

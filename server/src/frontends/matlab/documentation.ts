@@ -39,7 +39,8 @@ function commentsUnder(reader: Reader, headEnd: number, first: number): readonly
 }
 
 function docOf(text: string, comments: readonly Comment[]): DocText {
-  const start = (comments[0] as Comment).start;
+  const first = (comments[0] as Comment).start;
+  const start = Math.max(text.lastIndexOf('\n', first - 1), text.lastIndexOf('\r', first - 1)) + 1;
   const end = (comments.at(-1) as Comment).end;
   return { text: text.slice(start, end).replace(/^[ \t]*(?:[%#]+[{}!>|]?|[*]+(?=\s))/gm, (marks) => ' '.repeat(marks.length)), start, end };
 }

@@ -99,7 +99,8 @@ function call(expr: CallExpr): Printed {
 function unary(op: Extract<Expr, { kind: 'unary' }>['op'], operand: Expr): Printed {
   if (op === 'transpose') return [`${print(operand, level.power)}'`, level.power];
   if (op === 'bits') return [`bitcmp(${item(operand)})`, level.atom];
-  return [`${op === 'not' ? '~' : op}${print(operand, level.sign)}`, level.sign];
+  const inner = print(operand, level.sign);
+  return [`${op === 'not' ? '~' : op}${inner.startsWith(op) ? `(${inner})` : inner}`, level.sign];
 }
 
 function binary(expr: BinaryExpr): Printed {
