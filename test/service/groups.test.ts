@@ -152,3 +152,38 @@ describe('what stands at a place', () => {
     expect(found && groupText(found)).toBe(expected);
   });
 });
+
+describe('selected statements and equations', () => {
+  /** The text after the action on the part between two bars. */
+  async function onSelection(marked: string, title: string): Promise<string | undefined> {
+    const [before = '', inside = '', after = ''] = marked.split('|');
+    const text = before + inside + after;
+    const { workspace, file } = await checked(text);
+    const action = workspace.groups.actions(file, before.length, { start: before.length, end: before.length + inside.length }).find((each) => each.title.startsWith(title));
+    return action && applyEdits(text, action.edits);
+  }
+
+  const pendulum = 'from math import pi, sqrt\nl = 1.0  # [m]\ng = 9.81  # [m/s^2]\n';
+
+  test('an equation: its target depends on what it reads, without functions and pi', async () => {
+    expect(await onSelection(`${pendulum}T = 2*pi*|sq|rt(l/g)  # [s]\n`, 'Write T =')).toBe(`${pendulum}# T = sqrt(l/g) * C\nT = 2*pi*sqrt(l/g)  # [s]\n`);
+  });
+
+  test('several statements: the last target depends on what none of them gives', async () => {
+    const text = `|a = N*D\nb = rho*a*D/mu\nP = b*rho*N**3*D**5|  # [W]\n`;
+    expect(await onSelection(text, 'Write P =')).toContain('# P = rho*N**3*D**5 * phi(Re)\na = N*D\n');
+  });
+
+  test('a unit that is missing is asked for', async () => {
+    const { workspace, file } = await checked(`${pendulum}T = l*g*q9\n`);
+    const at = `${pendulum}T = l`.length;
+    expect(workspace.groups.actions(file, at, { start: at, end: at }).map(({ kind }) => kind)).toEqual(['missing-units']);
+  });
+
+  test.each([['two symbols', 'x = 2*l\n'], ['no assignment', 'print(l, g)\n'], ['nothing asked for', undefined]])('nothing is offered: %s', async (_what, line) => {
+    const text = `${pendulum}${line ?? 'T = sqrt(l/g)  # [s]\n'}`;
+    const { workspace, file } = await checked(text);
+    const at = pendulum.length + 5;
+    expect(workspace.groups.actions(file, at, line === undefined ? undefined : { start: at, end: at })).toEqual([]);
+  });
+});

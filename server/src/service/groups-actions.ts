@@ -3,10 +3,12 @@ import type { Understood } from '../analyze.ts';
 import type { HostStyle, TextEdit } from '../frontends/frontend.ts';
 import { definitions, equation, groupNames, hostSyntax, type GroupsResult, repeatingSets, solveGroups, systemOf } from '../groups/index.ts';
 import type { Stmt } from '../program/nodes.ts';
+import type { Span } from '../text/span.ts';
 import { type GroupAtPlace, groupsAround } from './groups-at.ts';
 import { productOf, sameProduct } from './groups-product.ts';
 import { assignmentsOf, chunkAt, statementsOf, type TextOf, whereOf } from './groups-symbols.ts';
 import { definitionsEdit, wordsEdit } from './groups-write.ts';
+import { relationOfSelection } from './relation-of-selection.ts';
 import { type FoundRelation, relationsOf } from './relations.ts';
 
 export interface GroupAction {
@@ -19,11 +21,15 @@ export interface GroupAction {
 /** Other sets of repeating symbols that are offered. */
 const mostSets = 6;
 
-/** The actions at an offset: those of the relation on its line, and the name for the product that stands there. */
-export function groupActions(understood: Understood, style: HostStyle, offset: number, textOf: TextOf): readonly GroupAction[] {
+/**
+ * The actions at an offset: those of the relation on its line, and the name for the product that stands there. `selection`: statements
+ * that are a relation, where no other stands there.
+ */
+export function groupActions(understood: Understood, style: HostStyle, offset: number, textOf: TextOf, selection?: Span): readonly GroupAction[] {
   const line = understood.lines.lineAt(offset);
   const found = relationsOf(understood, textOf, { functions: true }).filter(({ span }) => understood.lines.lineAt(span.start) <= line && line <= understood.lines.lineAt(span.end));
-  return [...found.flatMap((relation) => relationActions(understood, style, relation)), ...replacements(understood, offset, textOf)];
+  const selected = selection && found.length === 0 ? relationOfSelection(understood, selection, textOf) : undefined;
+  return [...[...found, ...(selected ? [selected] : [])].flatMap((relation) => relationActions(understood, style, relation)), ...replacements(understood, offset, textOf)];
 }
 
 function relationActions(understood: Understood, style: HostStyle, found: FoundRelation): GroupAction[] {

@@ -20,6 +20,7 @@ export function wordsEdit(understood: Understood, found: FoundRelation, style: H
     const start = index.lineStart(index.lineAt(found.where.chunk.anchor.start + (found.where.piece?.fn.start ?? 0)));
     return { start, end: start, text: marked.map((each) => each + lineBreak(text)).join('') };
   }
+  if (found.origin === 'selection') return { start: index.lineStart(line), end: index.lineStart(line), text: marked.map((each) => each + lineBreak(text)).join('') };
   const inWords = isDocumentation(found);
   const at = inWords ? found.span.end : index.lineEnd(line);
   return { start: at, end: at, text: (inWords ? lines.map((each) => indent + each) : marked).map((each) => lineBreak(text) + each).join('') };

@@ -14,8 +14,8 @@ export interface RelationOptions {
 /** A relation and where it stands. */
 export interface FoundRelation {
   readonly relation: Relation;
-  readonly origin: 'statement' | 'function';
-  /** Of the sentence, or of the function's name, in the file. */
+  readonly origin: 'statement' | 'function' | 'selection';
+  /** Of the sentence, of the function's name, or of the selected statements, in the file. */
   readonly span: Span;
   /** From one. */
   readonly line: number;

@@ -1,5 +1,5 @@
 /** What can be done at a place: fixes of findings, notes, and what concerns dimensionless groups. */
-import { type CancellationToken, type CodeAction, CodeActionKind, type CodeActionParams, type Command, type Diagnostic } from 'vscode-languageserver/node.js';
+import { type CancellationToken, type CodeAction, CodeActionKind, type CodeActionParams, CodeActionTriggerKind, type Command, type Diagnostic } from 'vscode-languageserver/node.js';
 import type { TextEdit } from '../../frontends/frontend.ts';
 import { applyProven } from '../../service/fix-all.ts';
 import type { OfferedFix, Workspace } from '../../service/contract.ts';
@@ -21,12 +21,14 @@ export async function codeActions(session: Session, { textDocument, range, conte
   const found = await session.ask(textDocument.uri, token, (document, workspace) => {
     const lines = LineIndex.of(document.text);
     const span = { start: offsetOf(lines, range.start, session.target.encoding), end: offsetOf(lines, range.end, session.target.encoding) };
+    // An equation has groups to offer at every line: they are for those who ask, and not for every light bulb.
+    const wantsSelection = span.end > span.start || context.triggerKind === CodeActionTriggerKind.Invoked;
     const writer = new Writer(session, document);
     const actions: CodeAction[] = [];
     if (wanted(CodeActionKind.QuickFix) || wanted(rewriteKind)) {
       for (const fix of workspace.fixes(document.file, span)) actions.push(writer.fix(fix, context.diagnostics));
     }
-    if (wanted(rewriteKind)) for (const action of workspace.groups.actions(document.file, span.start)) actions.push(writer.action(action.title, rewriteKind, action.edits));
+    if (wanted(rewriteKind)) for (const action of workspace.groups.actions(document.file, span.start, wantsSelection ? span : undefined)) actions.push(writer.action(action.title, rewriteKind, action.edits));
     // Asked for by name only: it checks the file several times, which a light bulb should not wait for.
     if (context.only?.some((only) => fixAllKind === only || fixAllKind.startsWith(`${only}.`))) actions.push(...fixAll(session, document, workspace, writer));
     return actions.filter(({ kind }) => kind === undefined || wanted(kind));
