@@ -77,6 +77,9 @@ const edit: fc.Arbitrary<Edit> = fc.record({
   text: fc.oneof(fc.constantFrom(...pieces), fc.nat(script.length - 60).map((from) => script.slice(from, from + 50))),
 });
 
+/** Megabytes that the server may hold at the end beyond what it held after 200 edits: garbage that is not collected yet, and no more. */
+const mostGrowth = 120;
+
 const shape = (found: Diagnostic) => ({ code: found.code, range: found.range, message: found.message });
 
 /** Sends edits, and compares with a fresh check after every twentieth. */
@@ -84,6 +87,8 @@ async function follow(edits: readonly Edit[], encoding: 'utf-8' | 'utf-16'): Pro
   const editor = await Client.start({ pull: true, encodings: [encoding] });
   try {
     let text = script;
+    let slowest = 0;
+    let early = 0;
     await editor.open('press.py', text);
     for (const [index, each] of edits.entries()) {
       // Half an astral character is no text: an edit there is widened as an editor would.
@@ -97,11 +102,18 @@ async function follow(edits: readonly Edit[], encoding: 'utf-8' | 'utf-16'): Pro
       await editor.change('press.py', { range: rangeOf(LineIndex.of(text), { start, end }, encoding), text: inserted });
       text = text.slice(0, start) + inserted + text.slice(end);
       if (index % 20 !== 19) continue;
+      const asked = performance.now();
       const report = await editor.pull('press.py');
+      slowest = Math.max(slowest, performance.now() - asked);
+      if (index === 199) early = editor.memory();
       const { findings } = (await engine()).check(`${editor.folder}/press.py`, text);
       const expected = findings.map(({ code, span, message }) => ({ code, range: rangeOf(LineIndex.of(text), span, encoding), message }));
       expect(report.kind === 'full' ? report.items.map(shape) : report.kind).toEqual(expected);
     }
+    const late = editor.memory();
+    // How late an answer comes depends on the machine, so it is told and not asserted.
+    console.log(`${edits.length} edits: slowest answer ${slowest.toFixed(0)} ms, memory ${early.toFixed(0)} MB after 200 edits, ${late.toFixed(0)} MB at the end`);
+    expect(late - early).toBeLessThan(mostGrowth);
   } finally {
     await editor.stop();
   }
