@@ -18,7 +18,7 @@ export function readLiteral(value: Rational, text: string): Literal {
   const known = cache.get(text);
   if (known) return known;
   const tolerance = toleranceOf(value, text);
-  const literal = roundedPi(value, tolerance) ?? { value, pi: 0, pure: isPure(value), tolerance };
+  const literal = roundedPi(value, tolerance) ?? { value, pi: 0, pure: isPure(value) && !isMeasured(value), tolerance };
   if (cache.size > 5000) cache.clear();
   cache.set(text, literal);
   return literal;
@@ -93,11 +93,19 @@ function isPure(value: Rational): boolean {
   return size.den <= 16n && size.num <= 64n;
 }
 
-/** Integers and short decimals such as 0.001 and 3.6 are meant exactly; 32.2 and 0.3048 may be rounded. */
+/** A decimal such as 10.2 or 6.2 is no fraction that anybody means: it was measured, or looked up. 3.6 converts. */
+function isMeasured(value: Rational): boolean {
+  return value.den !== 1n && value.num > 16n && !value.equals(kilo);
+}
+
+const kilo = Rational.of(18, 5);
+
+/** Short numbers such as 0.001, 3.6 and 1000 are meant exactly; 32.2, 0.3048 and 3412 may be rounded. */
 function toleranceOf(value: Rational, text: string): number {
   const mantissa = /^[\d_]*\.?[\d_]*/.exec(text)?.[0].replaceAll('_', '') ?? '';
   const digits = mantissa.replace('.', '').replace(/^0+/, '');
   const significant = digits.replace(/0+$/, '');
-  if (!mantissa.includes('.') || significant.length < 2 || value.isZero) return 0;
-  return 0.5 / Number(digits);
+  if (value.isZero) return 0;
+  if (!/\.\d/.test(mantissa)) return significant.length < 3 ? 0 : 0.5 / Number(significant);
+  return significant.length < 2 ? 0 : 0.5 / Number(digits);
 }

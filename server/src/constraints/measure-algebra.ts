@@ -24,7 +24,7 @@ export function raiseMeasure(a: Measure | undefined, power: Rational): Measure |
   if (!a || power.isOne) return a;
   const size = power.toNumber();
   const factors = a.factors.map((factor) => ({ ...factor, power: (factor.power ?? 1) * size }));
-  const readings = a.readings.map((reading) => ({ scale: reading.scale.pow(power), weight: 0, zero: 0, nature: 'ratio' as const }));
+  const readings = a.readings.map((reading) => ({ scale: reading.scale.pow(power), weight: 0, zero: 0, nature: reading.nature === 'shifted' ? reading.nature : 'ratio' as const }));
   return assemble(readings, factors, a.radian * size, a.cycle * size, a.degrees * size);
 }
 
@@ -100,6 +100,8 @@ function productReading(a: Reading, b: Reading, degreesA: number, degreesB: numb
   const plain: Reading = { scale, weight: 0, zero: 0, nature: 'ratio' };
   const point = a.weight !== 0 ? a : b.weight !== 0 ? b : undefined;
   if (!point || point.nature === 'gauge') return plain;
+  // `t/(243.12 + t)`: a number counted in degrees stands beside the temperature, so the formula is one for that scale.
+  if ((point === a ? b : a).nature === 'shifted') return plain;
   const other = point === a ? degreesB : degreesA;
   return other < 0 && !point.pending ? plain : { scale, weight: point.weight, zero: 0, nature: 'point', pending: true };
 }
@@ -130,7 +132,8 @@ function shifted(reading: Reading, size: number): Reading[] {
   const known = knownZeros.find((candidate) => Math.abs(candidate - zero) < zeroTolerance);
   if (known === 0) results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'absolute' });
   else if (known !== undefined) results.push({ scale: reading.scale, weight: 1, zero: known, nature: 'point' });
-  if (reading.weight === 1 || reading.nature === 'absolute') results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'shifted' });
+  // `T - 40` and `40 - T`: the number may be a point of the same scale.
+  if (Math.abs(reading.weight) === 1 || reading.nature === 'absolute') results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'shifted' });
   return results;
 }
 

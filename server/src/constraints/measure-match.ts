@@ -4,6 +4,8 @@ import { type Literal, literalNumber } from './literal.ts';
 import type { Factor, Measure, Reading } from './measure.ts';
 
 const close = 1e-9;
+/** One number that converts may be a little off: 8.76 for a thousand hours of a year, 2545 for 2544.43. */
+const alone = 1e-3;
 /** Keeps the search to some thousand products. */
 const mostPerSide = 5;
 const tau = 2 * Math.PI;
@@ -57,7 +59,7 @@ function convertedPairs(a: Measure, left: Reading, b: Measure, right: Reading, t
   const slack = close + 3 * (left.scale.uncertainty + right.scale.uncertainty);
   for (const product of products(a.factors, b.factors)) {
     for (const turn of turns) {
-      if (Math.abs((ratio * turn) / product.size - 1) > slack + product.tolerance) continue;
+      if (Math.abs((ratio * turn) / product.size - 1) > Math.max(slack + product.tolerance, product.numbers === 1 ? alone : 0)) continue;
       const scale = commonScale(left, right, product, turn);
       return [[{ ...left, scale }, { ...right, scale }]];
     }
@@ -79,18 +81,20 @@ interface Product {
   readonly left: number;
   readonly right: number;
   readonly tolerance: number;
+  /** How many literals it is made of. */
+  readonly numbers: number;
 }
 
 /** Products of every choice of conversions among the literal factors; the empty choice first. */
 function products(left: readonly Factor[], right: readonly Factor[]): readonly Product[] {
-  let found: Product[] = [{ size: 1, left: 1, right: 1, tolerance: 0 }];
+  let found: Product[] = [{ size: 1, left: 1, right: 1, tolerance: 0, numbers: 0 }];
   const extend = (factor: Factor, side: 'left' | 'right'): void => {
     const before = found;
     for (const plain of partsOf(factor.literal)) {
       const part = plain ** (factor.power ?? 1);
       const more = before.map((each) => {
         const [l, r] = side === 'left' ? [each.left * part, each.right] : [each.left, each.right * part];
-        return { size: l / r, left: l, right: r, tolerance: each.tolerance + factor.literal.tolerance * Math.abs(factor.power ?? 1) };
+        return { size: l / r, left: l, right: r, tolerance: each.tolerance + factor.literal.tolerance * Math.abs(factor.power ?? 1), numbers: each.numbers + 1 };
       });
       found = found.concat(more);
     }
@@ -101,6 +105,15 @@ function products(left: readonly Factor[], right: readonly Factor[]): readonly P
 }
 
 const parts = new WeakMap<Literal, readonly number[]>();
+/** A day and a year in hours, a year in days, of which only part is worked. */
+const duties: readonly (readonly [least: number, most: number, whole: number])[] = [[2, 23, 24], [150, 366, 365.25], [1000, 8784, 8766]];
+
+/** `P*6000` in kWh/a: the number counts hours in a year. */
+function dutyOf(plain: number): readonly number[] {
+  if (!Number.isInteger(plain)) return [];
+  return duties.flatMap(([least, most, whole]) => (plain >= least && plain <= most ? [whole] : []));
+}
+
 /** Conversions that engineers fold into one number with a pure one: 120 is 2 times 60, 20 is 2 times 10. */
 const foldable = [10, 100, 1000, 1e4, 1e5, 1e6, 60, 3600, 86400];
 
@@ -111,7 +124,7 @@ function partsOf(literal: Literal): readonly number[] {
     const size = literalNumber(literal);
     const plain = literal.value.toNumber();
     const inner = literal.pure ? [] : foldable.flatMap((each) => [each, 1 / each]).filter((each) => literal.value.num !== 0n && isSmall(plain / each) && Math.abs(size / each - 1) > close);
-    found = [size, ...inner];
+    found = [size, ...inner, ...(literal.pi === 0 ? dutyOf(plain) : [])];
     parts.set(literal, found);
   }
   return found;

@@ -2,6 +2,7 @@
 import type { Constraint } from '../constraints/problem.ts';
 import type { Measure, Reading } from '../constraints/measure.ts';
 import { isPending, zeroTolerance } from '../constraints/measure-algebra.ts';
+import { literalNumber } from '../constraints/literal.ts';
 import { matchScales, missingFactor } from '../constraints/measure-match.ts';
 import type { Value } from '../constraints/value.ts';
 import { Dimension } from '../quantities/dimension.ts';
@@ -12,6 +13,10 @@ type Same = Extract<Constraint, { kind: 'same' }>;
 
 const temperature = Dimension.base('Θ');
 const velocity = Dimension.base('L').div(Dimension.base('T'));
+const specificEnergy = velocity.mul(velocity);
+const molarEnergy = specificEnergy.mul(Dimension.base('M')).div(Dimension.base('N'));
+/** Units that lie closer are one to an engineer: a year of 365 days, the acre inch per hour and the cubic foot per second. */
+const near = 0.01;
 
 /** The fault of a constraint whose dimensions agree; undefined where the units agree too or are not known. */
 export function scaleFault(constraint: Same, elimination: Elimination): Fault | undefined {
@@ -20,9 +25,10 @@ export function scaleFault(constraint: Same, elimination: Elimination): Fault | 
   if (!left || !right || !sameOpenTerms(constraint)) return undefined;
   const additive = constraint.reason.kind === 'sum';
   const dimension = elimination.reduce(constraint.left.form ?? constant).dimension;
-  if (!additive && isPending(left) && dimension !== temperature) return pendingFault(constraint, constraint.left);
+  if (!additive && isPending(left) && dimension !== temperature && !isEnthalpy(dimension)) return pendingFault(constraint, constraint.left);
+  const toNote = constraint.reason.kind === 'target' || constraint.reason.kind === 'result';
   const pairs = matchScales(left, right);
-  if (pairs.length === 0) return mismatch(constraint, left, right);
+  if (pairs.length === 0) return dimension.isOne && toNote && countsUnit(left) ? undefined : mismatch(constraint, left, right);
   if (dimension === velocity && turnsWithoutPi(left, right)) return { kind: 'scale', constraint, ratio: 2 * Math.PI, turns: 2 * Math.PI, zeros: false };
   if (additive || pairs.some(([a, b]) => sameZero(a, b))) return undefined;
   const weight = Math.max(...left.readings.map((reading) => reading.weight));
@@ -30,7 +36,20 @@ export function scaleFault(constraint: Same, elimination: Elimination): Fault | 
   return { kind: 'scale', constraint, ratio: 1, turns: 1, zeros: true };
 }
 
+/** `S = 50*(v - v0)/(v50 - v0)  # [g/kg]`: a number of that size that converts nothing is itself counted in the unit. */
+function countsUnit(measure: Measure): boolean {
+  return measure.readings.every((reading) => reading.scale.isOne) && measure.factors.some(({ literal }) => {
+    const size = Math.abs(literalNumber(literal));
+    return literal.pi === 0 && size > 1 && (size >= 10 || !literal.pure) && !Number.isInteger(Math.log10(size));
+  });
+}
+
 const constant = { dimension: Dimension.one, terms: [] };
+
+/** `h = cp*t` in °C: a specific enthalpy has a zero of its own, and 0 °C is a usual one. */
+function isEnthalpy(dimension: Dimension): boolean {
+  return dimension === specificEnergy || dimension === molarEnergy;
+}
 
 function pendingFault(constraint: Same, value: Value): Fault {
   return { kind: 'point', constraint: { kind: 'point', anchor: constraint.anchor, span: constraint.span, value, use: 'product' } };
@@ -38,7 +57,7 @@ function pendingFault(constraint: Same, value: Value): Fault {
 
 function mismatch(constraint: Same, left: Measure, right: Measure): Fault | undefined {
   const missing = missingFactor(left, right);
-  if (!missing || (Math.abs(missing.ratio - 1) < 1e-9 && missing.turns === 1)) return undefined;
+  if (!missing || (Math.abs(missing.ratio - 1) < near && missing.turns === 1)) return undefined;
   return { kind: 'scale', constraint, ratio: missing.ratio, turns: missing.turns, zeros: false };
 }
 
@@ -73,5 +92,12 @@ function sameZero(a: Reading, b: Reading): boolean {
   if (a.nature === 'gauge' || b.nature === 'gauge') return true;
   if (a.pending || b.pending || (a.weight === 0 && b.weight === 0)) return true;
   if (a.weight === 0 || b.weight === 0) return (a.weight === 0 ? a : b).nature !== 'absolute' && (a.weight === 0 ? a : b).nature !== 'shifted';
+  if (isScaledPoint(a, b)) return true;
   return Math.abs(a.weight - b.weight) < 1e-6 && Math.abs(a.zero - b.zero) < zeroTolerance;
+}
+
+/** `0.9*t_gas` in °C: an estimate in the same unit, and no conversion. */
+function isScaledPoint(a: Reading, b: Reading): boolean {
+  const distance = Math.abs(a.weight - b.weight);
+  return distance > 1e-6 && distance < 0.4 && (a.weight === 1 || b.weight === 1) && Math.abs(a.zero / a.weight - b.zero / b.weight) < zeroTolerance;
 }
