@@ -237,7 +237,7 @@ function join(before: Bindings, ends: readonly Bindings[], passing = false, chos
 
 function joinedValue(values: readonly Value[], chosen: boolean): Value {
   const telling = values.filter((value) => !value.fits && value.version?.origin !== 'constant');
-  const first = telling[0] ?? values.find((value) => !value.fits) ?? values[0];
+  const first = telling.find((value) => !value.blank) ?? telling[0] ?? values.find((value) => !value.fits) ?? values[0];
   if (!first) return { expr: undefined, form: undefined, from: [] };
   const alike = telling.every((value) => value === first || (value.form && first.form && sameForm(value.form, first.form) && !value.items));
   if (!alike && chosen) {

@@ -31,8 +31,9 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
   }
   const noted = notedValue(path, note, context.anchor, target, namesDifference(path, note) || isDifference(value));
   checkTarget(context, path, target, value, noted, note);
-  context.bindings.set(path, noted);
-  context.sightings?.set(target, noted);
+  const held: Value = value.fits && !value.literal ? { ...noted, blank: true } : noted;
+  context.bindings.set(path, held);
+  context.sightings?.set(target, held);
 }
 
 /** A new version of a symbol without a note. A bare number becomes a constant whose unit its uses decide. */
@@ -73,7 +74,7 @@ export function namesDifference(path: string, note: NoteInForce): boolean {
 export function checkTarget(context: Context, path: string, target: Span, value: Value, noted: Value, note: NoteInForce): void {
   const sure = value.form === noted.form;
   if (value.misuse && (sure || !value.tainted)) return reportMisuse(context, value, sure);
-  if (!value.form || value.fits || value.literal) return;
+  if (!value.form || value.fits || value.blank || value.literal) return;
   agreeWithNote(context, value, noted, value.expr ?? target, { kind: 'target', path, note });
 }
 

@@ -29,6 +29,8 @@ export interface Value {
   readonly split?: readonly [Value, Value];
   /** A literal other than 1 multiplies it, even if a pure one. */
   readonly numbered?: boolean;
+  /** Holds nothing yet but zeros or NaN, whatever its note says: a copy of it fits any unit too. */
+  readonly blank?: boolean;
   /** A tuple's positions. */
   readonly items?: readonly Value[];
   /** What a member is, for what is only run over: `zip`, `enumerate`. */

@@ -3,7 +3,7 @@ import type { ReadOptions, Vocabulary } from '../quantities/unit-result.ts';
 import { besideUnit } from './describe.ts';
 import { type Found, type Looked, lookForUnits } from './find-unit.ts';
 import type { Names } from './names.ts';
-import { isCount, type Surroundings } from './not-units.ts';
+import { isLength, type Surroundings } from './not-units.ts';
 import { type Piece, spanIn } from './piece.ts';
 import type { ChunkNotes, Directive, Note, NoteForm, NoteProblem, NoteSettings, NoteTarget } from './types.ts';
 
@@ -25,7 +25,7 @@ export class Collector {
   /** Looks for brackets in a piece; failed units count as problems where a note would count. */
   look(piece: Piece, place: Surroundings['place'], options: ReadOptions, counts: boolean, citations = false): Looked {
     const looked = lookForUnits(piece, { place, language: this.language, citations }, this.settings.parentheses, options);
-    const lengths = new Set(looked.brackets.filter((each) => isCount(piece.text.slice(each.span.start, each.span.end), this.names.occurs)));
+    const lengths = new Set(looked.brackets.filter((each) => isLength(piece.text.slice(each.span.start, each.span.end), this.names)));
     if (lengths.size > 0) this.leave(piece, [...lengths]);
     for (const each of looked.unread) this.unread(piece, each.span, each.text);
     if (counts) for (const each of looked.problems) this.problems.push({ span: spanIn(piece, each.span.start, each.span.end), text: each.text, fault: each.fault });

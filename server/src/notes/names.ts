@@ -3,6 +3,7 @@ import type { Chunk, Comment } from '../program/nodes.ts';
 /** The identifiers that a chunk's code uses, outside of comments and documentation; gathered at the first question. */
 export class Names {
   private found: ReadonlySet<string> | undefined;
+  private lengths: boolean | undefined;
 
   constructor(private readonly chunk: Chunk) {}
 
@@ -11,6 +12,15 @@ export class Names {
     this.found ??= gather(this.chunk);
     return this.found.has(name.slice(name.lastIndexOf('.') + 1).replace(/\[.*$/, ''));
   };
+
+  /** Whether brackets in the comments give lengths, `[nl]` and `[nl+1]` of a count `nl` in the code: then `[1]` is one too. */
+  get givesLengths(): boolean {
+    this.lengths ??= this.chunk.comments.some(({ text }) => {
+      const name = /\[\s*(n[a-z]{1,4})(?:\s*\+\s*\d+)?\s*\]/.exec(text)?.[1];
+      return name !== undefined && this.occurs(name);
+    });
+    return this.lengths;
+  }
 
   /** Nothing but the comment's marker stands before it on its line. */
   standsAlone(comment: Comment): boolean {

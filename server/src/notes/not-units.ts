@@ -38,9 +38,9 @@ export function isNoUnit(text: string, bracket: Bracketed, around: Surroundings)
   return followsCode(text, bracket.start);
 }
 
-/** `[nl]` where the code has a count of that name: the length of a vector. */
-export function isCount(inner: string, occurs: (name: string) => boolean): boolean {
-  return /^n[a-z]$/.test(inner) && occurs(inner);
+/** `[nl]` where the code has a count of that name, and `[1]` beside such: the length of a vector. */
+export function isLength(inner: string, names: { readonly occurs: (name: string) => boolean; readonly givesLengths: boolean }): boolean {
+  return inner === '1' ? names.givesLengths : /^n[a-z]$/.test(inner) && names.occurs(inner);
 }
 
 /** True where a bracket stands in a line of code: behind an operator, an opening bracket, a keyword. */

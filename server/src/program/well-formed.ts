@@ -86,7 +86,7 @@ function returnsOutputs(node: Readonly<Record<string, unknown>>, key: string): b
 
 /** Documentation over several comment lines has its marks blanked out. */
 function isBlanked(found: string, expected: string): boolean {
-  return found.length === expected.length && [...found].every((character, at) => character === expected[at] || expected[at] === ' ');
+  return found.length === expected.length && found.split('').every((character, at) => character === expected[at] || expected[at] === ' ');
 }
 
 function isNode(value: unknown): value is Span & Readonly<Record<string, unknown>> {

@@ -29,6 +29,8 @@ describe('trailing comments', () => {
     ['x = size(a); % [n x 3]', 'none'],
     ['x = zeros(nl, 1);  % [nl]', 'none'],
     ['x = zeros(nl + 1, 1);  % [nl+1]', 'none'],
+    ['if nl\n x = ones(nl, 1);  % [nl]\n y = 1;  % [1] all\nend', 'none'],
+    ['if nl\n x = ones(nl, 1);\n y = 1;  % [1] all\nend', 'y 1'],
     ['unit = 1e-3;  % all lengths in mm', 'none'],
     ['unit = 1e-3;  % [m/mm]', 'unit m/mm'],
     ["disp('x [m]')  % [s]", 'none'],
