@@ -20,8 +20,8 @@ export function lex(text: string): Lexed {
 
 const word = /[\p{L}_][\p{L}\p{N}_]*/uy;
 const number = /(?:0[xX][\da-fA-F]+|0[bB][01]+)(?:[us](?:8|16|32|64))?|(?:\d[\d_]*(?:\.(?![*/\\^'])\d*)?|\.\d+)(?:[eEdD][+-]?\d+)?[ijIJ]?(?![\p{L}\p{N}_])|\d+(?:\.(?![*/\\^'])\d*)?/uy;
-const operator = /\.\*\*|\.\^|\.\*|\.\/|\.\\|\.'|==|~=|!=|<=|>=|&&|\|\||\+=|-=|\*=|\/=|\^=|\|=|&=|\+\+|--|\*\*|[-+*/\\^<>=~!&|.:@?,;()[\]{}$]/y;
-const startsOperand = /^(?:[([{@]|[~!])$/;
+const operator = /\.[*/^\\]=(?!=)|\.\*\*|\.\^|\.\*|\.\/|\.\\|\.'|==|~=|!=|<=|>=|&&|\|\||\+=|-=|\*=|\/=|\^=|\|=|&=|\+\+|--|\*\*|[-+*/\\^<>=~!&|.:@?,;()[\]{}$]/y;
+const startsOperand = new Set(['(', '[', '{', '@', '~', '!']);
 const alone = /[ \t]*(?:\([^)\n]*\))?[ \t]*(?:$|[%#\r\n])/y;
 
 interface Bracket {
@@ -49,16 +49,17 @@ class Lexer implements Lexed {
   run(): void {
     const { text } = this;
     while (this.at < text.length) {
-      const character = text[this.at] as string;
-      if (character === '\n' || character === '\r') this.lineBreak();
-      else if (character === '%' || character === '#') this.comment();
-      else if (/\s/.test(character) || character === '\uFEFF') {
+      const code = text.charCodeAt(this.at);
+      if (code === 32 || code === 9) {
         this.spaced = true;
         this.at++;
-      } else if (text.startsWith('...', this.at)) this.continuation();
-      else if (character === '"' || character === "'") this.quote(character);
-      else if (this.isDigit(this.at) || (character === '.' && this.isDigit(this.at + 1) && !this.follows())) this.take(number, 'number');
-      else this.wordOrMark(character);
+      } else if (isLetter(code)) this.word(wordEnd(text, this.at));
+      else if (code === 10 || code === 13) this.lineBreak();
+      else if (code === 37 || code === 35) this.comment();
+      else if (code === 39 || code === 34) this.quote(text[this.at] as string);
+      else if (isDigit(code) || (code === 46 && isDigit(text.charCodeAt(this.at + 1)) && !this.follows())) this.take(number, 'number');
+      else if (code === 46 && text.startsWith('...', this.at)) this.continuation();
+      else this.wordOrMark(text[this.at] as string);
     }
     if (this.brackets.length > 0) this.unclosed();
   }
@@ -72,11 +73,6 @@ class Lexer implements Lexed {
     return mark === '[' || mark === '{';
   }
 
-  private isDigit(at: number): boolean {
-    const code = this.text.charCodeAt(at);
-    return code >= 48 && code <= 57;
-  }
-
   /** Whether the last token ends an operand and nothing stands between it and here. */
   private follows(): boolean {
     const last = this.tokens.at(-1);
@@ -84,7 +80,7 @@ class Lexer implements Lexed {
   }
 
   private push(kind: TokenKind, start: number, end: number, text = this.text.slice(start, end), closesParams = false): void {
-    this.tokens.push({ kind, text, start, end, ...(closesParams ? { closesParams: true } : {}) });
+    this.tokens.push(closesParams ? { kind, text, start, end, closesParams } : { kind, text, start, end });
     this.at = Math.max(end, this.at);
     this.spaced = false;
     this.startsStatement = kind === 'break' || (kind === 'keyword' && beforeStatement.has(text));
@@ -92,7 +88,7 @@ class Lexer implements Lexed {
 
   private take(pattern: RegExp, kind: TokenKind): void {
     pattern.lastIndex = this.at;
-    const end = pattern.exec(this.text) ? pattern.lastIndex : this.at + 1;
+    const end = pattern.test(this.text) ? pattern.lastIndex : this.at + 1;
     this.separate();
     this.push(kind, this.at, end);
   }
@@ -173,11 +169,16 @@ class Lexer implements Lexed {
   }
 
   private wordOrMark(character: string): void {
-    word.lastIndex = this.at;
-    if (word.exec(this.text)) return this.word(word.lastIndex);
+    if (/\s/.test(character) || character === '\uFEFF') {
+      this.spaced = true;
+      this.at++;
+      return;
+    }
+    const end = wordEnd(this.text, this.at);
+    if (end > this.at) return this.word(end);
     if (character === '!' && this.startsStatement && this.text[this.at + 1] !== '=') return this.push('command', this.at, commandEnd(this.text, this.at));
     operator.lastIndex = this.at;
-    const mark = operator.exec(this.text)?.[0] ?? character;
+    const mark = operator.test(this.text) ? this.text.slice(this.at, operator.lastIndex) : character;
     this.mark(mark);
   }
 
@@ -207,7 +208,7 @@ class Lexer implements Lexed {
     const start = this.at;
     const end = start + mark.length;
     if (this.brackets.length === 0 && (mark === ';' || mark === ',')) return this.push('break', start, end);
-    if (startsOperand.test(mark) || (/^[-+]$/.test(mark) && !/\s/.test(this.text[end] ?? ' '))) this.separate();
+    if (this.spaced && this.inMatrix && (startsOperand.has(mark) || ((mark === '-' || mark === '+') && !/\s/.test(this.text[end] ?? ' ')))) this.separate();
     if (mark === '(' || mark === '[' || mark === '{') {
       const last = this.tokens.at(-1);
       this.brackets.push({ mark, start, params: mark === '(' && last?.kind === 'op' && last.text === '@' });
@@ -217,6 +218,23 @@ class Lexer implements Lexed {
     if (closed && closed.mark + mark !== '()' && closed.mark + mark !== '[]' && closed.mark + mark !== '{}') this.problems.push({ start, end, message: `${closed.mark} is closed by ${mark}` });
     this.push('op', start, end, mark, closed?.params === true);
   }
+}
+
+function isLetter(code: number): boolean {
+  return (code >= 97 && code <= 122) || (code >= 65 && code <= 90) || code === 95;
+}
+
+function isDigit(code: number): boolean {
+  return code >= 48 && code <= 57;
+}
+
+/** Where the word at an offset ends; the offset itself where there is none. */
+function wordEnd(text: string, at: number): number {
+  let end = at;
+  for (let code = text.charCodeAt(end); isLetter(code) || (isDigit(code) && end > at); code = text.charCodeAt(end)) end++;
+  if (!(text.charCodeAt(end) > 127)) return end;
+  word.lastIndex = at;
+  return word.test(text) ? word.lastIndex : end;
 }
 
 const closers = new Set([')', ']', '}', "'", ".'"]);

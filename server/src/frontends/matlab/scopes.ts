@@ -9,7 +9,7 @@ export interface Scopes {
   readonly functions: ReadonlyMap<number, ReadonlySet<string>>;
 }
 
-const assignments = new Set(['=', '+=', '-=', '*=', '/=', '^=', '|=', '&=', '++', '--']);
+const assignments = new Set(['=', '+=', '-=', '*=', '/=', '^=', '.*=', './=', '.^=', '|=', '&=', '++', '--']);
 
 /** `functionsEnd`: an `end` closes each function of the file. */
 export function scopesOf(tokens: readonly Token[], functionsEnd: boolean): Scopes {

@@ -88,7 +88,7 @@ function command(reader: Reader): Stmt {
   return { kind: 'leave', flow: 'none', values: [], ...baseOf(reader, token.start) };
 }
 
-const augmented: Readonly<Record<string, BinaryExpr['op']>> = { '+=': '+', '-=': '-', '*=': '*', '/=': '/', '^=': '**' };
+const augmented: Readonly<Record<string, BinaryExpr['op']>> = { '+=': '+', '-=': '-', '*=': '*', '/=': '/', '^=': '**', '.*=': '*', './=': '/', '.^=': '**' };
 
 function simple(reader: Reader, first: Token): Stmt | undefined {
   if (first.kind === 'op' && first.text === '[' && assignsTo(reader)) return severalTargets(reader, first);

@@ -56,9 +56,10 @@ export function blockCommentMark(text: string, lineStart: number): '{' | '}' | u
 
 /** The offset of a line's end. */
 export function lineEnd(text: string, from: number): number {
-  let at = from;
-  while (at < text.length && text.charCodeAt(at) !== 10 && text.charCodeAt(at) !== 13) at++;
-  return at;
+  const feed = text.indexOf('\n', from);
+  const end = feed < 0 ? text.length : feed;
+  const line = text.slice(from, end).indexOf('\r');
+  return line < 0 ? end : from + line;
 }
 
 /** The offset behind a line break that starts at `at`. */
