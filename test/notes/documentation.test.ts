@@ -163,7 +163,7 @@ describe('classes', () => {
     const property = (decorator: string): string => `class Paint:\n    ${decorator}\n    def rho(self):\n        """Density of the paint [kg/m^3]."""\n        return 1240.0`;
     expect(unitsOf(property('@property'))).toBe('rho -> kg/m^3');
     expect(unitsOf(property('@functools.cached_property'))).toBe('rho -> kg/m^3');
-    expect(unitsOf(property('@staticmethod'))).toBe('none');
+    expect(unitsOf(property('@staticmethod'))).toBe('rho -> kg/m^3');
   });
 
   test('nested functions and methods have their own', () => {
@@ -182,4 +182,26 @@ test('words that introduce a unit are outside of its span', () => {
 
 test('line breaks of other systems', () => {
   expect(spansOf(parameters('V : float', '    Velocity [m/s]', 'D : float', '    Bore in mm').replace(/\n/g, '\r\n'))).toEqual(['m/s', 'mm']);
+});
+
+describe('the first sentence of a function', () => {
+  const fn = (head: string, doc: string): string => unitsOf(`def ${head}:\n    """${doc}"""\n    return x\n`);
+
+  test.each([
+    ['f(Q)', 'Time to dose a batch [s]', 'f -> s'],
+    ['f(Q)', 'Head of the pump [m] at flow Q [m3/s]', 'f -> m; f(Q) m3/s'],
+    ['f(Q)', 'Head of the pump [m] at flow Q [m3/s].', 'f -> m; f(Q) m3/s'],
+    ['f(t)', 'feed [m^3/s] at time t [s]', 'f -> m^3/s; f(t) s'],
+    ['f(self)', 'Rated torque [N·m].', 'f -> N·m'],
+    ['f(p)', 'Saturation temperature at pressure p [kPa]', 'f(p) kPa'],
+  ])('%s: %s', (head, doc, expected) => {
+    expect(fn(head, doc).split('; ').sort().join('; ')).toBe(expected);
+  });
+
+  test.each([
+    ['f(p)', 'Saturation temperature at a pressure in [kPa]'], ['f(x)', 'Convert the pressure in [psi] to [kPa]'], ['f(x)', 'Plot the level [m] of a run'], ['f(x)', 'Levels [m] and flows [m3/s]'],
+    ['f(x)', 'See [1].'], ['f(x)', 'The work of a tank.\n\n    Levels are counted in [m].'], ['f(x)', 'Density.\n\n    Returns\n    -------\n    float'], ['f(level)', 'Volume below the level'],
+  ])('%s: %s says nothing of it', (head, doc) => {
+    expect(fn(head, doc)).toBe('none');
+  });
 });

@@ -17,7 +17,7 @@ export function bareUnit(piece: Piece, number: boolean, taken: (name: string) =>
     const result = read(words, options);
     if (!result || (isLetter(words) && taken(words))) continue;
     const behind = text.slice(words.length);
-    if (!(end === text.length ? wholeCounts(words, result.beyondDoubt, number) : leadingCounts(words, behind, result.beyondDoubt))) continue;
+    if (!(end === text.length ? wholeCounts(words, result.beyondDoubt, number) : leadingCounts(words, behind, result.beyondDoubt, number))) continue;
     return { unit: result.unit, hints: result.hints, span: { start: 0, end: words.length }, outer: { start: 0, end: words.length }, by: 'bare' };
   }
   return undefined;
@@ -34,7 +34,7 @@ function endsOf(text: string): readonly number[] {
 }
 
 function read(words: string, options: ReadOptions) {
-  if (words === '' || words.length > 50 || /^(?:[\d.[(]|in\s)/i.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
+  if (words === '' || words.length > 50 || /^(?:(?!1\/\p{L})[\d.[(]|in\s(?!(?:lbf?|wg|H2O|Hg)$))/iu.test(words) || /[=<>?!"']|\.\./.test(words)) return undefined;
   if (numbersOfNoUnit.has(words.toLowerCase()) || !mayStandAlone(words) || derived.test(words) || computed.test(words) || (/^[A-Za-z]\d$/.test(words) && !/^(?:m[234]|s2)$/.test(words))) return undefined;
   const result = parseUnit(words.replace(/\s+/g, ' '), options);
   return result.ok ? result : undefined;
@@ -45,21 +45,25 @@ const numbersOfNoUnit = new Set(['1', '--', '---', '–', '—', 'none', 'n/a', 
 /** `mol fraction`: a number named after a unit. */
 const derived = /\s(?:fractions?|ratios?|numbers?|balance|chart)\b/i;
 /** `bits / 8`, `bits in n**2`, `U+03A7`: sums and codes. */
-const computed = /\/\s*\d|\sin\s|^U\+|^dim\s+[a-z]/;
+const computed = /(?<!\^\s*\(\s*\d+)\/\s*\d|\sin\s|^U\+|^dim\s+[a-z]/;
 /** Words that are units and more often something else. */
 const ordinary = new Set(['min', 'in', 'mil', 'met', 'var', 'point', 'line', 'part', 'parts', 'turn', 'all', 'each', 'cycle', 'link', 'chain', 'count', 'counts', 'item', 'items', 'max', 'era', 'rev', 'drop', 'hand', 'cup', 'are', 'second', 'dash', 'grade', 'stone', 'pole']);
 /** One or two letters that stand for a unit beside any value; common practice. */
-const plain = new Set(['m', 's', 'K', 'W', 'N', 'J', 'Pa', 'Hz', 'kg', 'ft', '%', '°', '-', 'bar', 'day', 'days', 'hours', 'minutes', 'seconds', 'metres', 'meters', 'degrees', 'radians', 'volts', 'watts', 'feet', 'inches', 'years', 'dimensionless', 'unitless']);
+const plain = new Set(['m', 's', 'K', 'W', 'N', 'J', 'Pa', 'Hz', 'kg', 'ft', 'hp', 'ksi', 'psf', 'fpm', 'kip', 'kips', 'lbm', 'mph', 'gal', 'gph', 'gpd', 'MGD', 'pcf', 'plf', 'klf', 'slugs', '%', '°', '-', 'bar', 'day', 'days', 'hours', 'minutes', 'seconds', 'metres', 'meters', 'degrees', 'radians', 'volts', 'watts', 'feet', 'inches', 'years', 'dimensionless', 'unitless']);
 
 function wholeCounts(words: string, beyondDoubt: boolean, number: boolean): boolean {
+  if (words === 'in') return number;
   if (ordinary.has(words.toLowerCase())) return false;
   return beyondDoubt || plain.has(words) || number;
 }
 
 /** A unit in front of a description: behind a comma a symbol is enough, before plain words it needs the look of a unit. */
-function leadingCounts(words: string, behind: string, beyondDoubt: boolean): boolean {
+function leadingCounts(words: string, behind: string, beyondDoubt: boolean, number: boolean): boolean {
+  if (words === 'in') return number && /^(?:,\s+[a-z]{3,}|\s{2,}(?!(?:the|an?|this|that|all|each|order)\b)\S)/.test(behind);
   if (ordinary.has(words.toLowerCase()) || /\sof\s/.test(words) || /^\s*(?:to|into|->|→|=>)\s/.test(behind)) return false;
   const described = /^\s*[,;(]\s*\(?[\p{L}]{3,}/u.test(behind) || /^\s+[-–—(]+\s*[\p{L}]{3,}/u.test(behind);
+  // A column of units, then a column of remarks.
+  if (/^\s{2,}[\p{L}\d(]/u.test(behind) && (beyondDoubt || plain.has(words))) return true;
   if (described) return beyondDoubt || plain.has(words) || (/^[A-Za-z]{1,2}$/.test(words) && behind.startsWith(','));
   if (/^\s*:/.test(behind)) return beyondDoubt && structured.test(words);
   if (!beyondDoubt || /^\s*(?:(?:is|are|was|of|for|and|or|per)\b|[=+*/<>])/i.test(behind) || !/^\s+[([{\p{L}@]/u.test(behind)) return false;

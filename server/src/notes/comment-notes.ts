@@ -90,7 +90,7 @@ function unitOf(out: Collector, piece: Piece, looked: Looked, value: Expr | unde
     return chosen;
   }
   if (looked.problems.length > 0 || (value && holdsNoNumber(value))) return undefined;
-  const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && isNumber(value), out.names.occurs, options) : undefined;
+  const bare = out.settings.bare && value?.kind !== 'record' ? bareUnit(piece, value !== undefined && (isNumber(value) || (piece.text.trim() === 'in' && value.kind === 'binary')), out.names.occurs, options) : undefined;
   return bare ?? looked.parentheses[0] ?? (namesUnit.test(symbol) ? undefined : unitInWords(piece, out.settings.bare, out.names.occurs, options));
 }
 

@@ -3,7 +3,7 @@ import type { ClassStmt, DocText, Expr, FunctionStmt } from '../program/nodes.ts
 import type { Collector } from './collector.ts';
 import { type DocEntry, type Documentation, plainEntries, readDocumentation } from './doc-entries.ts';
 import { unitOfEntry } from './doc-unit.ts';
-import { choose, lookForUnits } from './find-unit.ts';
+import { choose, type Found, lookForUnits } from './find-unit.ts';
 import type { Line } from './doc-lines.ts';
 import { isConverted } from './converted.ts';
 import { returnedRecords } from './returned-records.ts';
@@ -20,6 +20,7 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
     return param ? [{ kind: 'parameter', owner: fn, param }] : outputTargets(fn, name);
   }, fn);
   if (isProperty(fn)) propertyNote(out, fn, doc);
+  else if (!fn.outputs) summaryNotes(out, fn, doc);
   for (const entry of doc.entries) if (entry.role === 'result' && entry.lines && entry.type && isRecord(entry.type.text)) recordNotes(out, fn, doc, entry.lines);
 }
 
@@ -122,6 +123,33 @@ function isProperty(fn: FunctionStmt): boolean {
 
 function lastName(expr: Expr): string {
   return expr.kind === 'name' || expr.kind === 'member' ? expr.name : '';
+}
+
+/**
+ * `"""Head of the pump [m] at flow Q [m3/s]"""`: a unit behind the name of a parameter is its own; the one that is left, before any
+ * word that brings in a condition, is the result's.
+ */
+function summaryNotes(out: Collector, fn: FunctionStmt, doc: Documentation): void {
+  const sentence = { text: /^\s*[^\n]*?(?:[.;](?=\s|$)|(?=\n|$))/.exec(doc.opening.text)?.[0] ?? '', start: doc.opening.start };
+  if (!sentence.text.includes('[') || doc.entries.some((entry) => entry.role === 'result')) return;
+  const { brackets } = out.look(sentence, 'documentation', out.options(fn.name, sentence.text), false, doc.citations);
+  const rest: Found[] = [];
+  for (const found of brackets) {
+    const name = /([\p{L}_][\p{L}\p{N}_]*)\s*$/u.exec(sentence.text.slice(0, found.outer.start))?.[1];
+    const param = fn.params.find((each) => each.name === name);
+    if (!param) rest.push(found);
+    else if (!doc.entries.some((entry) => entry.names.includes(param.name))) out.note({ kind: 'parameter', owner: fn, param }, sentence, found, 'documentation');
+  }
+  const only = rest.length === 1 ? rest[0] : undefined;
+  const before = only && sentence.text.slice(0, only.outer.start);
+  if (only && before && !condition.test(before) && !fn.params.some((each) => nameIn(before, each.name))) out.note({ kind: 'result', owner: fn }, sentence, only, 'documentation');
+}
+
+/** What follows is not the result. */
+const condition = /\b(?:at|for|from|given|with|without|versus|vs|against|by|when|where|if|whether|above|below|than|using|over|under|between|into|per|on|as|until|within|set|sets|plot|plots|print|prints|show|shows|write|writes|takes?|convert|converts|read|reads)\b|[:?=]|->|→/i;
+
+function nameIn(text: string, name: string): boolean {
+  return name.length > 2 && new RegExp(`\\b${name}\\b`, 'i').test(text);
 }
 
 /** `"""Density of the paint [kg/m^3]."""` above a property is its result's unit. */

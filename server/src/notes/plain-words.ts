@@ -1,7 +1,7 @@
 /** Letters alone that count as a unit without a bracket around them. The rest are words, names and codes more often. */
 
 const short = new Set([
-  'm', 's', 'h', 'd', 'g', 'l', 't', 'mm', 'cm', 'dm', 'km', 'nm', 'um', 'kg', 'mg', 'ms', 'us', 'ns', 'ft', 'psi', 'rpm', 'gpm', 'cfm', 'cfs', 'bar', 'deg', 'rad', 'mol', 'ppm', 'ppb', 'ppt', 'sec', 'hr', 'hrs', 'atm', 'clo', 'ohm', 'lb', 'lbs', 'lbf', 'day', 'kt', 'kts', 'oz', 'ha', 'hp', 'msl', 'sr', 'lm', 'lx', 'cd', 'eV',
+  'm', 's', 'h', 'd', 'g', 'l', 't', 'mm', 'cm', 'dm', 'km', 'nm', 'um', 'kg', 'mg', 'ms', 'us', 'ns', 'ft', 'psi', 'ksi', 'psf', 'pcf', 'plf', 'klf', 'lbm', 'fpm', 'mph', 'gal', 'gph', 'gpd', 'MGD', 'kip', 'in', 'rpm', 'gpm', 'cfm', 'cfs', 'bar', 'deg', 'rad', 'mol', 'ppm', 'ppb', 'ppt', 'sec', 'hr', 'hrs', 'atm', 'clo', 'ohm', 'lb', 'lbs', 'lbf', 'day', 'kt', 'kts', 'oz', 'ha', 'hp', 'msl', 'sr', 'lm', 'lx', 'cd', 'eV',
   'K', 'W', 'N', 'J', 'V', 'A', 'C', 'F', 'R', 'L', 'S', 'T', 'H', 'Pa', 'Hz', 'Wh', 'VA', 'MW', 'GW', 'MJ', 'GJ', 'MN', 'MV', 'GN', 'Mg', 'Gg', 'Tg', 'Gy', 'Sv', 'Bq', 'Wb', 'Nm', 'Psi', 'PSI', 'Ohm', 'AU', 'DU', 'BTU', 'Btu', 'MPa', 'GPa', 'MHz', 'GHz', 'Ah', 'RPM', 'GPM', 'CFM', 'PPM', 'MWh', 'GWh', 'Kg', 'KG', 'KW',
 ]);
 
