@@ -127,6 +127,11 @@ describe('groups', () => {
     expect(out).toContain('Reynolds');
     expect(JSON.parse((await box.run('groups mixer.ipynb --format json')).out)).toMatchObject({ relations: [{ file: 'mixer.ipynb', cell: 2, line: 1, rank: 3 }] });
   });
+
+  test('of a relation in a text cell', async () => {
+    box.write('told.ipynb', mixer.replace('# Power', 'Power\\n\\n  P depends on N, D, rho, mu.\\nP depends on luck').replace('# P depends on N, D, rho, mu\\n', ''));
+    expect(JSON.parse((await box.run('groups told.ipynb --format json')).out)).toMatchObject({ relations: [{ cell: 1, line: 3, rank: 3, symbols: [{ name: 'P' }, { name: 'N' }, { name: 'D' }, { name: 'rho' }, { name: 'mu' }] }] });
+  });
 });
 
 test('Octave kernels: script and functions over several cells', async () => {

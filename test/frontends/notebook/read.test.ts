@@ -147,6 +147,17 @@ describe('places', () => {
   });
 });
 
+test('a line of a text cell that states a relation is a comment of the program', () => {
+  const cells = [{ text: 'Losses.\n\n h depends on V, D\nand more depends on V', language: undefined, isProse: true }, { text: 'h = f(V, D)', language: 'python' as const }];
+  const joined = joinCells(cells, 'python');
+  expect(joined.text).toBe('# h depends on V, D\n\nh = f(V, D)');
+  expect(joined.lineName(5)).toBe('cell 1, line 3');
+  expect(joined.toCell({ start: 2, end: 19 })).toEqual({ cell: 0, start: 10, end: 27 });
+  expect(joined.toProgram({ cell: 0, offset: 10 })).toBe(2);
+  expect(joined.toProgram({ cell: 0, offset: 0 })).toBeUndefined();
+  expect(joined.toCellEdits([{ start: 2, end: 3, text: 'x' }])).toBeUndefined();
+});
+
 describe('changes', () => {
   test('go into the strings, and nothing else of the file changes', () => {
     const file = notebookFile(['s = "a\\n"\nx = y', 'md:text', 'z = x']);

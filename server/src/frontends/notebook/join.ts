@@ -8,6 +8,8 @@ export interface CellText {
   readonly text: string;
   /** Undefined for text cells, raw cells, and code in a language that is not read. */
   readonly language: LanguageId | undefined;
+  /** A text cell: a line in it that says `y depends on a, b` of names in the code is read, and nothing else. */
+  readonly isProse?: boolean;
 }
 
 /** A place in a cell; cells count from 0 in the list that was joined, offsets from the start of the cell's text. */
@@ -42,6 +44,9 @@ export interface JoinedCells {
 /** Where a cell stands in the program. */
 interface Part extends Span {
   readonly cell: number;
+  /** Offset in the cell of what stands at `start`; below zero by the comment's marker for a line of a text cell. */
+  readonly from: number;
+  readonly isProse: boolean;
   /** In offsets of the program. */
   readonly blanked: readonly Span[];
 }
@@ -53,41 +58,57 @@ const between = '\n\n';
 export function joinCells(cells: readonly CellText[], language: LanguageId): JoinedCells {
   const parts: Part[] = [];
   let text = '';
-  cells.forEach((each, cell) => {
-    const code = each.language === language ? blankCommands(each.text, language) : undefined;
-    if (!code) return;
+  const add = (cell: number, from: number, put: string, blanked: readonly Span[], isProse = false): void => {
     if (parts.length > 0) text += between;
     const start = text.length;
-    text += code.text;
-    parts.push({ cell, start, end: text.length, blanked: code.spans.map((span) => ({ start: start + span.start, end: start + span.end })) });
+    text += put;
+    parts.push({ cell, from, isProse, start, end: text.length, blanked: blanked.map((span) => ({ start: start + span.start, end: start + span.end })) });
+  };
+  const code = cells.map((each) => (each.language === language && !each.isProse ? blankCommands(each.text, language) : undefined));
+  const names = new Set(code.flatMap((each) => each?.text.match(/[\p{L}_][\p{L}\p{N}_]*/gu) ?? []));
+  cells.forEach((each, cell) => {
+    const own = code[cell];
+    if (own) add(cell, 0, own.text, own.spans);
+    const marker = `${language === 'matlab' ? '%' : '#'} `;
+    if (each.isProse) for (const line of relationsIn(each.text, names)) add(cell, line.start - marker.length, marker + each.text.slice(line.start, line.end), [], true);
   });
-  const byCell = new Map(parts.map((part) => [part.cell, part]));
+  const cellOffset = (part: Part, offset: number): number => Math.max(Math.min(offset, part.end) - part.start + part.from, 0);
   return {
     language,
     text,
     toCell(span) {
       const part = partAt(parts, span.start);
       if (!part) return undefined;
-      const start = Math.min(span.start, part.end) - part.start;
-      return { cell: part.cell, start, end: Math.max(Math.min(span.end, part.end) - part.start, start) };
+      const start = cellOffset(part, span.start);
+      return { cell: part.cell, start, end: Math.max(cellOffset(part, span.end), start) };
     },
     lineName(offset) {
       const part = partAt(parts, offset);
-      return part ? `cell ${part.cell + 1}, line ${text.slice(part.start, Math.min(offset, part.end)).split(/\r\n|\r|\n/).length}` : 'line 1';
+      return part ? `cell ${part.cell + 1}, line ${cells[part.cell]?.text.slice(0, cellOffset(part, offset)).split(/\r\n|\r|\n/).length}` : 'line 1';
     },
     toProgram({ cell, offset }) {
-      const part = byCell.get(cell);
-      return part && Math.min(part.start + Math.max(offset, 0), part.end);
+      const part = parts.find((each) => each.cell === cell && (!each.isProse || (offset >= each.from && offset <= each.from + each.end - each.start)));
+      return part && Math.min(part.start + Math.max(offset - part.from, 0), part.end);
     },
     toCellEdits(edits) {
       const made = edits.map((edit): CellEdit | undefined => {
         const part = partAt(parts, edit.start);
-        if (!part || edit.end > part.end || part.blanked.some((each) => edit.start < each.end && each.start < edit.end)) return undefined;
+        if (!part || part.isProse || edit.end > part.end || part.blanked.some((each) => edit.start < each.end && each.start < edit.end)) return undefined;
         return { cell: part.cell, start: edit.start - part.start, end: edit.end - part.start, text: edit.text };
       });
       return made.every((each) => each !== undefined) ? made : undefined;
     },
   };
+}
+
+/** Lines of prose that state a relation between names of the code. */
+function relationsIn(prose: string, names: ReadonlySet<string>): readonly Span[] {
+  return [...prose.matchAll(/^[ \t]*([\p{L}_][\p{L}\p{N}_]*\s+depends\s+on\s+[\p{L}_][\p{L}\p{N}_,\t ]*?)\.?[ \t]*$/gmu)].flatMap((found) => {
+    const sentence = found[1] as string;
+    const start = found.index + found[0].indexOf(sentence);
+    const words = sentence.replace(/\bdepends\s+on\b|\band\b/g, ' ').match(/[\p{L}_][\p{L}\p{N}_]*/gu) ?? [];
+    return words.every((word) => names.has(word)) ? [{ start, end: start + sentence.length }] : [];
+  });
 }
 
 /** The last part that starts at or before an offset, else the first one. */

@@ -43,7 +43,7 @@ export function readNotebook(file: string, language?: LanguageId): NotebookRead 
   const spoken = language ?? notebookLanguage(kernel);
   if (!spoken) return refuse(`its kernel's language, ${kernel}, is not read`, true);
   const sources = found.map(cellSource);
-  const cells = found.map((node, at): CellText => ({ text: sources[at]?.text ?? '', language: cellLanguage(node, spoken) }));
+  const cells = found.map((node, at): CellText => ({ text: sources[at]?.text ?? '', language: cellLanguage(node, spoken), isProse: words(member(node, 'cell_type')) === 'markdown' }));
   const program = joinCells(cells, spoken);
   const sourceOf = (cell: number): SourceText => sources[cell] ?? { text: '', pieces: [], isList: false };
   return {
