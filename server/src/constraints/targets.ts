@@ -31,7 +31,7 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
   }
   const noted = notedValue(path, note, context.anchor, target, namesDifference(path, note) || isDifference(value));
   checkTarget(context, path, target, value, noted, note);
-  const held: Value = value.fits && !value.literal ? { ...noted, blank: true } : noted;
+  const held: Value = (value.fits && !value.literal) || value.blank ? { ...noted, blank: true } : noted;
   context.bindings.set(path, held);
   context.sightings?.set(target, held);
 }

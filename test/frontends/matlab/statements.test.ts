@@ -34,6 +34,7 @@ describe('statements', () => {
     ['global a b', '(outer a b)'],
     ['persistent n = 3;', '(outer n)'],
     ["error('bad %g', x)", '(raise "bad %g" x)'],
+    ["error 'not possible'", '(raise)'],
     ['break', '(break)'],
     ['if (k = f(x)) > 0, end', 'if (cmp (:= k (f x)) > 0)'],
   ])('%s', (text, form) => expect(shown(text)).toBe(form));

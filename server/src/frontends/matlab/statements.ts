@@ -85,7 +85,8 @@ function standsAlone(text: string, span: Span, comment: Comment): boolean {
 
 function command(reader: Reader): Stmt {
   const token = reader.next();
-  return { kind: 'leave', flow: 'none', values: [], ...baseOf(reader, token.start) };
+  const flow = raising.has(/^\w+/.exec(token.text)?.[0] ?? '') ? 'raise' : 'none';
+  return { kind: 'leave', flow, values: [], ...baseOf(reader, token.start) };
 }
 
 const augmented: Readonly<Record<string, BinaryExpr['op']>> = { '+=': '+', '-=': '-', '*=': '*', '/=': '/', '^=': '**', '.*=': '*', './=': '/', '.^=': '**' };
