@@ -69,6 +69,8 @@ export interface HostStyle {
   readonly toRadians: readonly string[];
   readonly toDegrees: readonly string[];
   readonly piNames: readonly string[];
+  /** A function does not see the variables of the script around it. */
+  readonly closedFunctions?: true;
   /** A new statement that gives a constant its name, with a comment; undefined where one line cannot do that (declarations stand elsewhere). */
   define(name: string, value: string, note: string): string | undefined;
   /** Prints an expression in the host's syntax. */

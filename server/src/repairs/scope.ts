@@ -39,7 +39,7 @@ export function symbolsAt(scene: Scene, anchor: Anchor, place: Span): readonly S
       const path = isExpr(span) && span.kind === 'name' ? span.name : undefined;
       if (path && value.version?.anchor !== anchor && value.version?.note) note(path, value, false, true);
     }
-    for (const name of scene.inputs.solver.variables()) {
+    for (const name of scene.inputs.style.closedFunctions ? [] : scene.inputs.solver.variables()) {
       const value = found.has(name) ? undefined : scene.inputs.solver.global(name);
       if (value?.form) note(name, value, false, true);
     }

@@ -48,9 +48,10 @@ export function isBracketed(code: string): boolean {
   return false;
 }
 
-/** How this script calls a library name: `np.deg2rad` for `numpy.deg2rad`; undefined where it is not imported. */
+/** How this script calls a library name: `np.deg2rad` for `numpy.deg2rad`; undefined where it is not imported. A name without a module is built in. */
 export function importedName(program: Program, dotted: string): string | undefined {
   const at = dotted.lastIndexOf('.');
+  if (at < 0) return dotted;
   const [module, name] = [dotted.slice(0, at), dotted.slice(at + 1)];
   for (const chunk of program.chunks) {
     for (const statement of chunk.statements) {

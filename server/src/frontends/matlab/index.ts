@@ -15,7 +15,7 @@ const matlabFrontEnd: FrontEnd = {
   language: 'matlab',
   endings: ['.m'],
   style: {
-    comment: '%', power: '^', pi: 'pi', print: printMatlab, toRadians: ['deg2rad'], toDegrees: ['rad2deg'], piNames: ['pi'],
+    comment: '%', power: '^', pi: 'pi', print: printMatlab, toRadians: ['deg2rad'], toDegrees: ['rad2deg'], piNames: ['pi'], closedFunctions: true,
     define: (name, value, note) => `${name} = ${value};  % ${note}`,
   },
   parse,
