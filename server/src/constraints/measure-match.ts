@@ -4,10 +4,10 @@ import { type Literal, literalNumber } from './literal.ts';
 import type { Factor, Measure, Reading } from './measure.ts';
 
 const close = 1e-9;
-/** One number that converts may be a little off: 8.76 for a thousand hours of a year, 2545 for 2544.43. */
-const alone = 1e-3;
+/** One number that converts may be a little off: 8.76 for a thousand hours of a year, 6356 for the inches of warm water that make a horsepower. */
+const alone = 2.5e-3;
 /** Keeps the search to some thousand products. */
-const mostPerSide = 5;
+const mostPerSide = 6;
 const tau = 2 * Math.PI;
 
 /** Pairs of readings, one of each side, in which both numbers are counted in the same scale; literal factors may convert. */
@@ -99,10 +99,22 @@ function products(left: readonly Factor[], right: readonly Factor[]): readonly P
       found = found.concat(more);
     }
   };
-  for (const factor of left.slice(0, mostPerSide)) extend(factor, 'left');
-  for (const factor of right.slice(0, mostPerSide)) extend(factor, 'right');
+  for (const factor of likeliest(left)) extend(factor, 'left');
+  for (const factor of likeliest(right)) extend(factor, 'right');
   return found;
 }
+
+/** Where there are too many, small pure numbers are the last to convert. */
+function likeliest(factors: readonly Factor[]): readonly Factor[] {
+  if (factors.length <= mostPerSide) return factors;
+  return [...factors].sort((a, b) => Number(isPlain(a)) - Number(isPlain(b))).slice(0, mostPerSide);
+}
+
+function isPlain({ literal }: Factor): boolean {
+  return literal.pure && !literal.value.abs().equals(ten) && !literal.value.abs().inv().equals(ten);
+}
+
+const ten = Rational.of(10);
 
 const parts = new WeakMap<Literal, readonly number[]>();
 /** A day and a year in hours, a year in days, of which only part is worked. */

@@ -5,6 +5,7 @@ import { parseUnit } from './parse-unit.ts';
 
 export interface KnownConstant {
   readonly name: string;
+  /** In the unit in which it was met; in that of the entry, its full value. */
   readonly value: string;
   readonly unit: string;
 }
@@ -20,7 +21,7 @@ export function knownConstant(size: number, dimension: Dimension): KnownConstant
       const value = sizeOf(form.value);
       if (!(Math.abs(size - value) <= tolerance(form.value))) continue;
       const unit = parseUnit(form.unit);
-      if (unit.ok && unit.unit.dimension === dimension) return { name: constant.name, value: constant.value, unit: constant.unit };
+      if (unit.ok && unit.unit.dimension === dimension) return { name: constant.name, value: form.unit === constant.unit ? constant.value : form.value, unit: form.unit };
     }
   }
   return undefined;

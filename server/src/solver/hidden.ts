@@ -1,9 +1,11 @@
 /** The numbers that may hide a unit in a contradiction, and which unit that would be. */
-import { literalNumber, readLiteral } from '../constraints/literal.ts';
+import { literalNumber, readLiteral, simpleExponent } from '../constraints/literal.ts';
 import type { Constraint } from '../constraints/problem.ts';
 import type { Value } from '../constraints/value.ts';
 import type { Expr } from '../program/nodes.ts';
 import { Dimension } from '../quantities/dimension.ts';
+import { knownConstant } from '../quantities/known-constants.ts';
+import { Rational } from '../quantities/rational.ts';
 import type { Fault, Involved } from './fault.ts';
 import { sidesOf } from './root-cause.ts';
 
@@ -11,7 +13,8 @@ export interface HiddenNumber {
   readonly text: string;
   /** Not a number for a constant that is known by name only. */
   readonly size: number;
-  readonly below: boolean;
+  /** The power it stands under in its side. */
+  readonly power: Rational;
   readonly side: 'left' | 'right' | 'value';
 }
 
@@ -25,8 +28,9 @@ export function hiddenNumbers(constraint: Constraint, involved: readonly Involve
   collect(first, same ? 'left' : 'value', found);
   if (same) collect(second, 'right', found);
   for (const each of involved) {
-    if (each.unknown.origin === 'constant' && each.unknown.name !== '') found.push({ text: each.unknown.name, size: Number.NaN, below: false, side: 'left' });
+    if (each.unknown.origin === 'constant' && each.unknown.name !== '') found.push({ text: each.unknown.name, size: Number.NaN, power: Rational.one, side: 'left' });
   }
+  if (found.length === 0) found.push(...constantsIn(constraint));
   const telling = found.filter((each) => !conversions.has(each.size));
   return (telling.length > 0 ? telling : found).sort((a, b) => Number(Number.isNaN(a.size)) - Number(Number.isNaN(b.size)));
 }
@@ -39,7 +43,34 @@ export function neededDimension(fault: Contradiction, found: readonly HiddenNumb
   const first = found[0];
   if (!first) return fault.kind === 'dimension' ? fault.right.div(fault.left) : undefined;
   const raw = fault.kind === 'dimension' ? (first.side === 'right' ? fault.left.div(fault.right) : fault.right.div(fault.left)) : inverse(fault.dimension);
-  return first.below ? inverse(raw) : raw;
+  return raw.pow(first.power.inv());
+}
+
+/** Whether a plain number in a side is a constant of exactly the dimension that is missing: `1.2*Q*c*dT` with the density of air. */
+export function hidesConstant(constraint: Constraint, left: Dimension, right: Dimension): boolean {
+  return plainNumbers(constraint).some((each) => isMissing(each, left, right));
+}
+
+function constantsIn(constraint: Constraint): readonly HiddenNumber[] {
+  const [left, right] = sidesOf(constraint).map((side) => side.form?.dimension);
+  return left && right && constraint.kind === 'same' ? plainNumbers(constraint).filter((each) => isMissing(each, left, right)) : [];
+}
+
+function isMissing(number: HiddenNumber, left: Dimension, right: Dimension): boolean {
+  const raw = number.side === 'right' ? left.div(right) : right.div(left);
+  return knownConstant(number.size, raw.pow(number.power.inv())) !== undefined;
+}
+
+/** The numbers with a decimal point that multiply a side as it is written, whether or not they look like constants. */
+function plainNumbers(constraint: Constraint): readonly HiddenNumber[] {
+  const found: HiddenNumber[] = [];
+  if (constraint.kind !== 'same') return found;
+  for (const [value, side] of [[constraint.left, 'left'], [constraint.right, 'right']] as const) if (value.expr) collectFrom(value.expr, Rational.one, side, found, isDecimal);
+  return found;
+}
+
+function isDecimal(value: Rational): boolean {
+  return value.den !== 1n;
 }
 
 function inverse(dimension: Dimension): Dimension {
@@ -50,19 +81,26 @@ function inverse(dimension: Dimension): Dimension {
 function collect(value: Value | undefined, side: HiddenNumber['side'], found: HiddenNumber[], depth = 0): void {
   if (!value || depth > 12 || found.length > 4) return;
   const before = found.length;
-  if (value.tainted && value.expr) collectFrom(value.expr, false, side, found);
+  if (value.tainted && value.expr) collectFrom(value.expr, Rational.one, side, found);
   if (found.length > before) return;
   collect(value.version?.note ? undefined : value.version?.assigned, side, found, depth + 1);
   for (const part of value.from) if (part.tainted) collect(part, side, found, depth + 1);
 }
 
-function collectFrom(expr: Expr, below: boolean, side: HiddenNumber['side'], found: HiddenNumber[]): void {
+function collectFrom(expr: Expr, power: Rational, side: HiddenNumber['side'], found: HiddenNumber[], counts?: (value: Rational) => boolean): void {
   if (expr.kind === 'number' && expr.value) {
     const literal = readLiteral(expr.value, expr.text);
-    if (!literal.pure) found.push({ text: expr.text, size: literalNumber(literal), below, side });
-  } else if (expr.kind === 'unary') collectFrom(expr.operand, below, side, found);
+    if (counts ? counts(expr.value) : !literal.pure) found.push({ text: expr.text, size: literalNumber(literal), power, side });
+  } else if (expr.kind === 'unary') collectFrom(expr.operand, power, side, found, counts);
   else if (expr.kind === 'binary' && (expr.op === '*' || expr.op === '/' || expr.op === '//')) {
-    collectFrom(expr.left, below, side, found);
-    collectFrom(expr.right, expr.op === '*' ? below : !below, side, found);
-  } else if (expr.kind === 'binary' && (expr.op === '+' || expr.op === '-' || expr.op === '**')) collectFrom(expr.left, below, side, found);
+    collectFrom(expr.left, power, side, found, counts);
+    collectFrom(expr.right, expr.op === '*' ? power : power.neg(), side, found, counts);
+  } else if (expr.kind === 'binary' && expr.op === '**') collectFrom(expr.left, power.mul(exponentOf(expr.right)), side, found, counts);
+  else if (!counts && expr.kind === 'binary' && (expr.op === '+' || expr.op === '-')) collectFrom(expr.left, power, side, found);
+}
+
+function exponentOf(expr: Expr): Rational {
+  if (expr.kind === 'unary' && expr.op === '-') return exponentOf(expr.operand).neg();
+  const exponent = expr.kind === 'number' && expr.value ? simpleExponent(readLiteral(expr.value, expr.text)) : Rational.one;
+  return exponent.isZero ? Rational.one : exponent;
 }

@@ -3,6 +3,7 @@ import type { Constraint } from '../constraints/problem.ts';
 import type { Form } from '../constraints/form.ts';
 import { Elimination } from './eliminate.ts';
 import type { Fault } from './fault.ts';
+import { hidesConstant } from './hidden.ts';
 import { scaleFault } from './scales.ts';
 
 /** What came of a problem. Inert: plain results and the means to reduce a form by them. */
@@ -59,7 +60,8 @@ function settleSame(constraint: Extract<Constraint, { kind: 'same' }>, eliminati
   const outcome = elimination.equate(left.form, right.form, constraint, soft);
   if (outcome.kind !== 'contradicts') return scaleFault(constraint, elimination);
   const proof = elimination.certificate(left.form, right.form);
-  return { kind: 'dimension', constraint, left: outcome.left.dimension, right: outcome.right.dimension, hidden: soft || proof.soft, involved: proof.involved };
+  const [a, b] = [outcome.left.dimension, outcome.right.dimension];
+  return { kind: 'dimension', constraint, left: a, right: b, hidden: soft || proof.soft || hidesConstant(constraint, a, b), involved: proof.involved };
 }
 
 /** Constraints that ask and do not solve. */

@@ -15,7 +15,7 @@ export function hiddenWords(voice: Voice, fault: HiddenFault, alike: number): Wo
   const need = neededDimension(fault, found);
   const number = names.length > 0 ? names.map((name) => `\`${name}\``).join(' or ') : 'a number in it';
   const known = found[0] && need ? knownConstant(found[0].size, need) : undefined;
-  const what = need ? ` carried ${unitWithKinds(need)}` : ' carried a unit';
+  const what = need ? ` carried ${unitWithKinds(need, known?.unit)}` : ' carried a unit';
   const constant = known && need ? ` That is ${known.name} (${known.value} ${known.unit}): name it and note its unit.` : '';
   const sides = sideText(voice, fault);
   const more = alike > 0 ? ` ${alike === 1 ? 'One more place' : `${alike} more places`} in this function ${alike === 1 ? 'is' : 'are'} of the same kind.` : '';

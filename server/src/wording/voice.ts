@@ -59,11 +59,11 @@ export function unitWords(text: string, dimension: Dimension): string {
   return dimension.isOne && /^(?:1|-+)?$/.test(text.trim()) ? 'dimensionless' : text;
 }
 
-/** `m/s (speed)`: the coherent unit of a dimension with the kinds of quantity that have it. */
-export function unitWithKinds(dimension: Dimension): string {
+/** `m/s (speed)`: the coherent unit of a dimension, or the one given, with the kinds of quantity that have it. */
+export function unitWithKinds(dimension: Dimension, unit = coherentUnit(dimension)): string {
   if (dimension.isOne) return 'a pure number';
   const kinds = kindsOf(dimension).slice(0, 2).join(' or ');
-  return coherentUnit(dimension) + (kinds ? ` (${kinds})` : '');
+  return unit + (kinds ? ` (${kinds})` : '');
 }
 
 /** ` (line 6)`, or with the file's name where it is another file. */

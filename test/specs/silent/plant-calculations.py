@@ -62,3 +62,87 @@ Q = 40.0            # [ft^3/s]
 t_fill = V_pond*43560/Q/3600    # [h]
 V_gal = V_pond*43560*7.48       # [gal]
 Q_gpm = Q*448.8     # [gpm]
+
+# ==== Swept volume with many numbers ====
+n_cyl = 4
+bore = 60.0         # [mm]
+stroke = 48.0       # [mm]
+n = 1450.0          # [1/min]
+V_dot = n_cyl*3.14159/4*(bore/1000)**2*stroke/1000*n/60     # [m^3/s]
+
+# ==== Horsepower of a fan and of a pump ====
+CFM = 8400.0        # [cfm]
+SP = 3.2            # [inH2O]
+eta = 0.62
+BHP = CFM*SP/(6356*eta)     # [hp]
+kW = BHP*0.7457             # [kW]
+Q = 350.0           # [gpm]
+dp = 48.0           # [psi]
+HP = Q*dp/(1714*eta)        # [hp]
+gamma = 62.4        # [lbf/ft^3]
+h = 46.0            # [ft]
+P = gamma*Q/448.83*h/eta/550    # [hp]
+
+# ==== Pound mass and pound force ====
+g_c = 32.174        # [lbm ft/(lbf s^2)]
+g = 32.2            # [ft/s^2]
+m_dot = 10.5        # [lbm/s]
+V = 8.0             # [ft/s]
+rho = 0.075         # [lbm/ft^3]
+F = m_dot*V/g_c             # [lbf]
+F_lit = m_dot*V/32.174      # [lbf]
+VP = rho*V**2/(2*g_c)       # [lbf/ft^2]
+VP_psi = VP/144             # [psi]
+m = 12.0            # [lbm]
+W = m*g/g_c         # [lbf]
+z = 30.0            # [ft]
+p = 62.4*z*g/g_c/144
+p_bottom = 14.7*144         # [lbf/ft^2]
+
+# ==== Ideal gas in US units ====
+p = 14.7            # [psia]
+R = 53.35           # [ft lbf/(lbm degR)]
+T = 540.0           # [degR]
+rho = p*144/(R*T)           # [lbm/ft^3]
+T_F = 80.0          # [degF]
+rho_F = p*144/(R*(T_F + 459.67))    # [lbm/ft^3]
+rho_460 = p*144/(R*(T_F + 460))     # [lbm/ft^3]
+q = 8400.0          # [ft^3/min]
+m = q*rho*60                # [lbm/h]
+c_p = 0.24          # [BTU/(lbm degF)]
+Q = m*c_p*(T_F - 55.0)      # [BTU/h]
+tons = Q/12000              # [ton_refrigeration]
+W_fan = 778.17*Q/3600       # [ft lbf/s]
+hp = W_fan/550              # [hp]
+
+# ==== Velocity in a pipe in US units ====
+import math
+
+Q = 350.0           # [gpm]
+d = 6.065           # [in]
+A = math.pi/4*(d/12)**2     # [ft^2]
+V = Q/448.83/A              # [ft/s]
+V_gal = Q*0.002228/A        # [ft/s]
+Re = 124.0*V*d/12/1.1
+f = 0.019           # [-]
+L = 240.0           # [ft]
+g = 32.174          # [ft/s^2]
+h_f = f*L/(d/12)*V**2/(2*g)     # [ft]
+dp = 62.4*h_f/144
+V_tank = 5000.0     # [gal]
+t_fill = V_tank/Q   # [min]
+
+# ==== Beam and bolt in kips and inches ====
+P = 11.5            # [kip]
+L = 14.0            # [ft]
+w = 0.045           # [kip/ft]
+E = 29000.0         # [ksi]
+I = 307.0           # [in^4]
+S = 51.5            # [in^3]
+M = P*L/4 + w*L**2/8        # [kip ft]
+f_b = M*12/S                # [ksi]
+f_psi = f_b*1000            # [psi]
+delta = P*(L*12)**3/(48*E*I)    # [in]
+delta_w = 5*w/12*(L*12)**4/(384*E*I)    # [in]
+limit = L*12/360            # [in]
+ok = delta <= limit
