@@ -1,6 +1,6 @@
 /**
  * `npm run test:editor`: the packaged extension in a real VS Code. On a desktop (a `code` on the path, or --download) with
- * @vscode/test-electron; else in the browser workbench, where some flows also drive the page. `--screenshots DIR` keeps its pictures.
+ * @vscode/test-electron; else in the browser workbench, where some flows also drive the page. `--screenshots DIR` keeps its pictures, `--flow WORDS` runs only the flows with these words in their names.
  */
 import { execFileSync } from 'node:child_process';
 import { cpSync, existsSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
@@ -10,12 +10,14 @@ import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
 import { copyExamples, dataFolder, installWorkbench, startWorkbench } from './editor-rig.mjs';
 import { browserExecutable, openPage } from './editor-page.mjs';
-import { pageFlows } from './editor-flows.mjs';
+import { lastLook, pageFlows } from './editor-flows.mjs';
 import { packExtension } from './vsix.mjs';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '..');
 const args = process.argv.slice(2);
 const screenshots = args.includes('--screenshots') ? resolve(args[args.indexOf('--screenshots') + 1]) : undefined;
+/** Part of a flow's name: that one alone is run. */
+const only = args.includes('--flow') ? args[args.indexOf('--flow') + 1] : undefined;
 const say = (text) => process.stdout.write(`${text}\n`);
 const suiteTime = 8 * 60_000;
 const counts = { passed: 0, failed: 0 };
@@ -72,11 +74,11 @@ async function inBrowser(suite, vsix) {
   const executablePath = browserExecutable();
   const template = join(folder, 'template');
   dataFolder(template, vsix, { 'workbench.startupEditor': 'none', 'files.autoSave': 'off', 'files.hotExit': 'off', 'editor.hover.delay': 100, 'security.workspace.trust.enabled': false });
-  await withWorkbench(template, 'suite', (workbench, workspace) => runSuite(workbench, workspace, suite, executablePath));
+  if (only === undefined) await withWorkbench(template, 'suite', (workbench, workspace) => runSuite(workbench, workspace, suite, executablePath));
   if (screenshots) mkdirSync(screenshots, { recursive: true });
-  for (const [name, flow] of Object.entries(pageFlows)) {
+  for (const [name, flow] of Object.entries(pageFlows).filter(([each]) => only === undefined || each.includes(only))) {
     try {
-      await withWorkbench(template, 'flow', (workbench, workspace) => runFlow(workbench, workspace, flow, executablePath));
+      await withWorkbench(template, 'flow', (workbench, workspace) => runFlow(workbench, workspace, name, flow, executablePath));
       counts.passed++;
       say(`ok: ${name}`);
     } catch (error) {
@@ -119,10 +121,13 @@ async function runSuite(workbench, workspace, suite, executablePath) {
   if (counts.passed === 0) throw new Error('the suite ran no case');
 }
 
-async function runFlow(workbench, workspace, flow, executablePath) {
+async function runFlow(workbench, workspace, name, flow, executablePath) {
   const opened = await openPage({ executablePath, workbench, workspace, payload: [['openFile', `vscode-remote://${workbench.authority}${workspace}/mixer.py`], ['skipWelcome', 'true']], log: () => {} });
   try {
     await flow(opened.page, screenshots && existsSync(screenshots) ? screenshots : undefined);
+  } catch (error) {
+    await lastLook(opened.page, screenshots, name);
+    throw error;
   } finally {
     await opened.close();
   }

@@ -10,7 +10,7 @@ const manifest = JSON.parse(readFileSync(join(root, 'package.json'), 'utf8'));
 
 /** What an editor reads of the manifest; the command and its packages have no place in an extension. */
 const keys = ['name', 'displayName', 'version', 'description', 'license', 'publisher', 'type', 'icon', 'keywords', 'categories', 'engines', 'main', 'activationEvents', 'capabilities', 'contributes', 'l10n'];
-const copied = ['syntaxes', 'schemas', 'client/language', 'client/walkthrough', 'client/l10n', 'client/icon.png', 'examples', 'README.md', 'CHANGELOG.md', 'LICENSE'];
+const copied = ['syntaxes', 'schemas', 'client/language', 'client/walkthrough', 'client/l10n', 'client/pictures', 'client/icon.png', 'examples', 'README.md', 'CHANGELOG.md', 'LICENSE'];
 /** Of the build: the rest is the command's. */
 const built = ['extension.cjs', 'extension.cjs.LEGAL.txt', 'language-server.js', 'language-server.js.LEGAL.txt', 'grammars', 'signatures', 'pages'];
 
