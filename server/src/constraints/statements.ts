@@ -240,6 +240,7 @@ function joinedValue(values: readonly Value[], chosen: boolean): Value {
   const first = telling.find((value) => !value.blank) ?? telling[0] ?? values.find((value) => !value.fits) ?? values[0];
   if (!first) return { expr: undefined, form: undefined, from: [] };
   const alike = telling.every((value) => value === first || (value.form && first.form && sameForm(value.form, first.form) && !value.items));
+  if (first.split && telling.every((value) => value.split)) return first;
   if (!alike && chosen) {
     const split = splitOf(telling);
     if (split) return { expr: undefined, form: undefined, from: values, split };

@@ -77,6 +77,7 @@ function open(param: SchemeParam, given: Passed, instance: Instance): void {
 function check(context: Context, scheme: Scheme, param: SchemeParam, given: Passed, instance: Instance): void {
   const value = given.value;
   if (value.misuse) reportMisuse(context, value);
+  if (value.split && param.note) return settle(context, value.split, given);
   if (!value.form || value.literal || value.fits) return;
   const passed = { ...value, expr: given.argument.value };
   if (param.note) {
@@ -88,6 +89,11 @@ function check(context: Context, scheme: Scheme, param: SchemeParam, given: Pass
   if (param.form.dimension.isOne) return;
   const required: Value = { expr: undefined, form: param.form, from: [] };
   agree(context, given.argument.value, passed, required, { kind: 'inferred-parameter', function: scheme.name, name: param.name }, given.argument.value);
+}
+
+/** A symbol that an if left in two dimensions cannot be right as an argument with a unit. */
+function settle(context: Context, [first, other]: readonly [Value, Value], given: Passed): void {
+  agree(context, given.argument.value, { ...first, measure: undefined }, { ...other, measure: undefined }, { kind: 'choice', of: 'branches' }, given.argument.value);
 }
 
 /** A parameter that the body ties to another: `a + b` inside asks for like arguments. Scales are left alone, the body may convert. */
