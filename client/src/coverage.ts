@@ -85,7 +85,8 @@ class OpenSymbols implements TreeDataProvider<OpenSymbol> {
 
   getTreeItem({ name, owner, uses, range }: OpenSymbol): TreeItem {
     const item = new TreeItem(name);
-    item.description = owner === undefined ? l10n.t('used {0} times', uses) : l10n.t('in {0}, used {1} times', owner, uses);
+    const often = uses === 1 ? l10n.t('used once') : l10n.t('used {0} times', uses);
+    item.description = owner === undefined ? often : l10n.t('in {0}, {1}', owner, often);
     item.iconPath = new ThemeIcon('symbol-variable');
     item.command = { command: 'termwise.reveal', title: l10n.t('Show'), arguments: [this.file?.uri, range] };
     return item;

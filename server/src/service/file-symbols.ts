@@ -82,8 +82,10 @@ export function coverageOf(symbols: readonly FileSymbol[]): Coverage {
 function collect(sightings: Sightings, { parsed }: Understood, piece: Piece | undefined): readonly FileSymbol[] {
   const defined = new Map<string, { readonly value: Value; readonly chunk: Chunk; readonly span: Span }>();
   const uses = new Map<string, number>();
+  const reckoned = new Set<string>();
   const chunkOf = new Map(parsed.program.chunks.map((chunk) => [chunk.anchor, chunk]));
   for (const [span, value] of sightings.values) {
+    if (isExpr(span)) for (const part of reckonedWith(span)) reckoned.add(part);
     const { version } = value;
     if (version?.span === span) {
       const chunk = chunkOf.get(version.anchor);
@@ -96,7 +98,7 @@ function collect(sightings: Sightings, { parsed }: Understood, piece: Piece | un
   }
   const parameters = new Set<Span>(piece?.fn.params.map(({ nameSpan }) => nameSpan));
   return [...defined].flatMap(([path, { value, chunk, span }]): readonly FileSymbol[] => {
-    if (!counts(value, sightings)) return [];
+    if (!counts(value, sightings) || (parameters.has(span) && !value.version?.note && !reckoned.has(path) && dimensionOf(value, sightings) === undefined)) return [];
     const note = value.version?.note;
     const dimension = note ? note.unit.dimension : dimensionOf(value, sightings);
     const unit = note ? (note.unit.scale ? note.unit.text : undefined) : dimension?.isOne ? '' : inferredUnit(value, sightings);
@@ -105,6 +107,12 @@ function collect(sightings: Sightings, { parsed }: Understood, piece: Piece | un
       origin: note ? 'declared' : dimension ? 'inferred' : 'unknown', description: note?.note.description,
     }];
   });
+}
+
+/** Symbols that an expression adds, multiplies or compares: a path that is only handed on is a number to nobody. */
+function reckonedWith(expr: Expr): readonly string[] {
+  const parts = expr.kind === 'binary' ? [expr.left, expr.right] : expr.kind === 'unary' ? [expr.operand] : expr.kind === 'compare' ? expr.operands : [];
+  return parts.flatMap((part) => pathOf(part) ?? []);
 }
 
 /** Texts, functions, tables and bare counts carry no unit. */
