@@ -1,5 +1,5 @@
 /** Builds what is shipped into dist/, or into the folder that is named: the command, the language server, the editor's client, the grammars, the signatures, the pages. */
-import { chmodSync, cpSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, cpSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { build as bundle } from 'esbuild';
@@ -15,12 +15,14 @@ const grammars = [
 export async function build(folder) {
   const dist = folder ?? join(root, 'dist');
   const bundles = [bundleCommand(dist), bundleLanguageServer(dist), bundleClient(dist)];
-  const outputFiles = (await Promise.all(bundles)).flatMap((each) => each.outputFiles);
+  const made = await Promise.all(bundles);
+  const outputFiles = made.flatMap((each) => each.outputFiles);
   if (!folder) rmSync(dist, { recursive: true, force: true });
   mkdirSync(dist, { recursive: true });
   for (const file of outputFiles) writeFileSync(file.path, file.contents);
   for (const command of ['termwise.js', 'language-server.js']) chmodSync(join(dist, command), 0o755);
   copyAssets(dist);
+  writeFileSync(join(dist, 'THIRD-PARTY-NOTICES.txt'), notices(made.flatMap(({ metafile }) => Object.keys(metafile.inputs))));
 }
 
 /** Everything stays in one folder: the assets are looked for beside the file that asks for them. */
@@ -31,6 +33,7 @@ function bundleCommand(dist) {
     outdir: dist,
     bundle: true,
     write: false,
+    metafile: true,
     splitting: true,
     format: 'esm',
     platform: 'node',
@@ -51,6 +54,7 @@ function bundleLanguageServer(dist) {
     outdir: dist,
     bundle: true,
     write: false,
+    metafile: true,
     format: 'esm',
     platform: 'node',
     target: 'node20',
@@ -71,6 +75,7 @@ function bundleClient(dist) {
     outExtension: { '.js': '.cjs' },
     bundle: true,
     write: false,
+    metafile: true,
     format: 'cjs',
     platform: 'node',
     target: 'node20',
@@ -79,6 +84,17 @@ function bundleClient(dist) {
     legalComments: 'linked',
     logLevel: 'warning',
   });
+}
+
+/** The licences of every package of which something is shipped. `inputs`: the files that went into the bundles. */
+function notices(inputs) {
+  const folders = [...inputs, ...grammars.map((grammar) => `node_modules/${grammar}`)].flatMap((file) => /^(.*node_modules\/(?:@[^/]+\/)?[^/]+)\//.exec(file)?.[1] ?? []);
+  const packages = [...new Set(folders)].sort().map((folder) => {
+    const { name, version, license } = JSON.parse(readFileSync(join(root, folder, 'package.json'), 'utf8'));
+    const file = readdirSync(join(root, folder)).find((each) => /^(?:licen[cs]e|copying)/i.test(each));
+    return `${name} ${version} (${typeof license === 'string' ? license : 'see its text'})\n\n${file ? readFileSync(join(root, folder, file), 'utf8').trim() : 'The package carries no licence text of its own.'}\n`;
+  });
+  return `This software contains parts of the following packages.\n\n${packages.join(`\n${'-'.repeat(80)}\n\n`)}`;
 }
 
 function copyAssets(dist) {

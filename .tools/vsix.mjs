@@ -12,7 +12,7 @@ const manifest = JSON.parse(readFileSync(join(root, 'package.json'), 'utf8'));
 const keys = ['name', 'displayName', 'version', 'description', 'license', 'publisher', 'type', 'icon', 'keywords', 'categories', 'engines', 'main', 'activationEvents', 'capabilities', 'contributes', 'l10n'];
 const copied = ['syntaxes', 'schemas', 'client/language', 'client/walkthrough', 'client/l10n', 'client/pictures', 'client/icon.png', 'examples', 'README.md', 'CHANGELOG.md', 'LICENSE'];
 /** Of the build: the rest is the command's. */
-const built = ['extension.cjs', 'extension.cjs.LEGAL.txt', 'language-server.js', 'language-server.js.LEGAL.txt', 'grammars', 'signatures', 'pages'];
+const built = ['extension.cjs', 'extension.cjs.LEGAL.txt', 'language-server.js', 'language-server.js.LEGAL.txt', 'THIRD-PARTY-NOTICES.txt', 'grammars', 'signatures', 'pages'];
 
 /** Packs the extension and gives the path of the file. */
 export async function packExtension(target = join(root, `${manifest.name}-${manifest.version}.vsix`)) {
