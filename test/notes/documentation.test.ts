@@ -194,6 +194,9 @@ describe('the first sentence of a function', () => {
     ['f(t)', 'feed [m^3/s] at time t [s]', 'f -> m^3/s; f(t) s'],
     ['f(self)', 'Rated torque [N·m].', 'f -> N·m'],
     ['f(p)', 'Saturation temperature at pressure p [kPa]', 'f(p) kPa'],
+    ['f(self)', 'Energy in the brake for one stop from full speed [kJ].', 'f -> kJ'],
+    ['f(p)', 'Temperature at the outlet [K].\n\n    :param p: pressure', 'f -> K'],
+    ['f(K)', 'Head.\n\n    Parameters\n    ----------\n    K : float\n        sum of the loss coefficients, -', 'f(K) -'],
   ])('%s: %s', (head, doc, expected) => {
     expect(fn(head, doc).split('; ').sort().join('; ')).toBe(expected);
   });

@@ -2,6 +2,7 @@
 import type { FunctionStmt, Param } from '../program/nodes.ts';
 import type { Context } from './context.ts';
 import { type Unknown, unknownForm } from './form.ts';
+import { namedClass, objectOf } from './scheme.ts';
 import { walk } from './statements.ts';
 import { notedValue, reportDisagreement } from './targets.ts';
 import type { NoteInForce, Value } from './value.ts';
@@ -36,6 +37,13 @@ function bindParam(context: Context, param: Param, note: NoteInForce | undefined
   const version = { path: param.name, anchor: context.anchor, span: param.nameSpan, origin: 'parameter' as const };
   if (param.mode === 'rest' || param.mode === 'rest-named') {
     context.bindings.set(param.name, { expr: undefined, form: undefined, from: [], version });
+    return { param, note: undefined, unknown: undefined };
+  }
+  const info = note ? undefined : namedClass(param.annotation, (name) => context.surroundings.global(name));
+  if (info) {
+    const object: Value = { ...objectOf(info), version };
+    context.bindings.set(param.name, object);
+    context.sightings?.set(param.nameSpan, object);
     return { param, note: undefined, unknown: undefined };
   }
   const unknown = note ? undefined : context.fresh(param.name, param.nameSpan, 'parameter');

@@ -45,3 +45,46 @@ export interface ClassInfo {
   readonly method: (name: string) => Scheme | undefined;
   readonly fingerprint: () => string;
 }
+
+/** An object of a class; its fields are worked out when one is asked for, since classes may hold each other. */
+export function objectOf(info: ClassInfo): Value {
+  return { expr: undefined, form: undefined, fields: new LazyFields(info.fields), from: [] };
+}
+
+/** The class that a type annotation names: `Motor`, `'Motor'`, `Optional[Motor]`, `Motor | None`. */
+export function namedClass(annotation: string | undefined, global: (name: string) => Value | undefined): ClassInfo | undefined {
+  const name = annotation && /^(?:typing\.)?(?:Optional\[)?\s*['"]?([\p{L}_][\p{L}\p{N}_]*)['"]?\s*\]?(?:\s*\|\s*None)?$/u.exec(annotation.trim())?.[1];
+  if (!name || plainTypes.has(name)) return undefined;
+  const callable = global(name)?.callable;
+  return callable?.kind === 'class' ? callable.info : undefined;
+}
+
+const plainTypes = new Set(['float', 'int', 'str', 'bool', 'complex', 'list', 'dict', 'tuple', 'set', 'object', 'Any', 'None', 'Callable']);
+
+class LazyFields implements ReadonlyMap<string, Value> {
+  constructor(private readonly make: () => ReadonlyMap<string, Value>) {}
+  get size(): number {
+    return this.make().size;
+  }
+  get(name: string): Value | undefined {
+    return this.make().get(name);
+  }
+  has(name: string): boolean {
+    return this.make().has(name);
+  }
+  forEach(visit: (value: Value, key: string, map: ReadonlyMap<string, Value>) => void): void {
+    for (const [name, value] of this.make()) visit(value, name, this);
+  }
+  entries(): MapIterator<[string, Value]> {
+    return this.make().entries();
+  }
+  keys(): MapIterator<string> {
+    return this.make().keys();
+  }
+  values(): MapIterator<Value> {
+    return this.make().values();
+  }
+  [Symbol.iterator](): MapIterator<[string, Value]> {
+    return this.make()[Symbol.iterator]();
+  }
+}

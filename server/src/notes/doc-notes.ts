@@ -142,11 +142,15 @@ function summaryNotes(out: Collector, fn: FunctionStmt, doc: Documentation): voi
   }
   const only = rest.length === 1 ? rest[0] : undefined;
   const before = only && sentence.text.slice(0, only.outer.start);
-  if (only && before && !condition.test(before) && !fn.params.some((each) => nameIn(before, each.name))) out.note({ kind: 'result', owner: fn }, sentence, only, 'documentation');
+  // Where every parameter is described, a bracket in the sentence can only be the result's.
+  const told = fn.params.every((param) => /^(?:self|cls)$/.test(param.name) || doc.entries.some((entry) => entry.names.includes(param.name)));
+  if (only && before && !action.test(before) && (told || !condition.test(before)) && !fn.params.some((each) => nameIn(before, each.name))) out.note({ kind: 'result', owner: fn }, sentence, only, 'documentation');
 }
 
-/** What follows is not the result. */
-const condition = /\b(?:at|for|from|given|with|without|versus|vs|against|by|when|where|if|whether|above|below|than|using|over|under|between|into|per|on|as|until|within|set|sets|plot|plots|print|prints|show|shows|write|writes|takes?|convert|converts|read|reads)\b|[:?=]|->|→/i;
+/** What follows may be a condition, and not the result. */
+const condition = /\b(?:at|for|from|given|with|without|by|when|where|if|above|below|than|using|over|under|between|per|on|as|until|within)\b/i;
+/** Sentences about what is done, and not about what comes out. */
+const action = /\b(?:versus|vs|against|whether|into|set|sets|plot|plots|print|prints|show|shows|write|writes|takes?|convert|converts|read|reads)\b|[:?=]|->|→/i;
 
 function nameIn(text: string, name: string): boolean {
   return name.length > 2 && new RegExp(`\\b${name}\\b`, 'i').test(text);

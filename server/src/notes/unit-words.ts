@@ -102,8 +102,9 @@ function tailOf(text: string, to: number, whole: boolean, options: ReadOptions):
   const words = tail.trim();
   if (words === '' || /^\d(?!\/)|^in\s/i.test(words) || /^\w+\s+\/\s|^U\+[\dA-F]{4}/.test(words) || !mayStandAlone(words) || isListed(text.slice(0, comma))) return undefined;
   const result = parseUnit(words, options);
-  if (!result.ok || /^(?:1|-+|none|n\/a|ratio|decimal|fraction)$/i.test(words)) return undefined;
-  const sure = result.beyondDoubt || fullNames.test(words) || (whole && /^[A-Za-zµΩ]{1,3}$/.test(words) && !notUnits.has(words.toLowerCase()) && /[A-Za-z]{4}/.test(text.slice(0, comma)));
+  const dash = whole && /^-{1,2}$/.test(words) && /[A-Za-z]{4}\s*$/.test(text.slice(0, comma));
+  if (!result.ok || (!dash && /^(?:1|-+|none|n\/a|ratio|decimal|fraction)$/i.test(words))) return undefined;
+  const sure = dash || result.beyondDoubt || fullNames.test(words) || (whole && /^[A-Za-zµΩ]{1,3}$/.test(words) && !notUnits.has(words.toLowerCase()) && /[A-Za-z]{4}/.test(text.slice(0, comma)));
   if (!sure || notUnits.has(words)) return undefined;
   return { unit: result.unit, hints: result.hints, span: { start, end: start + words.length }, outer: { start: comma, end }, by: 'words' };
 }

@@ -1,5 +1,5 @@
 /** Classes: their fields' units from notes, dataclass fields and the constructor; their methods' schemes. */
-import type { ClassInfo } from '../constraints/scheme.ts';
+import { type ClassInfo, namedClass, objectOf } from '../constraints/scheme.ts';
 import { notedValue } from '../constraints/targets.ts';
 import type { Value } from '../constraints/value.ts';
 import { pathOf } from '../program/path.ts';
@@ -32,10 +32,14 @@ export function classInfo(statement: ClassStmt, chunk: Chunk, file: FileSolver):
       const constructor = methods.get('__init__');
       const made = constructor && file.piece({ fn: constructor, owner: statement, chunk });
       for (const [name, value] of made?.fields ?? []) if (!fields.get(name)?.version?.note) fields.set(name, value);
-      for (const [name, fn] of methods) if (isProperty(fn)) setProperty(fields, name, file.scheme(fn, statement, chunk));
+      for (const [name, fn] of methods) {
+        const note = isProperty(fn) ? file.notesIn(chunk, statement).results(fn)[0] : undefined;
+        if (note) fields.set(name, notedValue(name, note, note.anchor, undefined));
+        else if (isProperty(fn)) setProperty(fields, name, file.scheme(fn, statement, chunk));
+      }
       return fields;
     },
-    fingerprint: () => `${statement.name}{${[...declaredNames(statement, chunk, file)].map(([name, value]) => `${name}:${fingerprintOf(value)}`).join()}}${method('__init__')?.fingerprint ?? ''}`,
+    fingerprint: () => `${statement.name}{${[...declaredNames(statement, chunk, file)].map(([name, value]) => `${name}:${fingerprintOf(value)}`).join()}}${[...methods].map(([name, fn]) => (name === '__init__' || isProperty(fn) ? (method(name)?.fingerprint ?? '') : '')).join()}`,
   };
 }
 
@@ -59,7 +63,8 @@ function declaredFields(statement: ClassStmt, chunk: Chunk, file: FileSolver, fi
     const name = target && pathOf(target);
     if (name === undefined || !target) continue;
     const note = lookup.statement(each, name, undefined)[0] ?? lookup.field(statement, name);
-    fields.set(name, note ? notedValue(name, note, chunk.anchor, target) : { expr: undefined, form: undefined, from: [] });
+    const held = note ? undefined : namedClass(each.annotation, (global) => file.global(global));
+    fields.set(name, note ? notedValue(name, note, chunk.anchor, target) : held && held.statement !== statement ? objectOf(held) : { expr: undefined, form: undefined, from: [] });
   }
   for (const [name, note] of file.index(chunk).fields.get(statement) ?? []) {
     if (!fields.get(name)?.form) fields.set(name, notedValue(name, note, note.anchor, undefined));
@@ -77,6 +82,5 @@ function isProperty(fn: FunctionStmt): boolean {
 function setProperty(fields: Map<string, Value>, name: string, scheme: ReturnType<ClassInfo['method']>): void {
   const result = scheme?.result;
   const value: Value = { expr: undefined, form: undefined, from: [] };
-  if (result?.note) fields.set(name, notedValue(name, result.note, result.note.anchor, undefined));
-  else fields.set(name, result?.form && result.form.terms.length === 0 ? { ...value, form: result.form, measure: result.measure } : value);
+  fields.set(name, result?.form && result.form.terms.length === 0 ? { ...value, form: result.form, measure: result.measure } : value);
 }

@@ -8,9 +8,11 @@ import type { Anchor } from '../text/span.ts';
 
 const anchors = new WeakMap<Anchor, number>();
 let count = 0;
+/** Objects that hold each other are read so far. */
+const deepestFields = 3;
 
 /** The fingerprint of what a name stands for. */
-export function fingerprintOf(value: Value | undefined): string {
+export function fingerprintOf(value: Value | undefined, depth = 0): string {
   if (!value) return '-';
   const callable = value.callable;
   if (callable?.kind === 'function') return `f${callable.scheme()?.fingerprint ?? '?'}`;
@@ -19,7 +21,8 @@ export function fingerprintOf(value: Value | undefined): string {
   if (value.module) return `m${value.module.name}`;
   if (value.literal) return `n${value.literal.value}|${value.literal.pi}`;
   const constant = value.version?.assigned?.literal;
-  const parts = value.items?.map(fingerprintOf).join() ?? '';
+  const inside = value.fields && depth < deepestFields ? [...value.fields].filter(([, field]) => !field.callable).map(([name, field]) => `${name}:${fingerprintOf(field, depth + 1)}`) : [];
+  const parts = [...(value.items?.map((item) => fingerprintOf(item, depth + 1)) ?? []), ...inside].join();
   return `v${formText(value.form, constant !== undefined)}|${measureText(value.measure)}|${constant?.value ?? ''}|${parts}|${place(value.version?.anchor)}`;
 }
 

@@ -1,6 +1,6 @@
 /** Sentences for terms and results that do not match. */
 import type { Reason } from '../constraints/problem.ts';
-import { familiarity } from '../quantities/kinds.ts';
+import { familiarity, kindsOf } from '../quantities/kinds.ts';
 import { coherentUnit } from '../quantities/print-unit.ts';
 import type { Fault } from '../solver/fault.ts';
 import { chainOf, sideWords } from './sides.ts';
@@ -52,6 +52,7 @@ function missing(voice: Voice, fault: DimensionFault): string {
   const lacking = fault.right.div(fault.left);
   const inverse = fault.left.div(fault.right);
   const { anchor, left, right, reason } = fault.constraint;
+  if (kindsOf(lacking).length === 0 && kindsOf(inverse).length === 0) return 'No usual quantity stands between the two: look for a quotient the wrong way round, or a power left out.';
   if (familiarity(lacking) <= familiarity(inverse)) return `${nameOf(voice, anchor, left)} would have to be multiplied by something in ${unitWithKinds(lacking)}.`;
   if (isNoted(reason)) return `${nameOf(voice, anchor, left)} would have to be divided by something in ${unitWithKinds(inverse)}.`;
   return `${nameOf(voice, anchor, right)} would have to be multiplied by something in ${unitWithKinds(inverse)}.`;
