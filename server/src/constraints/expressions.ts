@@ -1,12 +1,12 @@
 /** What each kind of expression says of units. One entry per node kind; anything else is unknown. */
 import { Rational } from '../quantities/rational.ts';
 import { pathOf } from '../program/path.ts';
-import type { CompareExpr, ComprehensionExpr, Expr, LambdaExpr, RecordExpr, SequenceExpr } from '../program/nodes.ts';
+import type { CompareExpr, ComprehensionExpr, Expr, LambdaExpr, RecordExpr, SequenceExpr, SliceExpr } from '../program/nodes.ts';
 import { indexed, memberOf, nameOf } from './access.ts';
 import { agree, alternatives, literalValue, negative, power, product, quotient, sum } from './arithmetic.ts';
 import { call } from './calls.ts';
 import type { Context } from './context.ts';
-import { oneForm, unknownForm } from './form.ts';
+import { isConstant, oneForm, unknownForm } from './form.ts';
 import { exactLiteral, readLiteral } from './literal.ts';
 import { bind, notedValue } from './targets.ts';
 import { type NoteInForce, type Value, unknown } from './value.ts';
@@ -74,10 +74,8 @@ function dispatch(context: Context, expr: Expr): Value {
     case 'opaque':
       for (const part of expr.parts) evaluate(context, part);
       return unknown(expr);
-    case 'slice': {
-      const parts = expr.parts.map((part) => evaluate(context, part));
-      return { ...(common(parts) ?? unknown(expr)), expr };
-    }
+    case 'slice':
+      return range(context, expr, false);
     case 'text':
       return unknown(expr);
   }
@@ -150,6 +148,14 @@ function comparison(context: Context, expr: CompareExpr): Value {
     agree(context, expr, left, right, { kind: 'comparison', op }, expr);
   });
   return truth;
+}
+
+/** `0:dt:t_end`. `counts`: a loop runs over it; elsewhere `0:n-1` is a list of bare numbers, counted in whatever unit it is used for. */
+export function range(context: Context, expr: SliceExpr, counts: boolean): Value {
+  const shared = common(expr.parts.map((part) => evaluate(context, part)));
+  if (!shared?.form) return unknown(expr);
+  const bare = !counts && isConstant(shared.form) && shared.form.dimension.isOne && expr.parts.some((part) => part.kind === 'number');
+  return bare ? { expr, form: unknownForm(context.fresh('', expr, 'constant')), from: [] } : { ...shared, expr };
 }
 
 /** A literal, or a constant that was given one without a note: a tolerance fits whatever it is compared with. */

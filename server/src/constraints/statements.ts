@@ -6,7 +6,7 @@ import { agree, product, quotient, sum, power } from './arithmetic.ts';
 import { assignedPaths } from './assigned.ts';
 import type { Bindings } from './bindings.ts';
 import type { Context } from './context.ts';
-import { bindElement, evaluate } from './expressions.ts';
+import { bindElement, evaluate, range } from './expressions.ts';
 import { isConstant, oneForm, sameForm, unknownForm } from './form.ts';
 import { assign, notedValue, reportDisagreement, reportMisuse } from './targets.ts';
 import { type Value, unknown } from './value.ts';
@@ -190,7 +190,7 @@ function cases(context: Context, statement: Extract<Stmt, { kind: 'match' }>): b
 
 /** The body is read once: what it assigns before it reads it keeps its version from before the loop, bare numbers become open. */
 function loop(context: Context, statement: Extract<Stmt, { kind: 'loop' }>): void {
-  const iterable = statement.iterable ? evaluate(context, statement.iterable) : undefined;
+  const iterable = statement.iterable?.kind === 'slice' ? range(context, statement.iterable, true) : statement.iterable && evaluate(context, statement.iterable);
   const before = context.bindings;
   context.bindings = before.branch();
   for (const path of assignedPaths(statement.body)) {

@@ -117,6 +117,17 @@ p = p_bar*1e5;             % [Pa]
 x = 40 - T_C;
 y = 3/x;
 
+% ==== Ranges of bare numbers ====
+y = [3 5 4];               % [m]
+t = 0:numel(y) - 1;        % [s]
+v = diff(y)./diff(t);      % [m/s]
+x = 0:10;                  % [m]
+dx = 0.5;                  % [m]
+n = numel(x);
+for k = 1:n
+  z = k*dx;                % [m]
+end
+
 % ==== Products of arrays ====
 A = [2 1; 1 3];            % [N/m]
 F = [10; 5];               % [N]
