@@ -2,13 +2,15 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect, test } from 'vitest';
+import { languageOf } from '../../server/src/frontends/registry.ts';
 import { LineIndex } from '../../server/src/text/line-index.ts';
 import { engine, filesOf } from '../harness/engine.ts';
 
 const folder = join(import.meta.dirname, '../../examples');
-const names = readdirSync(folder).filter((name) => name.endsWith('.py') || name.endsWith('.nomen'));
+const names = readdirSync(folder).filter((name) => languageOf(name) !== undefined);
 const texts = Object.fromEntries(names.map((name) => [`examples/${name}`, readFileSync(join(folder, name), 'utf8')]));
 const workspace = await engine(filesOf(texts));
+await workspace.prepare(...new Set(names.flatMap((name) => languageOf(name) ?? [])));
 
 /** The rows of the README's table, in the order of their files and lines. */
 function listed(): readonly string[] {
