@@ -24,20 +24,55 @@ export function matchScales(a: Measure, b: Measure): readonly (readonly [Reading
 }
 
 /** The factor between two single readings, `left = factor · right`, for the message about a missing conversion; with the turns it needs. */
-export function missingFactor(a: Measure, b: Measure): { readonly ratio: number; readonly turns: number } | undefined {
+export function missingFactor(a: Measure, b: Measure): { readonly ratio: number; readonly plain: number; readonly turns: number } | undefined {
   const [left, right] = [a.readings[0], b.readings[0]];
   if (!left || !right) return undefined;
   const turns = turnFactors(a, b)[0] as number;
   const ratio = (left.scale.toNumber() * turns) / right.scale.toNumber();
-  return { ratio: simplest(ratio, turns, products(a.factors, b.factors)), turns };
+  return { ratio: simplest(ratio, turns, products(converting(a), converting(b))), plain: ratio, turns };
 }
 
-/** What is still missing once the conversions that are there have been taken for such: 2π alone, or a power of ten, where one is left. */
+/** The literals that may have been meant to convert: a 2 or a 1/4 is none. */
+function converting(measure: Measure): readonly Factor[] {
+  return measure.factors.filter((factor) => !isPlain(factor));
+}
+
+/** What is still missing once the conversions that are there have been taken for such: 2π alone, or the number that is shortest to write. */
 function simplest(ratio: number, turns: number, made: readonly Product[]): number {
-  const left = made.map((product) => ratio / product.size);
-  const plain = left.find((each) => Math.abs(each / turns - 1) < close && turns !== 1);
-  const tens = left.filter((each) => Math.abs(Math.log10(each) - Math.round(Math.log10(each))) < 1e-9 && Math.abs(Math.log10(each)) > 0.5);
-  return plain ?? tens.sort((p, q) => Math.abs(Math.log10(p)) - Math.abs(Math.log10(q)))[0] ?? ratio;
+  const plain = made.map((product) => ratio / product.size).find((each) => Math.abs(each / turns - 1) < close && turns !== 1);
+  if (plain !== undefined) return plain;
+  let best = { size: ratio, digits: digitsOf(ratio, close) };
+  for (const product of made) {
+    const size = ratio / product.size;
+    const digits = digitsOf(size, product.tolerance + close);
+    const nearer = digits === best.digits && digits < 20 && Math.abs(Math.log(size)) < Math.abs(Math.log(best.size)) - close;
+    if (digits < best.digits || nearer) best = { size: rounded(size, product.tolerance + close), digits };
+  }
+  return best.size;
+}
+
+/** How many digits a factor or its reciprocal needs within a tolerance; powers of ten need none. */
+function digitsOf(size: number, tolerance: number): number {
+  return Math.min(shortest(size, tolerance), shortest(1 / size, tolerance));
+}
+
+function shortest(size: number, tolerance: number): number {
+  if (!(size >= 1) || size > 1e9) return 20;
+  for (let digits = 1; digits < 8; digits++) {
+    const plain = Number(size.toPrecision(digits));
+    if (Math.abs(plain / size - 1) <= tolerance) return Number.isInteger(Math.log10(plain)) ? 0 : digits + (Number.isInteger(plain) ? 0 : 1);
+  }
+  return 20;
+}
+
+/** The short number that a factor comes to within the tolerance of rounded conversions beside it. */
+function rounded(size: number, tolerance: number): number {
+  const up = size >= 1 ? size : 1 / size;
+  for (let digits = 1; digits < 8; digits++) {
+    const plain = Number(up.toPrecision(digits));
+    if (Math.abs(plain / up - 1) <= tolerance) return size >= 1 ? plain : 1 / plain;
+  }
+  return size;
 }
 
 /**

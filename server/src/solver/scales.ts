@@ -57,7 +57,7 @@ function pendingFault(constraint: Same, value: Value): Fault {
 
 function mismatch(constraint: Same, left: Measure, right: Measure): Fault | undefined {
   const missing = missingFactor(left, right);
-  if (!missing || (Math.abs(missing.ratio - 1) < near && missing.turns === 1)) return undefined;
+  if (!missing || (Math.min(Math.abs(missing.ratio - 1), Math.abs(missing.plain - 1)) < near && missing.turns === 1)) return undefined;
   return { kind: 'scale', constraint, ratio: missing.ratio, turns: missing.turns, zeros: false };
 }
 

@@ -53,6 +53,9 @@ function missing(voice: Voice, fault: DimensionFault): string {
   const inverse = fault.left.div(fault.right);
   const { anchor, left, right, reason } = fault.constraint;
   if (kindsOf(lacking).length === 0 && kindsOf(inverse).length === 0) return 'No usual quantity stands between the two: look for a quotient the wrong way round, or a power left out.';
+  // A symbol that is noted itself is the better witness: what is computed beside it has to change.
+  const computed = !isNoted(reason) && left.version?.note && !right.version?.note ? right : undefined;
+  if (computed && familiarity(lacking) <= familiarity(inverse)) return `${nameOf(voice, anchor, computed)} would have to be divided by something in ${unitWithKinds(lacking)}.`;
   if (familiarity(lacking) <= familiarity(inverse)) return `${nameOf(voice, anchor, left)} would have to be multiplied by something in ${unitWithKinds(lacking)}.`;
   if (isNoted(reason)) return `${nameOf(voice, anchor, left)} would have to be divided by something in ${unitWithKinds(inverse)}.`;
   return `${nameOf(voice, anchor, right)} would have to be multiplied by something in ${unitWithKinds(inverse)}.`;

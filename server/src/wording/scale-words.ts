@@ -5,24 +5,54 @@ import { Dimension } from '../quantities/dimension.ts';
 import type { Fault } from '../solver/fault.ts';
 import { bracket, capital, short } from './dimension-words.ts';
 import { factorWords } from './factor-words.ts';
-import { chainOf, sideWords } from './sides.ts';
-import { nameOf, unitOf, type Voice, type Words } from './voice.ts';
+import { noteLeaves } from '../solver/root-cause.ts';
+import { chainOf, sourceWords } from './sides.ts';
+import { countedIn, nameOf, unitOf, type Voice, type Words } from './voice.ts';
+
+const temperature = Dimension.base('Θ');
+const velocity = Dimension.base('L').div(Dimension.base('T'));
 
 type ScaleFault = Extract<Fault, { kind: 'scale' }>;
 
 export function scaleWords(voice: Voice, fault: ScaleFault): Words {
   const { constraint } = fault;
-  const dimension = constraint.right.form?.dimension ?? Dimension.one;
-  const [a, b] = [unitOf(constraint.left, dimension), unitOf(constraint.right, dimension)];
-  const left = nameOf(voice, constraint.anchor, constraint.left);
-  const advice = fault.zeros ? zeroAdvice(left, constraint.left, constraint.right, a, b) : `Multiply ${left} by ${factorWords(fault.ratio)}${fault.turns !== 1 ? ' (a revolution is 2π radians)' : ''}${correctable(constraint.reason)}.`;
-  const sides = capital(sideWords(voice, constraint.anchor, constraint.left, dimension));
-  return { message: `${openingOf(constraint.reason, a, b, turnsOf(fault))} ${sides}. ${advice}`, related: chainOf(voice, constraint, []) };
+  const { anchor, left, right } = constraint;
+  const dimension = right.form?.dimension ?? Dimension.one;
+  const [a, b] = [countedIn(left, dimension), countedIn(right, dimension)];
+  const sides = [left, ...(isBetween(constraint.reason) ? [right] : [])].map((side) => sourceWords(voice, anchor, side, dimension)).join('; ');
+  return { message: `${openingOf(constraint.reason, a, b, turnsOf(fault))} ${capital(sides)}. ${adviceOf(voice, fault, dimension)}`, related: chainOf(voice, constraint, []) };
 }
 
-/** A conversion that does not fit leaves both sides with one unit's name. */
-function inUnit(a: string, b: string): string {
-  return a === b ? 'otherwise' : `in ${a}`;
+function adviceOf(voice: Voice, fault: ScaleFault, dimension: Dimension): string {
+  const { anchor, left, right, reason } = fault.constraint;
+  const name = nameOf(voice, anchor, left);
+  if (fault.zeros) return zeroAdvice(name, left, right, unitOf(left, dimension), unitOf(right, dimension));
+  const other = isBetween(reason) && fault.turns === 1 ? ` or ${nameOf(voice, anchor, right)} by ${factorWords(1 / fault.ratio)}` : '';
+  return `Multiply ${name} by ${factorWords(fault.ratio)}${other}${turnsAdvice(fault, dimension)}${correctable(reason)}.`;
+}
+
+/** Two terms of the author's own, of which either may be the one to convert. */
+function isBetween(reason: Reason): boolean {
+  return reason.kind === 'sum' || reason.kind === 'comparison' || reason.kind === 'choice' || reason.kind === 'alike';
+}
+
+/** What a rotation leaves open: the radius or the diameter, the frequency or the angular velocity. */
+function turnsAdvice(fault: ScaleFault, dimension: Dimension): string {
+  const { left, right } = fault.constraint;
+  const [from, to] = [left.measure, right.measure];
+  if (fault.turns !== 1) return dimension === velocity && to?.radian === 0 ? ' with a radius, by half of that with a diameter (a revolution is 2π radians)' : ' (a revolution is 2π radians)';
+  const open = from && to && from.cycle !== 0 && to.cycle === 0 && to.radian === 0 && from.radian === 0;
+  return open ? `, or by ${factorWords(fault.ratio * (2 * Math.PI) ** from.cycle)} where the formula is one for rad/s` : '';
+}
+
+/** A conversion that does not fit leaves both sides with one unit's name, or the number in a unit without one. */
+function inUnit(a: string | undefined, b: string | undefined): string {
+  return a === undefined || a === b ? 'otherwise' : `in ${a}`;
+}
+
+/** The two units of terms that ought to share one. */
+function both(opening: string, a: string | undefined, b: string | undefined): string {
+  return a === undefined || b === undefined || a === b ? `${opening} not counted in the same unit.` : `${opening} counted in different units: ${a} and ${b}.`;
 }
 
 /** Rotation that is counted otherwise than the other side counts it. */
@@ -31,16 +61,16 @@ function turnsOf(fault: ScaleFault): string | undefined {
   return (fault.constraint.left.measure?.cycle ?? 0) !== 0 ? 'counts revolutions' : 'counts radians';
 }
 
-function openingOf(reason: Reason, a: string, b: string, turns: string | undefined): string {
+function openingOf(reason: Reason, a: string | undefined, b: string | undefined, turns: string | undefined): string {
   switch (reason.kind) {
     case 'sum':
-      return `The terms are counted in different units: ${a} and ${b}.`;
+      return both('The terms are', a, b);
     case 'comparison':
-      return `This comparison sets ${a} against ${b}.`;
+      return a === undefined || b === undefined || a === b ? both('The two sides of this comparison are', a, b) : `This comparison sets ${a} against ${b}.`;
     case 'choice':
-      return `The two choices are counted in different units: ${a} and ${b}.`;
+      return both('The two choices are', a, b);
     case 'alike':
-      return `\`${short(reason.function)}\` needs its arguments ${reason.positions[0] + 1} and ${reason.positions[1] + 1} in one unit; here they are ${a} and ${b}.`;
+      return `\`${short(reason.function)}\` needs its arguments ${reason.positions[0] + 1} and ${reason.positions[1] + 1} in one unit${a === undefined || b === undefined || a === b ? '' : `; here they are ${a} and ${b}`}.`;
     case 'target':
       if (turns) return `\`${reason.path}\` is noted ${bracket(reason.note.unit.text)}, but this value ${turns}.`;
       return `\`${reason.path}\` is noted ${bracket(reason.note.unit.text)}, but this value is counted ${inUnit(a, b)}.`;
@@ -51,11 +81,11 @@ function openingOf(reason: Reason, a: string, b: string, turns: string | undefin
       if (turns) return `\`${reason.function}\` takes \`${reason.name}\` in ${bracket(reason.note.unit.text)}, but this argument ${turns}.`;
       return `\`${reason.function}\` takes \`${reason.name}\` in ${bracket(reason.note.unit.text)}, but this argument is counted ${inUnit(a, b)}.`;
     case 'argument':
-      return `\`${short(reason.function)}\` takes ${reason.claim === 'rad' ? 'radians' : b}, but this is counted in ${a}.`;
+      return `\`${short(reason.function)}\` takes ${reason.claim === 'rad' ? 'radians' : (b ?? 'another unit')}, but this is counted ${inUnit(a, b)}.`;
     case 'conversion-edge':
-      return `This empirical relation counts \`${reason.path}\` in ${bracket(reason.note.unit.text)}, but here it is counted in ${a}.`;
+      return `This empirical relation counts \`${reason.path}\` in ${bracket(reason.note.unit.text)}, but here it is counted ${inUnit(a, b)}.`;
     default:
-      return `Different units stand where one is needed: ${a} and ${b}.`;
+      return both('The values are', a, b);
   }
 }
 
@@ -89,7 +119,15 @@ export function pointWords(voice: Voice, fault: Extract<Fault, { kind: 'point' }
   if (constraint.use === 'gas law') {
     return { message: `${name} is a gauge pressure (${unit}) in a gas law, which needs the absolute pressure. Add the atmospheric pressure first.`, related };
   }
-  const where = constraint.use === 'product' ? 'multiplied with another quantity' : constraint.use === 'quotient' ? 'divided by or dividing another quantity' : 'raised to a power';
-  const advice = unit.includes('F') ? 'add 459.67 for °R' : 'add 273.15 for K';
-  return { message: `${name} is a temperature in ${unit} and is ${where}; the result depends on where that scale has its zero. Use an absolute temperature (${advice}) or a temperature difference.`, related };
+  const point = pointIn(value) ?? value;
+  const own = unitOf(point, temperature);
+  const advice = /F/.test(own) ? 'add 459.67 for °R' : 'add 273.15 for K';
+  const what = point === value ? `${name} is a temperature in ${own}` : `${nameOf(voice, anchor, { ...point, expr: undefined })} is a temperature in ${own} and a factor of ${name}`;
+  const where = constraint.use === 'product' ? 'a product' : constraint.use === 'quotient' ? 'a quotient' : 'a power';
+  return { message: `${what}; ${where} depends on where that scale has its zero. Use an absolute temperature (${advice}) or a temperature difference.`, related };
+}
+
+/** The noted temperature that a product carries from another zero. */
+function pointIn(value: Value): Value | undefined {
+  return value.form?.dimension === temperature ? undefined : noteLeaves(value).find((leaf) => leaf.version?.note?.unit.offset && leaf.form?.dimension === temperature);
 }

@@ -6,7 +6,7 @@ import type { Dimension } from '../quantities/dimension.ts';
 import type { Involved } from '../solver/fault.ts';
 import { noteLeaves, sidesOf } from '../solver/root-cause.ts';
 import { type Anchor, type Place, placeAt } from '../text/span.ts';
-import { type Related, code, nameOf, unitOf, unitWords, type Voice, where } from './voice.ts';
+import { type Related, code, countedIn, nameOf, unitOf, unitWords, type Voice, where } from './voice.ts';
 
 const mostLeaves = 5;
 
@@ -18,6 +18,14 @@ export function sideWords(voice: Voice, anchor: Anchor, value: Value, dimension:
   if (own) return `${nameOf(voice, anchor, value)} is ${unit} (${where(voice, placeAt(own.anchor, own.note.span))})`;
   const parts = leaves.slice(0, mostLeaves).map((leaf) => leafWords(voice, leaf));
   return `${nameOf(voice, anchor, value)} is ${unit}${parts.length > 0 ? ` (${parts.join('; ')}${leaves.length > mostLeaves ? '; …' : ''})` : ''}`;
+}
+
+/** "`V_dot*dp/1000` comes from V_dot m3/h, line 3; dp Pa, line 4": where the number is counted in no unit with a name. */
+export function sourceWords(voice: Voice, anchor: Anchor, value: Value, dimension: Dimension): string {
+  const leaves = noteLeaves(value).filter((leaf) => leaf !== value);
+  if (value.version?.note || leaves.length === 0 || countedIn(value, dimension) !== undefined || (value.measure && value.measure.cycle + value.measure.radian !== 0)) return sideWords(voice, anchor, value, dimension);
+  const parts = leaves.slice(0, mostLeaves).map((leaf) => leafWords(voice, leaf));
+  return `${nameOf(voice, anchor, value)} comes from ${parts.join('; ')}${leaves.length > mostLeaves ? '; …' : ''}`;
 }
 
 function leafWords(voice: Voice, leaf: Value): string {

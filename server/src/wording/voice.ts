@@ -38,14 +38,19 @@ export function nameOf(voice: Voice, anchor: Anchor, value: Value): string {
   return value.version ? `\`${value.version.path}\`` : 'this value';
 }
 
-/** The unit of a side as the author writes units, else the coherent SI unit: `kPa`, `W/(m K)`. */
+/** The unit of a side as the author writes units, else the coherent SI unit of its dimension: `kPa`, `W/(m K)`. */
 export function unitOf(value: Value, dimension: Dimension): string {
+  return countedIn(value, dimension) ?? unitWords(coherentUnit(dimension), dimension);
+}
+
+/** The unit that a side's number is counted in, where that is known and has a name; a 2 or a 1/4 in front converts nothing. */
+export function countedIn(value: Value, dimension: Dimension): string | undefined {
   const note = value.version?.note;
   if (note && note.unit.dimension === dimension && note.unit.text !== '') return unitWords(note.unit.text, dimension);
-  const reading = value.measure?.readings.length === 1 && value.measure.factors.length === 0 ? value.measure.readings[0] : undefined;
+  const plain = value.measure?.factors.every(({ literal }) => literal.pure && literal.pi === 0 && !Number.isInteger(Math.log10(Math.abs(literal.value.toNumber())))) === true;
+  const reading = value.measure?.readings.length === 1 && plain ? value.measure.readings[0] : undefined;
   const printed = reading && value.form?.terms.length === 0 ? printUnit({ dimension, scale: reading.scale, text: '' }) : undefined;
-  if (printed !== undefined && !/^[\d.]+ /.test(printed)) return unitWords(turned(printed, value.measure), dimension);
-  return unitWords(coherentUnit(dimension), dimension);
+  return printed === undefined || /^\d\S* /.test(printed) ? undefined : unitWords(turned(printed, value.measure), dimension);
 }
 
 /** Revolutions and radians show in a plain rate: `1/s` of something in rpm is `rev/s`. */
