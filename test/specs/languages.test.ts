@@ -14,8 +14,8 @@ import { writeSection } from '../harness/writing/section.ts';
 
 /** How many sections at least each language says; the writer and the language's printer hold them up. */
 const floors: Readonly<Record<string, number>> = {
-  python: 218,
-  matlab: 207,
+  python: 243,
+  matlab: 232,
 };
 
 const sections = ['handbook', 'silent'].flatMap((folder) => readdirSync(join(import.meta.dirname, folder)).filter((name) => name.endsWith('.py')).flatMap((name) =>

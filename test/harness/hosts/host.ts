@@ -20,6 +20,8 @@ export interface Local {
   readonly noteLine: number;
   /** Members of the list that it is first given; undefined for a number. */
   readonly size: number | undefined;
+  /** Of what it is given first. */
+  readonly type: 'number' | 'truth' | 'text';
   /** Assigned once, in the outermost block. */
   readonly isConstant: boolean;
   /** The first assignment stands in the outermost block, so that it can be its declaration. */
@@ -30,6 +32,8 @@ export interface Local {
 
 export interface FunctionWords {
   readonly name: string;
+  /** It calls itself. */
+  readonly isRecursive: boolean;
   readonly params: readonly NotedName[];
   /** What is returned: none, one, or several; the names are those of variables that languages which return by name give. */
   readonly results: readonly NotedName[];
@@ -71,8 +75,8 @@ export interface Host {
   readonly ignoresCase?: boolean;
   /** The comment of a variable that is assigned once stands on its declaration. */
   readonly declaresNotes?: boolean;
-  /** `1/3` is 0. */
-  readonly integerDivision?: boolean;
+  /** Variables have types: `1/3` is 0, and a variable is not a number first and then a text. */
+  readonly isTyped?: boolean;
   /** Order of the file: as written, scripts before functions, functions before scripts. */
   readonly order: 'as written' | 'script first' | 'functions first';
   readonly keywords: ReadonlySet<string>;

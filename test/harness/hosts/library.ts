@@ -40,6 +40,6 @@ export function taking(callee: string, ...counts: readonly number[]): Said {
 }
 
 /** `float("inf")` and `float(x)`; `np.float64` alike. */
-export function numberOf(infinity: string): Said {
-  return ([only]) => (only?.kind === 'text' ? (/^[+]?inf/i.test(only.value) ? name(infinity) : undefined) : only);
+export function numberOf(infinity: string | Expr): Said {
+  return ([only]) => (only?.kind === 'text' ? (/^[+]?inf/i.test(only.value) ? (typeof infinity === 'string' ? name(infinity) : infinity) : undefined) : only);
 }

@@ -10,37 +10,41 @@ interface Assigned {
   isCounter: boolean;
 }
 
-/** What the statements assign, in the order of the first assignments; functions inside are scopes of their own. `listOf` finds literal lists. */
-export function localsOf(block: readonly Stmt[], params: readonly string[], listOf: (expr: Expr) => readonly Expr[] | undefined, nameOf: (name: string) => string, lineOf: (stmt: Stmt) => number): readonly Local[] {
+/**
+ * What the statements assign, in the order of the first assignments; functions inside are scopes of their own. `listOf` finds literal
+ * lists; `byIndex`: every loop over a list counts.
+ */
+export function localsOf(block: readonly Stmt[], params: readonly string[], listOf: (expr: Expr) => readonly Expr[] | undefined, nameOf: (name: string) => string, lineOf: (stmt: Stmt) => number, byIndex: boolean): readonly Local[] {
   const found = new Map<string, Assigned>();
-  collect(block, true, found);
+  collect(block, true, found, byIndex);
   return [...found].filter(([name]) => !params.includes(name)).map(([name, { count, first, atTop, isCounter }]) => ({
     name: nameOf(name),
     note: count === 1 ? first.trailing?.text : undefined,
     noteLine: lineOf(first),
-    size: first.kind === 'assign' ? listOf(first.value)?.length : undefined,
+    size: first.kind === 'assign' && first.targets[0]?.kind === 'name' ? listOf(first.value)?.length : undefined,
+    type: first.kind === 'assign' ? typeOf(first.value) : 'number',
     isConstant: count === 1 && atTop && !isCounter,
     declaredByAssignment: atTop,
     isCounter,
   }));
 }
 
-function collect(block: readonly Stmt[], atTop: boolean, found: Map<string, Assigned>): void {
+function collect(block: readonly Stmt[], atTop: boolean, found: Map<string, Assigned>, byIndex: boolean): void {
   for (const stmt of block) {
-    for (const { name, isCounter } of assignedBy(stmt)) {
+    for (const { name, isCounter } of assignedBy(stmt, byIndex)) {
       const known = found.get(name);
       if (known) known.count++;
       else found.set(name, { count: stmt.kind === 'loop' ? 2 : 1, first: stmt, atTop: atTop && stmt.kind === 'assign', isCounter });
     }
-    if (stmt.kind !== 'function' && stmt.kind !== 'class') for (const inner of blocksOf(stmt)) collect(inner, false, found);
+    if (stmt.kind !== 'function' && stmt.kind !== 'class') for (const inner of blocksOf(stmt)) collect(inner, false, found, byIndex);
   }
 }
 
-function assignedBy(stmt: Stmt): readonly { readonly name: string; readonly isCounter: boolean }[] {
+function assignedBy(stmt: Stmt, byIndex = false): readonly { readonly name: string; readonly isCounter: boolean }[] {
   const targets = stmt.kind === 'assign' ? stmt.targets : stmt.kind === 'loop' && stmt.target ? [stmt.target] : [];
   const names = targets.flatMap((target) => (target.kind === 'name' ? [target.name] : target.kind === 'sequence' ? target.items.flatMap((item) => (item.kind === 'name' ? [item.name] : [])) : []));
   const isCounter = stmt.kind === 'loop' && stmt.iterable?.kind === 'call' && stmt.iterable.callee.kind === 'name' && stmt.iterable.callee.name === 'range';
-  const counter = stmt.kind === 'loop' && stmt.target?.kind === 'sequence' && stmt.iterable ? walked(stmt, stmt.target, stmt.iterable).counter : undefined;
+  const counter = stmt.kind === 'loop' && stmt.target && stmt.iterable && (stmt.target.kind === 'sequence' || (byIndex && !isCounter)) ? walked(stmt, stmt.target, stmt.iterable).counter : undefined;
   const found = names.filter((name) => name !== counter).map((name) => ({ name, isCounter }));
   return counter === undefined ? found : [{ name: counter, isCounter: true }, ...found];
 }
@@ -53,6 +57,12 @@ export function walked(stmt: LoopStmt, target: Expr, iterable: Expr): { readonly
   if (callee === 'enumerate' && names.length === 2 && lists.length === 1) return { counter: names[0] as string, pairs: [[names[1] as string, lists[0] as Expr]] };
   if (names.length !== lists.length || (callee !== 'zip' && callee !== undefined)) return { counter: `n${stmt.start}`, pairs: [] };
   return { counter: `n_${names[0]}`, pairs: names.map((name, at) => [name, lists[at] as Expr] as const) };
+}
+
+/** The type of a value, as far as it shows. */
+export function typeOf(value: Expr): Local['type'] {
+  if (value.kind === 'text') return 'text';
+  return value.kind === 'truth' || value.kind === 'compare' || value.kind === 'logic' ? 'truth' : 'number';
 }
 
 /** Names of the script that its functions read. */

@@ -111,7 +111,7 @@ export class Speaker {
     const own = this.names.library(expr.callee);
     if (own === undefined) return expr.callee.kind === 'name' ? { ...expr, callee: this.turn(expr.callee), args: this.plain(expr, expr.callee.name) } : unsayable('methods');
     const said = Object.hasOwn(this.host.library, own) ? this.host.library[own] : undefined;
-    const args = this.plain(expr, own).map((arg) => arg.value);
+    const args = this.plain(expr, own).map((arg) => this.real(arg.value));
     const made = typeof said === 'string' ? call(said, ...args) : said?.(args);
     return made ?? unsayable(`library ${own}`);
   }
@@ -131,21 +131,26 @@ export class Speaker {
     if (says.has('named arguments') && given.slice(0, count).some((each) => each === undefined)) return expr.args;
     return params.slice(0, says.has('defaults') ? count : params.length).map((param, at): Argument => {
       const { name: _name, ...arg } = given[at] ?? { value: param.default ?? unsayable('missing arguments'), start: 0, end: 0 };
-      return arg;
+      return { ...arg, value: this.real(arg.value) };
     });
   }
 
   private binary(expr: Extract<Expr, { kind: 'binary' }>): Expr {
     if (['@', '\\', 'bits', '//'].includes(expr.op) || (expr.op === '%' && expr.left.kind === 'text')) return unsayable(`operator ${expr.op}`);
     const { mod } = this.host.library;
-    if (expr.op === '%' && typeof mod === 'string') return call(mod, this.turn(expr.left), this.turn(expr.right));
+    if (expr.op === '%' && typeof mod === 'string') return call(mod, this.turn(expr.left), this.real(this.turn(expr.right)));
     const [left, right] = [this.turn(expr.left), this.turn(expr.right)];
-    const real = this.host.integerDivision && expr.op === '/' && right.kind === 'number' && /^\d+$/.test(right.text);
-    return { ...expr, left, right: real ? { ...right, text: `${right.text}.0` } : right };
+    return { ...expr, left, right: expr.op === '/' ? this.real(right) : right };
+  }
+
+  /** A whole number as a real one, where the language tells them apart. */
+  private real(expr: Expr): Expr {
+    return this.host.isTyped && expr.kind === 'number' && /^\d+$/.test(expr.text) ? { ...expr, text: `${expr.text}.0` } : expr;
   }
 
   private compare({ operands, ops }: CompareExpr): Expr {
     if (ops.some((op) => op === 'in' || op === 'not in')) return unsayable('membership');
+    if (this.host.isTyped && operands.some((each) => each.kind === 'text')) return unsayable('texts compared');
     const turned = operands.map((each) => this.turn(each));
     const plain = ops.map((op) => (op === 'is' ? '==' : op === 'is not' ? '!=' : op));
     return and(plain.map((op, at) => compare(turned[at] as Expr, op, turned[at + 1] as Expr)));
@@ -161,6 +166,7 @@ export class Speaker {
 
   private sequence(expr: Extract<Expr, { kind: 'sequence' }>): Expr {
     if (expr.comments?.some((each) => each !== undefined)) return unsayable('comments in lists');
+    if (this.host.isTyped && expr.items.length === 0) return unsayable('empty lists');
     if (expr.form === 'set' || expr.form === 'matrix') return unsayable(expr.form);
     const isMatrix = expr.items.some((item) => item.kind === 'sequence');
     this.needs(isMatrix ? 'matrix' : expr.form === 'tuple' ? 'tuple' : 'list', expr);

@@ -7,10 +7,10 @@ import type { FunctionWords, Host, Line, Local } from '../hosts/host.ts';
 import { binary, name as named, number } from '../hosts/make.ts';
 import { documentedBy } from './documented.ts';
 import type { Names } from './names.ts';
-import { arraysIn, localsOf, walked } from './scope.ts';
+import { arraysIn, localsOf, typeOf, walked } from './scope.ts';
 import { Speaker } from './speak.ts';
 import { unsayable } from './unsayable.ts';
-import { namesIn, nestedIn } from './visit.ts';
+import { expressionsOf, namesIn, nestedIn } from './visit.ts';
 
 interface Scope {
   readonly locals: ReadonlyMap<string, Local>;
@@ -32,7 +32,7 @@ export class Writer {
 
   /** The variables of a block, under the names that they have in the host. */
   locals(block: readonly Stmt[], params: readonly string[] = []): readonly Local[] {
-    return localsOf(block, params, (expr) => this.speaker.list(expr), (name) => this.names.of(name), (stmt) => this.lineAt(stmt.start));
+    return localsOf(block, params, (expr) => this.speaker.list(expr), (name) => this.names.of(name), (stmt) => this.lineAt(stmt.start), !this.host.each);
   }
 
   /** A block of the script itself. */
@@ -58,7 +58,7 @@ export class Writer {
     const results = Array.from({ length: count }, (_, at) => ({ name: freshName(count > 1 ? `result${at + 1}` : 'result', taken), isArray: false, ...(notedResults.get(at) ?? { unit: undefined, words: '' }) }));
     if ([...notedResults.keys()].some((at) => at >= count)) return unsayable('notes on a result that is none');
     const words: FunctionWords = {
-      name: this.names.of(fn.name), locals, summary, remarks, results,
+      name: this.names.of(fn.name), locals, summary, remarks, results, isRecursive: fn.body.flatMap((each) => [...nestedIn(each)]).some((each) => expressionsOf(each).some((expr) => [...namesIn(expr)].includes(fn.name))),
       params: fn.params.map((param) => ({
         name: this.names.of(param.name), isArray: arrays.has(param.name), ...(params.get(param.name) ?? { unit: undefined, words: '' }),
         default: param.default && this.host.says.has('defaults') ? this.speaker.print(param.default) : undefined,
@@ -161,6 +161,7 @@ export class Writer {
     if (stmt.value.kind === 'record' && target.kind === 'name') return this.record(stmt, stmt.value, left, scope);
     if (stmt.op && this.host.says.has('updates')) return [this.line(stmt, this.host.evaluate(`${left} ${stmt.op}= ${this.speaker.print(stmt.value)}`))];
     const local = scope.locals.get(left);
+    if (this.host.isTyped && local && !stmt.op && typeOf(stmt.value) !== local.type) return unsayable('a variable of several types');
     const first = local?.declaredByAssignment && !scope.declared.has(left);
     const value = first && local.size !== undefined && this.host.initial ? this.host.initial((this.speaker.list(stmt.value) ?? []).map((item) => this.speaker.print(item))) : this.speaker.print(stmt.op ? binary(stmt.op, target, stmt.value) : stmt.value);
     scope.declared.add(left);
