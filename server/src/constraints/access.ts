@@ -1,6 +1,7 @@
 /** Reading symbols: names, attributes, subscripts. */
 import { pathOf } from '../program/path.ts';
 import type { Expr, IndexExpr, MemberExpr, NameExpr } from '../program/nodes.ts';
+import { call } from './calls.ts';
 import type { Context } from './context.ts';
 import { evaluate } from './expressions.ts';
 import { isConstant } from './form.ts';
@@ -39,6 +40,7 @@ export function memberOf(context: Context, expr: MemberExpr): Value {
 }
 
 export function indexed(context: Context, expr: IndexExpr): Value {
+  if (holdsFunction(context, expr.object)) return call(context, { kind: 'call', callee: expr.object, args: expr.keys.map((value) => ({ value, start: value.start, end: value.end })), results: 1, start: expr.start, end: expr.end });
   const path = pathOf(expr);
   const key = expr.keys.length === 1 ? expr.keys[0] : undefined;
   for (const each of expr.keys) if (each.kind !== 'text') evaluate(context, each);
@@ -56,6 +58,12 @@ export function indexed(context: Context, expr: IndexExpr): Value {
   if (object.items) return itemOf(object.items, expr, key);
   if (object.fields || object.callable || object.element) return unknown(expr);
   return isFixed(expr) && object.form && !isConstant(object.form) ? unknown(expr) : withExpr({ ...object, from: [object] }, expr);
+}
+
+/** `f(2)` of a variable that holds a function, where an element is written like a call. */
+function holdsFunction(context: Context, object: Expr): boolean {
+  const kind = object.kind === 'name' || object.kind === 'member' ? evaluate(context, object).callable?.kind : undefined;
+  return kind === 'local' || kind === 'function';
 }
 
 /** `y[0]` of an array without a note: a state vector's places have units of their own. */

@@ -5,11 +5,12 @@ export class Names {
   private found: ReadonlySet<string> | undefined;
   private lengths: boolean | undefined;
 
-  constructor(private readonly chunk: Chunk) {}
+  /** `transposes`: a quote behind an operand opens no text. */
+  constructor(private readonly chunk: Chunk, private readonly transposes = false) {}
 
   /** Whether the code of the chunk uses a name; of a dotted name, its last part. */
   readonly occurs = (name: string): boolean => {
-    this.found ??= gather(this.chunk);
+    this.found ??= gather(this.chunk, this.transposes);
     return this.found.has(name.slice(name.lastIndexOf('.') + 1).replace(/\[.*$/, ''));
   };
 
@@ -30,7 +31,7 @@ export class Names {
   }
 }
 
-function gather(chunk: Chunk): ReadonlySet<string> {
+function gather(chunk: Chunk, transposes: boolean): ReadonlySet<string> {
   let code = '';
   let from = 0;
   for (const comment of chunk.comments) {
@@ -38,6 +39,6 @@ function gather(chunk: Chunk): ReadonlySet<string> {
     from = comment.end;
   }
   code += chunk.text.slice(from);
-  const plain = code.replace(/("""|''')[\s\S]*?\1/g, ' ').replace(/(['"])(?:\\.|(?!\1)[^\\\n])*\1/g, ' ');
+  const plain = (transposes ? code.replace(/(?<=[\p{L}\p{N}_)\]}.])'|'[^'\n]*'|"[^"\n]*"/gu, ' ') : code).replace(/("""|''')[\s\S]*?\1/g, ' ').replace(/(['"])(?:\\.|(?!\1)[^\\\n])*\1/g, ' ');
   return new Set(plain.match(/[\p{L}_][\p{L}\p{N}_]*/gu) ?? []);
 }

@@ -38,6 +38,11 @@ describe('trailing comments', () => {
   ])('%s', (text, found) => expect(notes(text)).toBe(found));
 });
 
+describe('names in the code', () => {
+  it('between transposes are names', () => expect(notes("% A [N/m] stiffness\nW = u'*A*u';")).toBe('file:A N/m'));
+  it('in texts are none', () => expect(notes("% A [N/m] stiffness\ndisp('A'), B = u';")).toBe('none'));
+});
+
 describe('comments above', () => {
   it.each([
     ['% V [m/s], D [m]\nRe = V*D/nu;', 'file:V m/s; file:D m'],

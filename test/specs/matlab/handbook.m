@@ -242,6 +242,17 @@ h = fzero(@(z) A*z - V, h0);   % [m]
 h_wrong = fzero(@(z) A*z - V, h0) + V;
 %         ^^^^^^^^^^^^^^^^^^^^^^^^^^^ unlike-terms
 
+% ==== A function in a variable ====
+% White, 8th ed., eq. 2.14 (hydrostatic pressure)
+rho = 998;                     % [kg/m^3]
+g = 9.81;                      % [m/s^2]
+p = @(z) rho*g*z;
+z = 2.5;                       % [m]
+t = 3;                         % [s]
+p_1 = p(z);                    % [Pa]
+p_2 = p(t);                    % [Pa]
+%     ^^^^ unlike-result
+
 % ==== Tank that runs empty ====
 % White, 8th ed., example 3.22 (Torricelli's law)
 function dh = emptying(t, h)

@@ -221,6 +221,17 @@ function Q = mflow(rho, q)
 Q = rho*q;
 end
 
+% ==== Objects ====
+function A = wetted(depth)
+% depth - level [m]
+% A - area [m^2]
+tank = struct('width', 2, 'f', @(d) d*2);
+width = 2;                 % [m]
+side = @(d) d*width;
+A = side(depth);
+h = tank.f(depth);
+end
+
 % ==== Block comments ====
 %{
   V [m/s] velocity
