@@ -27,7 +27,8 @@ export function callLibrary(context: Context, expr: CallExpr, signature: Signatu
   const binding: Binding = { values: new Map(), literals: new Map() };
   const pairs = pairUp(signature, passed);
   for (const [at, { param, given }] of pairs.entries()) {
-    if (given.value.misuse) reportMisuse(context, given.value);
+    // Where the argument comes out as a pure number, no literal in it hides a unit.
+    if (given.value.misuse) reportMisuse(context, given.value, isPureClaim(param.claim) && isPlainNumber(given.value));
     if (param.claim.kind === 'unit') argument(context, signature, at, param, param.claim, given, binding);
   }
   for (const { param, given } of pairs) if (param.claim.kind === 'function') functionArgument(param.claim, given.value, binding);

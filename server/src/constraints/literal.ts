@@ -93,10 +93,12 @@ function isPure(value: Rational): boolean {
   return size.den <= 16n && size.num <= 64n;
 }
 
-/** A decimal such as 10.2 or 6.2 is no fraction that anybody means: it was measured, or looked up. 3.6 converts. */
+/** A decimal such as 10.2 or 6.5 is no fraction that anybody means: it was measured, or looked up. 3.6 converts. */
 function isMeasured(value: Rational): boolean {
-  return value.den !== 1n && value.num > 16n && !value.equals(kilo);
+  return value.den !== 1n && (value.num > 16n || value.compare(largestFraction) > 0) && !value.equals(kilo);
 }
+
+const largestFraction = Rational.of(5, 2);
 
 const kilo = Rational.of(18, 5);
 

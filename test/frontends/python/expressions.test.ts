@@ -62,7 +62,7 @@ describe('access and calls', () => {
     ['df[["a", "b"]]', '(at df (list "a" "b"))'],
     ['f(x, *r, k=1, **kw)', '(f x ...r k=1 ...kw)'],
     ['f(x)(y).z[0]', '(at (. ((f x) y) z) 0)'],
-    ['dict(a=1)', '(dict a=1)'],
+    ['dict(a=1)', '{"a": 1}'], ['dict(x, a=1)', '(dict x a=1)'],
     ['sum(x for x in y)', '(sum (each x for x in y))'],
     ['await z', '(? z)'],
   ]);

@@ -327,3 +327,51 @@ pump = Pump()
 margin = pump.H - 2.5
 too_much = pump.Q + pump.H
 #          ^^^^^^^^^^^^^^^ unlike-terms
+
+# ==== Units through annotated objects ====
+# common practice
+from dataclasses import dataclass
+
+
+@dataclass
+class Motor:
+    power: float        # [kW]
+    speed: float        # [rpm]
+
+
+@dataclass
+class Hoist:
+    motor: Motor
+    radius: float       # [m]
+    other: "Hoist"
+
+    def rope_speed(self) -> float:
+        """Speed of the rope at the drum [m/s]."""
+        return self.motor.speed/60*self.radius
+        #      ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ scale-mismatch: 2*pi
+
+
+def heat(hoist: Hoist, eta) -> float:
+    """
+    :param eta: efficiency [-]
+    :return: heat flow [W]
+    """
+    return (1 - eta)*hoist.motor.power
+    #      ^^^^^^^^^^^^^^^^^^^^^^^^^^^ scale-mismatch: 1000
+
+
+def torque(motor: Motor) -> float:
+    """
+    :return: torque [N m]
+    """
+    return motor.power*motor.speed
+    #      ^^^^^^^^^^^^^^^^^^^^^^^ unlike-result
+
+# ==== A record made by a call ====
+# common practice
+par = dict(
+    rho=998.2,      # [kg/m^3]
+    d=40.0,         # [mm]
+)
+A = 3.14159/4*par["d"]**2       # [m^2]
+#   ^^^^^^^^^^^^^^^^^^^^^ scale-mismatch: 0.000001

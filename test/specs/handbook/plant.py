@@ -74,3 +74,22 @@ c_p = 1006.0        # [J/(kg K)]
 dT = 14.0           # [K]
 P = 1.2*Q*c_p*dT    # [W]
 #   ^^^^^^^^^^^^ hidden-unit: density of standard air
+
+# ==== Arrhenius with a temperature in degC ====
+# Levenspiel, Chemical Reaction Engineering, chapter 2
+import math
+
+k0 = 3.4e6          # [1/s]
+Ea = 58.0           # [kJ/mol]
+R = 8.314           # [J/(mol K)]
+T = 64.0            # [degC]
+k = k0*math.exp(-Ea*1000/(R*(T + 273.15)))  # [1/s]
+k_slip = k0*math.exp(-Ea*1000/(R*T))        # [1/s]
+#                    ^^^^^^^^^^^^^^ offset-misuse: 273.15
+
+# ==== A coefficient of heat loss in digits, with a fraction ====
+A = 5.1             # [m^2]
+T = 64.0            # [degC]
+T_a = 20.0          # [degC]
+loss = 6.5*A*(T - T_a)      # [W]
+#      ^^^^^^^^^^^^^^^ hidden-unit: `6.5` carried

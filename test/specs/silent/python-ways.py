@@ -447,3 +447,55 @@ start = time.time()
 elapsed = time.time() - start
 rate = 100 / max(elapsed, 1e-9)
 print(f"{rate:.0f} per second")
+
+# ==== A record made by a call ====
+# common practice
+import math
+
+par = dict(
+    rho=998.2,      # [kg/m^3]
+    d=40.0,         # [mm]
+    dp=240.0,       # [Pa]
+    name="tank",
+)
+
+
+def outflow(C):
+    """Flow [kg/s] of the tank."""
+    A = math.pi/4*(par["d"]/1000)**2        # [m^2]
+    return C*A*math.sqrt(2*par["dp"]*par["rho"])
+
+# ==== Objects by the annotation of a parameter and of a field ====
+# common practice
+from dataclasses import dataclass
+from typing import Optional
+
+
+@dataclass
+class Motor:
+    power: float        # [kW]
+    speed: float        # [rpm]
+
+    def torque(self) -> float:
+        """Torque at the shaft for full load [N m]."""
+        return 9550*self.power/self.speed
+
+
+@dataclass
+class Drive:
+    motor: Motor
+    spare: Optional["Motor"]
+    ratio: float        # [-]
+
+    def output(self) -> float:
+        """Torque at the output shaft [kN m]."""
+        return self.motor.torque()*self.ratio/1000
+
+
+def losses(drive: Drive, eta: float) -> float:
+    """Heat to be taken away.
+
+    :param eta: efficiency [-]
+    :return: heat flow [W]
+    """
+    return (1 - eta)*drive.motor.power*1000

@@ -47,6 +47,7 @@ const byType: Record<string, Lower> = {
   },
   call: (low, node, span) => {
     const args = fieldOf(node, 'arguments');
+    if (args && isRecordCall(low, node, args)) return recordOfArguments(low, args, span);
     return { kind: 'call', callee: child(low, node, 'function'), args: args ? lowerArguments(low, args) : [], ...span };
   },
   attribute: (low, node, span) => {
@@ -206,6 +207,23 @@ function dictionary(low: Lowering, node: Syntax, span: Span): Expr {
     entries.push({ key: lowered.value, keySpan: spanOf(low, key), value: lowerExpression(low, value), ...(comment ? { comment } : {}), ...spanOf(low, part) });
   }
   return { kind: 'record', entries, others, ...span };
+}
+
+/** `dict(rho=998.2, cp=4180.0)` is the record with these entries. */
+function isRecordCall(low: Lowering, node: Syntax, args: Syntax): boolean {
+  const callee = fieldOf(node, 'function');
+  const parts = partsOf(args);
+  return callee !== undefined && /^(?:dict|(?:types\.)?SimpleNamespace)$/.test(textOf(low, callee)) && parts.length > 0 && parts.every((part) => part.type === 'keyword_argument');
+}
+
+function recordOfArguments(low: Lowering, args: Syntax, span: Span): Expr {
+  const entries = partsOf(args).flatMap((part): readonly RecordEntry[] => {
+    const [name, value] = [fieldOf(part, 'name'), fieldOf(part, 'value')];
+    if (!name || !value) return [];
+    const comment = low.comments.beside(spanOf(low, part));
+    return [{ key: textOf(low, name), keySpan: spanOf(low, name), value: lowerExpression(low, value), ...(comment ? { comment } : {}), ...spanOf(low, part) }];
+  });
+  return { kind: 'record', entries, others: [], ...span };
 }
 
 function comprehension(low: Lowering, node: Syntax, span: Span): Expr {
