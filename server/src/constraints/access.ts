@@ -16,7 +16,9 @@ export function nameOf(context: Context, expr: NameExpr): Value {
   if (bound) return withExpr(bound, expr);
   const symbol = context.surroundings.notes.symbol(expr.name, context.owner);
   const outside = context.surroundings.global(expr.name);
-  if (outside && (!symbol || outside.version?.note || outside.callable || outside.module)) return withExpr(outside, expr);
+  // `gamma` and `beta` of a nomenclature are those symbols, and not the built-in functions of that name.
+  const isBuiltIn = outside?.callable?.kind === 'library';
+  if (outside && (!symbol || outside.version?.note || (outside.callable && !isBuiltIn) || outside.module)) return withExpr(outside, expr);
   if (!symbol) return unknown(expr);
   const noted = notedValue(expr.name, symbol, context.anchor, undefined);
   context.bindings.set(expr.name, noted);

@@ -68,7 +68,11 @@ interface Callee {
 }
 
 function calleeOf(context: Context, callee: Expr): Callee {
-  if (callee.kind !== 'member') return { value: evaluate(context, callee), bound: false };
+  if (callee.kind !== 'member') {
+    const value = evaluate(context, callee);
+    const named = callee.kind === 'name' && !value.callable ? context.surroundings.global(callee.name) : undefined;
+    return { value: named?.callable?.kind === 'library' ? { ...named, expr: callee } : value, bound: false };
+  }
   const object = evaluate(context, callee.object);
   if (object.module || object.fields?.has(callee.name)) {
     return { value: evaluate(context, callee), bound: object.fields !== undefined };
