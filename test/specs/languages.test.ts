@@ -16,6 +16,8 @@ import { writeSection } from '../harness/writing/section.ts';
 const floors: Readonly<Record<string, number>> = {
   python: 243,
   matlab: 232,
+  javascript: 229,
+  typescript: 229,
 };
 
 const sections = ['handbook', 'silent'].flatMap((folder) => readdirSync(join(import.meta.dirname, folder)).filter((name) => name.endsWith('.py')).flatMap((name) =>

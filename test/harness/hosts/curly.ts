@@ -1,7 +1,8 @@
 /** What the languages with curly brackets have in common. */
 import type { Host, Line } from './host.ts';
 
-export const curly: Pick<Host, 'comment' | 'evaluate' | 'if' | 'elseIf' | 'else' | 'while' | 'end' | 'give' | 'giveNothing'> = {
+export const curly: Pick<Host, 'comment' | 'evaluate' | 'if' | 'elseIf' | 'else' | 'while' | 'end' | 'give' | 'giveNothing' | 'leavesAlone'> = {
+  leavesAlone: new Set(['[in]', 'loop heads']),
   comment: (text) => `// ${text}`,
   evaluate: (value) => `${value};`,
   if: (condition) => `if (${condition}) {`,

@@ -66,6 +66,8 @@ export type Feature = 'choose' | 'lambda' | 'comprehension' | 'tuple' | 'nothing
 export type Said = string | ((args: readonly Expr[]) => Expr | undefined);
 
 export interface Host {
+  /** Notes that its reader leaves alone on purpose: `[in]` is a direction where Doxygen is at home, a comment behind the brace of a loop stands in its body. */
+  readonly leavesAlone?: ReadonlySet<'[in]' | 'loop heads'>;
   readonly language: LanguageId;
   readonly fileName: string;
   readonly says: ReadonlySet<Feature>;

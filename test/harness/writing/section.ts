@@ -45,7 +45,7 @@ function written({ text, expectations }: MarkedText, host: Host, frontEnd: Front
     const line = note >= 0 ? note : lines.findIndex((candidate) => candidate.covers?.includes(each.line));
     return line < 0 ? unsayable(`no place for ${each.code}`) : { ...each, line, columns: undefined };
   });
-  const count = [...notes.values()].reduce((sum, each) => sum + each.length, 0);
+  const count = [...notes.values()].flat().filter((note) => isRead(note, host)).length;
   return { said: true, notes: count, marked: { text: `${lines.map((line) => line.text).join('\n')}\n`, expectations: places, lines: lines.map((_, at) => at) } };
 }
 
@@ -71,6 +71,11 @@ function fileOf(chunks: readonly Chunk[], host: Host, frontEnd: FrontEnd, index:
   if (host.whole) return [...opening, ...host.whole({ ...parts, head: [], locals: own })];
   if (host.order === 'script first') return [...opening, ...parts.script, { text: '' }, ...parts.functions];
   return [...opening, ...parts.written];
+}
+
+function isRead({ unit, target }: Note, { leavesAlone }: Host): boolean {
+  if (unit.text === 'in' && leavesAlone?.has('[in]')) return false;
+  return !(target.kind === 'statement' && target.statement.kind === 'loop' && leavesAlone?.has('loop heads'));
 }
 
 /** Operators and library functions on whole lists. */
