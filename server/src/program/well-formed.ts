@@ -58,16 +58,19 @@ class ChunkChecker {
     if (node['kind'] === 'name') this.covers(node, node['name'], path);
     if (node['kind'] === 'number' || (node['kind'] === undefined && typeof node['text'] === 'string')) this.covers(node, node['text'], path);
     if (isNode(node['nameSpan'])) this.covers(node['nameSpan'], node['name'], `${path}.nameSpan`);
-    if (isNode(node['opSpan']) && node['op'] !== 'bits' && !this.isPower(node['opSpan'], node['op'])) this.covers(node['opSpan'], node['op'], `${path}.opSpan`);
+    if (isNode(node['opSpan']) && node['op'] !== 'bits' && !this.isOwnSign(node['opSpan'], String(node['op']))) this.covers(node['opSpan'], node['op'], `${path}.opSpan`);
   }
 
-  /** Some languages write a power with a circumflex. */
-  private isPower(span: Span, op: unknown): boolean {
-    return op === '**' && this.chunk.text.slice(span.start, span.end) === '^';
+  /** Some languages write an operator in another way, with a dot before it where it goes by elements, or not at all. */
+  private isOwnSign(span: Span, op: string): boolean {
+    const sign = this.chunk.text.slice(span.start, span.end).replace(/^\.(?=.)/, '');
+    return sign === op || (ownSigns[op]?.includes(sign) ?? false);
   }
 
   private covers(span: Span, expected: unknown, path: string): void {
     const found = this.chunk.text.slice(span.start, span.end);
+    // What a language leaves unwritten has no extent: the object of a method, a default export.
+    if (span.start === span.end) return;
     if (found !== expected && !(typeof expected === 'string' && isBlanked(found, expected))) this.faults.push(`${path} covers ${JSON.stringify(found)} and stands for ${JSON.stringify(expected)}`);
   }
 
@@ -78,6 +81,8 @@ class ChunkChecker {
     });
   }
 }
+
+const ownSigns: Readonly<Record<string, readonly string[]>> = { '**': ['^', '√', '∛', '∜'], '*': [''], '/': ['//'], '//': ['÷'], '-': ['−'], '@': ['⋅', '·', '×'] };
 
 /** The outputs that a function returns are named in its head. */
 function returnsOutputs(node: Readonly<Record<string, unknown>>, key: string): boolean {

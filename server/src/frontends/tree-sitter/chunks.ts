@@ -16,6 +16,10 @@ export interface TreeHost {
   lowerStatements(low: Lowering, nodes: readonly Syntax[]): readonly Stmt[];
   /** The file's documentation, from the nodes of its first chunk with a statement; left out where the language has none. */
   fileDoc?(low: Lowering, nodes: readonly Syntax[]): DocText | undefined;
+  /** The text with what the grammar does not know blanked out, of the same length. */
+  readable?(text: string): string;
+  /** Whether a node of this type may belong to what stands on the line below it: documentation above a definition. */
+  precedes?(type: string): boolean;
   /** Whether a chunk would give the file's documentation if it stood first. */
   mayDocument?(chunk: Chunk): boolean;
 }
@@ -27,6 +31,8 @@ interface Piece {
   /** Holds a syntax error, or fragments that the parser could not join to statements. */
   broken: boolean;
   commentsOnly: boolean;
+  /** What stands on the line below belongs to it. */
+  open: boolean;
 }
 
 /** The chunks of a syntax tree; those of `previous` that did not change come back without being lowered again. */
@@ -51,13 +57,14 @@ function piecesOf(root: TreeNode, lines: LineIndex, host: TreeHost): readonly Pi
     const comment = host.shape.comments.has(type);
     const broken = !host.isStatement(type) || (!comment && node.hasError);
     const piece = pieces.at(-1);
-    if (piece && (line === lastLine || (piece.commentsOnly && line === lastLine + 1))) {
+    if (piece && (line === lastLine || ((piece.commentsOnly || piece.open) && line === lastLine + 1))) {
       piece.nodes.push(node);
       piece.end = Math.max(piece.end, endIndex);
       piece.broken ||= broken;
       piece.commentsOnly &&= comment;
+      piece.open = host.precedes?.(type) ?? false;
     } else {
-      pieces.push({ start: startIndex, end: endIndex, nodes: [node], broken, commentsOnly: comment });
+      pieces.push({ start: startIndex, end: endIndex, nodes: [node], broken, commentsOnly: comment, open: host.precedes?.(type) ?? false });
     }
     lastLine = lines.lineAt(Math.max(endIndex - (lines.text[endIndex - 1] === '\n' ? 1 : 0), startIndex));
   }

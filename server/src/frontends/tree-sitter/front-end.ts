@@ -2,23 +2,29 @@
 import { Language, Parser, type Tree } from 'web-tree-sitter';
 import type { LanguageId, Program } from '../../program/nodes.ts';
 import { LineIndex } from '../../text/line-index.ts';
-import { trueEdits } from '../edits.ts';
+import { differenceOf, trueEdits } from '../edits.ts';
 import type { FrontEnd, GrammarBytes, Parsed } from '../frontend.ts';
 import { chunksOf, type TreeHost } from './chunks.ts';
 import { TreeCopier } from './syntax.ts';
 import { tellEdits } from './tree-edit.ts';
 
+/** The runtime is started once: every start would leave the grammars loaded before without theirs. */
+let started: Promise<void> | undefined;
+
 /** Loads the grammar and gives the `parse` of its language. Throws where the bytes are no grammar. */
 export async function treeParser(language: LanguageId, bytes: GrammarBytes, host: TreeHost): Promise<FrontEnd['parse']> {
-  await Parser.init({ wasmBinary: bytes.runtime });
+  started ??= Parser.init({ wasmBinary: bytes.runtime });
+  await started;
   const parser = new Parser();
   const grammar = await Language.load(bytes.grammar);
   parser.setLanguage(grammar);
   const copier = new TreeCopier(grammar, host.shape);
+  const readable = (text: string): string => (host.readable ? host.readable(newlines(text)) : newlines(text));
   return (text, file, previous, edits) => {
     const old = previous instanceof TreeParse ? previous.take() : null;
-    if (old && previous) tellEdits(old, newlines(previous.text), trueEdits(previous.text, text, edits));
-    const tree = parser.parse(newlines(text), old);
+    const source = readable(text);
+    if (old && previous) tellEdits(old, readable(previous.text), host.readable ? differenceOf(readable(previous.text), source) : trueEdits(previous.text, text, edits));
+    const tree = parser.parse(source, old);
     old?.delete();
     const chunks = tree ? chunksOf(tree.rootNode, host, copier, LineIndex.of(text), file, previous?.program.chunks ?? []) : [];
     return new TreeParse(text, { language, file, chunks }, tree);
