@@ -1,6 +1,7 @@
 /** The host languages: one line each. */
 import type { LanguageId } from '../program/nodes.ts';
 import type { FrontEndEntry } from './frontend.ts';
+import { juliaEntry } from './julia/index.ts';
 import { isNotebook } from './notebook/read.ts';
 import { matlabEntry } from './matlab/index.ts';
 import { nomenclatureEntry } from './nomenclature/index.ts';
@@ -9,6 +10,7 @@ import { pythonEntry } from './python/index.ts';
 export const frontEndEntries: readonly FrontEndEntry[] = [
   pythonEntry,
   matlabEntry,
+  juliaEntry,
   nomenclatureEntry,
 ];
 
