@@ -77,7 +77,14 @@ function sameFactor(a: Factor, b: Factor): boolean {
 /** A literal added to a temperature or a gauge pressure: a difference, a point, or a change of zero. */
 export function shiftMeasure(a: Measure | undefined, literal: Literal, sign: 1 | -1): Measure | undefined {
   if (!a) return undefined;
-  const readings = a.readings.flatMap((reading) => shifted(reading, sign * literalNumber(literal)));
+  const size = sign * literalNumber(literal);
+  const readings = a.readings.flatMap((reading) => shifted(reading, size));
+  const [only, ...others] = a.factors;
+  if (only && others.length === 0 && (only.power ?? 1) === 1) {
+    // `1.8*t - 459.67` of a temperature in K: what multiplied it has converted it.
+    const points = a.readings.filter((reading) => reading.nature === 'absolute').flatMap((reading) => shifted(converted(reading, only.literal), size).filter((each) => each.nature === 'point'));
+    if (points.length > 0) return { ...a, factors: [], readings: [...points, ...readings].slice(0, mostReadings) };
+  }
   return { ...a, readings: readings.slice(0, mostReadings) };
 }
 
@@ -133,7 +140,9 @@ function shifted(reading: Reading, size: number): Reading[] {
   if (known === 0) results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'absolute' });
   else if (known !== undefined) results.push({ scale: reading.scale, weight: 1, zero: known, nature: 'point' });
   // `T - 40` and `40 - T`: the number may be a point of the same scale.
-  if (Math.abs(reading.weight) === 1 || reading.nature === 'absolute') results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'shifted' });
+  // 273.15 is the distance of two zeros, and no temperature to count from.
+  const zeros = knownZeros.some((each) => each > 0 && Math.abs(Math.abs(scale * size) - each) < 0.2);
+  if (!zeros && (Math.abs(reading.weight) === 1 || reading.nature === 'absolute')) results.push({ scale: reading.scale, weight: 0, zero: 0, nature: 'shifted' });
   return results;
 }
 

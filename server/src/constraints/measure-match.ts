@@ -4,7 +4,7 @@ import { type Literal, literalNumber } from './literal.ts';
 import type { Factor, Measure, Reading } from './measure.ts';
 
 const close = 1e-9;
-/** One number that converts may be a little off: 8.76 for a thousand hours of a year, 6356 for the inches of warm water that make a horsepower. */
+/** Units that lie so close are one, and one number that converts may be a little off: 8.76 for a thousand hours of a year, 6356 for the inches of warm water that make a horsepower. */
 const alone = 2.5e-3;
 /** Keeps the search to some thousand products. */
 const mostPerSide = 6;
@@ -94,7 +94,7 @@ function convertedPairs(a: Measure, left: Reading, b: Measure, right: Reading, t
   const slack = close + 3 * (left.scale.uncertainty + right.scale.uncertainty);
   for (const product of products(a.factors, b.factors)) {
     for (const turn of turns) {
-      if (Math.abs((ratio * turn) / product.size - 1) > Math.max(slack + product.tolerance, product.numbers === 1 ? alone : 0)) continue;
+      if (Math.abs((ratio * turn) / product.size - 1) > Math.max(slack + product.tolerance, product.numbers < 2 ? alone : 0)) continue;
       const scale = commonScale(left, right, product, turn);
       return [[{ ...left, scale }, { ...right, scale }]];
     }
