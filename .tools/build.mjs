@@ -8,7 +8,8 @@ const root = join(dirname(fileURLToPath(import.meta.url)), '..');
 
 /** WASM files of the packages that ship them. */
 const grammars = [
-  'web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tree-sitter-python.wasm', 'tree-sitter-julia/tree-sitter-julia.wasm',
+  'web-tree-sitter/web-tree-sitter.wasm', 'tree-sitter-python/tree-sitter-python.wasm',
+  'tree-sitter-javascript/tree-sitter-javascript.wasm', 'tree-sitter-typescript/tree-sitter-typescript.wasm', 'tree-sitter-julia/tree-sitter-julia.wasm',
 ];
 
 /** An earlier build stays where this one fails; a folder that is named is written into and not emptied. */

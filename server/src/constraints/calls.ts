@@ -1,6 +1,6 @@
 /** Calls: which function is meant, and what its signature or its body says of arguments and result. */
 import type { Argument, CallExpr, Expr } from '../program/nodes.ts';
-import { power } from './arithmetic.ts';
+import { power, product, quotient, sum } from './arithmetic.ts';
 import type { Context } from './context.ts';
 import { evaluate } from './expressions.ts';
 import { oneForm } from './form.ts';
@@ -16,11 +16,18 @@ export interface Passed {
   readonly value: Value;
 }
 
-const powers = new Set(['pow', 'power', 'mpower', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow']);
+const powers = new Set(['pow', 'power', 'mpower', 'math.pow', 'numpy.power', 'numpy.float_power', 'scipy.special.pow', 'Math.pow', 'mathjs.pow']);
 /** Arrays of zeros or of nothing fit any unit. */
-const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan', 'zeros', 'cell']);
+const fitting = new Set(['numpy.zeros', 'numpy.zeros_like', 'numpy.empty', 'numpy.empty_like', 'list', 'numpy.isnan', 'math.isnan', 'zeros', 'cell', 'Array', 'Float64Array', 'Float32Array', 'Int32Array', 'Uint32Array', 'Int16Array', 'Uint16Array', 'Int8Array', 'Uint8Array']);
 /** Questions about missing values. */
-const presence = new Set(['isnan', 'isfinite', 'isinf', 'numpy.isnan', 'numpy.isfinite', 'numpy.isinf', 'math.isnan']);
+const presence = new Set(['isnan', 'isfinite', 'isinf', 'numpy.isnan', 'numpy.isfinite', 'numpy.isinf', 'math.isnan', 'isNaN', 'isFinite', 'Number.isNaN', 'Number.isFinite']);
+/** Functions that stand for an operator. */
+const operations: ReadonlyMap<string, (context: Context, expr: CallExpr, left: Value, right: Value) => Value> = new Map([
+  ['mathjs.add', (context, expr, left, right) => sum(context, expr, left, right, '+', expr)],
+  ['mathjs.subtract', (context, expr, left, right) => sum(context, expr, left, right, '-', expr)],
+  ...['mathjs.multiply', 'mathjs.dotMultiply'].map((name) => [name, (_context: Context, expr: CallExpr, left: Value, right: Value): Value => product(expr, left, right)] as const),
+  ...['mathjs.divide', 'mathjs.dotDivide'].map((name) => [name, (_context: Context, expr: CallExpr, left: Value, right: Value): Value => quotient(expr, left, right)] as const),
+]);
 const ones = new Set(['numpy.ones', 'numpy.ones_like', 'numpy.eye', 'numpy.identity', 'ones', 'eye']);
 
 export function call(context: Context, expr: CallExpr): Value {
@@ -95,6 +102,8 @@ function elementOf(value: Value): Value {
 function special(context: Context, expr: CallExpr, name: string, passed: readonly Passed[]): Value | undefined {
   const [first, second] = passed;
   if (powers.has(name) && first && second) return power(context, expr, first.value, second.value, expr);
+  const operation = operations.get(name);
+  if (operation && first && second && passed.length === 2) return operation(context, expr, first.value, second.value);
   if (fitting.has(name)) return { expr, form: undefined, fits: true, from: [] };
   if (name === 'zip') return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: passed.map(({ value }) => elementOf(value)) } };
   if (name === 'enumerate' && first) return { expr, form: undefined, from: [], element: { expr, form: undefined, from: [], items: [unknown(expr), elementOf(first.value)] } };

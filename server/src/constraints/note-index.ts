@@ -1,4 +1,5 @@
 /** The notes of a file, by what they are about. */
+import { ownField } from '../program/objects.ts';
 import type { ChunkNotes, Note } from '../notes/types.ts';
 import type { ClassStmt, Chunk, FunctionStmt, Param, RecordEntry, Stmt } from '../program/nodes.ts';
 import type { EmpiricalUnit, NoteLookup } from './context.ts';
@@ -66,9 +67,9 @@ function empiricalOf(chunk: Chunk, notes: ChunkNotes): ChunkIndex['empirical'] {
 export function lookupIn(index: ChunkIndex, owner: ClassStmt | undefined, wide: (name: string) => NoteInForce | undefined): NoteLookup {
   const symbolOf = (path: string, within: FunctionStmt | undefined): NoteInForce | undefined => {
     const own = within && index.symbols.get(within)?.get(path);
-    return own ?? fieldOf(path) ?? wide(path.startsWith('self.') ? path.slice(5) : path);
+    return own ?? fieldOf(path) ?? wide(ownField(path) ?? path);
   };
-  const fieldOf = (path: string): NoteInForce | undefined => (owner && path.startsWith('self.') ? index.fields.get(owner)?.get(path.slice(5)) : undefined);
+  const fieldOf = (path: string): NoteInForce | undefined => (owner && ownField(path) !== undefined ? index.fields.get(owner)?.get(ownField(path) as string) : undefined);
   const withSymbol = (notes: readonly NoteInForce[], path: string, within: FunctionStmt | undefined): readonly NoteInForce[] => {
     const symbol = symbolOf(path, within);
     return symbol ? [...notes, symbol] : notes;

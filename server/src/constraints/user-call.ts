@@ -1,5 +1,6 @@
 /** Calls of functions and classes of the workspace, and of functions defined inside the caller. */
 import type { CallExpr } from '../program/nodes.ts';
+import { constructorNames } from '../program/objects.ts';
 import { agree } from './arithmetic.ts';
 import type { Passed } from './calls.ts';
 import type { Context, LocalFunction } from './context.ts';
@@ -30,7 +31,7 @@ function isUnitValue({ param, given }: { readonly param: SchemeParam; readonly g
 
 /** An object: its fields are those of the class; arguments are checked against the constructor. */
 export function newObject(context: Context, expr: CallExpr, info: ClassInfo, passed: readonly Passed[]): Value {
-  const constructor = info.method('__init__');
+  const constructor = constructorNames.map((name) => info.method(name)).find((each) => each !== undefined);
   const named = info.statement.body.some((each) => each.kind === 'function' && each.name === info.name && each.unbound) ? info.method(info.name) : undefined;
   if (constructor) callScheme(context, expr, constructor, passed, true);
   else if (named) callScheme(context, expr, named, passed, false);

@@ -43,6 +43,8 @@ export interface FrontEndEntry {
   readonly endings: readonly string[];
   /** The grammar's file within its package; undefined for a parser of our own. */
   readonly grammar?: string;
+  /** The language whose signatures it shares; undefined for its own. */
+  readonly signatures?: LanguageId;
   create(bytes: GrammarBytes): FrontEnd | Promise<FrontEnd>;
 }
 
@@ -69,6 +71,8 @@ export interface HostStyle {
   readonly toRadians: readonly string[];
   readonly toDegrees: readonly string[];
   readonly piNames: readonly string[];
+  /** Objects of the language itself, whose members need no import. */
+  readonly builtIn?: readonly string[];
   /** A function does not see the variables of the script around it. */
   readonly closedFunctions?: true;
   /** A new statement that gives a constant its name, with a comment; undefined where one line cannot do that (declarations stand elsewhere). */

@@ -2,6 +2,7 @@
 import type { LanguageId } from '../program/nodes.ts';
 import type { FrontEndEntry } from './frontend.ts';
 import { juliaEntry } from './julia/index.ts';
+import { javascriptEntry, typescriptEntry } from './javascript/index.ts';
 import { isNotebook } from './notebook/read.ts';
 import { matlabEntry } from './matlab/index.ts';
 import { nomenclatureEntry } from './nomenclature/index.ts';
@@ -10,6 +11,8 @@ import { pythonEntry } from './python/index.ts';
 export const frontEndEntries: readonly FrontEndEntry[] = [
   pythonEntry,
   matlabEntry,
+  javascriptEntry,
+  typescriptEntry,
   juliaEntry,
   nomenclatureEntry,
 ];

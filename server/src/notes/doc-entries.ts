@@ -1,6 +1,7 @@
 /** What a documentation text says of which name: entries of sections, `:param x:` fields, and lines of plain lists. */
 import { isBlank, type Line, linesOf } from './doc-lines.ts';
 import { type Role, type Section, sectionsOf } from './doc-sections.ts';
+import { firstTag, hasTags, tagEntries } from './doc-tags.ts';
 import { type Piece, partOf, trimmed } from './piece.ts';
 
 export interface DocEntry {
@@ -34,6 +35,7 @@ const plainHead = new RegExp(`^(?:[-*•+]\\s+|[@\\\\]param\\s+)?[\`]{0,2}(${nam
 /** All entries of a documentation text. */
 export function readDocumentation(doc: Piece): Documentation {
   const lines = linesOf(doc.text);
+  if (hasTags(lines)) return { text: doc, entries: tagEntries(doc, lines), citations: false, opening: partOf(doc, 0, lines[firstTag(lines)]?.start ?? doc.text.length) };
   const sections = sectionsOf(lines);
   const entries: DocEntry[] = [];
   for (const section of sections) if (section.role !== 'skip') entries.push(...sectionEntries(doc, lines, section));

@@ -1,5 +1,6 @@
 /** Notes in the documentation of functions, classes and modules. */
 import type { ClassStmt, DocText, Expr, FunctionStmt } from '../program/nodes.ts';
+import { constructorOf } from '../program/objects.ts';
 import type { Collector } from './collector.ts';
 import { type DocEntry, type Documentation, plainEntries, readDocumentation } from './doc-entries.ts';
 import { unitOfEntry } from './doc-unit.ts';
@@ -17,6 +18,7 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
   readEntries(out, doc, (entry, name) => {
     if (entry.role === 'field') return owner && name !== undefined ? [{ kind: 'field', owner, name }] : [];
     const param = name === undefined ? undefined : (params.get(name) ?? params.get(inCode(name)));
+    if (name !== undefined && params.has(name.slice(0, Math.max(name.indexOf('.'), 0)))) return [{ kind: 'symbol', owner: fn, name }];
     return param ? [{ kind: 'parameter', owner: fn, param }] : outputTargets(fn, name);
   }, fn);
   if (isProperty(fn)) propertyNote(out, fn, doc);
@@ -28,7 +30,7 @@ export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt 
 export function classDocs(out: Collector, cls: ClassStmt): void {
   if (!cls.doc || !mayHoldUnits(cls.doc)) return;
   const doc = readDocumentation(cls.doc);
-  const constructor = cls.body.find((each): each is FunctionStmt => each.kind === 'function' && each.name === '__init__');
+  const constructor = constructorOf(cls);
   const said = new Set(constructor?.doc ? readDocumentation(constructor.doc).entries.flatMap((entry) => entry.names) : []);
   readEntries(out, doc, (entry, name) => {
     if (name === undefined || entry.role === 'result') return [];

@@ -41,6 +41,7 @@ export class NoteWalk {
         return this.function(statement, cls);
       case 'class':
         this.classes.push(statement);
+        if (statement.doc) this.used.add(statement.doc.start);
         classDocs(this.out, statement);
         return this.block(statement.body, undefined, statement);
       case 'loop':
@@ -68,6 +69,7 @@ export class NoteWalk {
 
   private function(fn: FunctionStmt, cls: ClassStmt | undefined): void {
     this.functions.push(fn);
+    if (fn.doc) this.used.add(fn.doc.start);
     for (const param of fn.params) {
       if (!param.comment) continue;
       this.used.add(param.comment.start);

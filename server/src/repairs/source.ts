@@ -49,9 +49,9 @@ export function isBracketed(code: string): boolean {
 }
 
 /** How this script calls a library name: `np.deg2rad` for `numpy.deg2rad`; undefined where it is not imported. A name without a module is built in. */
-export function importedName(program: Program, dotted: string): string | undefined {
+export function importedName(program: Program, dotted: string, builtIn: readonly string[] = []): string | undefined {
   const at = dotted.lastIndexOf('.');
-  if (at < 0) return dotted;
+  if (at < 0 || builtIn.includes(dotted.slice(0, at))) return dotted;
   const [module, name] = [dotted.slice(0, at), dotted.slice(at + 1)];
   for (const chunk of program.chunks) {
     for (const statement of chunk.statements) {
@@ -68,7 +68,7 @@ export function importedName(program: Program, dotted: string): string | undefin
 /** A factor's text with π as this script writes it; digits where it has no name for π. */
 export function hostFactor(factor: string, scene: Scene): string {
   if (!/\bpi\b/.test(factor)) return factor;
-  const pi = scene.inputs.style.piNames.map((name) => importedName(scene.inputs.program, name)).find((name) => name !== undefined);
+  const pi = scene.inputs.style.piNames.map((name) => importedName(scene.inputs.program, name, scene.inputs.style.builtIn)).find((name) => name !== undefined);
   return factor.replace(/\bpi\b/g, pi ?? String(Math.PI));
 }
 

@@ -215,7 +215,7 @@ class Files implements Workspace {
   private shipped(language: LanguageId): SignatureTable {
     let table = this.tables.get(language);
     if (!table) {
-      table = loadSignatures(this.assets.signatures(language));
+      table = loadSignatures(this.assets.signatures(frontEndEntries.find((each) => each.language === language)?.signatures ?? language));
       this.tables.set(language, table);
     }
     return table;

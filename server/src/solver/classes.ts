@@ -2,6 +2,7 @@
 import { type ClassInfo, namedClass, objectOf } from '../constraints/scheme.ts';
 import { notedValue } from '../constraints/targets.ts';
 import type { Value } from '../constraints/value.ts';
+import { constructorNames, constructorOf } from '../program/objects.ts';
 import { pathOf } from '../program/path.ts';
 import type { Chunk, ClassStmt, FunctionStmt } from '../program/nodes.ts';
 import { methodsOf } from './definitions.ts';
@@ -29,7 +30,7 @@ export function classInfo(statement: ClassStmt, chunk: Chunk, file: FileSolver):
     fields: () => {
       if (fields) return fields;
       fields = new Map(declared());
-      const constructor = methods.get('__init__');
+      const constructor = constructorOf(statement);
       const made = constructor && file.piece({ fn: constructor, owner: statement, chunk });
       for (const [name, value] of made?.fields ?? []) if (!fields.get(name)?.version?.note) fields.set(name, value);
       for (const [name, fn] of methods) {
@@ -39,7 +40,7 @@ export function classInfo(statement: ClassStmt, chunk: Chunk, file: FileSolver):
       }
       return fields;
     },
-    fingerprint: () => `${statement.name}{${[...declaredNames(statement, chunk, file)].map(([name, value]) => `${name}:${fingerprintOf(value)}`).join()}}${[...methods].map(([name, fn]) => (name === '__init__' || isProperty(fn) ? (method(name)?.fingerprint ?? '') : '')).join()}`,
+    fingerprint: () => `${statement.name}{${[...declaredNames(statement, chunk, file)].map(([name, value]) => `${name}:${fingerprintOf(value)}`).join()}}${[...methods].map(([name, fn]) => (constructorNames.includes(name) || isProperty(fn) ? (method(name)?.fingerprint ?? '') : '')).join()}`,
   };
 }
 

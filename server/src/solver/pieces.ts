@@ -8,6 +8,7 @@ import { walk } from '../constraints/statements.ts';
 import { notedValue } from '../constraints/targets.ts';
 import type { NoteInForce, Value } from '../constraints/value.ts';
 import type { Chunk, FunctionStmt } from '../program/nodes.ts';
+import { constructorNames, ownField } from '../program/objects.ts';
 import type { Span } from '../text/span.ts';
 import type { Piece } from './definitions.ts';
 import type { Fault } from './fault.ts';
@@ -90,7 +91,7 @@ function attempt(piece: Piece, owner: ClassInfo | undefined, surroundings: Surro
 
 function selfOf(piece: Piece, owner: ClassInfo | undefined): Value | undefined {
   const plain = !piece.fn.unbound && piece.fn.decorators.every((each) => each.kind !== 'name' || each.name !== 'staticmethod');
-  const fields = owner && (piece.fn.name === '__init__' ? owner.declared() : owner.fields());
+  const fields = owner && (constructorNames.includes(piece.fn.name) ? owner.declared() : owner.fields());
   return fields && plain ? { expr: undefined, form: undefined, fields, from: [] } : undefined;
 }
 
@@ -180,10 +181,11 @@ function empiricalScheme(fn: FunctionStmt, chunk: Chunk, surroundings: Surroundi
 function fieldsOf(context: Context, reduce: (form: Form) => Form): ReadonlyMap<string, Value> {
   const fields = new Map<string, Value>();
   for (const [path, value] of context.bindings.all()) {
-    if (!path.startsWith('self.')) continue;
+    const name = ownField(path);
+    if (name === undefined) continue;
     const form = value.form && reduce(value.form);
-    if (value.fields) fields.set(path.slice(5), value);
-    else if (form && form.terms.length === 0 && value.version?.origin !== 'constant') fields.set(path.slice(5), { ...value, form });
+    if (value.fields) fields.set(name, value);
+    else if (form && form.terms.length === 0 && value.version?.origin !== 'constant') fields.set(name, { ...value, form });
   }
   return fields;
 }

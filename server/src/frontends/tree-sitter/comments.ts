@@ -15,9 +15,16 @@ export interface CommentMarkers {
   readonly tail?: RegExp;
 }
 
+/** Whether a comment is documentation by its opening, `/** …`: of what stands below it. */
+export function isBlock(text: string, base: number, comment: Comment): boolean {
+  return /\/\*\*[^\S\n]*$/.test(text.slice(Math.max(base + comment.start - 20, 0), base + comment.start));
+}
+
 /** The comments of one chunk by line, with offsets relative to the chunk. */
 export class Comments {
   private readonly byLine = new Map<number, Placed>();
+  /** Comments over several lines, by their last line. */
+  private readonly byLastLine = new Map<number, Placed>();
   private readonly owned = new Set<Comment>();
   private readonly alone = new Set<Comment>();
   readonly all: readonly Comment[];
@@ -56,10 +63,11 @@ export class Comments {
     const column = this.base + span.start - this.lineStart(line);
     const found: Comment[] = [];
     for (let at = line - 1; at >= 0; at--) {
-      const placed = this.byLine.get(at);
+      const placed = this.byLastLine.get(at) ?? this.byLine.get(at);
       if (!placed?.alone || placed.column !== column) break;
       found.push(placed.comment);
       this.owned.add(placed.comment);
+      at = Math.min(at, this.lines.lineAt(this.base + placed.comment.start));
     }
     return found.reverse();
   }
@@ -88,7 +96,10 @@ export class Comments {
     const lineStart = this.lineStart(line);
     const alone = this.lines.text.slice(lineStart, at.start).trim() === '';
     if (alone) this.alone.add(comment);
-    this.byLine.set(line, { comment, alone, column: at.start - lineStart });
+    const placed = { comment, alone, column: at.start - lineStart };
+    this.byLine.set(line, placed);
+    const last = this.lines.lineAt(at.end);
+    if (last !== line) this.byLastLine.set(last, placed);
     return comment;
   }
 }

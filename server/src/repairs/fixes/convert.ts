@@ -58,7 +58,7 @@ function angleCall(from: Measure, to: Measure, step: Conversion, scene: Scene, c
   const size = step.factor.toNumber();
   const names = Math.abs(size / (Math.PI / 180) - 1) < 1e-12 ? toRadians : Math.abs((size * Math.PI) / 180 - 1) < 1e-12 ? toDegrees : [];
   if (from.readings[0]?.nature !== 'ratio' || from.cycle > 0) return undefined;
-  const name = names.map((each) => importedName(scene.inputs.program, each)).find((each) => each !== undefined);
+  const name = names.map((each) => importedName(scene.inputs.program, each, scene.inputs.style.builtIn)).find((each) => each !== undefined);
   return name && `${name}(${code})`;
 }
 
