@@ -170,6 +170,7 @@ export class FileSolver {
     const definitions = this.names.get(name);
     const last = definitions?.at(-1);
     if (!definitions || !last) return undefined;
+    if (this.inputs.program.language === 'julia' && !this.agree(name, definitions)) return { expr: undefined, form: undefined, from: [] };
     switch (last.kind) {
       case 'function':
         return { expr: undefined, form: undefined, from: [], callable: { kind: 'function', name, scheme: () => this.scheme(last.statement, undefined, last.chunk) } };
@@ -180,6 +181,15 @@ export class FileSolver {
       case 'variable':
         return this.variable(name, definitions);
     }
+  }
+
+  /** Where methods of one name are chosen by the types of their arguments, several are known only where all do the same. */
+  private agree(name: string, definitions: readonly Definition[]): boolean {
+    const callable = definitions.some((each) => each.kind === 'function' || each.kind === 'class');
+    if (!callable) return true;
+    if (this.inputs.neighbour(name)?.names.has(name)) return false;
+    const [first, ...others] = definitions.map((each) => (each.kind === 'function' ? this.scheme(each.statement, undefined, each.chunk)?.fingerprint : undefined));
+    return others.length === 0 || (first !== undefined && others.every((each) => each === first));
   }
 
   /** A top-level variable: its note, or the value of its only assignment. */

@@ -75,7 +75,6 @@ function climb(chain: Chain, state: { at: number }, least: number): Expr {
   }
 }
 
-/** A number before a symbol stays outside of a power: `2x^2` is `2*(x^2)`. */
 function combined(text: string, opSpan: Span, left: Expr, right: Expr): Expr {
   const span = { start: left.start, end: right.end };
   const compared = comparisons[text];

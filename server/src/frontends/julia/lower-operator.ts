@@ -3,6 +3,7 @@ import type { CompareOp, Expr } from '../../program/nodes.ts';
 import type { Span } from '../../text/span.ts';
 import { type Lowering, spanOf, textOf } from '../tree-sitter/lowering.ts';
 import type { Syntax } from '../tree-sitter/syntax.ts';
+import { regrouped } from './infix.ts';
 import { lowerExpression, opaque } from './lower-expression.ts';
 import { arithmetic, comparisons, root, rootPower, undotted } from './operators.ts';
 
@@ -19,6 +20,8 @@ export function lowerUnary(low: Lowering, node: Syntax, span: Span): Expr {
 }
 
 export function lowerBinary(low: Lowering, node: Syntax, span: Span): Expr {
+  const again = regrouped(low, node);
+  if (again) return again;
   const [left, sign, right] = node.parts;
   if (!left || !sign || !right) return opaque(low, node, span);
   const text = undotted(textOf(low, sign));
@@ -37,6 +40,8 @@ export function lowerBinary(low: Lowering, node: Syntax, span: Span): Expr {
 export function lowerJuxtaposition(low: Lowering, node: Syntax, span: Span): Expr {
   const [left, right] = node.parts;
   if (!left || !right) return opaque(low, node, span);
+  const again = regrouped(low, node);
+  if (again) return again;
   if (right.type.endsWith('string_literal')) return right.type === 'string_literal' ? lowerExpression(low, left) : { kind: 'opaque', parts: [], ...span };
   return product(low, left, lowerExpression(low, right), span);
 }

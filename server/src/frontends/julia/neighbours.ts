@@ -32,8 +32,28 @@ export function resolveModule(file: string, statement: ImportStmt, _name: string
   return found === file ? undefined : found;
 }
 
-/** The files that the topmost file including this one reads, itself among them; only this file where none does. */
+interface Found {
+  readonly root: string;
+  readonly text: string | undefined;
+  readonly files: readonly string[];
+}
+
+const modules = new WeakMap<FileSource, Map<string, Found>>();
+
+/** The files of the module around a file, searched again where the file that joins them changed. */
 function moduleFiles(file: string, source: FileSource): readonly string[] {
+  const known = modules.get(source) ?? new Map<string, Found>();
+  modules.set(source, known);
+  const found = known.get(file);
+  if (found && source.read(found.root) === found.text) return found.files;
+  const files = searched(file, source);
+  const root = files[0] ?? file;
+  known.set(file, { root, text: source.read(root), files });
+  return files;
+}
+
+/** The files that the topmost file including this one reads, itself among them; only this file where none does. */
+function searched(file: string, source: FileSource): readonly string[] {
   let best = reach(file, source);
   let folder = parent(file);
   for (let up = 0; up < levelsUp; up++) {
