@@ -54,3 +54,8 @@ test('a factor that is almost right is changed by what is missing, and never cal
   const fixes = offers('rho = 1000.0  # [kg/m^3]\nV = 2.0  # [m/s]\np = 0.5*rho*V**2/100  # [kPa]', ['convert']);
   expect(fixes.map((fix) => fix.confidence)).not.toContain('proven');
 });
+
+test('a speed in rpm in a power is not proven: only the formula tells revolutions from radians', () => {
+  const text = 'M = f()  # [N m]\nn = f()  # [rpm]\nP = M*n  # [W]\n';
+  expect(offers(text, ['convert']).map((fix) => fix.confidence)).not.toContain('proven');
+});

@@ -40,8 +40,14 @@ function converted(fault: ScaleFault, value: Value, from: Measure, to: Measure, 
   const angle = reason.kind === 'argument' && reason.claim === 'rad';
   const unit = angle ? 'rad' : unitText(target);
   // Either side of a comparison may be converted; of the two terms of a sum only the author knows which.
-  const confidence: Confidence = step.sure && isNoted(value) && (angle || isNoted(target)) && reason.kind !== 'choice' ? 'proven' : 'likely';
+  const confidence: Confidence = step.sure && !leavesTurns(from, to) && isNoted(value) && (angle || isNoted(target)) && reason.kind !== 'choice' ? 'proven' : 'likely';
   return [{ kind: 'convert', confidence, edits: [{ ...span, text: written }], says: { what: 'rewrite', from: code, to: written, ...(unit ? { unit } : {}) }, cost: 1 }];
+}
+
+/** `P = M*n` in watts, of a speed in rpm: by 1/60 it counts revolutions, by 2π/60 radians, and only the formula tells which. */
+function leavesTurns(from: Measure, to: Measure): boolean {
+  const plain = (measure: Measure): boolean => measure.cycle === 0 && measure.radian === 0;
+  return (from.cycle !== 0 && plain(to)) || (to.cycle !== 0 && plain(from));
 }
 
 /** Both numbers are what notes say they are, or computed from such. */
