@@ -1,8 +1,9 @@
 /** The host languages: one line each. */
 import type { LanguageId } from '../program/nodes.ts';
 import type { FrontEndEntry } from './frontend.ts';
-import { juliaEntry } from './julia/index.ts';
+import { fortranEntry } from './fortran/index.ts';
 import { javascriptEntry, typescriptEntry } from './javascript/index.ts';
+import { juliaEntry } from './julia/index.ts';
 import { isNotebook } from './notebook/read.ts';
 import { matlabEntry } from './matlab/index.ts';
 import { nomenclatureEntry } from './nomenclature/index.ts';
@@ -14,6 +15,7 @@ export const frontEndEntries: readonly FrontEndEntry[] = [
   javascriptEntry,
   typescriptEntry,
   juliaEntry,
+  fortranEntry,
   nomenclatureEntry,
 ];
 

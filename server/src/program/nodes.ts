@@ -24,7 +24,11 @@ export interface IndexExpr extends Span { readonly kind: 'index'; readonly objec
  * `results`: how many results the caller takes, in languages where a function gives as many as are asked for and `f(x)` may be an element too;
  * undefined: the value as it is.
  */
-export interface CallExpr extends Span { readonly kind: 'call'; readonly callee: Expr; readonly args: readonly Argument[]; readonly results?: number }
+export interface CallExpr extends Span {
+  readonly kind: 'call'; readonly callee: Expr; readonly args: readonly Argument[]; readonly results?: number;
+  /** A variable among the arguments may come back with a new value: Fortran's `call`. */
+  readonly byReference?: true;
+}
 /** `spread`: `*args`, `**kwargs`, `...rest`: what it fills is unknown. */
 export interface Argument extends Span { readonly name?: string; readonly value: Expr; readonly spread?: boolean }
 export interface UnaryExpr extends Span { readonly kind: 'unary'; readonly op: '-' | '+' | 'not' | 'transpose' | 'bits'; readonly operand: Expr }
@@ -101,6 +105,8 @@ export interface Param extends Span {
   readonly name: string; readonly nameSpan: Span; readonly default?: Expr; readonly annotation?: string;
   readonly mode: 'plain' | 'keyword' | 'rest' | 'rest-named';
   readonly comment?: Comment;
+  /** A parameter that the function gives back: only that, or after taking it; undefined: it is only taken. */
+  readonly intent?: 'out' | 'inout';
 }
 
 /** A comment without its marker: `text` is the source between start and end, marker and outer blanks removed. */

@@ -71,7 +71,7 @@ class ChunkChecker {
     const found = this.chunk.text.slice(span.start, span.end);
     // What a language leaves unwritten has no extent: the object of a method, a default export.
     if (span.start === span.end) return;
-    if (found !== expected && !(typeof expected === 'string' && isBlanked(found, expected))) this.faults.push(`${path} covers ${JSON.stringify(found)} and stands for ${JSON.stringify(expected)}`);
+    if (found !== expected && !(typeof expected === 'string' && (isBlanked(found, expected) || found.toLowerCase() === expected))) this.faults.push(`${path} covers ${JSON.stringify(found)} and stands for ${JSON.stringify(expected)}`);
   }
 
   private inOrder(spans: readonly Span[], path: string): void {
@@ -82,7 +82,7 @@ class ChunkChecker {
   }
 }
 
-const ownSigns: Readonly<Record<string, readonly string[]>> = { '**': ['^', '√', '∛', '∜'], '*': [''], '/': ['//'], '//': ['÷'], '-': ['−'], '@': ['⋅', '·', '×'] };
+const ownSigns: Readonly<Record<string, readonly string[]>> = { '**': ['^', '√', '∛', '∜'], '*': [''], '/': ['//'], '//': ['÷', '/'], '-': ['−'], '@': ['⋅', '·', '×'] };
 
 /** The outputs that a function returns are named in its head. */
 function returnsOutputs(node: Readonly<Record<string, unknown>>, key: string): boolean {
