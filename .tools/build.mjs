@@ -15,7 +15,7 @@ const grammars = [
 /** An earlier build stays where this one fails; a folder that is named is written into and not emptied. */
 export async function build(folder) {
   const dist = folder ?? join(root, 'dist');
-  const bundles = [bundleCommand(dist), bundleLanguageServer(dist), bundleClient(dist)];
+  const bundles = [bundleCommand(dist), bundleLanguageServer(dist), bundleClient(dist), bundleWorker(dist), bundleWebClient(dist)];
   const made = await Promise.all(bundles);
   const outputFiles = made.flatMap((each) => each.outputFiles);
   if (!folder) rmSync(dist, { recursive: true, force: true });
@@ -87,6 +87,49 @@ function bundleClient(dist) {
   });
 }
 
+/** The server as a worker: the protocol's library for browsers in the place of the one for Node, and no module of Node. */
+function bundleWorker(dist) {
+  return bundle({
+    absWorkingDir: root,
+    entryPoints: { 'web-server': 'server/src/lsp/browser.ts' },
+    outdir: dist,
+    bundle: true,
+    write: false,
+    metafile: true,
+    format: 'iife',
+    platform: 'browser',
+    target: 'es2022',
+    mainFields: ['module', 'browser', 'main'],
+    alias: { 'vscode-languageserver/node.js': 'vscode-languageserver/browser.js' },
+    // Asked for by the runtime of the grammars where it runs in Node, which is not here.
+    external: ['fs/promises', 'module', 'node:*'],
+    // An address to be named and not asked: the bytes are handed over.
+    define: { 'import.meta.url': '"https://termwise.invalid/"' },
+    minify: true,
+    legalComments: 'linked',
+    logLevel: 'warning',
+  });
+}
+
+/** The client for an editor in a browser; extensions there are loaded with `require`, too, and end in `.js`. */
+function bundleWebClient(dist) {
+  return bundle({
+    absWorkingDir: root,
+    entryPoints: { 'web-extension': 'client/src/web.ts' },
+    outdir: dist,
+    bundle: true,
+    write: false,
+    metafile: true,
+    format: 'cjs',
+    platform: 'browser',
+    target: 'es2022',
+    external: ['vscode'],
+    minify: true,
+    legalComments: 'linked',
+    logLevel: 'warning',
+  });
+}
+
 /** The licences of every package of which something is shipped. `inputs`: the files that went into the bundles. */
 function notices(inputs) {
   const folders = [...inputs, ...grammars.map((grammar) => `node_modules/${grammar}`)].flatMap((file) => /^(.*node_modules\/(?:@[^/]+\/)?[^/]+)\//.exec(file)?.[1] ?? []);
@@ -102,6 +145,9 @@ function copyAssets(dist) {
   mkdirSync(join(dist, 'grammars'), { recursive: true });
   for (const grammar of grammars) cpSync(join(root, 'node_modules', grammar), join(dist, 'grammars', grammar.split('/')[1]));
   cpSync(join(root, 'server/src/signatures'), join(dist, 'signatures'), { recursive: true, filter: (path) => !path.endsWith('.ts') });
+  const signatures = join(dist, 'signatures');
+  // For a place where folders cannot be listed.
+  writeFileSync(join(signatures, 'list.json'), JSON.stringify(Object.fromEntries(readdirSync(signatures, { withFileTypes: true }).filter((each) => each.isDirectory()).map(({ name }) => [name, readdirSync(join(signatures, name)).sort()]))));
   cpSync(join(root, 'server/src/findings/checks'), join(dist, 'pages'), { recursive: true, filter: (path) => !path.endsWith('.ts') });
 }
 

@@ -116,6 +116,9 @@ async function openMenu(page, words) {
   throw new Error(`no row with ${words} in the menu`);
 }
 
+/** Those that are tried with the server in a worker, too. */
+export const webFlows = ['a squiggle stands under the fault, and a hover by keyboard tells it', 'the light bulb offers what settles the finding'];
+
 async function goTo(page, line, column) {
   await page.locator('.view-line').first().waitFor(patience);
   await page.locator('.view-lines').first().click();

@@ -25,6 +25,8 @@ function findBrowser() {
 export async function openPage({ executablePath, workbench, workspace, payload, log }) {
   const browser = await chromium.launch({ executablePath, args: quiet });
   const page = await browser.newPage({ viewport: { width: 1280, height: 800 } });
+  // What the page says of itself, for whoever looks for a fault.
+  if (process.env.TERMWISE_PAGE_LOG) page.on('console', (message) => process.stderr.write(`${message.type()}: ${message.text()}\n`));
   const exit = new Promise((resolve) => void page.exposeFunction('codeAutomationExit', resolve));
   await page.exposeFunction('codeAutomationLog', (_type, args) => log(format(...args)));
   await page.goto(`http://${workbench.authority}/?folder=${encodeURI(workspace)}&payload=${encodeURIComponent(JSON.stringify(payload))}`);

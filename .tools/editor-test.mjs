@@ -10,7 +10,7 @@ import { fileURLToPath } from 'node:url';
 import { build } from 'esbuild';
 import { copyExamples, dataFolder, installWorkbench, startWorkbench } from './editor-rig.mjs';
 import { browserExecutable, openPage } from './editor-page.mjs';
-import { lastLook, pageFlows } from './editor-flows.mjs';
+import { lastLook, pageFlows, webFlows } from './editor-flows.mjs';
 import { packExtension } from './vsix.mjs';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '..');
@@ -27,9 +27,10 @@ try {
   const suite = join(folder, 'suite');
   await bundleSuite(suite);
   const vsix = await packExtension(join(folder, 'termwise.vsix'));
+  const webVsix = await packExtension(join(folder, 'termwise-web.vsix'), { webOnly: true });
   const desktop = desktopEditor();
   if (desktop || args.includes('--download')) await onDesktop(suite, vsix, desktop);
-  else await inBrowser(suite, vsix);
+  else await inBrowser(suite, vsix, webVsix);
 } catch (error) {
   counts.failed++;
   say(error instanceof Error ? (error.stack ?? error.message) : String(error));
@@ -69,16 +70,20 @@ async function onDesktop(suite, vsix, executable) {
   }
 }
 
-async function inBrowser(suite, vsix) {
+async function inBrowser(suite, vsix, webVsix) {
   installWorkbench(say);
   const executablePath = browserExecutable();
   const template = join(folder, 'template');
-  dataFolder(template, vsix, { 'workbench.startupEditor': 'none', 'files.autoSave': 'off', 'files.hotExit': 'off', 'editor.hover.delay': 100, 'security.workspace.trust.enabled': false });
+  const settings = { 'workbench.startupEditor': 'none', 'files.autoSave': 'off', 'files.hotExit': 'off', 'editor.hover.delay': 100, 'security.workspace.trust.enabled': false };
+  dataFolder(template, vsix, settings);
   if (only === undefined) await withWorkbench(template, 'suite', (workbench, workspace) => runSuite(workbench, workspace, suite, executablePath));
   if (screenshots) mkdirSync(screenshots, { recursive: true });
-  for (const [name, flow] of Object.entries(pageFlows).filter(([each]) => only === undefined || each.includes(only))) {
+  const webTemplate = join(folder, 'web-template');
+  dataFolder(webTemplate, webVsix, settings);
+  const flows = [...Object.entries(pageFlows).map(([name, flow]) => [name, flow, template]), ...webFlows.map((name) => [`in a worker of the browser: ${name}`, pageFlows[name], webTemplate])];
+  for (const [name, flow, data] of flows.filter(([each]) => only === undefined || each.includes(only))) {
     try {
-      await withWorkbench(template, 'flow', (workbench, workspace) => runFlow(workbench, workspace, name, flow, executablePath));
+      await withWorkbench(data, 'flow', (workbench, workspace) => runFlow(workbench, workspace, name, flow, executablePath));
       counts.passed++;
       say(`ok: ${name}`);
     } catch (error) {

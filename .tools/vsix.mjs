@@ -9,13 +9,13 @@ const root = join(dirname(fileURLToPath(import.meta.url)), '..');
 const manifest = JSON.parse(readFileSync(join(root, 'package.json'), 'utf8'));
 
 /** What an editor reads of the manifest; the command and its packages have no place in an extension. */
-const keys = ['name', 'displayName', 'version', 'description', 'license', 'publisher', 'type', 'icon', 'keywords', 'categories', 'engines', 'main', 'activationEvents', 'capabilities', 'contributes', 'l10n'];
+const keys = ['name', 'displayName', 'version', 'description', 'license', 'publisher', 'icon', 'keywords', 'categories', 'engines', 'main', 'browser', 'activationEvents', 'capabilities', 'contributes', 'l10n'];
 const copied = ['syntaxes', 'schemas', 'client/language', 'client/walkthrough', 'client/l10n', 'client/pictures', 'client/icon.png', 'examples', 'README.md', 'CHANGELOG.md', 'LICENSE'];
 /** Of the build: the rest is the command's. */
-const built = ['extension.cjs', 'extension.cjs.LEGAL.txt', 'language-server.js', 'language-server.js.LEGAL.txt', 'THIRD-PARTY-NOTICES.txt', 'grammars', 'signatures', 'pages'];
+const built = ['extension.cjs', 'extension.cjs.LEGAL.txt', 'language-server.js', 'language-server.js.LEGAL.txt', 'web-extension.js', 'web-server.js', 'THIRD-PARTY-NOTICES.txt', 'grammars', 'signatures', 'pages'];
 
-/** Packs the extension and gives the path of the file. */
-export async function packExtension(target = join(root, `${manifest.name}-${manifest.version}.vsix`)) {
+/** Packs the extension and gives the path of the file. `webOnly`: without what runs in Node, so that an editor has to take the other. */
+export async function packExtension(target = join(root, `${manifest.name}-${manifest.version}.vsix`), { webOnly = false } = {}) {
   const stage = join(root, '.cache', `vsix-${process.pid}`);
   try {
     const dist = join(stage, 'build');
@@ -25,7 +25,9 @@ export async function packExtension(target = join(root, `${manifest.name}-${mani
     const present = new Set(readdirSync(dist));
     for (const name of built) if (present.has(name)) cpSync(join(dist, name), join(folder, 'dist', name), { recursive: true });
     for (const name of copied) cpSync(join(root, name), join(folder, name), { recursive: true });
-    writeFileSync(join(folder, 'package.json'), JSON.stringify(Object.fromEntries(keys.map((key) => [key, manifest[key]])), undefined, 2));
+    writeFileSync(join(folder, 'package.json'), JSON.stringify(Object.fromEntries(keys.filter((key) => !(webOnly && key === 'main')).map((key) => [key, manifest[key]])), undefined, 2));
+    // An editor in a browser loads no extension that calls itself a module; the server is one, and its folder says so.
+    writeFileSync(join(folder, 'dist', 'package.json'), '{ "type": "module" }\n');
     mkdirSync(dirname(target), { recursive: true });
     await createVSIX({ cwd: folder, packagePath: target, dependencies: false, allowMissingRepository: true, rewriteRelativeLinks: false });
     return target;

@@ -1,10 +1,10 @@
 /** The commands of the palette, and those that the server's answers refer to. */
 import { commands, type ExtensionContext, l10n, type LogOutputChannel, Position, Selection, Uri, window, workspace } from 'vscode';
-import type { LanguageClient, Position as SentPosition, Range as SentRange } from 'vscode-languageclient/node';
+import type { BaseLanguageClient, Position as SentPosition, Range as SentRange } from 'vscode-languageclient';
 
-export function registerCommands(context: ExtensionContext, client: LanguageClient, output: LogOutputChannel): void {
+export function registerCommands(context: ExtensionContext, client: BaseLanguageClient, output: LogOutputChannel): void {
   const register = (name: string, run: (...args: never[]) => unknown): void => void context.subscriptions.push(commands.registerCommand(`termwise.${name}`, run));
-  register('restartServer', () => client.restart());
+  register('restartServer', () => restart(client));
   register('showOutput', () => output.show());
   register('writeGroups', () => rewrite());
   register('fixProven', () => commands.executeCommand('editor.action.codeAction', { kind: 'source.fixAll.termwise', apply: 'first' }));
@@ -12,6 +12,12 @@ export function registerCommands(context: ExtensionContext, client: LanguageClie
   register('openExamples', () => openExamples(context));
   register('select', select);
   register('showActions', showActions);
+}
+
+/** The client for Node can do it in one step; that for browsers in two. */
+async function restart(client: BaseLanguageClient): Promise<void> {
+  await client.stop();
+  await client.start();
 }
 
 /** Selects what a fix leaves to be filled in. */

@@ -1,6 +1,6 @@
 /** How many units of the document in front are known, and a view of the symbols that have none, most used first. */
 import { commands, EventEmitter, type ExtensionContext, l10n, Range, Selection, StatusBarAlignment, type TextEditor, ThemeIcon, type TreeDataProvider, TreeItem, Uri, window, workspace } from 'vscode';
-import { type LanguageClient, State } from 'vscode-languageclient/node';
+import { type BaseLanguageClient, State } from 'vscode-languageclient';
 import type { CoverageAnswer, FileCoverage } from '../../server/src/lsp/requests/coverage.ts';
 
 /** After the last change, in milliseconds: counting must not hurry anybody. */
@@ -8,7 +8,7 @@ const pause = 600;
 
 type OpenSymbol = FileCoverage['open'][number];
 
-export function registerCoverage(context: ExtensionContext, client: LanguageClient): void {
+export function registerCoverage(context: ExtensionContext, client: BaseLanguageClient): void {
   const symbols = new OpenSymbols();
   const view = window.createTreeView('termwise.openUnits', { treeDataProvider: symbols });
   const bar = window.createStatusBarItem('termwise.coverage', StatusBarAlignment.Right, 90);
@@ -43,7 +43,7 @@ export function registerCoverage(context: ExtensionContext, client: LanguageClie
   );
 }
 
-async function ask(client: LanguageClient, { document }: TextEditor): Promise<FileCoverage | undefined> {
+async function ask(client: BaseLanguageClient, { document }: TextEditor): Promise<FileCoverage | undefined> {
   try {
     const answer = await client.sendRequest<CoverageAnswer>('termwise/coverage', { textDocument: { uri: client.code2ProtocolConverter.asUri(document.uri) } });
     return answer.files[0];
@@ -54,7 +54,7 @@ async function ask(client: LanguageClient, { document }: TextEditor): Promise<Fi
 }
 
 /** The counts of the whole workspace, as other tools can read them. */
-async function copyAll(client: LanguageClient): Promise<void> {
+async function copyAll(client: BaseLanguageClient): Promise<void> {
   const { files } = await client.sendRequest<CoverageAnswer>('termwise/coverage', {});
   const known = files.reduce((sum, file) => sum + file.known, 0);
   const all = files.reduce((sum, file) => sum + file.all, 0);

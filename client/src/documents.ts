@@ -1,6 +1,6 @@
 /** The documents that the server is told of. */
 /** As VS Code and the usual language extensions name them. */
-const languageIds = [
+export const languageIds: readonly string[] = [
   'python', 'nomenclature', 'matlab', 'octave', 'julia', 'c', 'cpp', 'javascript', 'javascriptreact', 'typescript', 'typescriptreact',
   'fortran', 'FortranFreeForm', 'fortran-modern', 'fortran_free-form', 'fortran_fixed-form',
 ];

@@ -1,7 +1,8 @@
 /** The language server's process, and what stands of it in the status bar. */
-import { type ExtensionContext, l10n, languages, type LanguageStatusItem, LanguageStatusSeverity, type LogOutputChannel, workspace } from 'vscode';
+import { type ExtensionContext, l10n, languages, type LanguageStatusItem, LanguageStatusSeverity, type LogOutputChannel } from 'vscode';
 import { CloseAction, ErrorAction, type ErrorHandler, type InitializeParams, LanguageClient, type LanguageClientOptions, type ServerOptions, State, TransportKind } from 'vscode-languageclient/node';
 import { documents } from './documents.ts';
+import { initializationOptions } from './options.ts';
 
 /** A server that ends more often than this in the time below (in milliseconds) is not started again by itself. */
 const mostRestarts = 5;
@@ -16,7 +17,7 @@ export function createClient(context: ExtensionContext, name: string, output: Lo
   const server: ServerOptions = { run: { module, transport: TransportKind.ipc }, debug: { module, transport: TransportKind.ipc } };
   const options: LanguageClientOptions = {
     documentSelector: [...documents], outputChannel: output, errorHandler: restarting(status), initializationFailedHandler: () => false,
-    initializationOptions: { ...workspace.getConfiguration('termwise'), select: true },
+    initializationOptions: initializationOptions(),
   };
   const client = new PushedTo('termwise', name, server, options);
   context.subscriptions.push(status, client.onDidChangeState(({ newState }) => show(status, newState)));

@@ -10,5 +10,5 @@ const assets = nodeAssets();
 export async function loadFrontEnd(language: LanguageId): Promise<FrontEnd> {
   const entry = frontEndEntries.find((each) => each.language === language);
   if (!entry) throw new Error(`${language} is not served`);
-  return await entry.create({ runtime: assets.runtime, grammar: assets.grammar(language) ?? new Uint8Array() });
+  return await entry.create({ runtime: assets.runtime(), grammar: assets.grammar(language) ?? new Uint8Array() });
 }

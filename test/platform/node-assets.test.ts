@@ -7,7 +7,7 @@ describe('the assets of a source run', () => {
   const magic = [0, 0x61, 0x73, 0x6d];
 
   it('holds the runtime and the grammar of Python as WASM', () => {
-    expect([...assets.runtime.subarray(0, 4)]).toEqual(magic);
+    expect([...assets.runtime().subarray(0, 4)]).toEqual(magic);
     expect([...(assets.grammar('python')?.subarray(0, 4) ?? [])]).toEqual(magic);
   });
   it('holds the signatures of Python, sorted by file', () => {

@@ -1,7 +1,7 @@
 /** `termwise-language-server --stdio`: the language server for any editor. */
 import { createConnection, ProposedFeatures } from 'vscode-languageserver/node.js';
 import manifest from '../../../package.json' with { type: 'json' };
-import { nodeAssets } from '../platform/node-assets.ts';
+import { nodeHost } from './node-host.ts';
 import { serve } from './server.ts';
 
 const usage = `termwise-language-server: checks the units in scripts, for an editor that speaks the Language Server Protocol
@@ -21,6 +21,6 @@ else {
   const connection = createConnection(ProposedFeatures.all);
   // One answer that fails is no reason to leave the editor without the others.
   process.on('unhandledRejection', (error) => connection.console.error(error instanceof Error ? (error.stack ?? error.message) : String(error)));
-  serve(connection, nodeAssets(), manifest.version);
+  serve(connection, nodeHost(manifest.version));
   connection.listen();
 }

@@ -1,22 +1,20 @@
-/** Files as the editor sees them: an open document wins over the disk. */
-import { diskFiles } from '../platform/disk.ts';
+/** Files as the editor sees them: an open document wins over what lies beneath. */
 import type { FileSource } from '../service/contract.ts';
 import { join, parent } from '../text/paths.ts';
 import type { Documents } from './documents.ts';
-import { isPath } from './paths.ts';
 
-/** `forget` drops what is known of the folders on disk. */
-export function overlay(documents: Documents): FileSource & { forget(): void } {
-  const disk = diskFiles();
+/** `forget` drops what is known of the folders beneath. */
+export function overlay(documents: Documents, beneath: FileSource & { forget(): void }): FileSource & { forget(): void } {
   return {
-    read: (file) => documents.at(file)?.text ?? (isPath(file) ? disk.read(file) : undefined),
+    read: (file) => documents.at(file)?.text ?? beneath.read(file),
     list(folder) {
-      if (!isPath(folder)) return [];
-      const names = disk.list(folder);
-      const unsaved = documents.all().filter(({ file }) => isPath(file) && parent(file) === folder).map(({ file }) => file.slice(join(folder, '').length));
+      // A document that was never saved is in no folder.
+      if (folder === '.') return [];
+      const names = beneath.list(folder);
+      const unsaved = documents.all().filter(({ file }) => parent(file) === folder).map(({ file }) => file.slice(join(folder, '').length));
       const more = unsaved.filter((name) => !names.includes(name));
       return more.length === 0 ? names : [...names, ...more];
     },
-    forget: () => disk.forget(),
+    forget: () => beneath.forget(),
   };
 }

@@ -39,5 +39,7 @@ export function rangeOf(lines: LineIndex, span: Span, encoding: Encoding): Range
 }
 
 function widthOf(point: string, encoding: 'utf-8' | 'utf-32'): number {
-  return encoding === 'utf-32' ? 1 : Buffer.byteLength(point);
+  if (encoding === 'utf-32') return 1;
+  const code = point.codePointAt(0) ?? 0;
+  return code < 0x80 ? 1 : code < 0x800 ? 2 : code < 0x10000 ? 3 : 4;
 }

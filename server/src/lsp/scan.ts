@@ -7,7 +7,6 @@ import { languageOf } from '../frontends/registry.ts';
 import type { SymbolGroup } from '../service/contract.ts';
 import { isLeftOut } from './left-out.ts';
 import { uriOf } from './paths.ts';
-import { scriptsIn } from './scripts.ts';
 import type { Session } from './session.ts';
 import { toDiagnostics } from './to-protocol.ts';
 import { turn } from './turn.ts';
@@ -31,7 +30,7 @@ export class Scan {
   /** Reads everything again; a scan that is under way gives up. */
   async start(): Promise<void> {
     const mine = ++this.running;
-    const paths = [...scriptsIn(this.session, this.session.folders)];
+    const paths = [...this.session.scriptsIn(this.session.folders)];
     const known = new Set(paths);
     for (const file of this.files.keys()) if (!known.has(file)) this.drop(file);
     const progress = await this.progress(paths.length);

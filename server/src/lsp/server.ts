@@ -1,6 +1,6 @@
 /** The language server over a connection: which message goes where. Each request has its file in requests/. */
 import { type Connection, ErrorCodes, type InitializeParams, type InitializeResult, ResponseError, TextDocumentSyncKind } from 'vscode-languageserver/node.js';
-import type { Assets } from '../service/contract.ts';
+import type { Host } from './host.ts';
 import { fileOf } from './paths.ts';
 import { codeActionKinds, codeActions } from './requests/code-actions.ts';
 import { codeLenses } from './requests/code-lens.ts';
@@ -27,8 +27,8 @@ interface Running {
   readonly scan: Scan;
 }
 
-/** Answers a client until the connection ends. */
-export function serve(connection: Connection, assets: Assets, version: string): void {
+/** Answers a client until the connection ends. Gives what is to be told of files that changed where the client does not say so by the protocol. */
+export function serve(connection: Connection, host: Host): (files: readonly string[]) => Promise<void> {
   let running: Running | undefined;
   const now = (): Running => {
     if (!running) throw new ResponseError(ErrorCodes.ServerNotInitialized, 'not initialized');
@@ -36,13 +36,19 @@ export function serve(connection: Connection, assets: Assets, version: string): 
   };
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
-    const session = new Session(connection, assets, params, configurationProblems(connection));
+    const session = new Session(connection, host, params, configurationProblems(connection));
     running = { session, diagnostics: new Diagnostics(session), scan: new Scan(session) };
-    return { capabilities: capabilitiesFor(session), serverInfo: { name: 'termwise-language-server', version } };
+    return { capabilities: capabilitiesFor(session), serverInfo: { name: 'termwise-language-server', version: host.version } };
   });
   connection.onInitialized(() => begin(connection, now()));
   followDocuments(connection, now);
   answerRequests(connection, now);
+  return async (files) => {
+    const { session, diagnostics, scan } = now();
+    const closed = files.filter((file) => !session.documents.at(file));
+    await diagnostics.everything(closed);
+    await scan.follow(closed);
+  };
 }
 
 /** What can be asked only once the client is ready: watching, settings, folders, and the first look at the workspace. */

@@ -1,15 +1,15 @@
 /** One client's session: its documents, its settings, and the engines that answer for them. */
 import { type CancellationToken, type ClientCapabilities, type Connection, type InitializeParams, LSPErrorCodes, ResponseError } from 'vscode-languageserver/node.js';
-import { pageFile } from '../platform/pages.ts';
 import type { FindingCode } from '../program/codes.ts';
 import { Configurations } from '../service/configurations.ts';
 import type { ConfigurationProblem } from '../service/configuration.ts';
-import type { Assets, CheckResult, FileSource, Workspace } from '../service/contract.ts';
+import type { CheckResult, FileSource, Workspace } from '../service/contract.ts';
 import { createWorkspace } from '../service/workspace.ts';
 import { parent } from '../text/paths.ts';
 import { Documents, type OpenDocument } from './documents.ts';
+import type { Host } from './host.ts';
 import { overlay } from './overlay.ts';
-import { fileOf, uriOf } from './paths.ts';
+import { fileOf } from './paths.ts';
 import { agreeOn } from './positions.ts';
 import { defaultSettings, readSettings, type SessionSettings, settingsWith } from './settings.ts';
 import type { Target } from './to-protocol.ts';
@@ -20,7 +20,7 @@ const slice = 8;
 
 export class Session {
   readonly documents = new Documents();
-  readonly source: FileSource & { forget(): void } = overlay(this.documents);
+  readonly source: FileSource & { forget(): void };
   readonly capabilities: ClientCapabilities;
   readonly target: Target;
   readonly configurations: Configurations;
@@ -37,11 +37,12 @@ export class Session {
   /** Ends when the engines are free: checks with pauses in them must not meet. */
   private busy: Promise<unknown> = Promise.resolve();
 
-  constructor(readonly connection: Connection, private readonly assets: Assets, params: InitializeParams, tellProblems: (file: string, problems: readonly ConfigurationProblem[]) => void) {
+  constructor(readonly connection: Connection, private readonly host: Host, params: InitializeParams, tellProblems: (file: string, problems: readonly ConfigurationProblem[]) => void) {
     const { capabilities, initializationOptions, workspaceFolders, rootUri } = params;
+    this.source = overlay(this.documents, host.files);
     this.capabilities = capabilities;
     this.folders = (workspaceFolders ?? (rootUri ? [{ uri: rootUri }] : [])).map(({ uri }) => fileOf(uri));
-    this.target = targetOf(capabilities, (file) => this.source.read(file) ?? '');
+    this.target = targetOf(capabilities, host, (file) => this.source.read(file) ?? '');
     this.settings = initializationOptions === undefined ? defaultSettings : readSettings(initializationOptions);
     this.client = { select: typeof initializationOptions === 'object' && initializationOptions !== null && (initializationOptions as Record<string, unknown>).select === true };
     this.configurations = new Configurations(this.source, tellProblems);
@@ -58,10 +59,15 @@ export class Session {
     const key = JSON.stringify(settings);
     let engine = this.engines.get(key);
     if (!engine) {
-      engine = createWorkspace(this.assets, this.source, settings, ['nomenclature']);
+      engine = createWorkspace(this.host.assets, this.source, settings, ['nomenclature']);
       this.engines.set(key, engine);
     }
     return engine;
+  }
+
+  /** The scripts below folders. */
+  scriptsIn(folders: readonly string[]): Iterable<string> {
+    return this.host.scripts(folders, (folder) => this.configurations.at(folder));
   }
 
   /** The findings of a document as it is now; made once for each of its texts. Rejects as cancelled where it changes meanwhile. */
@@ -158,7 +164,7 @@ export class Session {
   }
 }
 
-function targetOf(capabilities: ClientCapabilities, textOf: (file: string) => string): Target {
+function targetOf(capabilities: ClientCapabilities, host: Host, textOf: (file: string) => string): Target {
   const { textDocument, general } = capabilities;
   const related = textDocument?.publishDiagnostics?.relatedInformation ?? false;
   const described = textDocument?.publishDiagnostics?.codeDescriptionSupport ?? false;
@@ -166,7 +172,7 @@ function targetOf(capabilities: ClientCapabilities, textOf: (file: string) => st
     encoding: agreeOn(general?.positionEncodings),
     textOf,
     relatedInformation: related,
-    pageUri: described ? (code) => uriOf(pageFile(code as FindingCode).replaceAll('\\', '/')) : undefined,
+    pageUri: described ? (code) => host.pageUri(code as FindingCode) : undefined,
     markdown: textDocument?.hover?.contentFormat?.includes('markdown') ?? false,
   };
 }

@@ -13,7 +13,7 @@ export interface Target {
   /** Text of a file that a related place is in. */
   readonly textOf: (file: string) => string;
   /** Address of the page that explains a code; undefined where the client opens none. */
-  readonly pageUri: ((code: string) => string) | undefined;
+  readonly pageUri: ((code: string) => string | undefined) | undefined;
   readonly relatedInformation: boolean;
   readonly markdown: boolean;
 }
@@ -43,9 +43,13 @@ function toDiagnostic(finding: PlacedFinding, lines: LineIndex, target: Target):
     code,
     source: 'termwise',
     message,
-    ...(target.pageUri ? { codeDescription: { href: target.pageUri(code) } } : {}),
+    ...described(target.pageUri?.(code)),
     ...(target.relatedInformation && related.length > 0 ? { relatedInformation: related.map((each) => toRelated(each, target)) } : {}),
   };
+}
+
+function described(href: string | undefined): Pick<Diagnostic, 'codeDescription'> {
+  return href === undefined ? {} : { codeDescription: { href } };
 }
 
 function toRelated({ file, span, message }: PlacedFinding['related'][number], target: Target): DiagnosticRelatedInformation {

@@ -1,20 +1,28 @@
 /** What ships with the engine, read from disk: beside the bundle, or from the sources and their packages. */
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
-import { basename, dirname, join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { frontEndEntries } from '../frontends/registry.ts';
-import type { Assets } from '../service/contract.ts';
+import { builtName, runtimeFile } from './grammar-files.ts';
+import type { LanguageId } from '../program/nodes.ts';
+import type { Assets, SignatureFiles } from '../service/contract.ts';
 
 const here = dirname(fileURLToPath(import.meta.url));
-const runtime = 'web-tree-sitter/web-tree-sitter.wasm';
+
+/** All of it is at hand at once. */
+export interface NodeAssets extends Assets {
+  runtime(): Uint8Array;
+  grammar(language: LanguageId): Uint8Array | undefined;
+  signatures(language: LanguageId): SignatureFiles;
+}
 
 /** The assets of this installation. Throws where it is incomplete: that is a fault of the installation, not of any script. */
-export function nodeAssets(): Assets {
+export function nodeAssets(): NodeAssets {
   const bundled = existsSync(join(here, 'grammars'));
   const signatures = bundled ? join(here, 'signatures') : join(here, '..', 'signatures');
-  const grammarFile = (path: string): string => (bundled ? join(here, 'grammars', basename(path)) : fromPackage(path));
+  const grammarFile = (path: string): string => (bundled ? join(here, 'grammars', builtName(path)) : fromPackage(path));
   return {
-    runtime: readFileSync(grammarFile(runtime)),
+    runtime: () => readFileSync(grammarFile(runtimeFile)),
     grammar: (language) => {
       const path = frontEndEntries.find((entry) => entry.language === language)?.grammar;
       return path === undefined ? undefined : readFileSync(grammarFile(path));

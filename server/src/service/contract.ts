@@ -13,11 +13,13 @@ export type { FileSource };
 /** What the engine needs from outside besides scripts: bytes and texts that ship with it. */
 export interface Assets {
   /** The grammar runtime and one grammar per language, as WASM bytes. */
-  readonly runtime: Uint8Array;
-  grammar(language: LanguageId): Uint8Array | undefined;
+  runtime(): Uint8Array | Promise<Uint8Array>;
+  grammar(language: LanguageId): Uint8Array | undefined | Promise<Uint8Array | undefined>;
   /** Shipped signature files of a language, in the nomenclature notation. */
-  signatures(language: LanguageId): readonly { readonly file: string; readonly text: string }[];
+  signatures(language: LanguageId): SignatureFiles | Promise<SignatureFiles>;
 }
+
+export type SignatureFiles = readonly { readonly file: string; readonly text: string }[];
 
 export interface Settings {
   /** Severity of each code; `off` silences it. Missing: the check's default. */

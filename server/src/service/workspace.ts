@@ -159,7 +159,11 @@ class Files implements Workspace {
 
   private async load(language: LanguageId): Promise<void> {
     const entry = frontEndEntries.find((each) => each.language === language);
-    if (entry) this.frontEnds.push(await entry.create({ runtime: this.assets.runtime, grammar: this.assets.grammar(language) ?? new Uint8Array() }));
+    if (!entry) return;
+    const [signatures, grammar] = await Promise.all([this.assets.signatures(entry.signatures ?? language), this.assets.grammar(language)]);
+    this.tables.set(language, loadSignatures(signatures));
+    const runtime = grammar ? await this.assets.runtime() : new Uint8Array();
+    this.frontEnds.push(await entry.create({ runtime, grammar: grammar ?? new Uint8Array() }));
   }
 
   /** Undefined for a script, and where the arithmetic is not loaded. */
@@ -206,19 +210,11 @@ class Files implements Workspace {
     const key = `${language}|${reach.fingerprint}`;
     let library = this.libraries.get(key);
     if (!library) {
-      library = libraryOf(...reach.signatures, this.shipped(language));
+      const shipped = this.tables.get(language);
+      library = libraryOf(...reach.signatures, ...(shipped ? [shipped] : []));
       this.libraries.set(key, library);
     }
     return library;
-  }
-
-  private shipped(language: LanguageId): SignatureTable {
-    let table = this.tables.get(language);
-    if (!table) {
-      table = loadSignatures(this.assets.signatures(frontEndEntries.find((each) => each.language === language)?.signatures ?? language));
-      this.tables.set(language, table);
-    }
-    return table;
   }
 
   private imported(file: string | undefined, from: FrontEnd): FileSolver | undefined {

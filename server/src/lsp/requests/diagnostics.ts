@@ -16,7 +16,7 @@ export class Diagnostics {
   private readonly changed = new Set<string>();
   private timer: NodeJS.Timeout | undefined;
   /** Names of results are unlike those of an earlier server: a client may still ask with one of them. */
-  private readonly era = `${process.pid}.${Date.now().toString(36)}`;
+  private readonly era = `${Date.now().toString(36)}.${Math.random().toString(36).slice(2)}`;
   private count = 0;
 
   constructor(private readonly session: Session) {}

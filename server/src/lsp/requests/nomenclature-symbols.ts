@@ -2,7 +2,6 @@
 import { type CancellationToken, type Location, type PrepareRenameParams, type Range, type ReferenceParams, type RenameParams, ResponseError, LSPErrorCodes, MessageType, ShowMessageNotification, type TextEdit, type WorkspaceEdit } from 'vscode-languageserver/node.js';
 import { languageOf } from '../../frontends/registry.ts';
 import { readNomenclature } from '../../notes/nomenclature/read.ts';
-import { scriptsIn } from '../scripts.ts';
 import type { SymbolUses } from '../../service/places.ts';
 import { LineIndex } from '../../text/line-index.ts';
 import { parent } from '../../text/paths.ts';
@@ -64,7 +63,7 @@ function symbolAt(session: Session, uri: string, position: { readonly line: numb
 
 /** The nomenclature file first, then the scripts in its folder and below that hold the word. */
 async function* usesEverywhere(session: Session, name: string, declaredIn: string, token: CancellationToken): AsyncGenerator<SymbolUses & { readonly file: string; readonly text: string }> {
-  for (const file of new Set([declaredIn, ...scriptsIn(session, [parent(declaredIn)])])) {
+  for (const file of new Set([declaredIn, ...session.scriptsIn([parent(declaredIn)])])) {
     await turn(token);
     const text = session.source.read(file);
     const language = languageOf(file);
