@@ -14,8 +14,9 @@ import { writeSection } from '../harness/writing/section.ts';
 
 /** How many sections at least each language says; the writer and the language's printer hold them up. */
 const floors: Readonly<Record<string, number>> = {
-  python: 243,
-  matlab: 232,
+  python: 247,
+  matlab: 235,
+  julia: 238,
   javascript: 229,
   typescript: 229,
 };

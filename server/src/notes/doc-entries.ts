@@ -52,6 +52,7 @@ function firstLineOf(section: Section): number {
 
 function sectionEntries(doc: Piece, lines: readonly Line[], section: Section): readonly DocEntry[] {
   const body = lines.slice(section.from, section.to);
+  if (section.style === 'markdown') return plainEntries(doc, body).map((entry) => ({ ...entry, role: section.role as Role }));
   const base = body.reduce((least, line) => Math.min(least, line.indent), Number.POSITIVE_INFINITY);
   const starts = body.flatMap((line, at) => (line.indent === base && !isBlank(line) ? [at] : []));
   if (section.role === 'result' && isProse(body, starts, section)) return [{ role: 'result', names: [], type: undefined, body: textOf(doc, body, 0, body.length) }];

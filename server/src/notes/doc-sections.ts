@@ -1,11 +1,11 @@
-/** Sections of a documentation text: numpydoc's underlined headings and Google's headings with a colon. */
+/** Sections of a documentation text: numpydoc's underlined headings, Google's headings with a colon, and Markdown's as in the docstrings of Julia. */
 import { isBlank, type Line } from './doc-lines.ts';
 
 export type Role = 'parameter' | 'result' | 'field';
 
 export interface Section {
   readonly role: Role | 'skip';
-  readonly style: 'underlined' | 'colon';
+  readonly style: 'underlined' | 'colon' | 'markdown';
   /** Lines of the body, from and to (excluded). */
   readonly from: number;
   readonly to: number;
@@ -25,10 +25,11 @@ export function sectionsOf(lines: readonly Line[]): readonly Section[] {
     const head = headAt(lines, at);
     if (head) heads.push({ at, ...head, indent: line.indent });
   });
-  return heads.map((head, index) => {
+  const told = heads.filter((head) => head.style !== 'markdown' || heads.some((each) => each.style === 'markdown' && each.role !== 'skip'));
+  return told.map((head, index) => {
     const from = head.at + (head.style === 'underlined' ? 2 : 1);
-    const limit = heads[index + 1]?.at ?? lines.length;
-    const to = head.style === 'underlined' ? limit : dedent(lines, from, limit, head.indent);
+    const limit = told[index + 1]?.at ?? lines.length;
+    const to = head.style !== 'colon' ? limit : dedent(lines, from, limit, head.indent);
     return { role: head.role, style: head.style, from, to };
   });
 }
@@ -36,6 +37,8 @@ export function sectionsOf(lines: readonly Line[]): readonly Section[] {
 function headAt(lines: readonly Line[], at: number): { readonly role: Role | 'skip'; readonly style: Section['style'] } | undefined {
   const line = lines[at] as Line;
   if (isBlank(line) || line.text.length > 24) return undefined;
+  const marked = /^#{1,4}\s+(.*?):?$/.exec(line.text);
+  if (marked) return { role: roles.get((marked[1] as string).toLowerCase()) ?? 'skip', style: 'markdown' };
   const below = lines[at + 1];
   const plain = line.text.replace(/\s*:$/, '');
   if (below && /^(?:-{3,}|={3,}|~{3,})$/.test(below.text)) return { role: roles.get(plain.toLowerCase()) ?? 'skip', style: 'underlined' };
