@@ -116,7 +116,7 @@ test('keys of a returned record', () => {
   const doc = ['    """Sums.', '', '    Returns', '    -------', '    out : dict', '        * Q : Heat flow through', '          the wall, [W]', '        * Cr : Ratio, [-]', '        * W : Width, [m]', '    """'].join('\n');
   expect(unitsOf(`def f(x):\n${doc}\n    return {'Q': x, 'Cr': 2 * x}`)).toBe('{Q} W; {Cr} -');
   expect(unitsOf(`def f(x):\n${doc}\n    out = {'Q': x}\n    if x:\n        return out\n    return None`)).toBe('{Q} W');
-  expect(unitsOf(`def f(x):\n${doc}\n    return dict(Q=x)`)).toBe('none');
+  expect(unitsOf(`def f(x):\n${doc}\n    return dict(Q=x)`)).toBe('{Q} W');
 });
 
 describe('other styles', () => {
