@@ -1,6 +1,7 @@
 /** Calls: which function is meant, and what its signature or its body says of arguments and result. */
 import type { Argument, CallExpr, Expr } from '../program/nodes.ts';
 import { power, product, quotient, sum } from './arithmetic.ts';
+import { giveBack } from './by-reference.ts';
 import type { Context } from './context.ts';
 import { evaluate } from './expressions.ts';
 import { oneForm } from './form.ts';
@@ -8,7 +9,7 @@ import { callLibrary } from './library-call.ts';
 import { exactLiteral } from './literal.ts';
 import { Rational } from '../quantities/rational.ts';
 import { callLocal, callScheme, newObject } from './user-call.ts';
-import { type Value, unknown, unknownValue } from './value.ts';
+import { type Callable, type Value, unknown, unknownValue } from './value.ts';
 
 /** One argument with what is known of it. */
 export interface Passed {
@@ -48,6 +49,13 @@ function called(context: Context, expr: CallExpr): Value {
   const passed = expr.args.map((argument) => ({ argument, value: evaluate(context, argument.value) }));
   // `isnan(a + b)` asks whether one of them is missing: what is added there need not be alike.
   if (target?.kind === 'library' && presence.has(target.name)) context.constraints.length = asked;
+  if (!expr.byReference) return applied(context, expr, callee, target, passed);
+  const result = applied(context, expr, callee, target, passed);
+  giveBack(context, expr, target, passed, result);
+  return unknown(expr);
+}
+
+function applied(context: Context, expr: CallExpr, callee: Callee, target: Callable | undefined, passed: readonly Passed[]): Value {
   if (!target && callee.method) return callMethod(context, expr, callee.object as Value, callee.method, passed);
   // Where an element is written like a call, a symbol with a unit of its own is no function; nor is `NaN(2, 3)` more than an array of NaN.
   if (!target) return expr.results !== undefined && (callee.value.form || callee.value.fits) && !callee.value.literal ? { ...callee.value, expr, from: [callee.value] } : unknown(expr);

@@ -50,6 +50,8 @@ let unknowns = 0;
 export class Context {
   readonly constraints: Constraint[] = [];
   bindings = new Bindings();
+  /** Notes of declarations: they hold for every value that their symbols take. */
+  declared: ReadonlyMap<string, NoteInForce> = new Map();
   /** Names that assignments reach outside for. */
   readonly outer = new Set<string>();
   returns: Value[] = [];
@@ -67,6 +69,15 @@ export class Context {
     sightings?: Map<Span, Value>,
   ) {
     this.sightings = sightings;
+  }
+
+  /** The note of a symbol's declaration from here on; undefined where it has none. */
+  declare(path: string, note: NoteInForce | undefined): void {
+    if (!note && !this.declared.has(path)) return;
+    const declared = new Map(this.declared);
+    if (note) declared.set(path, note);
+    else declared.delete(path);
+    this.declared = declared;
   }
 
   add(constraint: Constraint): void {

@@ -46,6 +46,7 @@ function bindParam(context: Context, param: Param, note: NoteInForce | undefined
     context.sightings?.set(param.nameSpan, object);
     return { param, note: undefined, unknown: undefined };
   }
+  if (param.intent && note) context.declare(param.name, note);
   const unknown = note ? undefined : context.fresh(param.name, param.nameSpan, 'parameter');
   const value: Value = note
     ? notedValue(param.name, note, context.anchor, param.nameSpan)

@@ -16,6 +16,8 @@ export interface SchemeParam {
   readonly name: string;
   readonly mode: 'plain' | 'keyword' | 'rest' | 'rest-named';
   readonly optional: boolean;
+  /** The argument comes back with what the function gives it. */
+  readonly intent?: 'out' | 'inout';
   readonly note?: NoteInForce;
   /** What the uses inside the function require; undefined: nothing is known. */
   readonly form: Form | undefined;

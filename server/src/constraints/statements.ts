@@ -8,8 +8,9 @@ import type { Bindings } from './bindings.ts';
 import type { Context } from './context.ts';
 import { bindElement, evaluate, range } from './expressions.ts';
 import { isConstant, oneForm, sameForm, unknownForm } from './form.ts';
-import { assign, notedValue, reportDisagreement, reportMisuse } from './targets.ts';
+import { assign, notedValue, reportMisuse } from './targets.ts';
 import { type Value, unknown } from './value.ts';
+import { declaration } from './declaration.ts';
 
 /** Walks a block; false where its end is not reached. */
 export function walk(context: Context, block: readonly Stmt[]): boolean {
@@ -95,13 +96,6 @@ function augmented(context: Context, statement: AssignStmt): Value {
   }
 }
 
-function declaration(context: Context, statement: Extract<Stmt, { kind: 'declare' }>): void {
-  const path = pathOf(statement.target);
-  if (path === undefined) return;
-  const notes = context.surroundings.notes.statement(statement, path, context.owner);
-  reportDisagreement(context, path, notes);
-  if (notes[0]) context.bindings.set(path, notedValue(path, notes[0], context.anchor, statement.target));
-}
 
 /** At the edge of an empirical relation its symbols must be counted in the units it names; inside, nothing is checked. */
 function empiricalStatement(context: Context, statement: AssignStmt, units: NonNullable<ReturnType<Context['surroundings']['notes']['empirical']>>): void {
@@ -260,7 +254,7 @@ function splitOf(values: readonly Value[]): readonly [Value, Value] | undefined 
 
 /** A nested function is read once where it stands, its parameters open. */
 function localFunction(context: Context, statement: FunctionStmt): Value {
-  const outside = { bindings: context.bindings, returns: context.returns, owner: context.owner };
+  const outside = { bindings: context.bindings, returns: context.returns, owner: context.owner, declared: context.declared };
   context.owner = statement;
   context.bindings = outside.bindings.branch();
   context.returns = [];
@@ -277,6 +271,7 @@ function localFunction(context: Context, statement: FunctionStmt): Value {
   context.bindings = outside.bindings;
   context.returns = outside.returns;
   context.owner = outside.owner;
+  context.declared = outside.declared;
   const first = returns[0];
   const result = first && returns.every((value) => value.form && first.form && sameForm(value.form, first.form)) ? first : returns.length === 1 ? (first as Value) : { expr: undefined, form: undefined, from: [] };
   return { expr: undefined, form: undefined, from: [], callable: { kind: 'local', local: { definition: statement, params, result } } };

@@ -22,7 +22,7 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
   const path = pathOf(target);
   if (path === undefined) return;
   if (target.kind === 'index' && target.keys[0]?.kind !== 'text') return assignMember(context, path, target, value, statement);
-  const notes = context.surroundings.notes.statement(statement, path, context.owner);
+  const notes = notesOn(context, statement, path);
   reportDisagreement(context, path, notes);
   const note = notes[0];
   if (!note) {
@@ -34,6 +34,13 @@ export function assign(context: Context, target: Expr, value: Value, statement: 
   const held: Value = (value.fits && !value.literal) || value.blank ? { ...noted, blank: true } : noted;
   context.bindings.set(path, held);
   context.sightings?.set(target, held);
+}
+
+/** The notes that an assigned value has to fit, that of the symbol's declaration behind those of the statement. */
+function notesOn(context: Context, statement: Stmt, path: string): readonly NoteInForce[] {
+  const notes = context.surroundings.notes.statement(statement, path, context.owner);
+  const declared = context.declared.get(path);
+  return declared && !notes.includes(declared) ? [...notes, declared] : notes;
 }
 
 /** A new version of a symbol without a note. A bare number becomes a constant whose unit its uses decide. */
@@ -102,7 +109,7 @@ function disagrees(a: NoteInForce, b: NoteInForce): boolean {
 
 /** Storing into an element keeps the container's unit and has to agree with it. */
 function assignMember(context: Context, path: string, target: Expr, value: Value, statement: Stmt): void {
-  const notes = context.surroundings.notes.statement(statement, path, context.owner);
+  const notes = notesOn(context, statement, path);
   const current = context.bindings.get(path);
   const note = notes[0];
   if (note) {

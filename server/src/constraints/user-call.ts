@@ -45,7 +45,8 @@ export function callLocal(context: Context, expr: CallExpr, local: LocalFunction
   local.params.forEach((param, at) => {
     const given = passed.find((each) => each.argument.name === param.name) ?? (passed[at]?.argument.name === undefined ? passed[at] : undefined);
     if (param.unknown && given && !given.value.literal && !given.value.fits) instance.set(param.unknown.id, given.value);
-    if (param.note && given?.value.form && !given.value.literal && !given.value.fits) {
+    const intent = local.definition.kind === 'function' ? local.definition.params[at]?.intent : undefined;
+    if (param.note && intent !== 'out' && given?.value.form && !given.value.literal && !given.value.fits) {
       const noted = notedValue(param.name, param.note, context.anchor, undefined);
       const name = local.definition.kind === 'function' ? local.definition.name : 'lambda';
       agree(context, expr, given.value, noted, { kind: 'parameter', function: name, name: param.name, note: param.note }, given.argument.value);
@@ -70,6 +71,7 @@ function pairUp(params: readonly SchemeParam[], passed: readonly Passed[], bound
 }
 
 function open(param: SchemeParam, given: Passed, instance: Instance): void {
+  if (param.intent === 'out') return;
   const term = param.form?.terms[0];
   const alone = term && param.form?.terms.length === 1 && param.form.dimension.isOne && term.power.isOne;
   if (alone && !instance.has(term.unknown.id) && !given.value.literal && !given.value.fits) instance.set(term.unknown.id, given.value);
@@ -77,6 +79,8 @@ function open(param: SchemeParam, given: Passed, instance: Instance): void {
 
 function check(context: Context, scheme: Scheme, param: SchemeParam, given: Passed, instance: Instance): void {
   const value = given.value;
+  // What an argument held that comes back with a new value says nothing, unless its unit is noted.
+  if (param.intent === 'out' || (param.intent === 'inout' && !value.version?.note)) return;
   if (value.misuse) reportMisuse(context, value);
   if (value.split && param.note) return settle(context, value.split, given);
   if (!value.form || value.literal || value.fits) return;

@@ -29,7 +29,7 @@ export function fingerprintOf(value: Value | undefined, depth = 0): string {
 /** Where a scheme's notes stand counts too, since a finding may point at them. */
 export function schemeFingerprint(scheme: Omit<Scheme, 'fingerprint'>): string {
   const names = new Map<number, number>();
-  const params = scheme.params.map((param) => `${param.name}:${param.mode}:${param.note ? noteText(param.note) : named(param.form, names)}`);
+  const params = scheme.params.map((param) => `${param.name}:${param.mode}:${param.intent ?? ''}:${param.note ? noteText(param.note) : named(param.form, names)}`);
   return `${scheme.name}(${params.join()})${scheme.result ? resultText(scheme.result, names) : ''}`;
 }
 

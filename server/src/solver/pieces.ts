@@ -126,7 +126,7 @@ function schemeOf(piece: Piece, params: readonly ReadParam[], returns: readonly 
 /** A body that contradicts itself says nothing of its parameters: the fault is reported there, not at every call. */
 function schemeParam({ param, note, unknown }: ReadParam, reduce: (form: Form) => Form): SchemeParam {
   const open = unknown && reduce(unknownForm(unknown));
-  return { name: param.name, mode: param.mode, optional: param.default !== undefined, form: open, unknown, ...(note ? { note } : {}) };
+  return { name: param.name, mode: param.mode, optional: param.default !== undefined, form: open, unknown, ...(note ? { note } : {}), ...(param.intent ? { intent: param.intent } : {}) };
 }
 
 function notedResult(notes: readonly NoteInForce[], returns: readonly Value[]): SchemeResult | undefined {
@@ -169,7 +169,7 @@ function empiricalScheme(fn: FunctionStmt, chunk: Chunk, surroundings: Surroundi
   const named = (name: string): NoteInForce | undefined => units.find((unit) => unit.symbol === name)?.note;
   const params = readParams(context, fn, undefined).map((each): SchemeParam => {
     const note = named(each.param.name) ?? each.note;
-    return { name: each.param.name, mode: each.param.mode, optional: each.param.default !== undefined, form: undefined, unknown: undefined, ...(note ? { note } : {}) };
+    return { name: each.param.name, mode: each.param.mode, optional: each.param.default !== undefined, form: undefined, unknown: undefined, ...(note ? { note } : {}), ...(each.param.intent ? { intent: each.param.intent } : {}) };
   });
   const results = surroundings.notes.results(fn);
   const note = named(fn.name);
