@@ -10,5 +10,7 @@ const patterns = ['**/*.{f90,f95,f03,f08,f,for,ftn}', '**/*.m', '**/*.jl'];
 /** Documents on disk, and those that were never saved. */
 export const documents: readonly ({ readonly scheme: string; readonly language: string } | { readonly scheme: string; readonly pattern: string })[] = [
   ...['file', 'untitled'].flatMap((scheme) => languageIds.map((language) => ({ scheme, language }))),
+  // Cells of notebooks that the server is sent.
+  ...['python', 'julia', 'octave', 'matlab'].map((language) => ({ scheme: 'vscode-notebook-cell', language })),
   ...patterns.map((pattern) => ({ scheme: 'file', pattern })),
 ];

@@ -13,6 +13,8 @@ export interface OpenDocument {
   readonly language: LanguageId | undefined;
   readonly version: number;
   readonly text: string;
+  /** The program of a notebook, whose findings go to its cells. */
+  readonly isProgram?: true;
 }
 
 export class Documents {
@@ -27,6 +29,11 @@ export class Documents {
   change(uri: string, version: number, changes: readonly TextDocumentContentChangeEvent[], encoding: Encoding): OpenDocument | undefined {
     const document = this.byUri.get(uri);
     return document && this.keep({ ...document, version, text: changes.reduce((text, change) => applied(text, change, encoding), document.text) });
+  }
+
+  /** The program of a notebook, which no notification of a text document opens. */
+  put(document: OpenDocument): void {
+    this.keep(document);
   }
 
   close(uri: string): OpenDocument | undefined {
@@ -60,7 +67,8 @@ const otherNames: Readonly<Record<string, LanguageId>> = {
   octave: 'matlab', javascriptreact: 'javascript', typescriptreact: 'typescript', 'cuda-cpp': 'cpp', fortranfreeform: 'fortran', 'fortran-modern': 'fortran', 'fortran_free-form': 'fortran', 'fortran_fixed-form': 'fortran',
 };
 
-function languageNamed(languageId: string, file: string, text: string): LanguageId | undefined {
+/** Undefined where the language is none of ours. */
+export function languageNamed(languageId: string, file: string, text: string): LanguageId | undefined {
   const named = languages.find((each) => each === languageId) ?? otherNames[languageId.toLowerCase()];
   if (named) return named;
   // `.m` is taken for Objective-C where no extension says otherwise; what is Objective-C shows it.
@@ -68,7 +76,8 @@ function languageNamed(languageId: string, file: string, text: string): Language
   return languageOf(file);
 }
 
-function applied(text: string, change: TextDocumentContentChangeEvent, encoding: Encoding): string {
+/** A text after one change. */
+export function applied(text: string, change: TextDocumentContentChangeEvent, encoding: Encoding): string {
   if (!('range' in change)) return change.text;
   const lines = LineIndex.of(text);
   const [one, other] = [offsetOf(lines, change.range.start, encoding), offsetOf(lines, change.range.end, encoding)];

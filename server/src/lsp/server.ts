@@ -14,6 +14,8 @@ import { inlayHints } from './requests/inlay-hints.ts';
 import { foldingRanges, formatting, semanticTokens } from './requests/nomenclature.ts';
 import { prepareRename, references, rename } from './requests/nomenclature-symbols.ts';
 import { nomenclatureCapabilities, serveNomenclatureOnly } from './nomenclature-only.ts';
+import { Notebooks } from './notebooks.ts';
+import { cellActions, cellHover, followNotebooks, notebookSelector, publishCells } from './requests/notebook.ts';
 import { askForSettings, settingsChanged } from './requests/settings.ts';
 import { unitOrigin } from './requests/unit-origin.ts';
 import { changedFiles, watchFiles } from './requests/watched-files.ts';
@@ -25,6 +27,7 @@ interface Running {
   readonly session: Session;
   readonly diagnostics: Diagnostics;
   readonly scan: Scan;
+  readonly notebooks: Notebooks;
 }
 
 /** Answers a client until the connection ends. Gives what is to be told of files that changed where the client does not say so by the protocol. */
@@ -37,11 +40,17 @@ export function serve(connection: Connection, host: Host): (files: readonly stri
 
   connection.onInitialize((params: InitializeParams): InitializeResult => {
     const session = new Session(connection, host, params, configurationProblems(connection));
-    running = { session, diagnostics: new Diagnostics(session), scan: new Scan(session) };
+    const notebooks = new Notebooks(session.target.encoding);
+    const programs = async (uri: string): Promise<void> => {
+      const program = notebooks.of(uri);
+      if (program) await publishCells(session, notebooks, program);
+    };
+    running = { session, diagnostics: new Diagnostics(session, programs), scan: new Scan(session), notebooks };
     return { capabilities: capabilitiesFor(session), serverInfo: { name: 'termwise-language-server', version: host.version } };
   });
   connection.onInitialized(() => begin(connection, now()));
   followDocuments(connection, now);
+  followNotebooks(connection, () => ({ ...now(), fail: (error) => now().diagnostics.fail(error) }));
   answerRequests(connection, now);
   return async (files) => {
     const { session, diagnostics, scan } = now();
@@ -108,7 +117,11 @@ function followDocuments(connection: Connection, now: () => Running): void {
 }
 
 function answerRequests(connection: Connection, now: () => Running): void {
-  connection.onHover((params, token) => hover(now().session, params, token));
+  connection.onHover((params, token) => {
+    const { session, notebooks } = now();
+    const program = notebooks.of(params.textDocument.uri);
+    return program ? cellHover(session, notebooks, program, params, token) : hover(session, params, token);
+  });
   connection.onCompletion((params, token) => completion(now().session, params, token));
   connection.onTypeDefinition((params, token) => unitOrigin(now().session, params, token));
   connection.onReferences((params, token) => references(now().session, params, token));
@@ -117,7 +130,11 @@ function answerRequests(connection: Connection, now: () => Running): void {
   connection.onDocumentSymbol((params, token) => documentSymbols(now().session, params, token));
   connection.onWorkspaceSymbol((params, token) => workspaceSymbols(now().session, now().scan, params, token));
   connection.onCodeLens((params, token) => codeLenses(now().session, params, token));
-  connection.onCodeAction((params, token) => codeActions(now().session, params, token));
+  connection.onCodeAction((params, token) => {
+    const { session, notebooks } = now();
+    const program = notebooks.of(params.textDocument.uri);
+    return program ? cellActions(session, notebooks, program, params, token) : codeActions(session, params, token);
+  });
   connection.onFoldingRanges((params, token) => foldingRanges(now().session, params, token));
   connection.onDocumentFormatting((params, token) => formatting(now().session, params, token));
   connection.languages.semanticTokens.on((params, token) => semanticTokens(now().session, params, token));
@@ -130,6 +147,7 @@ function capabilitiesFor(session: Session): InitializeResult['capabilities'] {
   return {
     positionEncoding: session.target.encoding,
     textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
+    notebookDocumentSync: { notebookSelector },
     hoverProvider: true,
     inlayHintProvider: true,
     completionProvider: { triggerCharacters: [...completionTriggers] },

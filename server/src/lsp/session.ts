@@ -71,8 +71,8 @@ export class Session {
   }
 
   /** The findings of a document as it is now; made once for each of its texts. Rejects as cancelled where it changes meanwhile. */
-  async check(document: OpenDocument, token?: CancellationToken): Promise<CheckResult> {
-    return this.alone(() => this.checkNow(document, token));
+  async check(document: OpenDocument, token?: CancellationToken, lineName?: (offset: number) => string): Promise<CheckResult> {
+    return this.alone(() => this.checkNow(document, token, lineName));
   }
 
   /** Runs something while nothing else uses the engines, on a document that was checked as it is now; undefined where it changed meanwhile. */
@@ -134,7 +134,7 @@ export class Session {
     return true;
   }
 
-  private async checkNow(document: OpenDocument, token?: CancellationToken): Promise<CheckResult> {
+  private async checkNow(document: OpenDocument, token?: CancellationToken, lineName?: (offset: number) => string): Promise<CheckResult> {
     for (;;) {
       const { epoch } = this;
       const workspace = await this.engineOf(document.file);
@@ -144,7 +144,7 @@ export class Session {
       if (language === 'nomenclature') await workspace.prepareValues();
       const known = this.known(document);
       if (known) return known;
-      const result = await this.inSlices(document, workspace.steps(document.file, document.text, language), token);
+      const result = await this.inSlices(document, workspace.steps(document.file, document.text, language, lineName), token);
       if (epoch !== this.epoch) continue;
       this.checked.set(document.uri, { document, epoch, result });
       return result;

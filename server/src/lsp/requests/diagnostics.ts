@@ -19,7 +19,8 @@ export class Diagnostics {
   private readonly era = `${Date.now().toString(36)}.${Math.random().toString(36).slice(2)}`;
   private count = 0;
 
-  constructor(private readonly session: Session) {}
+  /** `programs`: tells the cells of a notebook again. */
+  constructor(private readonly session: Session, private readonly programs: (uri: string) => Promise<void>) {}
 
   /** A document was opened or edited. Edits that come together are checked once. */
   changedIn(document: OpenDocument): void {
@@ -52,6 +53,7 @@ export class Diagnostics {
   async everything(files: readonly string[] = []): Promise<void> {
     await this.session.touch(files);
     if (this.session.pulls) {
+      for (const { uri, isProgram } of this.session.documents.all()) if (isProgram) await this.programs(uri);
       if (this.session.capabilities.workspace?.diagnostics?.refreshSupport) await this.session.connection.languages.diagnostics.refresh();
       return;
     }
@@ -82,6 +84,7 @@ export class Diagnostics {
   private async push(uri: string): Promise<void> {
     const document = this.session.documents.get(uri);
     if (!document) return;
+    if (document.isProgram) return this.programs(uri);
     const diagnostics = await this.of(document).catch(givenUp);
     if (!diagnostics || this.session.documents.get(uri) !== document) return;
     const before = this.sent.get(uri);
