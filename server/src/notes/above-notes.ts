@@ -1,7 +1,7 @@
 /** Notes in comments that stand on lines of their own: `# V [m/s], D [m]`, and the comment above a field. */
 import { pathOf } from '../program/path.ts';
 import type { AssignStmt, Comment, DeclareStmt, FunctionStmt } from '../program/nodes.ts';
-import { noteText } from './comment-notes.ts';
+import { declaredTargets, noteText } from './comment-notes.ts';
 import type { Collector } from './collector.ts';
 import { choose, type Found, lookForUnits } from './find-unit.ts';
 import { isCode } from './not-units.ts';
@@ -88,7 +88,7 @@ function moved(found: Found): Found {
 }
 
 /** The comment directly above a field: one bracket that names no other symbol is the field's unit. */
-export function fieldAboveNote(out: Collector, statement: AssignStmt | DeclareStmt): boolean {
+export function fieldAboveNote(out: Collector, statement: AssignStmt | DeclareStmt, owner?: FunctionStmt): boolean {
   const target = statement.kind === 'assign' ? statement.targets[0] : statement.target;
   const path = target && pathOf(target);
   const comment = statement.above?.at(-1);
@@ -96,10 +96,10 @@ export function fieldAboveNote(out: Collector, statement: AssignStmt | DeclareSt
   const piece = noteText(comment);
   if (!piece.text.includes('[') || isCode(piece.text)) return false;
   const first = (firstItem.exec(piece.text.slice(0, Math.max(piece.text.indexOf('['), 0))) ?? describedItem.exec(piece.text))?.[1];
-  if (first !== undefined && first !== path && isShort(first)) return false;
+  if (first !== undefined && out.name(first) !== path && isShort(first)) return false;
   const looked = out.look(piece, 'comment', out.options(path, piece.text), true);
   const found = looked.brackets.length === 1 ? looked.brackets[0] : undefined;
-  if (found) out.note({ kind: 'statement', statement, path }, piece, found, 'above');
+  if (found) for (const each of declaredTargets(statement, path, owner)) out.note(each, piece, found, 'above');
   return found !== undefined;
 }
 

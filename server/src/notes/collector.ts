@@ -1,3 +1,4 @@
+import { nameIn } from '../program/name-case.ts';
 import type { LanguageId } from '../program/nodes.ts';
 import type { ReadOptions, Vocabulary } from '../quantities/unit-result.ts';
 import { besideUnit } from './describe.ts';
@@ -17,6 +18,11 @@ export class Collector {
 
   constructor(readonly settings: NoteSettings, readonly vocabulary: Vocabulary, readonly language: LanguageId, readonly names: Names) {}
 
+  /** A name of a comment as the code's form has it. */
+  name(written: string): string {
+    return nameIn(this.language, written);
+  }
+
   /** Options for units that stand beside a symbol and these words. */
   options(symbol: string, words: string): ReadOptions {
     return { vocabulary: this.vocabulary, describes: `${symbol} ${words}` };
@@ -35,7 +41,7 @@ export class Collector {
   /** A note on a target by a unit found in a piece. */
   note(target: NoteTarget, piece: Piece, found: Found, form: NoteForm): void {
     this.places.add(piece.start + found.span.start);
-    this.notes.push({ target, unit: found.unit, span: spanIn(piece, found.span.start, found.span.end), form, hints: found.hints, ...besideUnit(piece.text, found.outer) });
+    this.notes.push({ target: target.kind === 'symbol' ? { ...target, name: this.name(target.name) } : target, unit: found.unit, span: spanIn(piece, found.span.start, found.span.end), form, hints: found.hints, ...besideUnit(piece.text, found.outer) });
   }
 
   /** Units found in a piece that nothing could be done with. */
@@ -44,7 +50,9 @@ export class Collector {
   }
 
   directive(directive: Directive): void {
-    this.directives.push(directive);
+    const name = (written: string): string => this.name(written);
+    if (directive.kind === 'depends') this.directives.push({ ...directive, dependent: name(directive.dependent), on: directive.on.map(name) });
+    else this.directives.push(directive.kind === 'empirical' ? { ...directive, units: directive.units.map((each) => ({ ...each, symbol: name(each.symbol) })) } : directive);
   }
 
   get result(): ChunkNotes {

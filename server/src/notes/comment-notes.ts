@@ -11,7 +11,7 @@ import type { NoteTarget } from './types.ts';
 import { unitInWords } from './unit-words.ts';
 
 /** The note behind an assignment, a declaration, a loop's or a `with` statement's head; one per target where there are as many. */
-export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt): void {
+export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt, owner?: FunctionStmt): void {
   const comment = statement.trailing;
   if (!comment || (statement.kind !== 'loop' && statement.kind !== 'scope' && !belongs(chunk, statement, comment))) return;
   const groups = targetsOf(statement);
@@ -21,14 +21,31 @@ export function trailingNotes(out: Collector, chunk: Chunk, statement: AssignStm
   if (positions === 0 || named === undefined || piece.text === '' || isCode(piece.text)) return;
   const options = out.options(named, piece.text);
   const looked = out.look(piece, 'comment', options, true);
+  const note = (path: string, found: Found, alone: boolean): void => {
+    for (const target of declaredTargets(statement, path, owner)) (alone ? noteAlone : noteWhole)(out, target, piece, found);
+  };
   if (positions === 1) {
     const found = unitOf(out, piece, looked, valueOf(statement), options, named);
-    if (found) for (const [path] of groups) if (path !== undefined) out.note({ kind: 'statement', statement, path }, piece, found, 'trailing');
+    if (found) for (const [path] of groups) if (path !== undefined) note(path, found, false);
     return;
   }
   const each = looked.brackets.length > 0 ? looked.brackets : looked.parentheses;
-  if (each.length !== positions) return out.leave(piece, each);
-  for (const group of groups) group.forEach((path, at) => path !== undefined && group.length === positions && noteAlone(out, { kind: 'statement', statement, path }, piece, each[at] as Found));
+  if (each.length === positions) for (const group of groups) group.forEach((path, at) => path !== undefined && group.length === positions && note(path, each[at] as Found, true));
+  else if (statement.kind === 'declare' && each.length < 2) {
+    const found = unitOf(out, piece, looked, undefined, options, named);
+    for (const path of groups[0] ?? []) if (found && path !== undefined) note(path, found, false);
+  } else out.leave(piece, each);
+}
+
+/** What a note on a statement is about: the symbol it assigns; the parameter or the result that it declares. */
+export function declaredTargets(statement: AssignStmt | DeclareStmt | LoopStmt | ScopeStmt, path: string, owner: FunctionStmt | undefined): readonly NoteTarget[] {
+  const own: NoteTarget = { kind: 'statement', statement, path };
+  if (statement.kind !== 'declare' || !owner) return [own];
+  const param = owner.params.find((each) => each.name === path);
+  const outputs = owner.outputs ?? [];
+  const position = outputs.findIndex((each) => each.name === path);
+  const result: readonly NoteTarget[] = position < 0 ? [] : [{ kind: 'result', owner, ...(outputs.length > 1 ? { position } : {}), name: path }];
+  return [param ? { kind: 'parameter', owner, param } : own, ...result];
 }
 
 export function paramNote(out: Collector, chunk: Chunk, owner: FunctionStmt, param: Param): void {
@@ -67,6 +84,10 @@ export function returnNotes(out: Collector, owner: FunctionStmt, statement: Retu
     if (found) out.note({ kind: 'result', owner }, piece, found, 'trailing');
   } else if (brackets.length === positions) brackets.forEach((found, position) => noteAlone(out, { kind: 'result', owner, position }, piece, found));
   else out.leave(piece, brackets);
+}
+
+function noteWhole(out: Collector, target: NoteTarget, piece: Piece, found: Found): void {
+  out.note(target, piece, found, 'trailing');
 }
 
 /** One of several notes in a comment: the words beside it are not its own. */

@@ -13,13 +13,14 @@ import type { NoteTarget } from './types.ts';
 /** Parameters and results of a function; of a constructor also the fields that its documentation lists. */
 export function functionDocs(out: Collector, fn: FunctionStmt, owner: ClassStmt | undefined): void {
   if (!fn.doc || !mayHoldUnits(fn.doc)) return;
-  const doc = readDocumentation(fn.doc);
+  const doc = named(out, readDocumentation(fn.doc));
   const params = new Map(fn.params.map((param) => [param.name, param]));
   readEntries(out, doc, (entry, name) => {
     if (entry.role === 'field') return owner && name !== undefined ? [{ kind: 'field', owner, name }] : [];
     const param = name === undefined ? undefined : (params.get(name) ?? params.get(inCode(name)));
     if (name !== undefined && params.has(name.slice(0, Math.max(name.indexOf('.'), 0)))) return [{ kind: 'symbol', owner: fn, name }];
-    return param ? [{ kind: 'parameter', owner: fn, param }] : outputTargets(fn, name);
+    if (param) return [{ kind: 'parameter', owner: fn, param }, ...(param.intent ? outputTargets(fn, param.name) : [])];
+    return outputTargets(fn, entry === doc.entries.at(-1) && isResult(out, fn, doc, name) ? fn.outputs?.[0]?.name : name);
   }, fn);
   if (isProperty(fn)) propertyNote(out, fn, doc);
   else if (!fn.outputs) summaryNotes(out, fn, doc);
@@ -67,6 +68,16 @@ function readEntries(out: Collector, doc: Documentation, targetsOf: Targets, fn:
     const targets = fresh.flatMap((name) => targetsOf(entry, name));
     if (readEntry(out, doc, entry, targets)) for (const name of fresh) told.add(`${entry.role}:${name}`);
   }
+}
+
+/** The names of a documentation as the code's form has them. */
+function named(out: Collector, doc: Documentation): Documentation {
+  return { ...doc, entries: doc.entries.map((entry) => ({ ...entry, names: entry.names.map((name) => out.name(name)) })) };
+}
+
+/** Behind all parameters, a name that the code does not know can only be another one for the result: `rho = density` of `fluid_rho(t, p)`. */
+function isResult(out: Collector, fn: FunctionStmt, doc: Documentation, name: string | undefined): boolean {
+  return name !== undefined && fn.outputs?.length === 1 && !out.names.occurs(name) && fn.params.every((param) => doc.entries.some((entry) => entry.names.includes(param.name)));
 }
 
 /** A help text that writes a name in capitals means the one in the code. */

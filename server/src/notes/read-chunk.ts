@@ -12,7 +12,7 @@ import { NoteWalk } from './walk.ts';
 
 /** Reads the notes of a chunk; spans are relative to it. Never throws. */
 export function readChunkNotes(chunk: Chunk, settings: NoteSettings, vocabulary: Vocabulary, language: LanguageId): ChunkNotes {
-  const names = new Names(chunk, language === 'matlab' || language === 'julia');
+  const names = new Names(chunk, language);
   const out = new Collector(settings, vocabulary, language, names);
   const walk = new NoteWalk(out, chunk);
   walk.block(chunk.statements, undefined, undefined);

@@ -27,8 +27,8 @@ export class NoteWalk {
     switch (statement.kind) {
       case 'assign':
       case 'declare':
-        trailingNotes(this.out, this.chunk, statement);
-        if (statement.above) this.above(statement, cls);
+        trailingNotes(this.out, this.chunk, statement, owner);
+        if (statement.above) this.above(statement, cls, owner);
         if (statement.kind === 'assign') this.entries(statement.value);
         return;
       case 'evaluate':
@@ -61,8 +61,8 @@ export class NoteWalk {
     }
   }
 
-  private above(statement: Extract<Stmt, { kind: 'assign' | 'declare' }>, cls: ClassStmt | undefined): void {
-    const claimed = cls ? fieldAboveNote(this.out, statement) : statement.kind === 'assign' && namedAboveNote(this.out, statement);
+  private above(statement: Extract<Stmt, { kind: 'assign' | 'declare' }>, cls: ClassStmt | undefined, owner: FunctionStmt | undefined): void {
+    const claimed = cls || statement.kind === 'declare' ? fieldAboveNote(this.out, statement, owner) : namedAboveNote(this.out, statement);
     const comment = statement.above?.at(-1);
     if (claimed && comment) this.used.add(comment.start);
   }

@@ -9,7 +9,8 @@ import type { FileSource } from './contract.ts';
 import { join, parent } from '../text/paths.ts';
 
 export interface Reach {
-  symbol(name: string): NoteInForce | undefined;
+  /** The note on a symbol; `ignoringCase`: the name is in small letters, and the symbol may be written in others where there is only one such. */
+  symbol(name: string, ignoringCase?: boolean): NoteInForce | undefined;
   readonly vocabulary: Vocabulary;
   readonly signatures: readonly SignatureTable[];
   /** Equal where the same files with the same contents are in reach. */
@@ -54,13 +55,21 @@ export class NomenclatureFolders {
       for (const [symbol, note] of nomenclatureNotesInForce(nomenclature, file)) if (!symbols.has(symbol)) symbols.set(symbol, note);
       read.push(nomenclature);
     }
+    let lowered: ReadonlyMap<string, NoteInForce | undefined> | undefined;
     return {
-      symbol: (name) => symbols.get(name) ?? outer.symbol(name),
+      symbol: (name, ignoringCase) => (ignoringCase ? (lowered ??= inSmallLetters(symbols)).get(name) : symbols.get(name)) ?? outer.symbol(name, ignoringCase),
       vocabulary,
       signatures: [...read.map((each) => each.table), ...outer.signatures],
       fingerprint: `${++this.versions}`,
     };
   }
+}
+
+/** Symbols by their names in small letters; two that differ by case only are none. */
+function inSmallLetters(symbols: ReadonlyMap<string, NoteInForce>): ReadonlyMap<string, NoteInForce | undefined> {
+  const found = new Map<string, NoteInForce | undefined>();
+  for (const [name, note] of symbols) found.set(name.toLowerCase(), found.has(name.toLowerCase()) ? undefined : note);
+  return found;
 }
 
 const nothing: Reach = { symbol: () => undefined, vocabulary: emptyVocabulary, signatures: [], fingerprint: '' };

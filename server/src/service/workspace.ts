@@ -7,10 +7,11 @@ import type { Elementary } from '../notes/nomenclature/elementary.ts';
 import { nomenclatureNotes } from '../notes/nomenclature/chunk-notes.ts';
 import { readChunkNotes } from '../notes/read-chunk.ts';
 import type { ChunkNotes } from '../notes/types.ts';
+import { ignoresCase } from '../program/name-case.ts';
 import type { Chunk, LanguageId } from '../program/nodes.ts';
 import { loadSignatures } from '../signatures/load.ts';
 import type { FileSolver } from '../solver/file-solver.ts';
-import { type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
+import { inSmallLetters, type Library, libraryOf, type SignatureTable } from '../solver/library.ts';
 import type { Solved } from '../solver/pieces.ts';
 import { absolute, type Span } from '../text/span.ts';
 import type { Assets, CheckResult, CompletionChoice, FileSource, HintSettings, HoverInfo, OfferedFix, PlacedFinding, Settings, SymbolGroup, TextHint, Workspace } from './contract.ts';
@@ -191,7 +192,7 @@ class Files implements Workspace {
       frontEnd,
       readNotes: (chunk) => this.notesOf(chunk, frontEnd, reach),
       library: this.libraryFor(frontEnd.language, reach),
-      nomenclature: (name) => reach.symbol(name),
+      nomenclature: (name) => reach.symbol(name, ignoresCase(frontEnd.language)),
       importFile: (statement, name) => this.imported(frontEnd.resolve?.(file, statement, name, this.source), frontEnd),
       neighbour: (name) => this.imported(frontEnd.neighbour?.(file, name, this.source), frontEnd),
       cache: this.cache,
@@ -211,7 +212,8 @@ class Files implements Workspace {
     let library = this.libraries.get(key);
     if (!library) {
       const shipped = this.tables.get(language);
-      library = libraryOf(...reach.signatures, ...(shipped ? [shipped] : []));
+      const own = ignoresCase(language) ? reach.signatures.map(inSmallLetters) : reach.signatures;
+      library = libraryOf(...own, ...(shipped ? [shipped] : []));
       this.libraries.set(key, library);
     }
     return library;

@@ -30,6 +30,12 @@ export function libraryOf(...tables: readonly SignatureTable[]): Library {
   };
 }
 
+/** A table for a language whose names do not tell capital from small letters. */
+export function inSmallLetters(table: SignatureTable): SignatureTable {
+  const lowered = <T>(map: ReadonlyMap<string, T>): ReadonlyMap<string, T> => new Map([...map].map(([name, each]) => [name.toLowerCase(), each]));
+  return { functions: lowered(table.functions), methods: lowered(table.methods), constants: lowered(table.constants) };
+}
+
 function addPrefixes(name: string, modules: Set<string>): void {
   for (let dot = name.indexOf('.'); dot > 0; dot = name.indexOf('.', dot + 1)) modules.add(name.slice(0, dot));
 }
