@@ -1,6 +1,6 @@
 /**
  * `npm run test:editor`: the packaged extension in a real VS Code. On a desktop (a `code` on the path, or --download) with
- * @vscode/test-electron; else in the browser workbench, where some flows also drive the page. `--screenshots DIR` keeps its pictures, `--flow WORDS` runs only the flows with these words in their names.
+ * @vscode/test-electron; else in the browser workbench, where some flows also drive the page. `--screenshots DIR` keeps its pictures, `--flow WORDS` runs only the flows with these words in their names, `--suite` only what runs inside the editor.
  */
 import { execFileSync } from 'node:child_process';
 import { cpSync, existsSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
@@ -81,7 +81,7 @@ async function inBrowser(suite, vsix, webVsix) {
   const webTemplate = join(folder, 'web-template');
   dataFolder(webTemplate, webVsix, settings);
   const flows = [...Object.entries(pageFlows).map(([name, flow]) => [name, flow, template]), ...webFlows.map((name) => [`in a worker of the browser: ${name}`, pageFlows[name], webTemplate])];
-  for (const [name, flow, data] of flows.filter(([each]) => only === undefined || each.includes(only))) {
+  for (const [name, flow, data] of flows.filter(([each]) => !args.includes('--suite') && (only === undefined || each.includes(only)))) {
     try {
       await withWorkbench(data, 'flow', (workbench, workspace) => runFlow(workbench, workspace, name, flow, executablePath));
       counts.passed++;

@@ -174,6 +174,33 @@ const cases: Readonly<Record<string, () => Promise<void>>> = {
     assert.ok(uris.some((path) => path.endsWith('bench.nomen')), uris.join());
   },
 
+  'scripts in every other language have their findings': async () => {
+    const folder = vscode.workspace.workspaceFolders?.[0];
+    assert.ok(folder);
+    const names = (await vscode.workspace.fs.readDirectory(folder.uri)).filter(([name, type]) => type === vscode.FileType.File && !/\.(?:py|nomen|md)$/.test(name)).map(([name]) => name);
+    assert.ok(names.length > 0, 'no script in another language');
+    for (const name of names) {
+      const { uri } = await open(name);
+      await until(() => codes(uri), (now) => now.length > 0, `a finding in ${name}`);
+    }
+  },
+
+  'a notebook has its findings in its cells': async () => {
+    const folder = vscode.workspace.workspaceFolders?.[0];
+    assert.ok(folder);
+    const file = vscode.Uri.joinPath(folder.uri, 'bench.ipynb');
+    const cell = (source: string) => ({ cell_type: 'code', execution_count: null, metadata: {}, outputs: [], source });
+    const notebook = { cells: [cell('p = 2.0e5  # [Pa]\nh = 12.0  # [m]'), cell('total = p + h')], metadata: { kernelspec: { name: 'python3', display_name: 'Python 3', language: 'python' }, language_info: { name: 'python' } }, nbformat: 4, nbformat_minor: 5 };
+    await vscode.workspace.fs.writeFile(file, new TextEncoder().encode(JSON.stringify(notebook)));
+    const document = await vscode.workspace.openNotebookDocument(file);
+    await vscode.window.showNotebookDocument(document);
+    const last = document.cellAt(1).document.uri;
+    await until(() => codes(last), (now) => now.join() === 'unlike-terms', 'a finding in the second cell');
+    assert.deepEqual(codes(document.cellAt(0).document.uri), []);
+    await vscode.commands.executeCommand('workbench.action.closeActiveEditor');
+    await vscode.workspace.fs.delete(file);
+  },
+
   'the server is started again by command': async () => {
     const { uri } = await open('mixer.py');
     const before = await until(() => serverProcesses(), (now) => now.length === 1, 'one server');
