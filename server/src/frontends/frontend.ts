@@ -45,6 +45,11 @@ export interface FrontEndEntry {
   readonly grammar?: string;
   /** The language whose signatures it shares; undefined for its own. */
   readonly signatures?: LanguageId;
+  /**
+   * Set until the errors on code that nobody here wrote have been read and 19 in 20 are real: they are warnings until then, unless a
+   * setting says otherwise.
+   */
+  readonly onTrial?: true;
   create(bytes: GrammarBytes): FrontEnd | Promise<FrontEnd>;
 }
 

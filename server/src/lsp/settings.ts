@@ -1,5 +1,6 @@
 /** Settings as an editor sends them; what is not understood is left at its default. */
 import { findingCodes, levels } from '../findings/finding.ts';
+import { checks } from '../findings/registry.ts';
 import { defaultNoteSettings } from '../notes/types.ts';
 import type { Configuration } from '../service/configuration.ts';
 import { defaultHints, type HintSettings, type Settings } from '../service/contract.ts';
@@ -25,7 +26,8 @@ export function readSettings(sent: unknown): SessionSettings {
   const flag = (name: keyof typeof defaultNoteSettings): boolean => (typeof notes[name] === 'boolean' ? notes[name] : defaultNoteSettings[name]);
   const chosen = findingCodes.flatMap((code) => {
     const level = levels.find((each) => each === severities[code]);
-    return level ? [[code, level] as const] : [];
+    // Editors send defaults as if they were chosen; what is a default in one language may be another in the next.
+    return level && level !== defaultSeverity(code) ? [[code, level] as const] : [];
   });
   const wholeWorkspace = isObject(sent) && sent.wholeWorkspace === true;
   const hints = objectIn(sent, 'hints');
@@ -40,6 +42,10 @@ export function readSettings(sent: unknown): SessionSettings {
 /** A project's own file goes before the editor's settings: it says what the team agreed on. */
 export function settingsWith({ severities, notes }: Settings, configuration: Configuration): Settings {
   return { severities: { ...severities, ...configuration.severities }, notes: { ...notes, ...configuration.notes } };
+}
+
+function defaultSeverity(code: (typeof findingCodes)[number]): string | undefined {
+  return checks.find((check) => check.code === code)?.severity;
 }
 
 function objectIn(sent: unknown, name: string): Readonly<Record<string, unknown>> {

@@ -89,7 +89,7 @@ class Files implements Workspace {
     if (!frontEnd) return { file, language: language ?? 'python', text, findings: [], statistics: { functions: 0, notes: 0, unread: [] } };
     if (this.imports.size > mostImports) this.imports.clear();
     const understood = this.understand(file, text, frontEnd);
-    const detected = this.severe(yield* detectInSteps(understood));
+    const detected = this.severe(yield* detectInSteps(understood), frontEnd);
     const voice = voiceOver(file, (name) => (name === file ? text : this.textOf(name)), lineName);
     const findings = say(detected, voice).map((finding): PlacedFinding => ({
       code: finding.code,
@@ -109,14 +109,14 @@ class Files implements Workspace {
     const { understood } = kept;
     const look = (text: string): Look => {
       const again = this.understand(file, text, frontEnd);
-      return { understood: again, detected: this.severe(detect(again)) };
+      return { understood: again, detected: this.severe(detect(again), frontEnd) };
     };
     const reach = this.folders.reachOf(file);
     const trial = (edits: readonly TextEdit[]): Trial | undefined => {
       const found = tryInChunk(understood, edits, frontEnd, (chunk) => this.notesOf(chunk, frontEnd, reach));
-      return found && { ...found, before: this.severe(found.before), after: this.severe(found.after) };
+      return found && { ...found, before: this.severe(found.before, frontEnd), after: this.severe(found.after, frontEnd) };
     };
-    return fixesOf({ understood, detected: this.severe(detect(understood)) }, frontEnd.style, span, trial, look);
+    return fixesOf({ understood, detected: this.severe(detect(understood), frontEnd) }, frontEnd.style, span, trial, look);
   }
 
   hover(file: string, offset: number): HoverInfo | undefined {
@@ -243,9 +243,10 @@ class Files implements Workspace {
     return this.frontEnds.find((each) => reads(each, file));
   }
 
-  private severe(detected: readonly Detected[]): readonly Detected[] {
+  private severe(detected: readonly Detected[], { language }: FrontEnd): readonly Detected[] {
+    const onTrial = frontEndEntries.some((each) => each.language === language && each.onTrial);
     return detected.flatMap((each) => {
-      const severity = this.settings.severities[each.code] ?? each.severity;
+      const severity = this.settings.severities[each.code] ?? (onTrial && each.severity === 'error' ? 'warning' : each.severity);
       return severity === 'off' ? [] : [{ ...each, severity }];
     });
   }

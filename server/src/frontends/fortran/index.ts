@@ -21,7 +21,7 @@ const fortranFrontEnd: FrontEnd = {
   neighbour: neighbourOf,
 };
 
-export const fortranEntry: FrontEndEntry = { language: 'fortran', endings: fortranFrontEnd.endings, create: () => fortranFrontEnd };
+export const fortranEntry: FrontEndEntry = { language: 'fortran', onTrial: true, endings: fortranFrontEnd.endings, create: () => fortranFrontEnd };
 
 function parse(text: string, file: string, previous?: Parsed): Parsed {
   const form = formOf(file);

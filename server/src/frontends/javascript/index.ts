@@ -18,7 +18,7 @@ const style: HostStyle = {
 
 function entry(language: LanguageId, endings: readonly string[], grammar: string): FrontEndEntry {
   return {
-    language, endings, grammar, signatures: 'javascript',
+    language, endings, grammar, signatures: 'javascript', onTrial: true,
     create: async (bytes) => ({
       language, endings, style,
       resolve: resolveImport,

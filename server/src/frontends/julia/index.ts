@@ -10,6 +10,7 @@ import { juliaShape } from './shape.ts';
 
 export const juliaEntry: FrontEndEntry = {
   language: 'julia',
+  onTrial: true,
   endings: ['.jl'],
   grammar: 'tree-sitter-julia/tree-sitter-julia.wasm',
   create: async (bytes) => ({

@@ -22,7 +22,7 @@ const matlabFrontEnd: FrontEnd = {
   neighbour: neighbourOf,
 };
 
-export const matlabEntry: FrontEndEntry = { language: 'matlab', endings: matlabFrontEnd.endings, create: () => matlabFrontEnd };
+export const matlabEntry: FrontEndEntry = { language: 'matlab', onTrial: true, endings: matlabFrontEnd.endings, create: () => matlabFrontEnd };
 
 /** What is kept beside a program, to parse on from. */
 interface Kept {
