@@ -4,13 +4,12 @@ import type { HostStyle } from '../frontends/frontend.ts';
 import type { Chunk, Expr } from '../program/nodes.ts';
 import { openSymbols } from '../repairs/open-symbols.ts';
 import { noteEdit } from '../repairs/fixes/write-note.ts';
-import { Scene } from '../repairs/scene.ts';
+import type { Scene } from '../repairs/scene.ts';
 import type { Piece } from '../solver/definitions.ts';
 import type { Span } from '../text/span.ts';
 import type { HintSettings, TextHint } from './contract.ts';
 import type { FormulaValues } from './formula-values.ts';
-
-const scenes = new WeakMap<Understood, Scene>();
+import { sceneOf } from './scene-of.ts';
 
 /** `values`: what the formulas of a nomenclature file come to; undefined for a script. */
 export function hintsIn(understood: Understood, style: HostStyle, span: Span, settings: HintSettings, values: FormulaValues | undefined): readonly TextHint[] {
@@ -94,14 +93,4 @@ function isCall(span: Span): span is Extract<Expr, { kind: 'call' }> {
 
 function meets({ anchor }: Chunk, inner: Span, span: Span): boolean {
   return anchor.start + inner.start <= span.end && span.start <= anchor.start + inner.end;
-}
-
-function sceneOf(understood: Understood, style: HostStyle): Scene {
-  let scene = scenes.get(understood);
-  if (!scene) {
-    const { parsed, lines, notes, solver } = understood;
-    scene = new Scene({ file: parsed.program.file, program: parsed.program, lines, notes, solver, style });
-    scenes.set(understood, scene);
-  }
-  return scene;
 }

@@ -9,7 +9,7 @@ import type { Dimension } from '../quantities/dimension.ts';
 import { kindsOf } from '../quantities/kinds.ts';
 import { printUnit } from '../quantities/print-unit.ts';
 import { expressionsAt } from '../repairs/expressions-at.ts';
-import { dimensionOf, Scene } from '../repairs/scene.ts';
+import { dimensionOf, type Scene } from '../repairs/scene.ts';
 import { noteLeaves } from '../solver/root-cause.ts';
 import type { Sightings } from '../solver/pieces.ts';
 import { LineIndex } from '../text/line-index.ts';
@@ -17,11 +17,9 @@ import type { Span } from '../text/span.ts';
 import { unitOf } from '../wording/voice.ts';
 import type { HoverInfo } from './contract.ts';
 import { conversionOf } from './conversion-at.ts';
+import { sceneOf } from './scene-of.ts';
 
 const longestName = 60;
-/** What was seen of a file's functions, as long as its text holds. */
-const scenes = new WeakMap<Understood, Scene>();
-
 export function hoverAt(understood: Understood, style: HostStyle, offset: number, textOf: (file: string) => string): HoverInfo | undefined {
   const { parsed, notes } = understood;
   const chunk = parsed.program.chunks.find(({ anchor, text }) => anchor.start <= offset && offset <= anchor.start + text.length);
@@ -36,16 +34,6 @@ interface Page {
   readonly scene: Scene;
   readonly chunk: Chunk;
   readonly textOf: (file: string) => string;
-}
-
-function sceneOf(understood: Understood, style: HostStyle): Scene {
-  let scene = scenes.get(understood);
-  if (!scene) {
-    const { parsed, lines, notes, solver } = understood;
-    scene = new Scene({ file: parsed.program.file, program: parsed.program, lines, notes, solver, style });
-    scenes.set(understood, scene);
-  }
-  return scene;
 }
 
 function ofNote(note: Note, { chunk, scene }: Page): HoverInfo | undefined {
