@@ -61,10 +61,16 @@ function mismatch(constraint: Same, left: Measure, right: Measure): Fault | unde
   return { kind: 'scale', constraint, ratio: missing.ratio, turns: missing.turns, zeros: false };
 }
 
+/** `tilt = 10` and what it multiplies: a bare number where only pure numbers fit may be meant in degrees, or in percent. */
+function isBareAngle({ form }: Value, elimination: Elimination): boolean {
+  return form !== undefined && form.terms.some(({ unknown }) => unknown.origin === 'constant') && elimination.reduce(form).dimension.isOne;
+}
+
 /** A measure whose literal factors are settled: a constant that turned out to carry a unit leaves the scale unknown. */
 function comparable(value: Value, elimination: Elimination): Measure | undefined {
   const measure = value.measure;
   if (!measure || !value.form) return undefined;
+  if (isBareAngle(value, elimination)) return undefined;
   for (const term of value.form.terms) {
     if (term.unknown.origin !== 'constant') continue;
     const solved = elimination.reduce({ dimension: Dimension.one, terms: [{ unknown: term.unknown, power: term.power }] });

@@ -310,3 +310,23 @@ r = 0.4         # [m]
 phi = arc / r   # [rad]
 s = r * phi     # [m]
 small = 1 - phi**2 / 2
+
+
+# ==== An angle without a note, in degrees, turned and doubled ====
+# from memory, common practice
+def cosd(angle):
+    """Cosine of an angle.
+
+    Parameters
+    ----------
+    angle : float
+        [degrees]
+    """
+    return unknown(angle)
+
+
+tilt = 10
+a = cosd(tilt)
+b = cosd(-tilt)
+c = cosd(2*tilt)
+d = cosd(90 - tilt)
