@@ -57,7 +57,11 @@ export class NomenclatureFolders {
     }
     let lowered: ReadonlyMap<string, NoteInForce | undefined> | undefined;
     return {
-      symbol: (name, ignoringCase) => (ignoringCase ? (lowered ??= inSmallLetters(symbols)).get(name) : symbols.get(name)) ?? outer.symbol(name, ignoringCase),
+      symbol(name, ignoringCase) {
+        if (!ignoringCase) return symbols.get(name) ?? outer.symbol(name);
+        lowered ??= inSmallLetters(symbols);
+        return lowered.get(name) ?? outer.symbol(name, ignoringCase);
+      },
       vocabulary,
       signatures: [...read.map((each) => each.table), ...outer.signatures],
       fingerprint: `${++this.versions}`,

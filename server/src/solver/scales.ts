@@ -63,7 +63,8 @@ function mismatch(constraint: Same, left: Measure, right: Measure): Fault | unde
 
 /** `tilt = 10` and what it multiplies: a bare number where only pure numbers fit may be meant in degrees, or in percent. */
 function isBareAngle({ form }: Value, elimination: Elimination): boolean {
-  return form !== undefined && form.terms.some(({ unknown }) => unknown.origin === 'constant') && elimination.reduce(form).dimension.isOne;
+  if (!form) return false;
+  return form.terms.some(({ unknown }) => unknown.origin === 'constant') && elimination.reduce(form).dimension.isOne;
 }
 
 /** A measure whose literal factors are settled: a constant that turned out to carry a unit leaves the scale unknown. */
