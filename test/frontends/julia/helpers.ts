@@ -13,5 +13,5 @@ export const shown = (text: string): string => showProgram(parse(text));
 /** The form of the value in `v = …`. */
 export function valueOf(text: string): string {
   const line = shown(`v = ${text}`);
-  return /^\(= v ([^]*)\)((?: # .*)?)$/.exec(line)?.slice(1).join('') ?? line;
+  return /^\(= v ([\s\S]*)\)((?: # .*)?)$/.exec(line)?.slice(1).join('') ?? line;
 }
