@@ -1,7 +1,7 @@
 /** The documents that the server is told of. */
 /** As VS Code and the usual language extensions name them. */
 export const languageIds: readonly string[] = [
-  'python', 'nomenclature', 'matlab', 'octave', 'julia', 'c', 'cpp', 'javascript', 'javascriptreact', 'typescript', 'typescriptreact',
+  'python', 'nomenclature', 'matlab', 'octave', 'julia', 'javascript', 'javascriptreact', 'typescript', 'typescriptreact',
   'fortran', 'FortranFreeForm', 'fortran-modern', 'fortran_free-form', 'fortran_fixed-form',
 ];
 /** Endings of scripts that an editor without an extension for their language takes for plain text, or for another language. */

@@ -10,7 +10,7 @@ import { registerCoverage } from './coverage.ts';
 import { languageIds } from './documents.ts';
 import { initializationOptions } from './options.ts';
 
-const files = '**/*.{py,pyw,nomen,m,f90,f95,f03,f08,f,for,ftn,jl,c,h,cpp,cc,cxx,hpp,hh,hxx}';
+const files = '**/*.{py,pyw,nomen,m,f90,f95,f03,f08,f,for,ftn,jl,js,mjs,ts}';
 /** Files beyond these are not sent: what they say is unknown. */
 const mostFiles = 1000;
 const longest = 400_000;

@@ -64,7 +64,7 @@ export class Documents {
 
 /** Names that editors and their extensions have for languages besides our own. */
 const otherNames: Readonly<Record<string, LanguageId>> = {
-  octave: 'matlab', javascriptreact: 'javascript', typescriptreact: 'typescript', 'cuda-cpp': 'cpp', fortranfreeform: 'fortran', 'fortran-modern': 'fortran', 'fortran_free-form': 'fortran', 'fortran_fixed-form': 'fortran',
+  octave: 'matlab', javascriptreact: 'javascript', typescriptreact: 'typescript', fortranfreeform: 'fortran', 'fortran-modern': 'fortran', 'fortran_free-form': 'fortran', 'fortran_fixed-form': 'fortran',
 };
 
 /** Undefined where the language is none of ours. */
